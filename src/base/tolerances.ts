@@ -1,0 +1,35 @@
+/**
+ * Every tolerance, coarsest first, each with its reason. Lengths in mm, angles in radians.
+ */
+
+/** Largest distance between the cut flank and the exact curve, before the program's last digit.
+ *  Why: a desktop machine steps 1.25 um; the program should not be the larger error. */
+export const FORM_ERROR = 0.001;
+
+/** Largest distance between the path and the exact offset where arcs stand for the addendum's offset.
+ *  Why: 0.6 of the form error, so that rounding to a unit of the last digit and the proof's own step stay inside it. */
+export const FIT_ERROR = FORM_ERROR * 0.6;
+
+/** Largest sag of the chords of a sampled curve, where a polygon stands for it (clipping, drawing).
+ *  Why: the clipped polygon only says which pieces survive and where they meet; a fifth of the form error tells them apart. */
+export const CHORD_SAG = FORM_ERROR / 5;
+
+/** How far the clipped polygon and the exact offset may disagree.
+ *  Why: chord sag of the input and of clipper's own arcs, which overshoot what was asked by up to 2.25 times, and grid rounding. */
+export const CLIP_AGREEMENT = CHORD_SAG * 4;
+
+/** The proof's figures are found to this.
+ *  Why: a tenth of the form error, and the last figure that is printed. */
+export const PROOF_RESOLUTION = FORM_ERROR / 10;
+
+/** One integer step handed to clipper-lib.
+ *  Why: 20 steps per sag hide the rounding, and parts up to +-474 mm stay in its fast exact range (47,453,132 steps). */
+export const CLIPPER_STEP = CHORD_SAG / 20;
+
+/** Points closer than this are one point.
+ *  Why: far above double rounding at 500 mm (1e-13), far below anything that can be written (1e-5 inch = 2.5e-4 mm). */
+export const SAME_POINT = 1e-9;
+
+/** Headings closer than this are tangent, in radians, before rounding: 0.1 degree.
+ *  Why: a break a look-ahead controller slows for is ten times larger. */
+export const TANGENT = (0.1 * Math.PI) / 180;

@@ -1,0 +1,61 @@
+/**
+ * Place, heading, normal, curvature and arc length of a cycloid span, in closed form.
+ *
+ * With h = (1 + R/2r) t:  P'(t) = [2 (R + r) sin(R t / 2r) + offset (1 + R/2r)] e^(ih)  and  n(t) = -i e^(ih),
+ * so the heading is e^(ih) up to sign, n' = (1 + R/2r) e^(ih), and the curvature is (1 + R/2r) over the bracket.
+ * Sources: the parametrisation is that of Wikipedia "Epicycloid"; arc length of a partial arch from cusp,
+ * s(t) = 4 r (R + r) / R (1 - cos(R t / 2r)), is standard (J. D. Lawrence, A Catalog of Special Plane Curves).
+ */
+import type { CycloidPiece } from './piece.ts';
+import { turnPoint, type Point } from './point.ts';
+
+/** From the curve's own frame to the frame of the piece. */
+function place(piece: CycloidPiece, x: number, y: number): Point {
+  return turnPoint({ x, y: piece.sense * y }, piece.cusp);
+}
+
+/** The point at roll parameter t. */
+export function cycloidPoint(piece: CycloidPiece, t: number): Point {
+  const { fixed: R, rolling: r, offset } = piece;
+  const spoke = (1 + R / r) * t;
+  const h = (1 + R / (2 * r)) * t;
+  return place(
+    piece,
+    (R + r) * Math.cos(t) - r * Math.cos(spoke) + offset * Math.sin(h),
+    (R + r) * Math.sin(t) - r * Math.sin(spoke) - offset * Math.cos(h),
+  );
+}
+
+/** n(t): the unit vector from the contact point of the two circles to the traced point. */
+export function cycloidNormal(piece: CycloidPiece, t: number): Point {
+  const h = (1 + piece.fixed / (2 * piece.rolling)) * t;
+  return place(piece, Math.sin(h), -Math.cos(h));
+}
+
+/** e^(ih): the direction of growing t wherever `cycloidRate` is positive. */
+export function cycloidDirection(piece: CycloidPiece, t: number): Point {
+  const h = (1 + piece.fixed / (2 * piece.rolling)) * t;
+  return place(piece, Math.cos(h), Math.sin(h));
+}
+
+/** Signed speed dP/dt along `cycloidDirection`, mm per radian. */
+export function cycloidRate(piece: CycloidPiece, t: number): number {
+  const { fixed: R, rolling: r, offset } = piece;
+  return 2 * (R + r) * Math.sin((R * t) / (2 * r)) + offset * (1 + R / (2 * r));
+}
+
+/** Signed radius of curvature dP/dt / dh/dt: positive turns with the sense of the piece along growing t. */
+export function cycloidRadius(piece: CycloidPiece, t: number): number {
+  return cycloidRate(piece, t) / (1 + piece.fixed / (2 * piece.rolling));
+}
+
+/** Signed length from t = 0 to t (exact while the rate keeps its sign). */
+export function cycloidLength(piece: CycloidPiece, t: number): number {
+  const { fixed: R, rolling: r, offset } = piece;
+  return ((4 * r * (R + r)) / R) * (1 - Math.cos((R * t) / (2 * r))) + offset * (1 + R / (2 * r)) * t;
+}
+
+/** The point where the two circles touch at t, on the fixed circle: every normal of every parallel passes through it. */
+export function contactPoint(piece: CycloidPiece, t: number): Point {
+  return place(piece, piece.fixed * Math.cos(t), piece.fixed * Math.sin(t));
+}
