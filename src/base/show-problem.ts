@@ -1,0 +1,33 @@
+/** A problem as one prints it: place, path, what is wrong, and on a second line what to do. */
+import type { Place, Problem } from './problem.ts';
+
+export function showProblem(problem: Problem): string {
+  const place = showPlace(problem.at);
+  const warning = problem.severity === 'warning' ? 'warning: ' : '';
+  const first = place === '' ? `${warning}${problem.message}` : `${place} ${warning}${problem.message}`;
+  return problem.hint === undefined ? first : `${first}\n  ${problem.hint}`;
+}
+
+function showPlace(at: Place): string {
+  switch (at.kind) {
+    case 'file':
+      return `${at.file}:`;
+    case 'value': {
+      const spot = at.line === undefined ? '' : `:${at.line}:${at.column ?? 1}`;
+      return at.path.length === 0 ? `${at.file}${spot}:` : `${at.file}${spot} ${showPath(at.path)}:`;
+    }
+    case 'program':
+      return `${at.file}:${at.line}:`;
+    case 'part':
+      return `at X${at.x.toFixed(3)} Y${at.y.toFixed(3)}:`;
+  }
+}
+
+/** Keys with points between them, places in a list in brackets, counted from 1: `blank.keep-out[2].x`. */
+export function showPath(path: readonly (string | number)[]): string {
+  return path.reduce<string>(
+    (shown, key) =>
+      typeof key === 'number' ? `${shown}[${key + 1}]` : shown === '' ? key : `${shown}.${key}`,
+    '',
+  );
+}

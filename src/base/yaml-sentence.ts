@@ -1,0 +1,53 @@
+/**
+ * What the YAML parser objects to, in words for somebody who has never heard of YAML, with what to do about it.
+ * In: the parser's code and its own sentence, which is kept where nothing better is known.
+ */
+export function yamlSentence(code: string, sentence: string): { message: string; hint?: string } {
+  return (
+    SENTENCES[code] ?? {
+      message: `This is not valid YAML: ${sentence.split('\n')[0] ?? ''}.`.replace('..', '.'),
+    }
+  );
+}
+
+const SENTENCES: Readonly<Record<string, { message: string; hint?: string }>> = {
+  TAB_AS_INDENT: {
+    message: 'A tab stands at the beginning of a line.',
+    hint: 'Indent with blanks.',
+  },
+  MULTIPLE_DOCS: {
+    message: 'A second document begins here (a line of ---).',
+    hint: 'One file holds one job or one machine: make two files of it.',
+  },
+  BLOCK_AS_IMPLICIT_KEY: {
+    message: 'Two keys stand on one line.',
+    hint: 'Write the second on a line of its own, or both in braces: { arms: 5, rim: 1.8 }.',
+  },
+  MULTILINE_IMPLICIT_KEY: {
+    message: 'This line has no key that can be read.',
+    hint: 'A colon is followed by a blank: "teeth: 60", not "teeth:60".',
+  },
+  MISSING_CHAR: {
+    message: 'Something that was opened is not closed, or a comma or colon is missing.',
+    hint: 'Look for a quote, brace or bracket without its partner.',
+  },
+  BAD_SCALAR_START: {
+    message: 'A value cannot begin with this character.',
+    hint: 'Put the value between quotes: "…".',
+  },
+  BAD_DQ_ESCAPE: {
+    message: 'A backslash between double quotes begins something unknown.',
+    hint: "Use single quotes: 'C:\\wheels'.",
+  },
+  BAD_ALIAS: { message: 'A value cannot begin with *.', hint: 'Put the value between quotes: "…".' },
+  KEY_OVER_1024_CHARS: { message: 'A key is longer than 1024 letters.' },
+  RESOURCE_EXHAUSTION: { message: 'Values are nested too deep.' },
+  UNEXPECTED_TOKEN: {
+    message: 'Something stands here that does not belong.',
+    hint: 'A comma too many, a brace without its partner, or text after a closed value.',
+  },
+  BAD_INDENT: {
+    message: 'The lines of one group do not begin in the same column, or a brace or bracket is not closed.',
+    hint: 'Let all keys of a group begin in the same column, further in than the key above them.',
+  },
+};
