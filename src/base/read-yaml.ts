@@ -91,10 +91,10 @@ function problemOf(fault: Fault, file: string, code: SyntaxCode): Problem {
 }
 
 /** What is wrong with a text that is good YAML, but no file of ours. */
-function wholeFaults(document: Document.Parsed, code: SyntaxCode): Fault[] {
+function wholeFaults(document: ReturnType<typeof parseDocument>, code: SyntaxCode): Fault[] {
   const spot = { line: 1, column: 1 };
-  const version = document.directives.yaml;
-  if (version.explicit === true && version.version !== '1.2') {
+  const version = document.directives?.yaml;
+  if (version?.explicit === true && version.version !== '1.2') {
     const message = `YAML ${version.version} is asked for; this file is read as YAML 1.2.`;
     return [{ message, hint: 'Leave the %YAML line out.', spot }];
   }
