@@ -80,15 +80,19 @@ export interface NumberWords {
   readonly leadingZero: 'keep' | 'drop';
   /** Digits of G and M codes: 1 is G1, 2 is G01. */
   readonly codeWidth: 1 | 2;
-  readonly valueLargest: number; // S
+  /** S  Largest length the controller holds, in the unit of the program. */
+  readonly valueLargest: number;
 }
 
 export interface ModeWords {
   readonly millimetreWord: string; // S  'G21', 'G71'
   readonly inchWord: string; // S  'G20', 'G70'
-  /** Written at the start, in order; the unit word stands where 'UNIT' is said. S */
+  /** Written at the start, whole and in order, the work offset, feed mode and centre word among them; the unit word
+   *  stands where 'UNIT' is said. S */
   readonly opening: readonly string[];
   readonly openingOnePerBlock: boolean;
+  /** Words in force when the controller is switched on; empty where that is not known. Nothing written relies on them. */
+  readonly powerOn: readonly string[];
   readonly modeRepeat: 'changed' | 'every-block';
   readonly axisRepeat: 'changed' | 'every-block';
 }
@@ -132,7 +136,8 @@ export interface HoleWords {
 }
 
 export interface DwellWords {
-  readonly letter: 'P' | 'X' | 'F' | 'S' | 'none'; // S
+  /** S  After a dwell with F or S the feed or speed is to be written again, for a reader that takes it as one. */
+  readonly letter: 'P' | 'X' | 'F' | 'S' | 'none';
   readonly unit: 'seconds' | 'milliseconds'; // S
 }
 
@@ -141,7 +146,8 @@ export interface CutterWords {
   readonly change: 'automatic' | 'by-hand' | 'one-program';
   readonly words: 'T-and-M6' | 'T-then-M6' | 'T-only' | 'none';
   readonly highest: number;
-  readonly lengthOffset: 'none' | 'G43-H'; // S
+  /** S  'with-T': the controller takes the cutter's length with T, and nothing more is written. */
+  readonly lengthOffset: 'none' | 'G43-H' | 'with-T';
   readonly lengthCancel: 'none' | 'G49-at-end'; // S
 }
 
@@ -167,6 +173,8 @@ export interface PathWords {
   /** Words for exact path, and for roughing, or none. S */
   readonly finishing: string | null;
   readonly roughing: string | null;
+  /** Farthest that the roughing words let the slides stray from the path, mm; null where there are no such words. */
+  readonly roughingStrays: number | null;
   readonly feedMode: string | null; // 'G94' or null where the controller has no such word
   readonly helixFeedAlong: 'helix' | 'circle';
   /** The reader stops at a feed move without any F before it. */
@@ -208,7 +216,7 @@ export interface Limits {
   readonly blockSeconds: number;
   /** Total indicated runout of the spindle, mm, where a cutter says nothing. */
   readonly runout: number;
-  /** Diameter of the collet nut, mm, and its height above the cutter's collet end. */
+  /** S  Diameter of the collet nut, mm, and its height above the cutter's collet end. */
   readonly nut: { readonly diameter: number; readonly length: number };
   /** Watts at the cutter. */
   readonly power: number;

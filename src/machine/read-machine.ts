@@ -1,0 +1,126 @@
+/**
+ * A machine file's text to a Machine, or every reason why it is none, each with its line.
+ * A file may be `like` another and give only what differs: groups are joined key by key, lists and values replaced.
+ * In: the machine's name, the file and its text, and how to get the text of another machine file by its name.
+ */
+import type { ProblemCode } from '../base/problem-codes.ts';
+import type { Outcome, Place, Problem } from '../base/problem.ts';
+import { failure, success } from '../base/problem.ts';
+import { nearestWord } from '../base/nearest-word.ts';
+import { camelKeys } from './camel-keys.ts';
+import { checkMachine } from './check-machine.ts';
+import { followLike, type Layer } from './follow-like.ts';
+import { joinTrees } from './join-trees.ts';
+import type { Machine } from './machine.ts';
+import { checkTree, knownKeys, type MachineTree, type SchemaIssue } from './machine-schema.ts';
+
+export function readMachine(
+  name: string,
+  file: string,
+  text: string,
+  load: (name: string) => string | undefined,
+): Outcome<Machine> {
+  const layers = followLike({ name, file, text }, load);
+  if (!layers.ok) {
+    return layers;
+  }
+  const tree = joinTrees(layers.value.map((layer) => layer.yaml.value).toReversed());
+  const checked = checkTree(tree);
+  if (!checked.ok) {
+    return failure(inOrder(checked.issues.map((issue) => problemOf(issue, layers.value))));
+  }
+  const machine = machineOf(name, checked.tree);
+  const dangers = checkMachine(machine).map((danger) => ({
+    code: 'machine.dangerous' as const,
+    severity: danger.severity,
+    message: danger.message,
+    hint: danger.hint,
+    at: placeOf(danger.path, layers.value),
+  }));
+  return dangers.some((one) => one.severity === 'error')
+    ? failure(inOrder(dangers))
+    : success(machine, inOrder(dangers));
+}
+
+function machineOf(name: string, tree: MachineTree): Machine {
+  const { description, units, proved, words, limits } = camelKeys(tree);
+  const { rotary, ...others } = words;
+  return {
+    name,
+    description,
+    units,
+    words: rotary === undefined ? others : { ...others, rotary },
+    limits,
+    proved,
+  };
+}
+
+function problemOf(issue: SchemaIssue, layers: readonly Layer[]): Problem {
+  const at = placeOf(issue.path, layers);
+  if (issue.kind === 'unknown-key') {
+    return unknownKey(issue.path, issue.key ?? '', layers);
+  }
+  if (issue.kind === 'missing') {
+    return problem(
+      'machine.missing',
+      at,
+      'is not given, and a wrong guess could be dangerous.',
+      `Give ${issue.expected}; the controller's manual says which.`,
+    );
+  }
+  return problem(
+    'machine.invalid',
+    at,
+    `${writtenAt(issue.path, layers)} is not right here.`,
+    `Give ${issue.expected}.`,
+  );
+}
+
+function unknownKey(path: SchemaIssue['path'], key: string, layers: readonly Layer[]): Problem {
+  const known = knownKeys(path);
+  const near = nearestWord(key, known);
+  const layer = layers.find((one) => has(one.yaml.value, [...path, key])) ?? layers[0];
+  const spot = layer?.yaml.placeOfKey(path, key);
+  return problem(
+    'machine.unknown-key',
+    { kind: 'value', file: layer?.file ?? '', path: [...path, key], ...spot },
+    `A machine file has no ${key} here.`,
+    near === undefined ? `Known here: ${known.join(', ')}.` : `Is ${near} meant?`,
+  );
+}
+
+function problem(code: ProblemCode, at: Place, message: string, hint: string): Problem {
+  return { code, severity: 'error', message, hint, at };
+}
+
+/** In the file that says it, the nearest one first; what no file says is missing from the first. */
+function placeOf(path: SchemaIssue['path'], layers: readonly Layer[]): Place {
+  const layer = layers.find((one) => has(one.yaml.value, path)) ?? layers[0];
+  return { kind: 'value', file: layer?.file ?? '', path, ...layer?.yaml.placeOf(path) };
+}
+
+function writtenAt(path: SchemaIssue['path'], layers: readonly Layer[]): string {
+  const layer = layers.find((one) => has(one.yaml.value, path));
+  const value = layer?.yaml.writtenAt(path);
+  return value === undefined || value === '' ? 'What is given' : value;
+}
+
+function has(tree: unknown, path: SchemaIssue['path']): boolean {
+  let here = tree;
+  for (const key of path) {
+    if (typeof here !== 'object' || here === null || !Object.hasOwn(here, key)) {
+      return false;
+    }
+    here = (here as Record<string | number, unknown>)[key];
+  }
+  return true;
+}
+
+/** As a person reads a file: from the top; what another file says comes after. */
+function inOrder(problems: readonly Problem[]): readonly Problem[] {
+  const first = problems[0]?.at;
+  const lineOf = (one: Problem): number => (one.at.kind === 'value' ? (one.at.line ?? 0) : 0);
+  const fileOf = (one: Problem): number =>
+    one.at.kind === 'value' && first?.kind === 'value' && one.at.file === first.file ? 0 : 1;
+  return [...problems].sort((a, b) => fileOf(a) - fileOf(b) || lineOf(a) - lineOf(b));
+}
