@@ -33,3 +33,7 @@ export const SAME_POINT = 1e-9;
 /** Headings closer than this are tangent, in radians, before rounding: 0.1 degree.
  *  Why: a break a look-ahead controller slows for is ten times larger. */
 export const TANGENT = (0.1 * Math.PI) / 180;
+
+/** A value of a program that stands for a whole number may differ from one by this; a code is tried after multiplying by ten.
+ *  Why: NISTIR 6556 §3.3.2.1 reads it so; controllers refuse what differs more. No length. */
+export const WHOLE_NUMBER = 0.0001;

@@ -9,6 +9,34 @@ export const CHECK_CODES = {
     guards: 'a line that cannot be read, or that two readers read differently',
     blind: 'what the controller does beyond its manual',
   },
+  'prove.readers-disagree': {
+    guards: 'a line in which two readers of different making find different words',
+    blind: 'what both readers take wrongly; % lines, which the second one cannot hold',
+  },
+  'prove.arc': {
+    guards: 'an arc that this controller would refuse or run otherwise than written',
+    blind: 'how finely the controller itself divides an arc',
+  },
+  'prove.length-offset': {
+    guards: "cutting without a length offset, or with another cutter's",
+    blind: 'the lengths in the controller’s own table',
+  },
+  'prove.file': {
+    guards: 'what the controller cannot load: long lines, letters it does not hold, missing % or number lines',
+    blind: 'how the file reaches the controller',
+  },
+  'prove.end': {
+    guards: 'a program without an end, as a broken copy has none',
+    blind: 'a copy that broke off and still ends well',
+  },
+  'prove.ambiguous': {
+    guards: 'words that controllers read differently',
+    blind: 'which way this controller goes, where its machine file does not say',
+  },
+  'prove.assumed': {
+    guards: 'a mode that is left to what the controller remembers from the last program',
+    blind: 'what it remembers',
+  },
   'prove.gouge': {
     guards: 'metal of the wheel cut away',
     blind: 'bending, runout beyond the stated cutting diameter, play of the slides',

@@ -1,0 +1,135 @@
+/**
+ * Runs one block: what its words claim, then NISTIR 6556 §3.8, Table 8, in its order.
+ *
+ * A word that nothing on its line uses, a move without what it needs, a mode that isn't known: the block is refused
+ * before any of it is run, or at the latest before it moves.
+ */
+import { AXES, BIT, lettersOf, type Block } from './block.ts';
+import { G_GROUP, M_GROUP } from './modes-codes.ts';
+import { motionOfCode, type MotionMode } from './modes.ts';
+import { goHome, moveInMachine } from './trace-home.ts';
+import { runMove } from './trace-move.ts';
+import { changeCutter, runDwell, selectCutter, setFeed, setSpeed, turnSpindle } from './trace-settings.ts';
+import { changeModes } from './trace-modes.ts';
+import { happen, remark, unread, type Refusal, type Run } from './trace-run.ts';
+
+const DWELL = 40;
+const HOME = 280;
+const SECOND_HOME = 300;
+const MACHINE_PLACE = 530;
+const CANCEL = 800;
+
+/** Runs the block; answers why it can't be run, if so. */
+export function runBlock(run: Run, block: Block): Refusal | undefined {
+  const other = block.g[G_GROUP.other] ?? -1;
+  const dwellBit = other === DWELL ? dwellLetterBit(run) : 0;
+  const axes = block.given & AXES & ~dwellBit;
+  const isHome = other === HOME || other === SECOND_HOME;
+  const motion = motionOf(run, block, axes, isHome);
+  if (motion !== undefined && typeof motion !== 'string') {
+    return motion;
+  }
+  return (
+    leftOver(run, block, motion, axes, dwellBit, isHome) ??
+    setFeed(run, block, dwellBit) ??
+    setSpeed(run, block, dwellBit) ??
+    selectCutter(run, block) ??
+    changeCutter(run, block) ??
+    turnSpindle(run, block, motion !== undefined) ??
+    runDwell(run, block, other === DWELL, dwellBit, motion !== undefined) ??
+    changeModes(run, block) ??
+    moveAs(run, block, motion, axes, other) ??
+    stop(run, block)
+  );
+}
+
+function dwellLetterBit(run: Run): number {
+  const { letter } = run.machine.words.dwell;
+  return letter === 'none' ? 0 : BIT[letter];
+}
+
+/** The motion that this line makes, undefined for none; sets nothing. */
+function motionOf(run: Run, block: Block, axes: number, isHome: boolean): MotionMode | undefined | Refusal {
+  const code = block.g[G_GROUP.motion] ?? -1;
+  const written = code >= 0 ? motionOfCode(code) : undefined;
+  if (isHome) {
+    return code >= 0 && code !== CANCEL
+      ? unread(`${String(written)} and a way home both want the axis words`)
+      : undefined;
+  }
+  if (axes === 0) {
+    return code < 0 || code === CANCEL ? undefined : unread(`${String(written)} without X, Y or Z`);
+  }
+  const motion = written ?? run.modes.motion;
+  if (motion === undefined) {
+    return unread('axis words before any word of motion');
+  }
+  return motion === 'none' ? unread('axis words while G80 has ended all motion') : motion;
+}
+
+/** Every letter must be used by something on its line. */
+function leftOver(
+  run: Run,
+  block: Block,
+  motion: MotionMode | undefined,
+  axes: number,
+  dwellBit: number,
+  isHome: boolean,
+): Refusal | undefined {
+  let used = BIT.F | BIT.S | BIT.T | dwellBit;
+  if (motion !== undefined || isHome) {
+    used |= axes;
+  }
+  if (motion === 'G2' || motion === 'G3') {
+    used |= BIT.I | BIT.J | BIT.R | (run.modes.plane === 'XY' ? 0 : BIT.K);
+  }
+  if (block.g[G_GROUP.length] === 430) {
+    used |= BIT.H;
+  }
+  if ((block.g[G_GROUP.path] ?? -1) >= 0 && run.codes.pathTolerance) {
+    used |= BIT.P;
+  }
+  const left = block.given & ~used;
+  return left === 0 ? undefined : unread(`nothing on the line uses ${lettersOf(left).split('').join(', ')}`);
+}
+
+function moveAs(
+  run: Run,
+  block: Block,
+  motion: MotionMode | undefined,
+  axes: number,
+  other: number,
+): Refusal | undefined {
+  const code = block.g[G_GROUP.motion] ?? -1;
+  const written = code >= 0 ? motionOfCode(code) : undefined;
+  if (written !== undefined) {
+    run.modes.motion = written;
+  }
+  if (other === HOME || other === SECOND_HOME) {
+    return goHome(run, block, axes);
+  }
+  if (other === MACHINE_PLACE) {
+    return moveInMachine(run, block, motion, axes);
+  }
+  return motion === undefined || motion === 'none' ? undefined : runMove(run, block, motion, axes);
+}
+
+function stop(run: Run, block: Block): undefined {
+  const code = block.m[M_GROUP.stop] ?? -1;
+  if (code === 0 || code === 1) {
+    happen(run, { kind: 'stop', optional: code === 1 });
+  } else if (code >= 0) {
+    const word = code === 2 ? 'M2' : 'M30';
+    const { end } = run.machine.words.end;
+    if (word !== end) {
+      remark(
+        run,
+        'prove.ambiguous',
+        'warning',
+        `the program ends with ${word}; this machine's word is ${end}`,
+        'end word',
+      );
+    }
+    happen(run, { kind: 'end', word });
+  }
+}

@@ -1,0 +1,56 @@
+/**
+ * From axis words to a place. In: the words, the unit and distance mode, where the machine stands. Out: mm, null for an
+ * axis that is not known.
+ *
+ * Steps are added as whole multiples of 1e-9 of the program's unit, so that ten steps of 0.1 end exactly where 1 does
+ * and a circle that closes on paper closes here.
+ */
+import { millimetresPer } from '../base/units.ts';
+import { has, valueOf, type Block, type Letter } from './block.ts';
+import type { Here } from './modes.ts';
+import { isLengthKnown, unread, type Refusal, type Run } from './trace-run.ts';
+
+/** Steps of the program's unit: whole numbers of them are exact doubles up to 9 million units. */
+const STEPS = 1e9;
+
+/** What keeps a place from being read: no unit or no distance mode yet. */
+export function placeRefused(run: Run): Refusal | undefined {
+  if (run.modes.unit === undefined) {
+    return unread('a place is named before the unit is (a factor of 25.4)');
+  }
+  if (run.modes.distance === undefined) {
+    return unread('a place is named before G90 or G91 says whether it is a place or a step');
+  }
+  return undefined;
+}
+
+/** Millimetres of a length word. */
+export function lengthOf(run: Run, value: number): number {
+  return value * millimetresPer(run.modes.unit ?? 'mm');
+}
+
+/** Where the axis words lead; axes that are not given stay. `placeRefused` has been asked. */
+export function placeOf(run: Run, block: Block, axes: number): Here {
+  const { here } = run;
+  const z = axisPlace(run, block, axes, 'Z', here.z);
+  return {
+    x: axisPlace(run, block, axes, 'X', here.x),
+    y: axisPlace(run, block, axes, 'Y', here.y),
+    z: isLengthKnown(run) ? z : null,
+  };
+}
+
+function axisPlace(run: Run, block: Block, axes: number, letter: Letter, from: number | null): number | null {
+  const bit = 1 << (letter.charCodeAt(0) - 65);
+  if ((axes & bit) === 0 || !has(block, bit)) {
+    return from;
+  }
+  const value = valueOf(block, letter);
+  const unit = millimetresPer(run.modes.unit ?? 'mm');
+  if (run.modes.distance === 'absolute') {
+    return value * unit;
+  }
+  return from === null
+    ? null
+    : ((Math.round((from / unit) * STEPS) + Math.round(value * STEPS)) / STEPS) * unit;
+}

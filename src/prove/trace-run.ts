@@ -1,0 +1,116 @@
+/**
+ * What reading a program keeps while it goes through the lines, and what it hands out: moves, events, findings.
+ *
+ * Frame: the program's; mm, mm/min, 1/min (clockwise positive), s.
+ */
+import type { Machine } from '../machine/machine.ts';
+import type { TracedMove } from '../motion/traced-move.ts';
+import type { CheckCode } from './check-codes.ts';
+import type { Codes } from './modes-codes.ts';
+import { spindleOf, type Here, type ModalState } from './modes.ts';
+import type { Finding } from './proof.ts';
+
+export type AxisName = 'x' | 'y' | 'z';
+
+/** What happens between moves. `before` is the index of the move that follows. */
+export type TracedEvent = { readonly line: number; readonly before: number } & (
+  | { readonly kind: 'spindle'; /** 1/min, signed; 0 still. */ readonly speed: number }
+  | { readonly kind: 'cutter'; readonly number: number }
+  /** `optional`: M1, which stops only where a switch says so. */
+  | { readonly kind: 'stop'; readonly optional: boolean }
+  | { readonly kind: 'dwell'; readonly seconds: number }
+  /** The axes went to a place of the machine: its home, or `place` in its own coordinates. The move before made the way. */
+  | {
+      readonly kind: 'machine-place';
+      readonly axes: readonly AxisName[];
+      readonly place?: { readonly x?: number; readonly y?: number; readonly z?: number };
+    }
+  /** A comment that is shown to the operator. */
+  | { readonly kind: 'message'; readonly text: string }
+  | { readonly kind: 'end'; readonly word: 'M2' | 'M30' | '%' }
+);
+
+export type EventBody = TracedEvent extends infer E
+  ? E extends unknown
+    ? Omit<E, 'line' | 'before'>
+    : never
+  : never;
+
+/** Why the reader stops at a line. */
+export interface Refusal {
+  readonly code: CheckCode;
+  readonly message: string;
+}
+
+export interface Run {
+  readonly file: string;
+  readonly machine: Machine;
+  readonly codes: Codes;
+  readonly modes: ModalState;
+  here: Here;
+  line: number;
+  /** A place in the program's own frame has been named. */
+  placed: boolean;
+  /** A cutting move has been made. */
+  cutting: boolean;
+  readonly moves: TracedMove[];
+  readonly events: TracedEvent[];
+  readonly findings: Finding[];
+  /** By kind of remark: which finding says it, and on how many more lines it was met. */
+  readonly remarks: Map<string, { readonly at: number; more: number }>;
+}
+
+export function unread(message: string): Refusal {
+  return { code: 'prove.unread', message };
+}
+
+export function badArc(message: string): Refusal {
+  return { code: 'prove.arc', message };
+}
+
+export function happen(run: Run, body: EventBody): void {
+  run.events.push({ line: run.line, before: run.moves.length, ...body });
+}
+
+/** A finding that doesn't stop the reader: said at its first line, and counted after. */
+export function remark(
+  run: Run,
+  code: CheckCode,
+  severity: Finding['severity'],
+  message: string,
+  kind: string = code,
+): void {
+  const known = run.remarks.get(kind);
+  if (known !== undefined) {
+    known.more += 1;
+    return;
+  }
+  run.remarks.set(kind, { at: run.findings.length, more: 0 });
+  run.findings.push({ code, severity, message, file: run.file, line: run.line });
+}
+
+/** Adds to each remark on how many more lines it holds. */
+export function countRemarks(run: Run): void {
+  for (const { at, more } of run.remarks.values()) {
+    const finding = run.findings[at];
+    if (more > 0 && finding !== undefined) {
+      const message = `${finding.message} (and on ${String(more)} more line${more === 1 ? '' : 's'})`;
+      run.findings[at] = { ...finding, message };
+    }
+  }
+}
+
+/** Whether Z of the program is Z of the cutter's tip. */
+export function isLengthKnown(run: Run): boolean {
+  return (
+    run.machine.words.cutters.lengthOffset !== 'G43-H' ||
+    (run.modes.cutter !== null && run.modes.length === run.modes.cutter)
+  );
+}
+
+/** Writes the move down and stands at its end. */
+export function makeMove(run: Run, kind: 'rapid' | 'line', to: Here, feed: number | null): void {
+  const { file, line, here, modes } = run;
+  run.moves.push({ file, line, kind, from: here, to, feed, cutter: modes.cutter, spindle: spindleOf(modes) });
+  run.here = to;
+}
