@@ -1,0 +1,35 @@
+/**
+ * The lines that divide a program, so that a person with a broken cutter finds their place: pass, lap with its depth,
+ * tooth. Made in this one place from what a step belongs to.
+ *
+ * In  : the step's `Belongs`, the program's unit. Out: `Roughing, lap 3 of 12, down to -0.3600 mm, tooth 5`.
+ */
+import { millimetresPer, type LengthUnit } from '../base/units.ts';
+import type { Belongs } from '../motion/motion.ts';
+
+export function belongsText(belongs: Belongs, unit: LengthUnit): string {
+  const parts = [belongs.pass.charAt(0).toUpperCase() + belongs.pass.slice(1)];
+  if (belongs.lap !== undefined) {
+    parts.push(`lap ${belongs.lap}${belongs.laps === undefined ? '' : ` of ${belongs.laps}`}`);
+  }
+  if (belongs.depth !== undefined) {
+    parts.push(`down to height ${lengthInWords(belongs.depth, unit)}`);
+  }
+  if (belongs.tooth !== undefined) {
+    parts.push(`tooth ${belongs.tooth}`);
+  }
+  return parts.join(', ');
+}
+
+export function belongsElsewhere(a: Belongs | undefined, b: Belongs): boolean {
+  return (
+    a === undefined || a.pass !== b.pass || a.lap !== b.lap || a.tooth !== b.tooth || a.depth !== b.depth
+  );
+}
+
+/** A length with its unit as a word: three decimals of a millimetre, four of an inch. */
+export function lengthInWords(mm: number, unit: LengthUnit): string {
+  const decimals = unit === 'mm' ? 3 : 4;
+  const text = (mm / millimetresPer(unit)).toFixed(decimals);
+  return `${Number(text) === 0 ? (0).toFixed(decimals) : text} ${unit}`;
+}

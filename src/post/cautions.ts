@@ -1,0 +1,104 @@
+/**
+ * The cautions that belong to one program, with its own numbers: sentences in ordinary letters, for the program's head
+ * and for the sheet beside the machine.
+ *
+ * In  : the header's facts (mm), the machine. Out: sentences, the most urgent first.
+ * Topics: ISO 12100 (risk reduction), 29 CFR 1910.212 (guards), .133 (eyes), .95 (noise), .1024 (beryllium), .1025 (lead),
+ * ISO 13850 (emergency stop), NISTIR 6556 App. A (a controller checks neither travel nor collisions). Wording is our own.
+ */
+import type { Machine } from '../machine/machine.ts';
+import { lengthInWords } from './belongs-text.ts';
+import type { HeaderFacts } from './header-facts.ts';
+import { materialCautions } from './material-cautions.ts';
+
+export function cautions(facts: HeaderFacts, machine: Machine): readonly string[] {
+  return [
+    ...whoAnswers(machine),
+    ...(facts.kind === 'cut' ? [] : stillSpindle(facts)),
+    ...beforeTheStart(facts, machine),
+    ...(facts.kind === 'cut' ? [...atTheCutter(facts, machine), ...materialCautions(facts.material)] : []),
+    ...whenItStops(facts, machine),
+  ];
+}
+
+function whoAnswers(machine: Machine): readonly string[] {
+  return [
+    'CAUTION. A mill can maim. Only a trained person runs this, and the rules of the place and the book of the machine come before every word here',
+    'Whoever presses start answers for it: the writer of this program has not seen your machine, your cutters or your set-up. Read it through first',
+    'That a controller takes a program says nothing of its safety: few check their travel, and none sees a clamp',
+    ...(machine.proved === 'unproved'
+      ? [
+          'The machine file has not been proved on a real machine: run this in the air, block by block, before anything else',
+        ]
+      : []),
+  ];
+}
+
+function stillSpindle(facts: HeaderFacts): readonly string[] {
+  return facts.kind === 'walk'
+    ? [
+        'This program turns no spindle and stays at the clear height: watch that the cutter passes over or round everything that stands on the table',
+      ]
+    : ['This program is for the air: no blank, no cutter near anything'];
+}
+
+function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[] {
+  const length = (mm: number): string => lengthInWords(mm, machine.units);
+  const { extents, clear, park } = facts;
+  const deepest = extents.z[0];
+  return [
+    `Before the start park the cutter at X ${length(park.x)}, Y ${length(park.y)}, at height ${length(park.z)} or above, with nothing between it and the clear height ${length(clear)}`,
+    `Set zero with care, then move by hand to X 0, Y 0 and the clear height ${length(clear)} and look whether the place is right. Take off shifts, turns, scales and mirrors left by earlier work`,
+    `First run: raise the zero of height by ${length(raise(facts))} so that everything happens in the air, rapid override low, a hand on feed hold. Then block by block down to the first cut`,
+    `The lowest point is height ${length(deepest)}${underTheBlank(facts, length)}. Compare all the reaches above with clamps, screws, vice, table edges and the ends of travel`,
+    `The words are in ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. A part that measures anything but ${lengthInWords(facts.check.size, 'mm')} at ${facts.check.what} is in the wrong unit or badly set: stop`,
+    ...facts.cutters.map(
+      (cutter) =>
+        `Cutter ${cutter.number} must be the one of ${length(cutter.diameter)}, clean in its collet, sticking out ${length(cutter.stickOut)} and no more, its length measured again after fitting`,
+    ),
+    `The blank is held by ${facts.holding}: pull at it before the start, and keep every clamp outside the reaches above or named in the job`,
+  ];
+}
+
+/** From the lowest point to above the blank, with a clear height to spare. */
+function raise(facts: HeaderFacts): number {
+  return Math.max(0, facts.topZ - facts.extents.z[0]) + Math.max(0, facts.clear - facts.topZ);
+}
+
+function underTheBlank(facts: HeaderFacts, length: (mm: number) => string): string {
+  const under = facts.plateZ - facts.extents.z[0];
+  return under > 0 ? `, which is ${length(under)} into what lies under the blank: let that be waste` : '';
+}
+
+function atTheCutter(facts: HeaderFacts, machine: Machine): readonly string[] {
+  const highest = facts.speeds.at(-1);
+  return [
+    `The spindle goes up to ${highest === undefined ? 'no speed' : `${Math.round(highest)} turns a minute`}: see that cutter, collet and nut are made for it, the nut tight and the key out`,
+    ...(machine.words.spindle.run === 'by-hand'
+      ? [
+          'The program cannot switch this spindle: at each stop do what it says, and never go on with the spindle still',
+        ]
+      : []),
+    'Guards shut and their switches working. Never reach in. No gloves, loose cuffs, long hair, rings or chains near a turning spindle',
+    'Wear glasses made for impact, as small cutters break and fly, and ear protection where the noise asks for it',
+    'Know where the emergency stop is and try it first. After using it find the machine zero and the work zero anew: the place may be lost',
+    'Stay with it. Listen, and stop when the sound changes: a broken cutter tells nobody, and the rest of the program cuts air or worse',
+  ];
+}
+
+function whenItStops(facts: HeaderFacts, machine: Machine): readonly string[] {
+  const change = machine.words.cutters.change;
+  return [
+    ...(change === 'automatic' || facts.program.of + facts.cutters.length <= 2
+      ? []
+      : [
+          'After every change of cutter touch off height anew at the same spot: no two cutters stick out alike',
+        ]),
+    ...(facts.kind === 'cut'
+      ? [
+          'Do not start in the middle of a tooth: a start in mid program lacks units, feed, spindle and offset. Begin at a place marked Cutter, with zero and length checked',
+          'Measure with the spindle still and the machine held, burrs taken off first',
+        ]
+      : []),
+  ];
+}

@@ -1,0 +1,60 @@
+/**
+ * The words at the head of a program: what this is with its mark, some ten lines of set-up, then the cautions.
+ *
+ * In  : facts as plain data (mm, 1/min), the machine. Out: sentences, one a line, in ordinary letters; the writer turns them
+ *       into the machine's comment letters and line length. Lengths are printed in the program's unit, by its name.
+ */
+import type { Machine } from '../machine/machine.ts';
+import { lengthInWords } from './belongs-text.ts';
+import { cautions } from './cautions.ts';
+import type { HeaderFacts } from './header-facts.ts';
+import type { Span } from './motion-facts.ts';
+
+const KINDS = {
+  cut: 'Cutting program',
+  walk: 'Walk-round program, to be run first, spindle still',
+  check: 'Trial of a machine file, in the air only',
+} as const;
+
+/** Everything, in order. */
+export function headerLines(facts: HeaderFacts, machine: Machine): readonly string[] {
+  return [...setUpLines(facts, machine), ...cautions(facts, machine), 'End of the cautions'];
+}
+
+function setUpLines(facts: HeaderFacts, machine: Machine): readonly string[] {
+  const length = (mm: number): string => lengthInWords(mm, machine.units);
+  const span = ([low, high]: Span): string => `from ${length(low)} to ${length(high)}`;
+  const { park, check, extents } = facts;
+  return [
+    `Title: ${facts.title}`,
+    `Mark ${facts.mark}, made by version ${facts.version}`,
+    `${KINDS[facts.kind]}, number ${facts.program.number} of ${facts.program.of}`,
+    ...facts.part.map((line) => `Part: ${line}`),
+    `Machine file ${machine.name}, ${machine.proved === 'unproved' ? 'not yet proved on a machine' : `proved: ${machine.proved}`}`,
+    `Units: ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. To check: ${check.what} is ${bothUnits(check.size)}`,
+    `Blank: ${facts.blank}. Material: ${facts.material}. Held by ${facts.holding}`,
+    ...facts.cutters.map(
+      (cutter) =>
+        `Cutter ${cutter.number}: cuts ${length(cutter.diameter)} wide, ${cutter.flutes} flutes, sticking out ${length(cutter.stickOut)}`,
+    ),
+    spindleLine(facts, machine),
+    `Zero of X and Y: the axis of the wheel. Zero of height: ${facts.zero === 'top' ? 'the top of the blank' : 'the plate under the blank'}. Found again by ${facts.again}`,
+    `Reaches in X ${span(extents.x)}, in Y ${span(extents.y)}, in height ${span(extents.z)}. Clear height ${length(facts.clear)}`,
+    `Park before the start: X ${length(park.x)}, Y ${length(park.y)}, height ${length(park.z)}`,
+    ...facts.proved.map((line) => `Proved: ${line}`),
+    ...facts.notProved.map((line) => `Not proved: ${line}`),
+  ];
+}
+
+function spindleLine(facts: HeaderFacts, machine: Machine): string {
+  if (facts.speeds.length === 0) {
+    return 'Spindle: stays still';
+  }
+  const way = machine.words.spindle.forward === 'M3' ? 'clockwise' : 'counter-clockwise';
+  const hand = machine.words.spindle.run === 'by-hand' ? ', switched by hand at the stops' : '';
+  return `Spindle: ${way} seen from above the work, ${facts.speeds.map((speed) => Math.round(speed)).join(' and ')} turns a minute${hand}`;
+}
+
+function bothUnits(mm: number): string {
+  return `${lengthInWords(mm, 'mm')} or ${lengthInWords(mm, 'inch')}`;
+}

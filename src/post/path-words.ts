@@ -1,0 +1,34 @@
+/**
+ * Exact path for what makes the flank, the machine file's roughing words for the rest, written where the kind of pass changes.
+ */
+import { formatCode } from './format-word.ts';
+import { writeBlock } from './program-sink.ts';
+import type { Writer } from './writer.ts';
+
+const FINISHING = /finishing|spring/;
+
+/** At the start of a program, before any pass is known: the stricter of the two. */
+export function writeFirstPath(writer: Writer): void {
+  const { path, modes } = writer.machine.words;
+  const words = path.finishing ?? path.roughing;
+  if (words !== null && modes.opening.includes(words)) {
+    writer.path = words;
+  }
+  takePath(writer, words);
+}
+
+export function writePathFor(writer: Writer, pass: string): void {
+  const { finishing, roughing } = writer.machine.words.path;
+  takePath(writer, FINISHING.test(pass) ? finishing : roughing);
+}
+
+/** The words of one block, `G64 P0.002`, as the machine file has them. */
+function takePath(writer: Writer, words: string | null): void {
+  if (words === null || words === writer.path) {
+    return;
+  }
+  writer.path = words;
+  const width = writer.machine.words.numbers.codeWidth;
+  const parts = words.split(' ').map((word) => formatCode(word, width));
+  writeBlock(writer.sink, parts.join(writer.sink.gap));
+}

@@ -1,0 +1,123 @@
+/**
+ * Where blocks and comments are gathered: block numbers, the gap between words, comment marks, the longest line.
+ *
+ * In  : words of a block, texts of comments. Out: the program's lines and the problems met on the way.
+ */
+import type { Place, Problem } from '../base/problem.ts';
+import type { ProblemCode } from '../base/problem-codes.ts';
+import type { Machine } from '../machine/machine.ts';
+import { commentCleaner, foldText, type Cleaner } from './clean-comment.ts';
+import { formatCode } from './format-word.ts';
+
+export interface Sink {
+  readonly machine: Machine;
+  readonly file: string;
+  readonly lines: string[];
+  readonly gap: string;
+  readonly clean: Cleaner;
+  readonly problems: Map<string, Problem>;
+  blocks: number;
+  /** The next block number, where blocks are numbered. */
+  number: number;
+  /** The next block begins a cutter's part of the program. */
+  cutterBegins: boolean;
+}
+
+export function openSink(machine: Machine, file: string): Sink {
+  return {
+    machine,
+    file,
+    lines: [],
+    gap: machine.words.file.gapBetweenWords ? ' ' : '',
+    clean: commentCleaner(machine.words.file),
+    problems: new Map(),
+    blocks: 0,
+    number: machine.words.blocks.first,
+    cutterBegins: true,
+  };
+}
+
+/** Words of one block, in their order, as text without a number. */
+export function joinWords(sink: Sink, words: readonly string[]): string {
+  const width = sink.machine.words.numbers.codeWidth;
+  return words.map((word) => formatCode(word, width)).join(sink.gap);
+}
+
+/** One block. `apart` is a word that may stand in a block of its own before it where the line would be too long. */
+export function writeBlock(sink: Sink, body: string, apart = ''): void {
+  if (apart !== '') {
+    const whole = body + sink.gap + apart;
+    if (numberText(sink).length + whole.length <= sink.machine.words.file.lineLongest) {
+      putBlock(sink, whole);
+      return;
+    }
+    putBlock(sink, apart);
+  }
+  putBlock(sink, body);
+}
+
+function putBlock(sink: Sink, body: string): void {
+  const line = numberText(sink) + body;
+  if (line.length > sink.machine.words.file.lineLongest) {
+    complain(sink, 'post.cannot-say', 'line', {
+      message: `the block ${body} takes ${line.length} characters and the machine file allows ${sink.machine.words.file.lineLongest} a line`,
+      hint: 'give a larger line-longest, fewer length-decimals, or no gap-between-words',
+    });
+  }
+  sink.lines.push(line);
+  sink.blocks++;
+  countOn(sink);
+}
+
+function numberText(sink: Sink): string {
+  const numbers = sink.machine.words.blocks.numbers;
+  return numbers === 'none' || (numbers === 'cutter-changes' && !sink.cutterBegins)
+    ? ''
+    : `N${sink.number}${sink.gap}`;
+}
+
+function countOn(sink: Sink): void {
+  const { numbers, first, step, last } = sink.machine.words.blocks;
+  if (numbers === 'all' || (numbers === 'cutter-changes' && sink.cutterBegins)) {
+    sink.number = sink.number + step > last ? first : sink.number + step;
+  }
+  sink.cutterBegins = false;
+}
+
+/** Texts as comments, each on lines of its own; nothing where the machine reads none. */
+export function writeComments(sink: Sink, texts: readonly string[]): void {
+  for (const text of texts) {
+    putComment(sink, text, '');
+  }
+}
+
+/** A comment the operator is shown, where the machine can. */
+export function writeOperatorNotes(sink: Sink, texts: readonly string[]): void {
+  for (const text of texts) {
+    putComment(sink, text, sink.machine.words.file.operatorNote ?? '');
+  }
+}
+
+function putComment(sink: Sink, text: string, before: string): void {
+  const { commentForm, lineLongest } = sink.machine.words.file;
+  if (commentForm === 'none') {
+    return;
+  }
+  const [open, close] = commentForm === 'brackets' ? [`(${before}`, ')'] : [`;${before}`, ''];
+  for (const line of foldText(sink.clean(text), lineLongest - open.length - close.length)) {
+    sink.lines.push(open + line + close);
+  }
+}
+
+/** The same complaint is made once, where it is first met. */
+export function complain(
+  sink: Sink,
+  code: ProblemCode,
+  key: string,
+  text: { readonly message: string; readonly hint: string },
+): void {
+  if (!sink.problems.has(key)) {
+    const at: Place = { kind: 'program', file: sink.file, line: sink.lines.length + 1 };
+    sink.problems.set(key, { code, severity: 'error', ...text, at });
+  }
+}
