@@ -23,39 +23,50 @@ export function oneOf<const Names extends readonly [string, ...string[]]>(...nam
 }
 
 export function text(pattern: RegExp, error: string) {
-  return z.string({ error }).regex(pattern, { error });
+  return z.custom<string>((v) => typeof v === 'string' && pattern.test(v), { error });
 }
 
 export function number(least: number, greatest: number, unit: string) {
   const error = `a number from ${least} to ${greatest} ${unit}`;
-  return z.number({ error }).min(least, { error }).max(greatest, { error });
+  return z.custom<number>((v) => typeof v === 'number' && v >= least && v <= greatest, { error });
 }
 
 export function whole(least: number, greatest: number, unit = '') {
   const error = `a whole number from ${least} to ${greatest} ${unit}`.trimEnd();
-  return z.number({ error }).refine((n) => Number.isInteger(n) && n >= least && n <= greatest, { error });
+  return z.custom<number>((v) => Number.isInteger(v) && Number(v) >= least && Number(v) <= greatest, {
+    error,
+  });
 }
-
-const YES_NO: Readonly<Record<string, boolean>> = { yes: true, no: false };
 
 export function yesNo() {
   return z.preprocess((v) => YES_NO[String(v)] ?? v, z.boolean({ error: 'yes or no' }));
 }
 
+const YES_NO: Readonly<Record<string, boolean>> = { yes: true, no: false };
+
+/** A key with nothing after it is not `none`: it may be one that was forgotten. */
 export function orNone<Inner extends z.ZodType>(inner: Inner) {
-  return z.preprocess((v) => (v === 'none' ? null : v), inner.nullable());
+  return z.preprocess((v) => (v === 'none' ? null : v === null ? '' : v), inner.nullable());
 }
 
 export function words(pattern: RegExp, error: string) {
   return z.array(text(pattern, error), { error }).max(20, { error });
 }
 
-export function axes<Inner extends z.ZodType>(inner: () => Inner) {
-  return group({ x: inner(), y: inner(), z: inner() });
+export function axes<Inner extends z.ZodType>(axis: Inner) {
+  return group({ x: axis, y: axis, z: axis });
 }
 
 export function travel() {
   const error = 'two ends of travel in mm, [lowest, highest], within 5000 of zero, the lowest first';
-  const end = z.number({ error }).min(-5000, { error }).max(5000, { error });
-  return z.tuple([end, end], { error }).refine(([low, high]) => low < high, { error });
+  return z.custom<readonly [number, number]>(
+    (v) => Array.isArray(v) && v.length === 2 && isTravel(v[0], v[1]),
+    {
+      error,
+    },
+  );
+}
+
+function isTravel(low: unknown, high: unknown): boolean {
+  return typeof low === 'number' && typeof high === 'number' && low >= -5000 && low < high && high <= 5000;
 }

@@ -250,13 +250,13 @@ const theRotary = () =>
 
 const limits = () =>
   group({
-    travel: axes(travel),
+    travel: axes(travel()),
     'feed-lowest': number(0.1, 1000, 'mm/min').default(1),
     'feed-highest': number(10, 60_000, 'mm/min').default(1000),
-    rapid: axes(() => number(10, 120_000, 'mm/min')).default({ x: 1000, y: 1000, z: 500 }),
+    rapid: axes(number(10, 120_000, 'mm/min')).default({ x: 1000, y: 1000, z: 500 }),
     'spindle-lowest': number(0, 100_000, 'turns a minute'),
     'spindle-highest': number(10, 300_000, 'turns a minute'),
-    acceleration: axes(() => number(1, 20_000, 'mm/s2')).default({ x: 100, y: 100, z: 50 }),
+    acceleration: axes(number(1, 20_000, 'mm/s2')).default({ x: 100, y: 100, z: 50 }),
     'corner-allowance': number(0.0001, 1, 'mm').default(0.01),
     'smallest-step': number(0.000_001, 0.1, 'mm').default(0.001_25),
     'block-seconds': number(0, 1, 'seconds').default(0.005),

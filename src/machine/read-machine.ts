@@ -24,7 +24,7 @@ export function readMachine(
   if (!layers.ok) {
     return layers;
   }
-  const tree = joinTrees(layers.value.map((layer) => layer.yaml.value).toReversed());
+  const tree = joinTrees(layers.value.map(sayings).toReversed());
   const checked = checkTree(tree);
   if (!checked.ok) {
     return failure(inOrder(checked.issues.map((issue) => problemOf(issue, layers.value))));
@@ -40,6 +40,12 @@ export function readMachine(
   return dangers.some((one) => one.severity === 'error')
     ? failure(inOrder(dangers))
     : success(machine, inOrder(dangers));
+}
+
+/** What a file says; who proved it says nothing of a file that is like it. */
+function sayings(layer: Layer, nth: number): unknown {
+  const { proved, ...others } = layer.yaml.value as Readonly<Record<string, unknown>>;
+  return nth === 0 && proved !== undefined ? { ...others, proved } : others;
 }
 
 function machineOf(name: string, tree: MachineTree): Machine {
@@ -68,12 +74,7 @@ function problemOf(issue: SchemaIssue, layers: readonly Layer[]): Problem {
       `Give ${issue.expected}; the controller's manual says which.`,
     );
   }
-  return problem(
-    'machine.invalid',
-    at,
-    `${writtenAt(issue.path, layers)} is not right here.`,
-    `Give ${issue.expected}.`,
-  );
+  return problem('machine.invalid', at, `${complaint(issue.path, layers)}.`, `Give ${issue.expected}.`);
 }
 
 function unknownKey(path: SchemaIssue['path'], key: string, layers: readonly Layer[]): Problem {
@@ -99,10 +100,13 @@ function placeOf(path: SchemaIssue['path'], layers: readonly Layer[]): Place {
   return { kind: 'value', file: layer?.file ?? '', path, ...layer?.yaml.placeOf(path) };
 }
 
-function writtenAt(path: SchemaIssue['path'], layers: readonly Layer[]): string {
+function complaint(path: SchemaIssue['path'], layers: readonly Layer[]): string {
   const layer = layers.find((one) => has(one.yaml.value, path));
   const value = layer?.yaml.writtenAt(path);
-  return value === undefined || value === '' ? 'What is given' : value;
+  if (value !== undefined) {
+    return value === '' ? 'nothing is given' : `${value} is not right here`;
+  }
+  return 'what is given is not right here';
 }
 
 function has(tree: unknown, path: SchemaIssue['path']): boolean {
