@@ -103,12 +103,11 @@ function breakWords(text: string, equalsAllowed: boolean): string {
  * in two, its rest could begin with anything.
  */
 export function foldText(text: string, width: number): readonly string[] {
-  const room = Math.max(1, width - 'NOTE '.length);
   const lines: string[] = [];
   let line = '';
   for (const word of text.split(' ')) {
-    const fitting = word.slice(0, room);
-    if (line !== '' && line.length + 1 + fitting.length > room) {
+    const fitting = word.slice(0, width);
+    if (line !== '' && line.length + 1 + fitting.length > width) {
       lines.push(line);
       line = fitting;
     } else {
@@ -116,5 +115,7 @@ export function foldText(text: string, width: number): readonly string[] {
     }
   }
   lines.push(line);
-  return lines.filter((each) => each !== '').map((each) => (ACTIVE_FIRST.test(each) ? `NOTE ${each}` : each));
+  return lines
+    .filter((each) => each !== '')
+    .map((each) => (ACTIVE_FIRST.test(each) ? `NOTE ${each}`.slice(0, width) : each));
 }

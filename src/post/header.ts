@@ -21,7 +21,7 @@ export function headerLines(facts: HeaderFacts, machine: Machine): readonly stri
   return [...setUpLines(facts, machine), ...cautions(facts, machine), 'End of the cautions'];
 }
 
-function setUpLines(facts: HeaderFacts, machine: Machine): readonly string[] {
+export function setUpLines(facts: HeaderFacts, machine: Machine): readonly string[] {
   const length = (mm: number): string => lengthInWords(mm, machine.units);
   const span = ([low, high]: Span): string => `from ${length(low)} to ${length(high)}`;
   const { park, check, extents } = facts;

@@ -150,7 +150,7 @@ function writeSpindle(writer: Writer, speed: number): void {
   writer.spindle = speed;
   const text = speedText(writer, speed);
   if (run === 'by-hand') {
-    waitForHands(writer, [`Set the spindle to ${text} turns a minute and let it reach that speed`]);
+    waitForHands(writer, [`Set the spindle to ${text} turns a minute`, 'Let it reach that speed']);
     return;
   }
   if (speedWord === 'together') {
