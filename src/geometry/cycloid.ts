@@ -49,6 +49,48 @@ export function cycloidRadius(piece: CycloidPiece, t: number): number {
   return cycloidRate(piece, t) / (1 + piece.fixed / (2 * piece.rolling));
 }
 
+/** Where the rate changes its sign inside the span: cusps of the curve or of its parallel, in the order of travel. */
+export function cycloidCusps(piece: CycloidPiece): number[] {
+  const { fixed: R, rolling: r, offset } = piece;
+  const level = (-offset * (1 + R / (2 * r))) / (2 * (R + r));
+  if (Math.abs(level) >= 1 || R + r === 0) {
+    return [];
+  }
+  const slope = R / (2 * r);
+  const rising = Math.asin(level);
+  const found = [
+    ...solutionsInside(piece, slope, rising, 2 * Math.PI),
+    ...solutionsInside(piece, slope, Math.PI - rising, 2 * Math.PI),
+  ];
+  return found.sort((a, b) => (piece.to < piece.from ? b - a : a - b));
+}
+
+/** Where the curvature is greatest or least inside the span (R t / 2r an odd quarter turn), in the order of travel. */
+export function cycloidVertices(piece: CycloidPiece): number[] {
+  const found = solutionsInside(piece, piece.fixed / (2 * piece.rolling), Math.PI / 2, Math.PI);
+  return found.sort((a, b) => (piece.to < piece.from ? b - a : a - b));
+}
+
+/** Every t strictly inside the span where slope * t is `target` plus a whole number of periods. */
+export function solutionsInside(
+  piece: CycloidPiece,
+  slope: number,
+  target: number,
+  period: number,
+): number[] {
+  const ends = [piece.from * slope, piece.to * slope];
+  const low = Math.min(...ends);
+  const high = Math.max(...ends);
+  const found: number[] = [];
+  for (let n = Math.ceil((low - target) / period); target + n * period < high; n++) {
+    const value = target + n * period;
+    if (value > low) {
+      found.push(value / slope);
+    }
+  }
+  return found;
+}
+
 /** Signed length from t = 0 to t (exact while the rate keeps its sign). */
 export function cycloidLength(piece: CycloidPiece, t: number): number {
   const { fixed: R, rolling: r, offset } = piece;

@@ -1,5 +1,5 @@
 /** Place, heading, curvature and length of any piece; u in [0, 1] runs from its start to its end. mm, radians. */
-import { cycloidDirection, cycloidLength, cycloidPoint, cycloidRadius, cycloidRate } from './cycloid.ts';
+import { cycloidCusps, cycloidDirection, cycloidLength, cycloidPoint, cycloidRate } from './cycloid.ts';
 import type { Chain, CycloidPiece, Piece } from './piece.ts';
 import { addScaled, distance, polar, scale, subtract, unit, type Point } from './point.ts';
 
@@ -51,6 +51,34 @@ function travelSign(piece: CycloidPiece, u: number): number {
   return Math.sign(rate) * (piece.to < piece.from ? -1 : 1);
 }
 
+/** dP/du, mm: along the heading, or against it past a cusp of a cycloid's parallel; nothing on the cusp itself. */
+export function velocityOn(piece: Piece, u: number): Point {
+  switch (piece.kind) {
+    case 'line':
+      return subtract(piece.to, piece.from);
+    case 'arc': {
+      const spoke = polar(piece.radius * piece.turn, piece.start + u * piece.turn);
+      return { x: -spoke.y, y: spoke.x };
+    }
+    case 'cycloid': {
+      const t = rollAt(piece, u);
+      return scale(cycloidDirection(piece, t), cycloidRate(piece, t) * (piece.to - piece.from));
+    }
+  }
+}
+
+/** How far the heading turns from start to end, radians, never negative (cusps not counted). */
+export function turnOf(piece: Piece): number {
+  switch (piece.kind) {
+    case 'line':
+      return 0;
+    case 'arc':
+      return Math.abs(piece.turn);
+    case 'cycloid':
+      return Math.abs((1 + piece.fixed / (2 * piece.rolling)) * (piece.to - piece.from));
+  }
+}
+
 /** Signed curvature, 1/mm, positive turning left; infinite on a cusp. */
 export function curvatureOn(piece: Piece, u: number): number {
   switch (piece.kind) {
@@ -59,10 +87,11 @@ export function curvatureOn(piece: Piece, u: number): number {
     case 'arc':
       return (piece.turn < 0 ? -1 : 1) / piece.radius;
     case 'cycloid': {
-      const radius = Math.abs(cycloidRadius(piece, rollAt(piece, u)));
-      // dh/dt > 0 for r > 0 and for r < -R/2; the heading turns with it whichever way the rate points.
-      const bend = Math.sign(1 + piece.fixed / (2 * piece.rolling));
-      return (bend * piece.sense * (piece.to < piece.from ? -1 : 1)) / radius;
+      // The heading turns by (1 + R/2r) for each radian of roll, whichever way the rate points; where that is nothing
+      // (a point of a circle rolling in one of twice its size), the curve is a straight line to its very end.
+      const bend = 1 + piece.fixed / (2 * piece.rolling);
+      const way = piece.sense * (piece.to < piece.from ? -1 : 1);
+      return bend === 0 ? 0 : (way * bend) / Math.abs(cycloidRate(piece, rollAt(piece, u)));
     }
   }
 }
@@ -73,8 +102,16 @@ export function lengthOf(piece: Piece): number {
       return distance(piece.from, piece.to);
     case 'arc':
       return piece.radius * Math.abs(piece.turn);
-    case 'cycloid':
-      return Math.abs(cycloidLength(piece, piece.to) - cycloidLength(piece, piece.from));
+    case 'cycloid': {
+      // Back and forth are both length: measured between the cusps, where the rate changes its sign.
+      let sum = 0;
+      let from = piece.from;
+      for (const to of [...cycloidCusps(piece), piece.to]) {
+        sum += Math.abs(cycloidLength(piece, to) - cycloidLength(piece, from));
+        from = to;
+      }
+      return sum;
+    }
   }
 }
 
