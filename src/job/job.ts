@@ -2,6 +2,7 @@
  * A job, understood: everything in mm, everything that could be derived filled in, with its why.
  * Made by `read-job.ts`; nothing deeper checks it again.
  */
+import type { Problem } from '../base/problem.ts';
 import type { LengthUnit } from '../base/units.ts';
 import type { Cutter, Setup } from '../cutting/setup.ts';
 import type { CrossingProportions, WheelProportions } from '../tooth/wheel.ts';
@@ -21,6 +22,8 @@ export interface Job {
   readonly machine: string;
   readonly cuts: Cuts;
   readonly derived: Readonly<Record<string, Derived>>;
+  /** What was understood and still cannot be made: with an error among them only the sheet is written, not a program. */
+  readonly misfits?: readonly Problem[];
 }
 
 export interface WheelJob extends WheelProportions {

@@ -1,0 +1,88 @@
+/**
+ * Which cutter of the list does which pass where the job does not say. The largest that fits is the quickest and the
+ * stiffest: rough a space with the largest it lets in, finish with the largest that gets to the root, bore and cross out
+ * with the largest that the hole and the corners allow. Only cutters that reach deep enough; the smallest where none fits,
+ * so that what is wrong can be said of a real cutter.
+ * Widths and rules of roughing: the root of a space is as wide as D + 2 allowance + room for the chips. mm.
+ */
+import { Bug } from '../base/bug.ts';
+import type { Cutter } from '../cutting/setup.ts';
+import type { ToothSide } from '../tooth/tooth-side.ts';
+import { largestCutter } from '../tooth/largest-cutter.ts';
+import type { Crossings } from '../tooth/wheel.ts';
+
+export interface Choice {
+  readonly cutter: Cutter;
+  readonly why: string;
+}
+
+/** Room for chips beside a roughing cutter at the root. Why: without it both sides of the cutter rub. */
+export const CHIP_ROOM = 0.05;
+/** Largest cutter over the hole it clears, so that there is a ring to go round. */
+const HOLE_SHARE = 0.8;
+
+/** Metal left for finishing: a twentieth of the cutter, at least what covers bending, at most what is cut in one pass. */
+export function usualAllowance(diameter: number): number {
+  return Math.min(0.1, Math.max(0.02, Number((0.05 * diameter).toFixed(3))));
+}
+
+/** Width of a tooth space at the root circle. */
+export function rootWidth({ rootRadius, spaceAngle }: ToothSide): number {
+  return 2 * rootRadius * Math.sin(spaceAngle);
+}
+
+export interface Choosing {
+  readonly cutters: readonly Cutter[];
+  /** From the top of the blank to the deepest cut. */
+  readonly depth: number;
+  readonly side: ToothSide;
+}
+
+export function chooseRoughing(
+  { cutters, depth, side }: Choosing,
+  allowance: number | undefined,
+  finishing?: Cutter,
+): Choice {
+  const width = rootWidth(side);
+  const fits = (cutter: Cutter): boolean =>
+    cutter.reach >= depth &&
+    width >= cutter.diameter + 2 * (allowance ?? usualAllowance(cutter.diameter)) + CHIP_ROOM &&
+    (finishing === undefined ||
+      finishing.diameter <= cutter.diameter + (allowance ?? usualAllowance(cutter.diameter)));
+  return largest(cutters, fits, `the largest that roughs a space ${width.toFixed(3)} mm wide at the root`);
+}
+
+export function chooseFinishing({ cutters, depth, side }: Choosing, slot: number): Choice {
+  const reaches = 2 * largestCutter(side);
+  const fits = (cutter: Cutter): boolean =>
+    cutter.reach >= depth && cutter.diameter <= Math.min(reaches, slot);
+  const why = `the largest that gets to the root, where ${reaches.toFixed(3)} mm would fit, in the slot that was roughed`;
+  const full = cutters.filter((cutter) => cutter.flute >= depth);
+  return full.some(fits) ? largest(full, fits, why) : largest(cutters, fits, why);
+}
+
+export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {
+  const fits = (cutter: Cutter): boolean => cutter.reach >= depth && cutter.diameter <= HOLE_SHARE * bore;
+  return largest(cutters, fits, `the largest that has room to go round in a bore of ${bore} mm`);
+}
+
+export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings): Choice {
+  const { corner } = windows.proportions;
+  const room = HOLE_SHARE * (windows.windowOuter - windows.windowInner);
+  const fits = (cutter: Cutter): boolean =>
+    cutter.reach >= depth && cutter.diameter < 2 * corner && cutter.diameter <= room;
+  return largest(cutters, fits, `the largest that goes round corners of ${corner} mm radius`);
+}
+
+function largest(cutters: readonly Cutter[], fits: (cutter: Cutter) => boolean, why: string): Choice {
+  const bySize = cutters.toSorted((a, b) => b.diameter - a.diameter || a.number - b.number);
+  const chosen = bySize.find(fits);
+  const last = bySize.at(-1);
+  if (chosen === undefined && last !== undefined) {
+    return { cutter: last, why: 'the smallest: none of the list fits' };
+  }
+  if (chosen === undefined) {
+    throw new Bug('A job without cutters came to the choice of cutters.');
+  }
+  return { cutter: chosen, why };
+}
