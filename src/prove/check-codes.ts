@@ -42,6 +42,22 @@ export const CHECK_CODES = {
     blind: 'bending, runout beyond the stated cutting diameter, play of the slides',
   },
   'prove.left': { guards: 'metal left on the flanks', blind: 'bending and wear of the cutter' },
+  'prove.root': {
+    guards: 'more metal in the root corners than this cutter should leave',
+    blind: 'a cutter whose corners are worn round or chipped',
+  },
+  'prove.rolling-law': {
+    guards: 'an addendum whose normals miss the point where the pitch circles touch',
+    blind: 'the mate, and the distance the two are set at',
+  },
+  'prove.bore': {
+    guards: 'a bore that is not round, or not of the size asked for',
+    blind: 'a hole that was there before, and the fit of the arbor',
+  },
+  'prove.crossing': {
+    guards: 'crossings cut too far or not far enough',
+    blind: 'arms that bend while they are cut',
+  },
 } as const satisfies Record<string, CheckText>;
 
 export type CheckCode = keyof typeof CHECK_CODES;

@@ -1,0 +1,43 @@
+/**
+ * What every check judges from: the programs as they were read, the moves whose place and cutter are known, and the figures of the cut
+ * metal. Made once; the checks only look.
+ */
+import { millimetresPer } from '../base/units.ts';
+import type { Cutter } from '../cutting/setup.ts';
+import type { TracedMove } from '../motion/traced-move.ts';
+import { solidMoves, type SolidMove } from './metal-paths.ts';
+import type { ProofInput } from './proof.ts';
+import type { Trace } from './trace-program.ts';
+import { wheelFigures, type WheelFigures } from './wheel-figures.ts';
+
+export interface Evidence {
+  readonly input: ProofInput;
+  readonly traces: readonly Trace[];
+  /** Of all programs, in order. */
+  readonly moves: readonly TracedMove[];
+  readonly solids: readonly SolidMove[];
+  readonly cutterOf: (move: TracedMove) => Cutter | undefined;
+  /** One unit of the last digit the machine file writes, mm. */
+  readonly lastDigit: number;
+  /** With a target, where every line was read. */
+  readonly figures: WheelFigures | undefined;
+}
+
+export function gatherEvidence(input: ProofInput, traces: readonly Trace[]): Evidence {
+  const moves = traces.flatMap((trace) => trace.moves);
+  const cutters = new Map(input.setup.cutters.map((cutter) => [cutter.number, cutter]));
+  const cutterOf = (move: TracedMove): Cutter | undefined =>
+    move.cutter === null ? undefined : cutters.get(move.cutter);
+  const solids = solidMoves(moves, (move) => {
+    const cutter = cutterOf(move);
+    return cutter === undefined ? undefined : cutter.diameter / 2;
+  });
+  const { units, words } = input.machine;
+  const lastDigit = millimetresPer(units) * 10 ** -words.numbers.lengthDecimals[units];
+  const read = traces.every((trace) => trace.complete);
+  const figures =
+    input.target === undefined || !read
+      ? undefined
+      : wheelFigures(input.target, input.setup, solids, lastDigit);
+  return { input, traces, moves, solids, cutterOf, lastDigit, figures };
+}

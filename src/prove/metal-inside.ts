@@ -1,0 +1,146 @@
+/**
+ * Whether a place is inside the exact wheel: within the outline and outside bore and windows. Only asked of the cutter's
+ * axis, so that a cut that never comes near an outline, deep inside a tooth or the rim, is still seen.
+ *
+ * The flank's half angle at each radius is read between points of the exact pieces, closer than anything this has to tell
+ * apart: an axis near the outline itself has already been found by the deviation.
+ */
+import { pointOn } from '../geometry/on-piece.ts';
+import type { Loop } from '../geometry/piece.ts';
+import { angleOf, norm, turnPoint, type Point } from '../geometry/point.ts';
+import type { Crossings, WheelForm } from '../tooth/wheel.ts';
+import type { Worst } from './deviation-contour.ts';
+import type { SolidMove } from './metal-paths.ts';
+import type { Target } from './proof.ts';
+
+export interface WheelBody {
+  readonly form: WheelForm;
+  readonly boreRadius: number;
+  readonly crossings: Crossings | undefined;
+  /** Radius and half angle of the tooth, outward. */
+  readonly rho: readonly number[];
+  readonly half: readonly number[];
+  readonly window: readonly Point[];
+  /** Points of one pitch of the outline. */
+  readonly sector: readonly Point[];
+}
+
+const STEPS = 32;
+
+export function wheelBody(form: WheelForm, bore: number, crossings: Crossings | undefined): WheelBody {
+  const risen = form.sector.slice(0, Math.ceil(form.sector.length / 2));
+  const side = risen
+    .filter(({ role }) => role !== 'root' && role !== 'land')
+    .flatMap(({ piece }) => pointsOn(piece));
+  return {
+    form,
+    boreRadius: bore / 2,
+    crossings,
+    rho: side.map(norm),
+    half: side.map((point) => Math.abs(angleOf(point))),
+    window: crossings === undefined ? [] : loopPoints(crossings.window),
+    sector: loopPoints(form.sector.map(({ piece }) => piece)),
+  };
+}
+
+export function loopPoints(loop: Loop): Point[] {
+  return loop.flatMap((piece) => pointsOn(piece).slice(0, -1));
+}
+
+function pointsOn(piece: Loop[number]): Point[] {
+  const steps = piece.kind === 'line' ? 1 : STEPS;
+  return Array.from({ length: steps + 1 }, (_, k) => pointOn(piece, k / steps));
+}
+
+export function isInsideWheel(body: WheelBody, x: number, y: number): boolean {
+  const rho = Math.sqrt(x * x + y * y);
+  if (rho < body.boreRadius || rho >= body.form.outsideRadius) {
+    return false;
+  }
+  if (rho > body.form.rootRadius) {
+    const pitch = (2 * Math.PI) / body.form.proportions.teeth;
+    const angle = Math.atan2(y, x);
+    return Math.abs(angle - pitch * Math.round(angle / pitch)) < halfAngle(body, rho);
+  }
+  return !isInWindow(body, rho, x, y);
+}
+
+function halfAngle(body: WheelBody, rho: number): number {
+  const { rho: radii, half } = body;
+  let k = 1;
+  while (k < radii.length - 1 && radii[k]! < rho) {
+    k++;
+  }
+  const span = radii[k]! - radii[k - 1]!;
+  const share = span > 0 ? Math.min(1, Math.max(0, (rho - radii[k - 1]!) / span)) : 0;
+  return half[k - 1]! + share * (half[k]! - half[k - 1]!);
+}
+
+function isInWindow(body: WheelBody, rho: number, x: number, y: number): boolean {
+  const { crossings, window } = body;
+  if (crossings === undefined || rho < crossings.windowInner || rho > crossings.windowOuter) {
+    return false;
+  }
+  for (let k = 0; k < crossings.count; k++) {
+    const angle = (-2 * Math.PI * k) / crossings.count;
+    const [c, s] = [Math.cos(angle), Math.sin(angle)];
+    if (isInPolygon(window, x * c - y * s, x * s + y * c)) {
+      return true;
+    }
+  }
+  return false;
+}
+
+/** Crossings of a ray to +X, counted. */
+export function isInPolygon(polygon: readonly Point[], x: number, y: number): boolean {
+  let inside = false;
+  let previous = polygon[polygon.length - 1]!;
+  for (const point of polygon) {
+    if (point.y > y !== previous.y > y) {
+      const at = previous.x + ((y - previous.y) / (point.y - previous.y)) * (point.x - previous.x);
+      inside = at > x ? !inside : inside;
+    }
+    previous = point;
+  }
+  return inside;
+}
+
+/**
+ * The deepest cut whose axis is inside the wheel, if there is one. Moves are asked at both ends: one that crosses an
+ * outline on its way is already found there.
+ */
+export function deepestInside(target: Target, solids: readonly SolidMove[], top: number): Worst | undefined {
+  const body = wheelBody(target.form, target.bore, target.crossings);
+  let worst: Worst | undefined;
+  for (const { move, x0, y0, z0, x1, y1, z1, radius } of solids) {
+    for (const [x, y, z] of [[x0, y0, z0] as const, [x1, y1, z1] as const]) {
+      if (z < top && isInsideWheel(body, x, y)) {
+        const value = radius + depthInside(body, x, y);
+        worst = worst === undefined || value > worst.value ? { value, copy: 0, x, y, move } : worst;
+      }
+    }
+  }
+  return worst;
+}
+
+/** About how far inside: the distance to the nearest outline, from points along it. */
+function depthInside(body: WheelBody, x: number, y: number): number {
+  const rho = Math.hypot(x, y);
+  const pitch = (2 * Math.PI) / body.form.proportions.teeth;
+  const tooth = Math.round(Math.atan2(y, x) / pitch);
+  let least = body.boreRadius > 0 ? rho - body.boreRadius : Infinity;
+  const hold = (points: readonly Point[], turn: number): void => {
+    for (const point of points) {
+      const at = turnPoint(point, turn);
+      least = Math.min(least, Math.hypot(at.x - x, at.y - y));
+    }
+  };
+  for (let k = tooth - 1; k <= tooth + 1; k++) {
+    hold(body.sector, k * pitch);
+  }
+  const count = body.crossings?.count ?? 0;
+  for (let k = 0; k < count; k++) {
+    hold(body.window, (2 * Math.PI * k) / count);
+  }
+  return Math.max(0, least);
+}

@@ -1,0 +1,74 @@
+/**
+ * Which paths can touch which copy of an outline that repeats round the axis: each path is put into the list of every
+ * copy whose sector it may reach within `slack`. A lap that repeats another in the same place is put in once.
+ *
+ * In : paths, number of copies, radii between which the outline lies. Out: for each copy the indices of its paths.
+ */
+import type { PathSet } from './metal-paths.ts';
+
+/** The paths of one copy, the deep ones first. */
+export interface NearList {
+  readonly paths: Int32Array;
+  readonly deep: number;
+}
+
+export interface Ring {
+  readonly copies: number;
+  readonly inner: number;
+  readonly outer: number;
+  /** Polar angle about which copy 0 lies; each copy reaches half a pitch to both sides. */
+  readonly middle: number;
+}
+
+export function nearLists(set: PathSet, ring: Ring, slack: number): NearList[] {
+  const pitch = (2 * Math.PI) / ring.copies;
+  const lists: number[][] = Array.from({ length: ring.copies }, () => []);
+  for (let i = 0; i < set.count; i++) {
+    const mx = set.mx[i]!;
+    const my = set.my[i]!;
+    const rho = Math.sqrt(mx * mx + my * my);
+    const reach = set.bound[i]! + set.radius[i]! + slack;
+    if (rho - reach > ring.outer || rho + reach < ring.inner) {
+      continue;
+    }
+    const half = (reach < rho ? Math.asin(reach / rho) : Math.PI) + pitch / 2;
+    const middle = Math.atan2(my, mx) - ring.middle;
+    const first = Math.ceil((middle - half) / pitch);
+    const last = Math.min(Math.floor((middle + half) / pitch), first + ring.copies - 1);
+    for (let k = first; k <= last; k++) {
+      addOnce(set, lists[((k % ring.copies) + ring.copies) % ring.copies]!, i);
+    }
+  }
+  return lists.map((list) => deepFirst(set, list));
+}
+
+function deepFirst(set: PathSet, list: readonly number[]): NearList {
+  const deep = list.filter((i) => set.deep[i] === 1);
+  return {
+    paths: Int32Array.from([...deep, ...list.filter((i) => set.deep[i] === 0)]),
+    deep: deep.length,
+  };
+}
+
+function addOnce(set: PathSet, list: number[], i: number): void {
+  const x0 = set.x0[i]!;
+  const y1 = set.y1[i]!;
+  for (const k of list) {
+    if (set.x0[k] === x0 && set.y1[k] === y1 && samePath(set, i, k)) {
+      return;
+    }
+  }
+  list.push(i);
+}
+
+function samePath(set: PathSet, i: number, k: number): boolean {
+  return (
+    set.y0[i] === set.y0[k] &&
+    set.x1[i] === set.x1[k] &&
+    set.cx[i] === set.cx[k] &&
+    set.cy[i] === set.cy[k] &&
+    set.turn[i] === set.turn[k] &&
+    set.deep[i] === set.deep[k] &&
+    set.radius[i] === set.radius[k]
+  );
+}

@@ -1,0 +1,38 @@
+/**
+ * Proof of a program, or of several run one after the other: the list of checks, and the verdict.
+ *
+ * In  : texts, machine, set-up and (where known) what they are to make. Nothing of how the texts were made.
+ * Out : findings, the figures of the cut wheel, and what could not be checked. 'unread' where a line could not be read
+ *       for certain, 'refuse' where any check found an error.
+ */
+import { checkForm } from './check-form.ts';
+import { extentsOf } from './extents.ts';
+import { gatherEvidence, type Evidence } from './evidence.ts';
+import { notChecked } from './not-checked.ts';
+import type { Finding, Proof, ProofInput } from './proof.ts';
+import { proofFigures } from './proof-figures.ts';
+import { traceProgram } from './trace-program.ts';
+
+/** Every check, in the order its findings are given. */
+const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [checkForm];
+
+export function proveProgram(input: ProofInput): Proof {
+  const traces = input.programs.map(({ file, text }) => traceProgram(file, text, input.machine));
+  const evidence = gatherEvidence(input, traces);
+  const findings = [
+    ...traces.flatMap((trace) => trace.findings),
+    ...CHECKS.flatMap((check) => check(evidence)),
+  ];
+  const read = traces.every((trace) => trace.complete);
+  const refused = findings.some(({ severity }) => severity === 'error');
+  const figures = proofFigures(evidence);
+  return {
+    verdict: read ? (refused ? 'refuse' : 'pass') : 'unread',
+    findings,
+    notChecked: notChecked(evidence),
+    moves: evidence.moves,
+    blocks: traces.reduce((sum, trace) => sum + trace.blocks, 0),
+    extents: extentsOf(evidence.moves),
+    ...(figures === undefined ? {} : { figures }),
+  };
+}
