@@ -8,11 +8,11 @@
  * the tip corners there is no outline.
  */
 import { failure, success, type Outcome } from '../base/problem.ts';
+import { areaOfChain } from '../geometry/area-of-chain.ts';
 import { norm, turnPoint, type Point } from '../geometry/point.ts';
 import { largestCutter } from './largest-cutter.ts';
 import { leftInCorner } from './left-in-corner.ts';
 import { restingDisc } from './resting-disc.ts';
-import { sweptAreaOf } from './swept-area.ts';
 import { mm, toothProblem } from './tooth-problem.ts';
 import { toothSector } from './tooth-sector.ts';
 import { toothSide, type ToothSide } from './tooth-side.ts';
@@ -71,7 +71,7 @@ export function asCut(form: WheelForm, diameter: number): Outcome<AsCut> {
 }
 
 function areaOf(sector: readonly WheelPiece[]): number {
-  return sweptAreaOf(sector.map(({ piece }) => piece));
+  return areaOfChain(sector.map(({ piece }) => piece));
 }
 
 function hangs(side: ToothSide, diameter: number) {

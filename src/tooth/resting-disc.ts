@@ -7,6 +7,7 @@
  * Why it serves three masters: a fillet is a resting disc, so is a cutter, and so is each point that lies equally far from
  * root and side (the thickest place of what a cutter leaves).
  */
+import { SAME_POINT } from '../base/tolerances.ts';
 import { endOf, pointOn, startOf } from '../geometry/on-piece.ts';
 import type { ArcPiece } from '../geometry/piece.ts';
 import { angleOf, norm, polar, subtract, wrapAngle, type Point } from '../geometry/point.ts';
@@ -47,7 +48,9 @@ export function restingDisc(side: ToothSide, radius: number): RestingDisc | unde
   if (first.foot.on === 'tip') {
     return undefined;
   }
-  return { centre: polar(lowest, Math.max(0, first.at)), radius, onRoot: true, foot: first.foot };
+  // A root arc too short to be there would only be a block of no length.
+  const angle = first.at * lowest > SAME_POINT ? first.at : 0;
+  return { centre: polar(lowest, angle), radius, onRoot: true, foot: first.foot };
 }
 
 const ROOT: Touch = { at: -Infinity, foot: { on: 'flank', u: 0, point: { x: 0, y: 0 } } };

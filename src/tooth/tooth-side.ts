@@ -4,11 +4,12 @@
  * Frame: the middle of a tooth space on +X, the tooth that follows counter-clockwise centred at pi/N. The side runs
  * outward: root circle, radial flank at `spaceAngle`, addendum, land to the tooth's centre line. mm, radians.
  */
+import { SAME_POINT } from '../base/tolerances.ts';
 import { failure, success, type Outcome, type Problem } from '../base/problem.ts';
 import { endOf } from '../geometry/on-piece.ts';
 import type { ArcPiece, CycloidPiece } from '../geometry/piece.ts';
-import { angleOf, distance, polar, subtract } from '../geometry/point.ts';
-import { obliquityAtRadius, pointedHeight, type Rolling } from './addendum.ts';
+import { angleOf, distance, norm, polar, subtract } from '../geometry/point.ts';
+import { obliquityAtRadius, pointedHeight, pointedObliquity, type Rolling } from './addendum.ts';
 import { checkProportions } from './check-proportions.ts';
 import { mm, toothProblem } from './tooth-problem.ts';
 import type { WheelProportions } from './wheel.ts';
@@ -51,18 +52,31 @@ export function toothSide(p: WheelProportions): Outcome<ToothSide> {
     const arc = addendumArc(frame, Math.PI / p.teeth);
     return arc.ok ? success({ ...frame, addendum: arc.value, landAngle: 0 }) : arc;
   }
-  const tip = obliquityAtRadius(rolling, frame.outsideRadius);
-  const addendum: CycloidPiece = {
+  return success({ ...frame, ...rolledAddendum(frame, rolling, p) });
+}
+
+function rolledAddendum(
+  { spaceAngle, outsideRadius }: Pick<ToothSide, 'spaceAngle' | 'outsideRadius'>,
+  rolling: Rolling,
+  p: WheelProportions,
+): Pick<ToothSide, 'addendum' | 'landAngle' | 'outsideRadius'> {
+  const halfAngle = (p.tooth * Math.PI) / p.teeth;
+  const upTo = (obliquity: number): CycloidPiece => ({
     kind: 'cycloid',
     ...rolling,
     cusp: spaceAngle,
     sense: 1,
     offset: 0,
     from: 0,
-    to: (2 * generatingRadius * tip) / pitchRadius,
-  };
-  const landAngle = p.height === 1 ? 0 : Math.PI / p.teeth - angleOf(endOf(addendum));
-  return success({ ...frame, addendum, landAngle: Math.max(0, landAngle) });
+    to: (2 * rolling.rolling * obliquity) / rolling.fixed,
+  });
+  const kept = upTo(obliquityAtRadius(rolling, outsideRadius));
+  const landAngle = Math.PI / p.teeth - angleOf(endOf(kept));
+  if (p.height < 1 && 2 * landAngle * outsideRadius > SAME_POINT) {
+    return { addendum: kept, landAngle, outsideRadius };
+  }
+  const pointed = upTo(pointedObliquity(rolling, halfAngle));
+  return { addendum: pointed, landAngle: 0, outsideRadius: norm(endOf(pointed)) };
 }
 
 /** Radius of the single-arc addendum over its height: remembered from BS 978-2, which was not at hand. */
