@@ -209,3 +209,33 @@ function orderOf() {
       : { message: `the order is not a list of different passes. Use the form ${words.example}.` };
   });
 }
+
+/** The JSON Schema (draft 2020-12) of a job file, for editors. Rules across keys are not in it. */
+export function jobJsonSchema(): JsonSchema {
+  return z.toJSONSchema(jobSchema('mm'), {
+    io: 'input',
+    unrepresentable: 'any',
+    override: ({ zodSchema, jsonSchema }) => {
+      // Values are read by functions of ours, of which zod knows neither whether they may be left out nor the examples.
+      const { shape } = (zodSchema as z.ZodType).def as { shape?: Record<string, z.ZodType> };
+      if (shape !== undefined) {
+        jsonSchema.required = Object.keys(shape).filter((key) => shape[key]?.def.type !== 'optional');
+      }
+      const examples = z.globalRegistry.get(zodSchema)?.['examples'];
+      if (Array.isArray(examples)) {
+        jsonSchema.examples = examples;
+      }
+    },
+  }) as JsonSchema;
+}
+
+/** What the starter job needs to know of it. */
+export interface JsonSchema {
+  readonly description?: string;
+  readonly examples?: readonly (string | number)[];
+  readonly properties?: Readonly<Record<string, JsonSchema>>;
+  readonly required?: readonly string[];
+  readonly anyOf?: readonly JsonSchema[];
+  readonly enum?: readonly unknown[];
+  readonly additionalProperties?: JsonSchema | boolean;
+}
