@@ -7,7 +7,7 @@
  * Both follow from P = contact + (2 r s + d) n of `geometry/cycloid.ts`. The tooth comes to a point where the curve has
  * turned through half the tooth's angle. Design of the form: E. Beckett, "Clocks", Encyclopaedia Britannica, 9th ed., p. 32.
  */
-import { largestWhere } from './largest-where.ts';
+import { findRoot } from '../geometry/roots.ts';
 
 /** Radii of the two circles, mm: r rolls outside R. */
 export interface Rolling {
@@ -50,14 +50,12 @@ export function obliquityAtRadius(rolling: Rolling, radius: number): number {
   return Math.asin(Math.min(1, sineAtRadius(rolling, radius)));
 }
 
-/** Obliquity at the point of a tooth that spans `halfAngle` each side of its centre line at the pitch circle. */
+/**
+ * Obliquity at the point of a tooth that spans `halfAngle` each side of its centre line at the pitch circle. The two curves
+ * always meet before the tops of their arches while the tooth is thinner than half the leaf count of pitches.
+ */
 export function pointedObliquity(rolling: Rolling, halfAngle: number): number {
-  return largestWhere((theta) => angleFromCusp(rolling, theta) <= halfAngle, 0, Math.PI / 2);
-}
-
-/** Whether the two curves of a tooth meet before the tops of their arches. */
-export function comesToPoint(rolling: Rolling, halfAngle: number): boolean {
-  return angleFromCusp(rolling, Math.PI / 2) >= halfAngle;
+  return findRoot((theta) => angleFromCusp(rolling, theta) - halfAngle, 0, Math.PI / 2);
 }
 
 /** Height of the pointed tooth above the pitch circle, in the unit of the radii. */

@@ -5,8 +5,8 @@
  * centre of a smaller disc that rests in the same space and whose centre lies on the cutter's rim. In a fillet the
  * nearest metal is the fillet's, and the greatest distance lies on the line through the two centres.
  */
-import { addScaled, distance, subtract, unit, type Point } from '../geometry/point.ts';
-import { largestWhere } from './largest-where.ts';
+import { addScaled, distance, polar, subtract, unit, type Point } from '../geometry/point.ts';
+import { findRoot } from '../geometry/roots.ts';
 import { restingDisc, type RestingDisc } from './resting-disc.ts';
 import type { ToothSide } from './tooth-side.ts';
 
@@ -15,15 +15,17 @@ export function leftInCorner(
   cutter: RestingDisc,
   fillet: RestingDisc | undefined,
 ): { readonly thickness: number; readonly at: Point } {
+  // Positive for a disc whose centre lies deeper in the corner than the cutter's rim.
   const beyondRim = (size: number) => {
-    const disc = restingDisc(side, size);
-    return disc !== undefined && distance(disc.centre, cutter.centre) > cutter.radius;
+    const disc = size === 0 ? undefined : restingDisc(side, size);
+    const centre = disc?.centre ?? polar(side.rootRadius, side.spaceAngle);
+    return distance(centre, cutter.centre) - cutter.radius;
   };
-  if (fillet && !beyondRim(fillet.radius)) {
+  if (fillet && beyondRim(fillet.radius) <= 0) {
     const apart = subtract(fillet.centre, cutter.centre);
     const thickness = fillet.radius - cutter.radius + Math.hypot(apart.x, apart.y);
     return { thickness, at: addScaled(cutter.centre, unit(apart), cutter.radius) };
   }
-  const thickness = largestWhere(beyondRim, fillet?.radius ?? 0, cutter.radius);
+  const thickness = findRoot(beyondRim, fillet?.radius ?? 0, cutter.radius);
   return { thickness, at: restingDisc(side, thickness)?.centre ?? cutter.centre };
 }

@@ -3,6 +3,8 @@ import { describe, expect, it } from 'vitest';
 import { endOf, headingOn, pointOn, startOf } from '../../src/geometry/on-piece.ts';
 import { addScaled, distance, leftOf, norm, polar, type Point } from '../../src/geometry/point.ts';
 import { asCut, type AsCut } from '../../src/tooth/as-cut.ts';
+import { largestCutterBelow } from '../../src/tooth/largest-cutter.ts';
+import { toothSide } from '../../src/tooth/tooth-side.ts';
 import { wheelForm } from '../../src/tooth/wheel-form.ts';
 import type { WheelForm, WheelPiece, WheelProportions } from '../../src/tooth/wheel.ts';
 import { distanceTo, inMetal, pointsOf, risingHalf, spaceOf } from './outline-samples.ts';
@@ -192,6 +194,20 @@ describe('any wheel, any cutter', () => {
       { numRuns: 200, seed: 26 },
     );
   });
+});
+
+it('names the largest cutter whose foot stays below the working flank', () => {
+  fc.assert(
+    fc.property(anyProportions(), fc.double({ min: 0.05, max: 0.95, noNaN: true }), (p, share) => {
+      const form = value(wheelForm({ ...p, rootFillet: 0 }));
+      const working = form.rootRadius + share * (form.outsideRadius - form.rootRadius);
+      const largest = 2 * largestCutterBelow(value(toothSide(form.proportions)), working);
+      expect(value(asCut(form, largest * (1 - 1e-9))).footRadius).toBeLessThanOrEqual(working);
+      const beyond = asCut(form, largest * (1 + 1e-9));
+      expect(!beyond.ok || beyond.value.footRadius > working).toBe(true);
+    }),
+    { numRuns: 200, seed: 27 },
+  );
 });
 
 it('fills the hollow of an arc that leans outward, and only that', () => {
