@@ -1,16 +1,12 @@
 /**
  * Characters of the longest block a machine file may make: an arc in three axes with its centre and feed, every word at
- * its longest for this travel, or the opening where it is one block. A line that is longer than the controller
- * holds is dropped or cut, so this is reckoned before anything is written.
+ * its longest for this travel. A line that is longer than the controller holds is dropped or cut, so this is
+ * reckoned before anything is written.
  */
 import { millimetresPer } from '../base/units.ts';
 import type { Machine } from './machine.ts';
 
 export function longestBlock(machine: Machine): number {
-  return Math.max(longestMove(machine), longestOpening(machine));
-}
-
-function longestMove(machine: Machine): number {
   const { arcs, numbers } = machine.words;
   const length = lengthOfWord(largestLength(machine), numbers.lengthDecimals[machine.units]) + 1;
   const centres = arcs.planes === 'none' ? 0 : arcs.centre === 'radius' ? 1 : 2;
@@ -21,13 +17,8 @@ function longestMove(machine: Machine): number {
     ...Array<number>(3 + centres).fill(length),
     feed,
   ];
-  return joined(words, machine);
-}
-
-function longestOpening(machine: Machine): number {
-  const { opening, openingOnePerBlock, millimetreWord } = machine.words.modes;
-  const words = opening.map((word) => (word === 'UNIT' ? millimetreWord : word).length);
-  return openingOnePerBlock ? 0 : joined([...blockNumber(machine), ...words], machine);
+  const gaps = machine.words.file.gapBetweenWords ? words.length - 1 : 0;
+  return words.reduce((sum, word) => sum + word, gaps);
 }
 
 /** A coordinate cannot be farther from zero than the travel is long. */
@@ -44,9 +35,4 @@ function blockNumber(machine: Machine): readonly number[] {
 /** Letter, whole digits, point and decimals; a sign is the caller's. */
 function lengthOfWord(largest: number, decimals: number): number {
   return 1 + String(Math.ceil(largest)).length + 1 + decimals;
-}
-
-function joined(words: readonly number[], machine: Machine): number {
-  const gaps = machine.words.file.gapBetweenWords ? words.length - 1 : 0;
-  return words.reduce((sum, word) => sum + word, gaps);
 }

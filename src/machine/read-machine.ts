@@ -27,19 +27,25 @@ export function readMachine(
   const tree = joinTrees(layers.value.map(sayings).toReversed());
   const checked = checkTree(tree);
   if (!checked.ok) {
-    return failure(inOrder(checked.issues.map((issue) => problemOf(issue, layers.value))));
+    return failure(
+      inOrder(
+        file,
+        checked.issues.map((issue) => problemOf(issue, layers.value)),
+      ),
+    );
   }
   const machine = machineOf(name, checked.tree);
+  // What is dangerous together is to be mended here, even where one half of it is inherited.
   const dangers = checkMachine(machine).map((danger) => ({
     code: 'machine.dangerous' as const,
     severity: danger.severity,
     message: danger.message,
     hint: danger.hint,
-    at: placeOf(danger.path, layers.value),
+    at: placeOf(danger.path, layers.value.slice(0, 1)),
   }));
   return dangers.some((one) => one.severity === 'error')
-    ? failure(inOrder(dangers))
-    : success(machine, inOrder(dangers));
+    ? failure(inOrder(file, dangers))
+    : success(machine, inOrder(file, dangers));
 }
 
 /** What a file says; who proved it says nothing of a file that is like it. */
@@ -67,12 +73,8 @@ function problemOf(issue: SchemaIssue, layers: readonly Layer[]): Problem {
     return unknownKey(issue.path, issue.key ?? '', layers);
   }
   if (issue.kind === 'missing') {
-    return problem(
-      'machine.missing',
-      at,
-      'is not given, and a wrong guess could be dangerous.',
-      `Give ${issue.expected}; the controller's manual says which.`,
-    );
+    const guess = issue.path[0] === 'description' ? '' : ', and a wrong guess could be dangerous';
+    return problem('machine.missing', at, `is not given${guess}.`, `Give ${issue.expected}.`);
   }
   return problem('machine.invalid', at, `${complaint(issue.path, layers)}.`, `Give ${issue.expected}.`);
 }
@@ -103,10 +105,10 @@ function placeOf(path: SchemaIssue['path'], layers: readonly Layer[]): Place {
 function complaint(path: SchemaIssue['path'], layers: readonly Layer[]): string {
   const layer = layers.find((one) => has(one.yaml.value, path));
   const value = layer?.yaml.writtenAt(path);
-  if (value !== undefined) {
-    return value === '' ? 'nothing is given' : `${value} is not right here`;
+  if (value === '') {
+    return 'nothing is given';
   }
-  return 'what is given is not right here';
+  return `${value ?? 'what is given'} is not right here`;
 }
 
 function has(tree: unknown, path: SchemaIssue['path']): boolean {
@@ -120,11 +122,13 @@ function has(tree: unknown, path: SchemaIssue['path']): boolean {
   return true;
 }
 
-/** As a person reads a file: from the top; what another file says comes after. */
-function inOrder(problems: readonly Problem[]): readonly Problem[] {
-  const first = problems[0]?.at;
-  const lineOf = (one: Problem): number => (one.at.kind === 'value' ? (one.at.line ?? 0) : 0);
-  const fileOf = (one: Problem): number =>
-    one.at.kind === 'value' && first?.kind === 'value' && one.at.file === first.file ? 0 : 1;
-  return [...problems].sort((a, b) => fileOf(a) - fileOf(b) || lineOf(a) - lineOf(b));
+/** As a person reads: this file from the top; what it is like says comes after. */
+function inOrder(file: string, problems: readonly Problem[]): readonly Problem[] {
+  const rank = ({ at }: Problem): readonly number[] =>
+    at.kind === 'value' ? [at.file === file ? 0 : 1, at.line ?? 0, at.column ?? 0] : [0, 0, 0];
+  return problems.toSorted((a, b) => {
+    const [one, other] = [rank(a), rank(b)];
+    const differs = one.findIndex((value, i) => value !== other[i]);
+    return (one[differs] ?? 0) - (other[differs] ?? 0);
+  });
 }
