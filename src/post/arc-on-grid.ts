@@ -23,11 +23,12 @@ export interface GridLine extends GridPlace {
   readonly kind: 'line';
 }
 
-/** `cx`, `cy` in counts from zero; `radius` in counts for the radius form. */
+/** `cx`, `cy` in counts from zero. */
 export interface GridArc extends GridPlace {
   readonly kind: 'arc';
   readonly cx: number;
   readonly cy: number;
+  /** In counts: as the word of the radius form, or from the written centre to the written start. */
   readonly radius: number;
   readonly counterClockwise: boolean;
   /** Difference of start and end radius as written, in counts. */
@@ -46,6 +47,9 @@ export type GridMove = GridLine | GridArc | GridMiss;
 /** Chords under this many counts can round to nothing, and an arc whose ends meet is a full circle: from 1.5 counts none
  *  do, three leave room for both ends. */
 const SAFE_CHORD_COUNTS = 3;
+
+/** Counts along the arc beyond which rounding of both ends and the centre (under three counts) cannot turn it round. */
+const FAR_FROM_ROUNDING = 16;
 
 /** The whole arc, exact; `a0` its start angle. */
 interface Sweep {
@@ -74,13 +78,12 @@ export function arcOnGrid(
   }
   const endsMeet =
     Math.abs(sweep.turn) > Math.PI &&
-    Math.hypot(step.to.x - from.x, step.to.y - from.y) * grid.perMm < sweep.shortest;
+    distance(step.to.x, step.to.y, from.x, from.y) * grid.perMm < sweep.shortest;
   const moves: GridMove[] = [];
   let place = start;
   let share = 0;
   for (const next of arcCuts(words, sweep.a0, sweep.turn, endsMeet)) {
-    writePart(sweep, place, share, next, moves);
-    place = gridPlaceAt(sweep, next);
+    place = writePart(sweep, place, share, next, moves);
     share = next;
   }
   return moves;
@@ -93,7 +96,7 @@ function sweepOf(grid: Grid, words: ArcWords, from: Position, step: ArcStep): Sw
     grid,
     words,
     centre: step.centre,
-    radius: Math.hypot(dx, dy),
+    radius: distance(0, 0, dx, dy),
     a0: Math.atan2(dy, dx),
     turn: step.turn,
     from,
@@ -128,38 +131,49 @@ function gridPlaceAt(sweep: Sweep, share: number): GridPlace {
   };
 }
 
-/** The part between two shares of the turn: an arc where that is safe, chords where it is not, nothing where it is no move. */
-function writePart(sweep: Sweep, start: GridPlace, share0: number, share1: number, moves: GridMove[]): void {
+/** The part between two shares of the turn: an arc where that is safe, chords where not, nothing where it is no move. Its end. */
+function writePart(
+  sweep: Sweep,
+  start: GridPlace,
+  share0: number,
+  share1: number,
+  moves: GridMove[],
+): GridPlace {
   const turn = (share1 - share0) * sweep.turn;
   const end = gridPlaceAt(sweep, share1);
   if (isWholeTurn(turn)) {
     // Both ends are one place: a unit apart, a controller might run the unit instead of the circle.
-    moves.push(bestCentre(sweep, start, { ...start, z: end.z }));
-    return;
+    moves.push(bestCentre(sweep, start, { x: start.x, y: start.y, z: end.z }));
+    return end;
   }
-  const chord = Math.hypot(end.x - start.x, end.y - start.y);
-  if (chord < sweep.shortest || isFlat(sweep, turn)) {
+  const chord = distance(end.x, end.y, start.x, start.y);
+  if (chord < sweep.shortest || isFlat(sweep, turn, chord)) {
     chords(sweep, start, share0, share1, moves);
-    return;
+    return end;
   }
   const arc = bestCentre(sweep, start, end);
-  if (arc.kind === 'arc' && sweep.words.centre !== 'radius' && isReversed(arc, start, turn)) {
+  const centred = arc.kind === 'arc' && sweep.words.centre !== 'radius';
+  if (centred && isReversed(arc, start, turn, sweep.radius * sweep.grid.perMm)) {
     chords(sweep, start, share0, share1, moves);
-    return;
+  } else {
+    moves.push(arc);
   }
-  moves.push(arc);
+  return end;
 }
 
-/** The arc stands above its chord by less than a count: no controller could tell. */
-function isFlat(sweep: Sweep, turn: number): boolean {
-  return Math.abs(turn) < Math.PI && sweep.radius * (1 - Math.cos(turn / 2)) * sweep.grid.perMm < 1;
+/** The arc stands above its chord by less than a count (sag s, chord c: c^2 = 8 r s - 4 s^2): no controller could tell. */
+function isFlat(sweep: Sweep, turn: number, chord: number): boolean {
+  return Math.abs(turn) < Math.PI && chord * chord < 8 * sweep.radius * sweep.grid.perMm - 4;
 }
 
-/** Rounding has changed the turn by more than half a turn. */
-function isReversed(arc: GridArc, start: GridPlace, turn: number): boolean {
+/** Rounding has changed the turn by more than half a turn: possible only where the arc, or what it lacks to a circle, is tiny. */
+function isReversed(arc: GridArc, start: GridPlace, turn: number, radius: number): boolean {
+  const whole = 2 * Math.PI;
+  if (Math.min(Math.abs(turn), whole - Math.abs(turn)) * radius > FAR_FROM_ROUNDING) {
+    return false;
+  }
   const a = Math.atan2(start.y - arc.cy, start.x - arc.cx);
   const b = Math.atan2(arc.y - arc.cy, arc.x - arc.cx);
-  const whole = 2 * Math.PI;
   const swept = arc.counterClockwise ? (b - a + whole) % whole : (a - b + whole) % whole;
   return Math.abs(swept - Math.abs(turn)) > Math.PI;
 }
@@ -186,22 +200,35 @@ function bestCentre(sweep: Sweep, start: GridPlace, end: GridPlace): GridArc | G
 }
 
 function arcAbout(sweep: Sweep, start: GridPlace, end: GridPlace, cx: number, cy: number): GridArc {
-  const r1 = Math.hypot(start.x - cx, start.y - cy);
-  const r2 = Math.hypot(end.x - cx, end.y - cy);
-  const exactX = sweep.centre.x * sweep.grid.perMm;
-  const exactY = sweep.centre.y * sweep.grid.perMm;
+  const { x, y, z } = end;
+  const counterClockwise = sweep.turn > 0;
+  if (sweep.words.centre === 'radius') {
+    return { kind: 'arc', x, y, z, cx, cy, radius: meanRadius(sweep, start, end), counterClockwise, miss: 0 };
+  }
+  const r1 = distance(start.x, start.y, cx, cy);
   return {
     kind: 'arc',
-    ...end,
+    x,
+    y,
+    z,
     cx,
     cy,
-    // The mean distance of the written ends from the exact centre keeps the radius form's own centre nearest to it.
-    radius: Math.round(
-      (Math.hypot(start.x - exactX, start.y - exactY) + Math.hypot(end.x - exactX, end.y - exactY)) / 2,
-    ),
-    counterClockwise: sweep.turn > 0,
-    miss: Math.abs(r1 - r2),
+    radius: r1,
+    counterClockwise,
+    miss: Math.abs(r1 - distance(x, y, cx, cy)),
   };
+}
+
+/** The mean distance of the written ends from the exact centre keeps the radius form's own centre nearest to it. */
+function meanRadius(sweep: Sweep, start: GridPlace, end: GridPlace): number {
+  const x = sweep.centre.x * sweep.grid.perMm;
+  const y = sweep.centre.y * sweep.grid.perMm;
+  return Math.round((distance(start.x, start.y, x, y) + distance(end.x, end.y, x, y)) / 2);
+}
+
+/** Twice as quick as Math.hypot, whose care for huge and tiny numbers nothing on the grid needs. */
+function distance(x0: number, y0: number, x1: number, y1: number): number {
+  return Math.sqrt((x0 - x1) * (x0 - x1) + (y0 - y1) * (y0 - y1));
 }
 
 /** The controller's own test: below the absolute limit, or below both the outer limit and the share of the radius. */
@@ -214,8 +241,7 @@ function mayMiss(words: ArcWords, grid: Grid, arc: GridArc): boolean {
     return false;
   }
   const outer = words.missAtMost === null ? Infinity : words.missAtMost / millimetresPer(grid.unit);
-  const radius = Math.hypot(arc.x - arc.cx, arc.y - arc.cy) / grid.perUnit;
-  return miss < outer && miss < words.missShare * radius;
+  return miss < outer && miss < words.missShare * (arc.radius / grid.perUnit);
 }
 
 /** Chords of equal turn from the part's start to its end, none longer than the chord tolerance allows. */
@@ -233,7 +259,7 @@ function chords(
   for (let k = 1; k <= count; k++) {
     const next = gridPlaceAt(sweep, k === count ? share1 : share0 + ((share1 - share0) * k) / count);
     if (next.x !== place.x || next.y !== place.y || next.z !== place.z) {
-      moves.push({ kind: 'line', ...next });
+      moves.push({ kind: 'line', x: next.x, y: next.y, z: next.z });
       place = next;
     }
   }

@@ -41,6 +41,8 @@ const STAND_INS: Readonly<Record<string, string>> = {
   '"': '',
 };
 
+const NEEDS_STAND_IN = /[^ -~]|[%&'"]/;
+
 /** Never in a comment, whatever the machine file allows: these open, close or delimit. */
 const NEVER = '()[]{};%/\\"\'#';
 
@@ -51,24 +53,39 @@ export type Cleaner = (text: string) => string;
 
 export function commentCleaner(file: FileWords): Cleaner {
   const allowed = allowedLetters(file);
-  const has = (letter: string): boolean => allowed.has(letter);
+  const has = (letter: string): boolean => allowed[letter.charCodeAt(0)] === 1;
   return (text) => {
-    const plain = standIns(text);
+    const plain = NEEDS_STAND_IN.test(text) ? standIns(text) : text;
     const cased = file.letterCase === 'upper' ? plain.toUpperCase() : plain;
-    const kept = [...signsInWords(cased, has)].map((letter) => (has(letter) ? letter : ' ')).join('');
-    return breakWords(kept, has('=')).replace(/ +/g, ' ').trim();
+    const kept = keepAllowed(signsInWords(cased, has), allowed);
+    return breakWords(kept, has('=')).replace(/ {2,}/g, ' ').trim();
   };
 }
 
-function allowedLetters(file: FileWords): ReadonlySet<string> {
+/** By character code: 1 where a comment may hold it. */
+function allowedLetters(file: FileWords): Uint8Array {
   const lower = file.letterCase === 'any' ? 'abcdefghijklmnopqrstuvwxyz' : '';
-  const all = `ABCDEFGHIJKLMNOPQRSTUVWXYZ${lower}0123456789 ${file.commentLetters}`;
-  return new Set(
-    [...all].filter((letter) => {
-      const code = letter.charCodeAt(0);
-      return code >= 32 && code < 127 && !NEVER.includes(letter) && !file.bannedCharacters.includes(letter);
-    }),
-  );
+  const allowed = new Uint8Array(128);
+  for (const letter of `ABCDEFGHIJKLMNOPQRSTUVWXYZ${lower}0123456789 ${file.commentLetters}`) {
+    const code = letter.charCodeAt(0);
+    if (code >= 32 && code < 127 && !NEVER.includes(letter) && !file.bannedCharacters.includes(letter)) {
+      allowed[code] = 1;
+    }
+  }
+  return allowed;
+}
+
+/** Blanks for all that is not allowed; a text that needs none is returned as it is. */
+function keepAllowed(text: string, allowed: Uint8Array): string {
+  let kept = '';
+  let from = 0;
+  for (let i = 0; i < text.length; i++) {
+    if (allowed[text.charCodeAt(i)] !== 1) {
+      kept += `${text.slice(from, i)} `;
+      from = i + 1;
+    }
+  }
+  return from === 0 ? text : kept + text.slice(from);
 }
 
 /** Accents dropped, signs spelt; what has no stand-in is left for the filter. */

@@ -5,7 +5,7 @@
  * In  : the machine file's words. Out: blocks in the sink.
  */
 import type { Machine } from '../machine/machine.ts';
-import { joinWords, writeBlock, type Sink } from './program-sink.ts';
+import { codeWords, writeCodes, type Sink } from './program-sink.ts';
 
 /** Unit, plane, offset, ... in the machine file's order; what it forgot to list is added. */
 export function writeOpening(sink: Sink): void {
@@ -55,13 +55,13 @@ function writeModes(sink: Sink, words: readonly string[]): void {
   let block: string[] = [];
   const flush = (): void => {
     if (block.length > 0) {
-      writeBlock(sink, joinWords(sink, block));
+      writeCodes(sink, ...block);
     }
     block = [];
   };
   for (const word of words) {
     const alone = single || word.includes(' ') || word.startsWith('M');
-    if (alone || joinWords(sink, [...block, word]).length > room) {
+    if (alone || codeWords(sink, [...block, word]).join(sink.gap).length > room) {
       flush();
     }
     block.push(word);

@@ -1,8 +1,7 @@
 /**
  * Exact path for what makes the flank, the machine file's roughing words for the rest, written where the kind of pass changes.
  */
-import { formatCode } from './format-word.ts';
-import { writeBlock } from './program-sink.ts';
+import { writeCodes } from './program-sink.ts';
 import type { Writer } from './writer.ts';
 
 const FINISHING = /finishing|spring/;
@@ -28,7 +27,5 @@ function takePath(writer: Writer, words: string | null): void {
     return;
   }
   writer.path = words;
-  const width = writer.machine.words.numbers.codeWidth;
-  const parts = words.split(' ').map((word) => formatCode(word, width));
-  writeBlock(writer.sink, parts.join(writer.sink.gap));
+  writeCodes(writer.sink, ...words.split(' '));
 }

@@ -4,7 +4,7 @@
 import { stopSpindle } from './write-event.ts';
 import { writeOpening, writeRestored } from './mode-words.ts';
 import { writeFirstPath } from './path-words.ts';
-import { complain, joinWords, writeBlock, type Sink } from './program-sink.ts';
+import { complain, writeCodes, type Sink } from './program-sink.ts';
 import { writeTop } from './write-top.ts';
 import type { Writer } from './writer.ts';
 
@@ -43,10 +43,10 @@ export function writeEnding(writer: Writer): void {
   stopSpindle(writer);
   writeTop(writer);
   if (cutters.lengthCancel === 'G49-at-end') {
-    writeBlock(sink, joinWords(sink, ['G49']));
+    writeCodes(sink, 'G49');
   }
   writeRestored(sink);
-  writeBlock(sink, joinWords(sink, [end.end]));
+  writeCodes(sink, end.end);
   if (file.percentLines === 'both') {
     sink.lines.push('%');
   }

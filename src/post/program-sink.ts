@@ -5,7 +5,7 @@
  */
 import type { Place, Problem } from '../base/problem.ts';
 import type { ProblemCode } from '../base/problem-codes.ts';
-import type { Machine } from '../machine/machine.ts';
+import type { BlockWords, Machine } from '../machine/machine.ts';
 import { commentCleaner, foldText, type Cleaner } from './clean-comment.ts';
 import { formatCode } from './format-word.ts';
 
@@ -14,6 +14,8 @@ export interface Sink {
   readonly file: string;
   readonly lines: string[];
   readonly gap: string;
+  readonly longest: number;
+  readonly numbers: BlockWords['numbers'];
   readonly clean: Cleaner;
   readonly problems: Map<string, Problem>;
   blocks: number;
@@ -29,6 +31,8 @@ export function openSink(machine: Machine, file: string): Sink {
     file,
     lines: [],
     gap: machine.words.file.gapBetweenWords ? ' ' : '',
+    longest: machine.words.file.lineLongest,
+    numbers: machine.words.blocks.numbers,
     clean: commentCleaner(machine.words.file),
     problems: new Map(),
     blocks: 0,
@@ -37,30 +41,41 @@ export function openSink(machine: Machine, file: string): Sink {
   };
 }
 
-/** Words of one block, in their order, as text without a number. */
-export function joinWords(sink: Sink, words: readonly string[]): string {
+/** Codes in the machine file's width; other words pass. */
+export function codeWords(sink: Sink, words: readonly string[]): string[] {
   const width = sink.machine.words.numbers.codeWidth;
-  return words.map((word) => formatCode(word, width)).join(sink.gap);
+  return words.map((word) => formatCode(word, width));
 }
 
-/** One block. `apart` is a word that may stand in a block of its own before it where the line would be too long. */
-export function writeBlock(sink: Sink, body: string, apart = ''): void {
-  if (apart !== '') {
-    const whole = body + sink.gap + apart;
-    if (numberText(sink).length + whole.length <= sink.machine.words.file.lineLongest) {
-      putBlock(sink, whole);
-      return;
-    }
-    putBlock(sink, apart);
+/** A block of codes, S, T, H and the like, given as they are in trade and machine file. */
+export function writeCodes(sink: Sink, ...words: readonly string[]): void {
+  writeBlock(sink, codeWords(sink, words));
+}
+
+/**
+ * One block of finished words, the last of which (`apart`) may stand in a block of its own before the others where the line
+ * would be too long. The words are joined at once: a joined line is flat, a line of sums is a tree of strings that is
+ * dragged along until the end.
+ */
+export function writeBlock(sink: Sink, words: readonly string[], apart = ''): void {
+  if (apart === '') {
+    putBlock(sink, words.join(sink.gap));
+    return;
   }
-  putBlock(sink, body);
+  const whole = [...words, apart].join(sink.gap);
+  if (numberText(sink).length + whole.length <= sink.longest) {
+    putBlock(sink, whole);
+    return;
+  }
+  putBlock(sink, apart);
+  putBlock(sink, words.join(sink.gap));
 }
 
 function putBlock(sink: Sink, body: string): void {
   const line = numberText(sink) + body;
-  if (line.length > sink.machine.words.file.lineLongest) {
+  if (line.length > sink.longest) {
     complain(sink, 'post.cannot-say', 'line', {
-      message: `the block ${body} takes ${line.length} characters and the machine file allows ${sink.machine.words.file.lineLongest} a line`,
+      message: `the block ${body} takes ${line.length} characters and the machine file allows ${sink.longest} a line`,
       hint: 'give a larger line-longest, fewer length-decimals, or no gap-between-words',
     });
   }
@@ -70,15 +85,14 @@ function putBlock(sink: Sink, body: string): void {
 }
 
 function numberText(sink: Sink): string {
-  const numbers = sink.machine.words.blocks.numbers;
-  return numbers === 'none' || (numbers === 'cutter-changes' && !sink.cutterBegins)
+  return sink.numbers === 'none' || (sink.numbers === 'cutter-changes' && !sink.cutterBegins)
     ? ''
     : `N${sink.number}${sink.gap}`;
 }
 
 function countOn(sink: Sink): void {
-  const { numbers, first, step, last } = sink.machine.words.blocks;
-  if (numbers === 'all' || (numbers === 'cutter-changes' && sink.cutterBegins)) {
+  if (sink.numbers === 'all' || (sink.numbers === 'cutter-changes' && sink.cutterBegins)) {
+    const { first, step, last } = sink.machine.words.blocks;
     sink.number = sink.number + step > last ? first : sink.number + step;
   }
   sink.cutterBegins = false;

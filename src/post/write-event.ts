@@ -10,7 +10,7 @@ import { lengthInWords } from './belongs-text.ts';
 import { formatValue } from './format-word.ts';
 import { writeOpeningAgain } from './mode-words.ts';
 import { writeFirstPath } from './path-words.ts';
-import { complain, joinWords, writeBlock, writeComments, writeOperatorNotes } from './program-sink.ts';
+import { complain, writeCodes, writeComments, writeOperatorNotes } from './program-sink.ts';
 import { writeTop } from './write-top.ts';
 import { forgetModes, forgetPlace, type Writer } from './writer.ts';
 
@@ -100,7 +100,7 @@ function beginAgain(writer: Writer): void {
   writer.belongs = undefined;
   writeFirstPath(writer);
   if (writer.cutter !== null && writer.machine.words.cutters.lengthOffset === 'G43-H') {
-    writeBlock(writer.sink, joinWords(writer.sink, ['G43', `H${writer.cutter}`]));
+    writeCodes(writer.sink, 'G43', `H${writer.cutter}`);
   }
 }
 
@@ -108,14 +108,14 @@ function cutterWords(writer: Writer, number: number): void {
   const { sink } = writer;
   switch (writer.machine.words.cutters.words) {
     case 'T-and-M6':
-      writeBlock(sink, joinWords(sink, [`T${number}`, 'M6']));
+      writeCodes(sink, `T${number}`, 'M6');
       break;
     case 'T-then-M6':
-      writeBlock(sink, `T${number}`);
-      writeBlock(sink, joinWords(sink, ['M6']));
+      writeCodes(sink, `T${number}`);
+      writeCodes(sink, 'M6');
       break;
     case 'T-only':
-      writeBlock(sink, `T${number}`);
+      writeCodes(sink, `T${number}`);
       break;
     case 'none':
       break;
@@ -133,7 +133,7 @@ function waitForHands(writer: Writer, say: readonly string[]): void {
     const height = lengthInWords(writer.highestZ / grid.perMm, grid.unit);
     writeComments(sink, [`Before going on raise the cutter to height ${height} or above, over a free place`]);
   }
-  writeBlock(sink, joinWords(sink, ['M0']));
+  writeCodes(sink, 'M0');
   forgetPlace(writer);
   sink.cutterBegins = true;
   beginAgain(writer);
@@ -154,10 +154,10 @@ function writeSpindle(writer: Writer, speed: number): void {
     return;
   }
   if (speedWord === 'together') {
-    writeBlock(sink, joinWords(sink, [`S${text}`, forward]));
+    writeCodes(sink, `S${text}`, forward);
   } else {
-    writeBlock(sink, `S${text}`);
-    writeBlock(sink, joinWords(sink, [forward]));
+    writeCodes(sink, `S${text}`);
+    writeCodes(sink, forward);
   }
   if (spinUpSeconds > 0) {
     writeDwell(writer, spinUpSeconds);
@@ -185,7 +185,7 @@ function spindleDown(writer: Writer): readonly string[] {
   if (writer.machine.words.spindle.run === 'by-hand') {
     return ['Switch the spindle off'];
   }
-  writeBlock(writer.sink, joinWords(writer.sink, ['M5']));
+  writeCodes(writer.sink, 'M5');
   return [];
 }
 
@@ -206,9 +206,9 @@ function writeDwell(writer: Writer, seconds: number): void {
     unit === 'milliseconds'
       ? formatValue(Math.ceil(seconds * 1000), 0, { ...numbers, point: 'as-needed' })
       : formatValue(Math.ceil(seconds * scale) / scale, numbers.secondsDecimals, numbers);
-  writeBlock(sink, joinWords(sink, ['G4', letter + text]));
+  writeCodes(sink, 'G4', letter + text);
   forgetModes(writer);
   if (letter === 'S' && writer.spindle > 0 && machine.words.spindle.run === 'program') {
-    writeBlock(sink, `S${speedText(writer, writer.spindle)}`);
+    writeCodes(sink, `S${speedText(writer, writer.spindle)}`);
   }
 }

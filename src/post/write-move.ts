@@ -61,14 +61,24 @@ function writeLine(writer: Writer, step: LineStep): void {
 
 /** One straight block, or none where nothing would move. NaN stands for an axis that is not known and not to be moved. */
 function straight(writer: Writer, code: string, x: number, y: number, z: number, feed: string): void {
-  const moved = axisWords(writer, x, y, z, false);
-  if (moved === '') {
+  // An axis that is not known and not to be moved is NaN on both sides: it differs from itself.
+  const [dx, dy, dz] = [x === x && x !== writer.x, y === y && y !== writer.y, z === z && z !== writer.z];
+  if (!dx && !dy && !dz) {
     return;
   }
-  const everyAxis = writer.machine.words.modes.axisRepeat === 'every-block';
-  const body = withMotion(writer, code, everyAxis ? axisWords(writer, x, y, z, true) : moved);
-  writeBlock(writer.sink, body, takeFeed(writer, feed));
-  if (z === z && z !== writer.z) {
+  const every = writer.everyAxis;
+  const words = motionWord(writer, code);
+  if (dx || (every && x === x)) {
+    words.push(`X${lengthText(writer, x)}`);
+  }
+  if (dy || (every && y === y)) {
+    words.push(`Y${lengthText(writer, y)}`);
+  }
+  if (dz || (every && z === z)) {
+    words.push(`Z${lengthText(writer, z)}`);
+  }
+  writeBlock(writer.sink, words, takeFeed(writer, feed));
+  if (dz) {
     writer.atTop = false;
   }
   writer.x = x;
@@ -76,27 +86,13 @@ function straight(writer: Writer, code: string, x: number, y: number, z: number,
   writer.z = z;
 }
 
-function axisWords(writer: Writer, x: number, y: number, z: number, every: boolean): string {
-  const gap = writer.sink.gap;
-  let words = '';
-  if (x === x && (every || x !== writer.x)) {
-    words = `X${lengthText(writer, x)}`;
-  }
-  if (y === y && (every || y !== writer.y)) {
-    words += `${words === '' ? '' : gap}Y${lengthText(writer, y)}`;
-  }
-  if (z === z && (every || z !== writer.z)) {
-    words += `${words === '' ? '' : gap}Z${lengthText(writer, z)}`;
-  }
-  return words;
-}
-
-function withMotion(writer: Writer, code: string, words: string): string {
-  if (code === writer.motion && writer.machine.words.modes.modeRepeat === 'changed') {
-    return words;
+/** A new block's words, so far the motion word where it is news. */
+function motionWord(writer: Writer, code: string): string[] {
+  if (code === writer.motion && !writer.everyMotion) {
+    return [];
   }
   writer.motion = code;
-  return code + writer.sink.gap + words;
+  return [code];
 }
 
 function writeArc(writer: Writer, step: ArcStep): void {
@@ -122,42 +118,44 @@ function writeArc(writer: Writer, step: ArcStep): void {
 }
 
 function arcBlock(writer: Writer, arc: GridArc, feed: string): void {
-  const { sink, machine } = writer;
-  const gap = sink.gap;
-  const every =
-    machine.words.arcs.endWords === 'both' ||
-    machine.words.modes.axisRepeat === 'every-block' ||
+  const both =
+    writer.everyAxis ||
+    writer.machine.words.arcs.endWords === 'both' ||
     (arc.x === writer.x && arc.y === writer.y);
-  let body = '';
-  if (every || arc.x !== writer.x) {
-    body = `X${lengthText(writer, arc.x)}${gap}`;
+  const words = motionWord(writer, arc.counterClockwise ? writer.codes.ccw : writer.codes.cw);
+  if (both || arc.x !== writer.x) {
+    words.push(`X${lengthText(writer, arc.x)}`);
   }
-  if (every || arc.y !== writer.y) {
-    body += `Y${lengthText(writer, arc.y)}${gap}`;
+  if (both || arc.y !== writer.y) {
+    words.push(`Y${lengthText(writer, arc.y)}`);
   }
   if (arc.z !== writer.z) {
-    body += `Z${lengthText(writer, arc.z)}${gap}`;
+    words.push(`Z${lengthText(writer, arc.z)}`);
   }
-  const code = arc.counterClockwise ? writer.codes.ccw : writer.codes.cw;
-  writeBlock(sink, withMotion(writer, code, body + centreWords(writer, arc)), takeFeed(writer, feed));
+  centreWords(writer, arc, words);
+  writeBlock(writer.sink, words, takeFeed(writer, feed));
   tally(writer, arc);
   writer.x = arc.x;
   writer.y = arc.y;
   writer.z = arc.z;
 }
 
-function centreWords(writer: Writer, arc: GridArc): string {
+function centreWords(writer: Writer, arc: GridArc, words: string[]): void {
   const { centre, zeroWords } = writer.machine.words.arcs;
   if (centre === 'radius') {
-    return `R${lengthText(writer, arc.radius)}`;
+    words.push(`R${lengthText(writer, arc.radius)}`);
+    return;
   }
   const i = centre === 'from-start' ? arc.cx - writer.x : arc.cx;
   const j = centre === 'from-start' ? arc.cy - writer.y : arc.cy;
   // From zero an omitted word would be taken as the current place, or refused: both are always written.
   const omit = zeroWords === 'omit' && centre === 'from-start';
-  const iWord = omit && i === 0 ? '' : `I${lengthText(writer, i)}`;
-  const jWord = omit && j === 0 ? '' : `J${lengthText(writer, j)}`;
-  return iWord === '' || jWord === '' ? iWord + jWord : iWord + writer.sink.gap + jWord;
+  if (!omit || i !== 0) {
+    words.push(`I${lengthText(writer, i)}`);
+  }
+  if (!omit || j !== 0) {
+    words.push(`J${lengthText(writer, j)}`);
+  }
 }
 
 function tally(writer: Writer, arc: GridArc): void {

@@ -12,7 +12,6 @@ import { isMove, type Belongs, type Motion } from '../motion/motion.ts';
 import { belongsElsewhere, belongsText } from './belongs-text.ts';
 import type { HeaderFacts } from './header-facts.ts';
 import { headerLines } from './header.ts';
-import { motionFacts } from './motion-facts.ts';
 import { writePathFor } from './path-words.ts';
 import { writeBeginning, writeEnding, writeLabel } from './program-ends.ts';
 import { complain, openSink, writeComments, type Sink } from './program-sink.ts';
@@ -54,7 +53,7 @@ export function writeProgram(input: ProgramInput): Outcome<ProgramText> {
   const header = headerLines(input.header, machine);
   writeLabel(sink, input.label);
   writeComments(sink, header);
-  const writer = openWriter(machine, sink, motionFacts(motion).z[1]);
+  const writer = openWriter(machine, sink, highestOf(motion));
   writeBeginning(writer);
   writeSteps(writer, motion);
   writeEnding(writer);
@@ -84,6 +83,10 @@ function writeSteps(writer: Writer, motion: Motion): void {
       writeEvent(writer, step);
     }
   }
+}
+
+function highestOf(motion: Motion): number {
+  return motion.steps.reduce((z, step) => (isMove(step) && step.to.z > z ? step.to.z : z), -Infinity);
 }
 
 /** A comment and the pass's path words, where something new begins. */

@@ -3,7 +3,7 @@
  * Source of the ways: NISTIR 6556 sections 3.5.8 (G28 by way of the programmed point; there every axis goes home) and 3.5.12 (G53).
  */
 import { millimetresPer } from '../base/units.ts';
-import { joinWords, writeBlock } from './program-sink.ts';
+import { writeCodes } from './program-sink.ts';
 import { lengthText, forgetModes, type Writer } from './writer.ts';
 
 export function writeTop(writer: Writer): void {
@@ -15,22 +15,22 @@ export function writeTop(writer: Writer): void {
   switch (positions.top) {
     case 'G53-Z': {
       const z = Math.round(((positions.topMachineZ ?? 0) / millimetresPer(grid.unit)) * grid.perUnit) + 0;
-      writeBlock(sink, joinWords(sink, ['G53', 'G0', `Z${lengthText(writer, z)}`]));
+      writeCodes(sink, 'G53', 'G0', `Z${lengthText(writer, z)}`);
       break;
     }
     case 'G28-named':
       // By way of the place it stands at, so nothing but Z moves; the step is absolute again at once.
       if (machine.words.modes.openingOnePerBlock) {
-        writeBlock(sink, joinWords(sink, ['G91']));
-        writeBlock(sink, joinWords(sink, ['G28', `Z${lengthText(writer, 0)}`]));
+        writeCodes(sink, 'G91');
+        writeCodes(sink, 'G28', `Z${lengthText(writer, 0)}`);
       } else {
-        writeBlock(sink, joinWords(sink, ['G91', 'G28', `Z${lengthText(writer, 0)}`]));
+        writeCodes(sink, 'G91', 'G28', `Z${lengthText(writer, 0)}`);
       }
-      writeBlock(sink, joinWords(sink, ['G90']));
+      writeCodes(sink, 'G90');
       break;
     case 'G28-all':
       // By way of the program's highest place: Z first, then every axis goes home from there.
-      writeBlock(sink, joinWords(sink, ['G28', `Z${lengthText(writer, writer.highestZ)}`]));
+      writeCodes(sink, 'G28', `Z${lengthText(writer, writer.highestZ)}`);
       writer.x = NaN;
       writer.y = NaN;
       break;

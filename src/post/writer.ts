@@ -4,7 +4,7 @@
  */
 import type { Machine } from '../machine/machine.ts';
 import type { Belongs, Position } from '../motion/motion.ts';
-import { formatCode, formatCount } from './format-word.ts';
+import { formatCode, formatCount, type NumberStyle } from './format-word.ts';
 import { programGrid, toGrid, type Grid } from './program-grid.ts';
 import { complain, type Sink } from './program-sink.ts';
 
@@ -21,6 +21,11 @@ export interface Writer {
   /** Where Z is highest in this program, in counts: at or above the clear height. */
   readonly highestZ: number;
   readonly largestCount: number;
+  readonly decimals: number;
+  /** Every axis, every motion word in every block. */
+  readonly everyAxis: boolean;
+  readonly everyMotion: boolean;
+  readonly numbers: NumberStyle;
   /** As written, in counts; NaN where not known. */
   x: number;
   y: number;
@@ -57,6 +62,10 @@ export function openWriter(machine: Machine, sink: Sink, highestZ: number): Writ
     },
     highestZ: toGrid(grid, highestZ),
     largestCount: machine.words.numbers.valueLargest * grid.perUnit,
+    decimals: grid.decimals,
+    everyAxis: machine.words.modes.axisRepeat === 'every-block',
+    everyMotion: machine.words.modes.modeRepeat === 'every-block',
+    numbers: machine.words.numbers,
     x: NaN,
     y: NaN,
     z: NaN,
@@ -95,5 +104,5 @@ export function lengthText(writer: Writer, count: number): string {
       hint: 'check the job for a wrong unit, or value-largest in the machine file',
     });
   }
-  return formatCount(count, writer.grid.decimals, writer.machine.words.numbers);
+  return formatCount(count, writer.decimals, writer.numbers);
 }

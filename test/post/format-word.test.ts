@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { formatCode, formatCount, formatValue, type NumberStyle } from '../../src/post/format-word.ts';
 
 const plain: NumberStyle = { point: 'as-needed', trailingZeros: 'drop', leadingZero: 'keep' };

@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import type { Machine } from '../../src/machine/machine.ts';
 import { changedMachine, MACHINE_NAMES, postMachine } from '../support/post-machines.ts';
-import { randomMotion, type RandomMotion } from '../support/random-motion.ts';
+import { numberedMotion, type NumberedMotion } from '../support/numbered-motion.ts';
 import { textFaults } from '../support/text-faults.ts';
 import {
   arcFaults,
@@ -31,10 +31,10 @@ const machines: readonly (readonly [string, Machine])[] = [
 /** What is wrong with any of some random motions, shrunk to the smallest of them. */
 function check(
   machine: Machine,
-  faults: (random: RandomMotion, written: Written) => readonly string[],
+  faults: (random: NumberedMotion, written: Written) => readonly string[],
 ): void {
   fc.assert(
-    fc.property(randomMotion(CLEAR), (random) => {
+    fc.property(numberedMotion(CLEAR), (random) => {
       expect(faults(random, writeRandom(machine, random))).toEqual([]);
     }),
     { seed: SEED, numRuns: 40 },

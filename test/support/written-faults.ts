@@ -9,7 +9,7 @@ import type { TracedMove } from '../../src/motion/traced-move.ts';
 import { writeProgram } from '../../src/post/write-program.ts';
 import { traceProgram, type Trace } from '../../src/prove/trace-program.ts';
 import { headerFacts } from './header-facts.ts';
-import type { RandomMotion } from './random-motion.ts';
+import type { NumberedMotion } from './numbered-motion.ts';
 
 /** Above rounding of the doubles, below any digit. */
 const NOISE = 1e-9;
@@ -21,7 +21,7 @@ export interface Written {
   readonly byStep: readonly (readonly TracedMove[])[];
 }
 
-export function writeRandom(machine: Machine, random: RandomMotion): Written {
+export function writeRandom(machine: Machine, random: NumberedMotion): Written {
   const { motion, moves } = random;
   const header = headerFacts(motion);
   const outcome = writeProgram({ machine, name: 'random', suffix: '', label: 7, motion, header });
@@ -52,7 +52,7 @@ export function lastDigit(machine: Machine): number {
 }
 
 /** (a) of the writer's properties: every step ends where it should, to half a unit, however many came before. */
-export function placeFaults(machine: Machine, random: RandomMotion, written: Written): string[] {
+export function placeFaults(machine: Machine, random: NumberedMotion, written: Written): string[] {
   const half = lastDigit(machine) / 2 + NOISE;
   const faults: string[] = [];
   let place: TracedMove['to'] = random.moves[0]?.from ?? { x: 0, y: 0, z: 0 };
@@ -67,7 +67,7 @@ export function placeFaults(machine: Machine, random: RandomMotion, written: Wri
   return faults;
 }
 
-export function stateFaults(machine: Machine, random: RandomMotion, written: Written): string[] {
+export function stateFaults(machine: Machine, random: NumberedMotion, written: Written): string[] {
   const faults: string[] = [];
   const digit = millimetresPer(machine.units) * 10 ** -machine.words.numbers.feedDecimals;
   random.moves.forEach(({ from, step }, i) => {
@@ -96,7 +96,7 @@ function steepness(from: Position, step: MoveStep): number {
   return circle === 0 ? 1 : Math.hypot(circle, step.to.z - from.z) / circle;
 }
 
-export function arcFaults(machine: Machine, random: RandomMotion, written: Written): string[] {
+export function arcFaults(machine: Machine, random: NumberedMotion, written: Written): string[] {
   return random.moves.flatMap(({ from, step }, i) =>
     step.kind === 'arc'
       ? offArc(machine, written.byStep[i] ?? [], from, step).map((fault) => `step ${i} ${fault}`)
@@ -104,7 +104,7 @@ export function arcFaults(machine: Machine, random: RandomMotion, written: Writt
   );
 }
 
-/** On the circle to 1.5 units (chords: and their tolerance, inside), and turned as far as was meant. */
+/** On the circle to a unit in X and one in Y (chords: and their tolerance, inside), and turned as far as was meant. */
 function offArc(machine: Machine, moves: readonly TracedMove[], from: Position, step: ArcStep): string[] {
   const unit = lastDigit(machine);
   const radius = Math.hypot(from.x - step.centre.x, from.y - step.centre.y);
