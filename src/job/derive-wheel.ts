@@ -11,6 +11,7 @@ import type { WheelText } from './job-schema.ts';
 import type { WheelJob } from './job.ts';
 import { jobProblem } from './job-problem.ts';
 import type { Notes } from './notes.ts';
+import { tidy } from './read-number.ts';
 
 const REMEMBERED =
   'usual proportion of cycloidal clock wheels (BS 978-2, from memory: the standard was not at hand)';
@@ -24,7 +25,7 @@ export function deriveWheel(text: WheelText, notes: Notes): Outcome<WheelJob> {
   const module = moduleOf(text, leaves, notes);
   const height = notes.fill(text.height, 'height', 0.95, REMEMBERED);
   const tooth = notes.fill(text.tooth, 'tooth', 0.5, REMEMBERED);
-  const nominal = (module * (text.teeth + leaves)) / 2;
+  const nominal = tidy((module * (text.teeth + leaves)) / 2);
   const wheel: WheelJob = {
     teeth: text.teeth,
     module,
@@ -94,9 +95,14 @@ function checkSize(text: WheelText): Problem[] {
 function moduleOf(text: WheelText, leaves: number, notes: Notes): number {
   const pitch = text['diametral-pitch'];
   if (text.module === undefined && pitch !== undefined) {
-    return notes.fill(undefined, 'module', MM_PER_INCH / pitch, `25.4 over the diametral pitch ${pitch}`);
+    return notes.fill(
+      undefined,
+      'module',
+      tidy(MM_PER_INCH / pitch),
+      `25.4 over the diametral pitch ${pitch}`,
+    );
   }
-  const fromCentres = (2 * (text.centres ?? 0)) / (text.teeth + leaves);
+  const fromCentres = tidy((2 * (text.centres ?? 0)) / (text.teeth + leaves));
   const why = `twice the centres ${text.centres ?? 0} mm over ${text.teeth} teeth and ${leaves} leaves`;
   return notes.fill(text.module, 'module', fromCentres, why);
 }

@@ -6,7 +6,7 @@
  */
 import { z } from 'zod';
 import { millimetresPer, type LengthUnit } from '../base/units.ts';
-import { LENGTH_UNITS, readNumber, showValue } from './read-number.ts';
+import { LENGTH_UNITS, readNumber, showValue, tidy } from './read-number.ts';
 import { figure, showRange } from './show-length.ts';
 
 /** What a value is, in a few words, and one as it would be written. */
@@ -108,7 +108,7 @@ function measured(value: unknown, { least, most, per, unit }: Measure): Read<num
     const hint = `Units are mm${per} and inch${per}: "0.5 mm${per}", "3/64 inch${per}".`;
     return { message: `${showValue(value)} has a unit that is not known here.`, hint };
   }
-  return bounded(said.number * factor, showValue(value), { least, most }, range);
+  return bounded(tidy(said.number * factor), showValue(value), { least, most }, range);
 }
 
 /** A number without unit, or in modules. */

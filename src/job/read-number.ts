@@ -50,6 +50,11 @@ export const LENGTH_UNITS: Readonly<Record<string, number>> = {
   '"': MM_PER_INCH,
 };
 
+/** A converted value as it would be written: 3/16 inch is 4.7625 mm, not 4.762499999999999. Fifteen digits are kept. */
+export function tidy(value: number): number {
+  return Number(value.toPrecision(15));
+}
+
 /** A value as a message shows it: never long, never more than one line. */
 export function showValue(value: unknown): string {
   if (Array.isArray(value)) {
