@@ -35,6 +35,7 @@ export const PROBLEM_CODES = {
   'reach.flank': 'The cutter does not reach the working flank.',
   'reach.space': 'The cutter does not enter the tooth spaces.',
   'reach.corner': 'The cutter is larger than a corner it has to make.',
+  'reach.too-large': 'The part is larger than offsets can be held exact.',
   'reach.disagrees': 'The clipped polygon and the exact offset of its pieces disagree.',
 
   // toolpath: passes

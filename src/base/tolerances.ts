@@ -37,3 +37,7 @@ export const TANGENT = (0.1 * Math.PI) / 180;
 /** A value of a program that stands for a whole number may differ from one by this; a code is tried after multiplying by ten.
  *  Why: NISTIR 6556 §3.3.2.1 reads it so; controllers refuse what differs more. No length. */
 export const WHOLE_NUMBER = 0.0001;
+
+/** How much nearer than the offset distance a point may seem before it counts as nearer.
+ *  Why: ten times the rounding of a distance found at 500 mm, and far below SAME_POINT, so that what is cut away is cut right. */
+export const OFFSET_NOISE = SAME_POINT / 100;

@@ -8,9 +8,10 @@
 import { SAME_POINT } from '../base/tolerances.ts';
 import { meetByHalving } from './meet-by-halving.ts';
 import { nearestOnPiece } from './nearest-on-piece.ts';
-import { lengthOf, pointOn } from './on-piece.ts';
+import { pointOn } from './on-piece.ts';
 import type { ArcPiece, LinePiece, Piece } from './piece.ts';
 import { addScaled, cross, distance, dot, subtract, unit, type Point } from './point.ts';
+import { surroundOf, surroundsTouch } from './surround.ts';
 
 export interface Meeting {
   readonly u: number;
@@ -18,18 +19,12 @@ export interface Meeting {
 }
 
 export function intersectPieces(a: Piece, b: Piece): Meeting[] {
-  if (apart(a, b)) {
+  if (!surroundsTouch(surroundOf(a), surroundOf(b))) {
     return [];
   }
   const found = [...endsOnOther(a, b), ...crossingsOf(a, b)];
   found.sort((p, q) => p.u - q.u);
   return found.filter((meeting, i) => !found.slice(0, i).some((other) => same(a, meeting, other)));
-}
-
-/** Circles round both pieces (middle, half the length) that don't touch. */
-function apart(a: Piece, b: Piece): boolean {
-  const between = distance(pointOn(a, 0.5), pointOn(b, 0.5));
-  return between > (lengthOf(a) + lengthOf(b)) / 2 + SAME_POINT;
 }
 
 function same(a: Piece, p: Meeting, q: Meeting): boolean {

@@ -1,0 +1,113 @@
+/**
+ * From raw offset pieces to the ones that remain: every piece is cut where it meets another, and a part stays if the
+ * clipped polygon runs along it and no point of the outline is nearer to its middle than the distance. Distances are to
+ * the outline's exact pieces, so the choice is right down to rounding; the polygon says which rings there are. mm.
+ */
+import { CLIP_AGREEMENT, OFFSET_NOISE, SAME_POINT, TANGENT } from '../base/tolerances.ts';
+import { partOf } from './change-piece.ts';
+import { intersectPieces } from './intersect-pieces.ts';
+import { nearestOnPiece } from './nearest-on-piece.ts';
+import { endOf, headingOn, lengthOf, pointOn, startOf, turnOf } from './on-piece.ts';
+import type { Chain, Piece } from './piece.ts';
+import { cross, distance as distanceOf, type Point } from './point.ts';
+import type { OffsetPiece } from './raw-offset.ts';
+import { distanceToRing } from './ring.ts';
+import { surroundOf, surroundsTouch, type Surround } from './surround.ts';
+
+/** A part that remains. `raw` and `at` tell it from the other parts of its piece; ends are kept for the linking. */
+export interface Remaining extends OffsetPiece {
+  readonly raw: number;
+  readonly at: readonly [number, number];
+  readonly from: Point;
+  readonly to: Point;
+}
+
+export interface Trim {
+  readonly raw: readonly OffsetPiece[];
+  readonly outline: Chain;
+  readonly distance: number;
+  /** Pieces that cut without being part of the offset: the rays between which one pitch lies. */
+  readonly knives: Chain;
+  readonly rings: readonly (readonly Point[])[];
+}
+
+export function trimOffset({ raw, outline, distance, knives, rings }: Trim): Remaining[] {
+  const cuts = cutsOf(raw, knives);
+  const near = outline.map((piece) => ({ piece, round: surroundOf(piece) }));
+  return raw.flatMap((offset, index) => {
+    const places = cleanCuts(offset.piece, cuts[index] as number[]);
+    return places.slice(1).flatMap((to, i) => {
+      const part = remainingPart(offset, index, places[i] as number, to);
+      const middle = pointOn(part.piece, 0.5);
+      const kept =
+        rings.some((ring) => distanceToRing(ring, middle) <= CLIP_AGREEMENT) &&
+        !nearerThan(near, middle, Math.abs(distance) - OFFSET_NOISE);
+      return kept ? [part] : [];
+    });
+  });
+}
+
+/** For each raw piece the parameters at which it is cut, unsorted. */
+function cutsOf(raw: readonly OffsetPiece[], knives: Chain): number[][] {
+  const cuts: number[][] = raw.map(() => [0, 1]);
+  const round = raw.map(({ piece }) => surroundOf(piece));
+  raw.forEach((a, i) => {
+    for (const knife of knives) {
+      cuts[i]?.push(...intersectPieces(a.piece, knife).map(({ u }) => u));
+    }
+    for (let j = i + 1; j < raw.length; j++) {
+      const b = raw[j] as OffsetPiece;
+      const far = !surroundsTouch(round[i] as Surround, round[j] as Surround);
+      if (far || tangentNeighbours(a.piece, b.piece) || tangentNeighbours(b.piece, a.piece)) {
+        continue;
+      }
+      for (const { u, v } of intersectPieces(a.piece, b.piece)) {
+        cuts[i]?.push(u);
+        cuts[j]?.push(v);
+      }
+    }
+  });
+  return cuts;
+}
+
+/** Pieces that go on from one another without a bend, and turn by less than half a circle together, meet nowhere else. */
+function tangentNeighbours(a: Piece, b: Piece): boolean {
+  const joined = distanceOf(endOf(a), startOf(b)) <= SAME_POINT;
+  return (
+    joined && Math.abs(cross(headingOn(a, 1), headingOn(b, 0))) < TANGENT && turnOf(a) + turnOf(b) < Math.PI
+  );
+}
+
+/** In order, without cuts that leave nothing between them. */
+function cleanCuts(piece: Piece, cuts: readonly number[]): number[] {
+  const length = lengthOf(piece);
+  if (length <= SAME_POINT) {
+    return [];
+  }
+  const least = SAME_POINT / length;
+  const kept = [0];
+  for (const u of cuts.toSorted((a, b) => a - b)) {
+    if (u - (kept.at(-1) as number) > least && 1 - u > least) {
+      kept.push(u);
+    }
+  }
+  return [...kept, 1];
+}
+
+function remainingPart(offset: OffsetPiece, raw: number, from: number, to: number): Remaining {
+  const piece = partOf(offset.piece, from, to);
+  const [u0, u1] = offset.part;
+  const part = [u0 + from * (u1 - u0), u0 + to * (u1 - u0)] as const;
+  return { ...offset, piece, part, raw, at: [from, to], from: startOf(piece), to: endOf(piece) };
+}
+
+function nearerThan(
+  outline: readonly { readonly piece: Piece; readonly round: Surround }[],
+  point: Point,
+  limit: number,
+): boolean {
+  return outline.some(
+    ({ piece, round }) =>
+      distanceOf(round.centre, point) - round.radius < limit && nearestOnPiece(piece, point).distance < limit,
+  );
+}
