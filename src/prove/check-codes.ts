@@ -22,7 +22,8 @@ export const CHECK_CODES = {
     blind: 'the lengths in the controller’s own table',
   },
   'prove.file': {
-    guards: 'what the controller cannot load: long lines, letters it does not hold, missing % or number lines',
+    guards:
+      'what the controller cannot load: long lines, letters it does not hold, missing % or number lines',
     blind: 'how the file reaches the controller',
   },
   'prove.end': {
@@ -57,6 +58,82 @@ export const CHECK_CODES = {
   'prove.crossing': {
     guards: 'crossings cut too far or not far enough',
     blind: 'arms that bend while they are cut',
+  },
+  'prove.fast-move': {
+    guards: 'fast moves into metal, or sideways below the clear height',
+    blind: 'what stands above the clear height and was not said to be there',
+  },
+  'prove.plunge': {
+    guards: 'a cutter driven straight down into metal that was not said to plunge',
+    blind: 'whether one that was said to plunge does',
+  },
+  'prove.ramp': {
+    guards: 'ramps into metal steeper than the material allows',
+    blind: 'chips that pack in the slot',
+  },
+  'prove.obstacle': {
+    guards: 'cutter, shank or collet nut against keep-outs and screw heads',
+    blind: 'clamps that were not said to be there; the spindle above the nut',
+  },
+  'prove.plate': {
+    guards: 'cuts into the plate under the blank, deeper than was allowed',
+    blind: 'a plate that is not flat or not where it was said to be',
+  },
+  'prove.skin': {
+    guards: 'cuts through the skin that holds the wheel',
+    blind: 'a blank thinner than was said',
+  },
+  'prove.shank': {
+    guards: 'a shank wider than its cutter rubbing on walls above the reach',
+    blind: 'the taper between neck and shank',
+  },
+  'prove.nut': {
+    guards: 'the collet nut coming down on the blank',
+    blind: 'a cutter that was put in shorter than was said',
+  },
+  'prove.spindle': {
+    guards: 'cutting with the spindle still or turning backwards',
+    blind: 'a spindle that is switched by hand',
+  },
+  'prove.spindle-limits': {
+    guards: 'spindle speeds that this machine does not run',
+    blind: 'speed lost under load',
+  },
+  'prove.spin-up': {
+    guards: 'cutting before the spindle is up to speed',
+    blind: 'a spindle slower to come up than its machine file says',
+  },
+  'prove.feed-limits': {
+    guards: 'feeds that this machine does not run',
+    blind: 'the override, and feeds that short blocks never reach',
+  },
+  'prove.cutter': {
+    guards: 'cutting with a cutter that the set-up does not have, or that nobody named',
+    blind: 'which cutter is really in the spindle',
+  },
+  'prove.travel': {
+    guards: 'moves beyond the ends of the travel',
+    blind: 'where the blank really stands, if zero-at is not given',
+  },
+  'prove.left-on': {
+    guards: 'a program that ends with the spindle on, the cutter down or unusual modes',
+    blind: 'what is switched by hand',
+  },
+  'prove.holding': {
+    guards: 'a wheel that nothing holds once it is cut free',
+    blind: 'how strongly glue, tape, arbor or skin hold',
+  },
+  'prove.order': {
+    guards: 'bore, teeth and crossings cut in an order that loses the centre or weakens the rim',
+    blind: 'what is done between two programs',
+  },
+  'prove.loose': {
+    guards: 'slugs, cores and pillars cut free under a turning cutter',
+    blind: 'pieces smaller than three squares of its grid, and glue that holds or fails',
+  },
+  'prove.load': {
+    guards: 'a slot deeper than the cutter is wide, as when finishing runs before roughing',
+    blind: 'wear, and the finer rules of load that the passes were planned by',
   },
 } as const satisfies Record<string, CheckText>;
 

@@ -100,7 +100,8 @@ function deviationAt(field: Field, list: Int32Array, from: number, to: number, f
   const { set, farthest } = field;
   let gap = sweptGap(set, list, from, to, spot.x, spot.y, nearest);
   let out = gap;
-  for (let step = 0; follow && step < STEPS && gap > CLOSE && out < farthest; step++) {
+  const steps = follow ? STEPS : 0;
+  for (let step = 0; step < steps && gap > CLOSE && out < farthest; step++) {
     gap = sweptGap(set, list, from, to, spot.x + out * spot.nx, spot.y + out * spot.ny, nearest);
     out += gap;
   }

@@ -5,7 +5,7 @@
 import { millimetresPer } from '../base/units.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
-import { solidMoves, type SolidMove } from './metal-paths.ts';
+import { pathsBelow, solidMoves, type PathSet, type SolidMove } from './metal-paths.ts';
 import type { ProofInput } from './proof.ts';
 import type { Trace } from './trace-program.ts';
 import { wheelFigures, type WheelFigures } from './wheel-figures.ts';
@@ -16,6 +16,8 @@ export interface Evidence {
   /** Of all programs, in order. */
   readonly moves: readonly TracedMove[];
   readonly solids: readonly SolidMove[];
+  /** Their paths, whole and in the same order. */
+  readonly paths: PathSet;
   readonly cutterOf: (move: TracedMove) => Cutter | undefined;
   /** One unit of the last digit the machine file writes, mm. */
   readonly lastDigit: number;
@@ -39,5 +41,6 @@ export function gatherEvidence(input: ProofInput, traces: readonly Trace[]): Evi
     input.target === undefined || !read
       ? undefined
       : wheelFigures(input.target, input.setup, solids, lastDigit);
-  return { input, traces, moves, solids, cutterOf, lastDigit, figures };
+  const paths = pathsBelow(solids, Infinity, Infinity);
+  return { input, traces, moves, solids, paths, cutterOf, lastDigit, figures };
 }

@@ -27,6 +27,28 @@ export function findingAt(move: TracedMove | undefined, said: Said): Finding {
   };
 }
 
+/** One finding for each program: the first, which says how many more there are of its kind. */
+export function gathered(findings: readonly Finding[]): Finding[] {
+  const kinds = new Map<string, { readonly first: Finding; count: number }>();
+  for (const finding of findings) {
+    const kind = `${finding.code} ${finding.file}`;
+    const known = kinds.get(kind);
+    if (known === undefined) {
+      kinds.set(kind, { first: finding, count: 1 });
+    } else {
+      known.count += 1;
+    }
+  }
+  return [...kinds.values()].map(({ first, count }) =>
+    count === 1
+      ? first
+      : {
+          ...first,
+          message: `${first.message} (and on ${String(count - 1)} more line${count === 2 ? '' : 's'})`,
+        },
+  );
+}
+
 export function lengthText(length: number): string {
   return `${String(Number(length.toFixed(3)))} mm`;
 }

@@ -91,6 +91,10 @@ function isInWindow(body: WheelBody, rho: number, x: number, y: number): boolean
   return false;
 }
 
+export function isInWindowAt(body: WheelBody, x: number, y: number): boolean {
+  return isInWindow(body, Math.hypot(x, y), x, y);
+}
+
 /** Crossings of a ray to +X, counted. */
 export function isInPolygon(polygon: readonly Point[], x: number, y: number): boolean {
   let inside = false;

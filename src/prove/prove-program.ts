@@ -5,7 +5,16 @@
  * Out : findings, the figures of the cut wheel, and what could not be checked. 'unread' where a line could not be read
  *       for certain, 'refuse' where any check found an error.
  */
+import { checkDepth } from './check-depth.ts';
+import { checkEnd } from './check-end.ts';
+import { checkEntry } from './check-entry.ts';
+import { checkFast } from './check-fast.ts';
 import { checkForm } from './check-form.ts';
+import { checkLoose } from './check-loose.ts';
+import { checkObstacles } from './check-obstacles.ts';
+import { checkOrder } from './check-order.ts';
+import { checkSpindle } from './check-spindle.ts';
+import { checkTravel } from './check-travel.ts';
 import { extentsOf } from './extents.ts';
 import { gatherEvidence, type Evidence } from './evidence.ts';
 import { notChecked } from './not-checked.ts';
@@ -14,7 +23,18 @@ import { proofFigures } from './proof-figures.ts';
 import { traceProgram } from './trace-program.ts';
 
 /** Every check, in the order its findings are given. */
-const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [checkForm];
+const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [
+  checkForm,
+  checkFast,
+  checkEntry,
+  checkObstacles,
+  checkDepth,
+  checkSpindle,
+  checkTravel,
+  checkLoose,
+  checkOrder,
+  checkEnd,
+];
 
 export function proveProgram(input: ProofInput): Proof {
   const traces = input.programs.map(({ file, text }) => traceProgram(file, text, input.machine));

@@ -88,9 +88,9 @@ export function goodLines(options: GoodOptions = {}): string[] {
     '(BORE)',
     ...pen.rapid({ x: 0.25, y: 0, z: 5 }),
     ...pen.rapid({ z: 0.2 }),
-    ...Array.from({ length: 13 }, (_, k) => pen.ring(0.2 - 0.1 * (k + 1))),
-    pen.ring(deepest),
-    pen.line({ x: 0.7, y: 0 }),
+    ...Array.from({ length: BORE_LEVELS }, (_, k) =>
+      boreLevel(pen, 0.2 + ((deepest - 0.2) * (k + 1)) / BORE_LEVELS),
+    ).flat(),
     pen.ring(deepest),
     ...pen.rapid({ z: 5 }),
     '(ROUGHING)',
@@ -108,6 +108,14 @@ export function goodLines(options: GoodOptions = {}): string[] {
     'M2',
     '%',
   ];
+}
+
+const BORE_LEVELS = 20;
+
+/** Down by a turn of the inner ring, once round the outer one, and back. */
+function boreLevel(pen: Pen, z: number): string[] {
+  const inner = pen.ring(z);
+  return [inner, pen.line({ x: 0.7, y: 0 }), pen.ring(z), pen.line({ x: 0.25, y: 0 })];
 }
 
 /** Laps that fall on the straight flanks only. */

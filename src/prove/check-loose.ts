@@ -1,0 +1,86 @@
+/**
+ * Metal that comes loose under a turning cutter, and cuts that bite deeper than a cutter bears, both told from the coarse
+ * metal as the moves take it away in order. A piece is loose when it is cut round to the plate and is part of neither the
+ * wheel nor the sheet's edge. Looked at each time the cutter leaves the metal after cutting through.
+ */
+import type { Evidence } from './evidence.ts';
+import { findingAt, lengthText } from './finding-at.ts';
+import { loosePiece, type Piece } from './loose-piece.ts';
+import { wheelBody } from './metal-inside.ts';
+import { blankRaster, cutRaster, type Raster } from './metal-raster.ts';
+import type { Finding } from './proof.ts';
+import type { SolidMove } from './metal-paths.ts';
+
+/** Squares from the axis to the edge of what is looked at: what a wheel needs so that its spaces are seen. */
+const SQUARES = 200;
+/** mm; finer shows nothing that matters. */
+const FINEST = 0.06;
+/** A slot deeper than this share of the diameter breaks small cutters, whatever the material. */
+const DEEPEST_BITE = 1.05;
+
+export function checkLoose(evidence: Evidence): Finding[] {
+  const { input, solids, lastDigit } = evidence;
+  const { target, setup } = input;
+  if (target === undefined) {
+    return [];
+  }
+  const widest = Math.max(0, ...setup.cutters.map(({ diameter }) => diameter));
+  const reach = target.form.outsideRadius + 2 * widest;
+  const raster = blankRaster(setup, reach, Math.max(FINEST, reach / SQUARES));
+  const body = wheelBody(target.form, target.bore, target.crossings);
+  const through = setup.plateZ + lastDigit;
+  const worst: { bite: number; share: number; solid?: SolidMove } = { bite: 0, share: DEEPEST_BITE };
+  const loose: Finding[] = [];
+  let cutThrough = false;
+  for (let i = 0; i < solids.length && loose.length === 0; i++) {
+    const solid = solids[i]!;
+    if (solid.move.kind !== 'rapid') {
+      takeBite(raster, evidence, i, worst);
+      cutThrough ||= Math.min(solid.z0, solid.z1) <= through;
+    }
+    const lifts = solid.z1 > setup.topZ || i === solids.length - 1;
+    if (cutThrough && lifts) {
+      cutThrough = false;
+      const piece = loosePiece(raster, body, through, setup.shape.kind === 'sheet');
+      loose.push(...(piece === undefined ? [] : [cameLoose(solid, piece)]));
+    }
+  }
+  return [...loose, ...(worst.solid === undefined ? [] : [tooDeep(worst.solid, worst.bite)])];
+}
+
+function takeBite(
+  raster: Raster,
+  { paths, solids }: Evidence,
+  i: number,
+  worst: { bite: number; share: number; solid?: SolidMove },
+): void {
+  const solid = solids[i]!;
+  // A fall is taken at its upper end: what is left is never said to be less than it is.
+  const bite = cutRaster(raster, paths, i, Math.max(solid.z0, solid.z1));
+  const share = bite / (2 * solid.radius);
+  if (share > worst.share) {
+    worst.bite = bite;
+    worst.share = share;
+    worst.solid = solid;
+  }
+}
+
+function cameLoose(solid: SolidMove, { x, y, area }: Piece): Finding {
+  return findingAt(solid.move, {
+    code: 'prove.loose',
+    message: `a piece of ${String(Number(area.toFixed(2)))} mm2 at X ${lengthText(x)} Y ${lengthText(y)} is cut free of wheel and blank under the turning cutter; none may be`,
+    hint: 'Turn all of it to chips before its last joint is cut, or leave a skin under it.',
+    x,
+    y,
+  });
+}
+
+function tooDeep(solid: SolidMove, bite: number): Finding {
+  return findingAt(solid.move, {
+    code: 'prove.load',
+    message: `the cutter goes through solid metal ${lengthText(bite)} deep; a cutter of ${lengthText(2 * solid.radius)} bears no slot deeper than its diameter`,
+    hint: 'Rough this place in steps first, or run the programs in their order.',
+    x: solid.x1,
+    y: solid.y1,
+  });
+}

@@ -1,0 +1,35 @@
+/** Travel: where zero lies in the machine's own coordinates every place must be within its ends; else only the size is judged. */
+import type { Evidence } from './evidence.ts';
+import { extentsOf } from './extents.ts';
+import { findingAt, lengthText } from './finding-at.ts';
+import type { Finding } from './proof.ts';
+
+export function checkTravel(evidence: Evidence): Finding[] {
+  return (['x', 'y', 'z'] as const).flatMap((axis) => axisFindings(evidence, axis));
+}
+
+function axisFindings({ input, moves, lastDigit }: Evidence, axis: 'x' | 'y' | 'z'): Finding[] {
+  const [low, high] = extentsOf(moves)[axis];
+  const [first, last] = input.machine.limits.travel[axis];
+  const zero = input.setup.zeroAt?.[axis];
+  const name = axis.toUpperCase();
+  const worst = moves.find(({ to }) => to[axis] === low || to[axis] === high) ?? moves[0];
+  const said = (message: string, hint: string): Finding[] => [
+    findingAt(worst, { code: 'prove.travel', message, hint }),
+  ];
+  if (zero === undefined) {
+    return high - low > last - first + lastDigit
+      ? said(
+          `${name} runs over ${lengthText(high - low)}; this machine's travel is ${lengthText(last - first)}`,
+          'Use a machine with more travel.',
+        )
+      : [];
+  }
+  if (zero + low >= first - lastDigit && zero + high <= last + lastDigit) {
+    return [];
+  }
+  return said(
+    `${name} runs from ${lengthText(zero + low)} to ${lengthText(zero + high)} of the machine; its travel is ${lengthText(first)} to ${lengthText(last)}`,
+    'Set the blank elsewhere on the table, or correct zero-at.',
+  );
+}

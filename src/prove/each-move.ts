@@ -1,0 +1,36 @@
+/**
+ * Every move in the order it is run, with what the checks of motion ask of it: its path among the known ones, how many were run
+ * before it, and whether the spindle stood at the machine's top when its Z is not known.
+ */
+import type { TracedMove } from '../motion/traced-move.ts';
+import type { Evidence } from './evidence.ts';
+
+export interface EachMove {
+  readonly move: TracedMove;
+  /** How many moves of known place were run before this one. */
+  readonly before: number;
+  /** Its own among them, or -1. */
+  readonly path: number;
+  /** Z was last taken to a place of the machine itself, above everything. */
+  readonly atTop: boolean;
+}
+
+export function eachMove({ traces, solids }: Evidence): EachMove[] {
+  const moves: EachMove[] = [];
+  let before = 0;
+  for (const { moves: own, events } of traces) {
+    let atTop = false;
+    let next = 0;
+    own.forEach((move, k) => {
+      for (; next < events.length && events[next]!.before <= k; next++) {
+        const event = events[next]!;
+        atTop = event.kind === 'machine-place' && event.axes.includes('z') ? true : atTop;
+      }
+      const path = solids[before]?.move === move ? before : -1;
+      moves.push({ move, before, path, atTop: atTop && move.from.z === null });
+      before += path < 0 ? 0 : 1;
+      atTop = atTop && move.to.z === null;
+    });
+  }
+  return moves;
+}
