@@ -1,5 +1,5 @@
 /** Whatever the bytes are: no exception, no hang, and never a place that isn't a finite number. */
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { traceProgram, type Trace } from '../../src/prove/trace-program.ts';
 import { POSTS } from '../machine/read-posts.ts';

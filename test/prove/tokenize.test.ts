@@ -1,5 +1,5 @@
 /** Lines split into words, and what is not one. */
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { emptyLineWords } from '../../src/prove/line-words.ts';
 import { secondReading } from '../../src/prove/second-reader.ts';

@@ -1,97 +1,166 @@
-/** Random motions for every machine file: a start from the top, then any moves, each after a note that numbers it. */
-import fc from 'fast-check';
-import type { ArcStep, Motion, MoveStep, Position, Step } from '../../src/motion/motion.ts';
+/**
+ * Random motions that a program can be asked to write: lines, arcs from a hundredth of the last digit to metres round,
+ * whole circles, helices, feeds, speeds, waits, stops, cutter changes, notes that want to be words. mm, radians.
+ */
+import * as fc from 'fast-check';
+import type { Machine } from '../../src/machine/machine.ts';
+import type { Motion, Position, Step } from '../../src/motion/motion.ts';
 
-export interface RandomMotion {
-  readonly motion: Motion;
-  /** The moves that were numbered, in order, and where each began. */
-  readonly moves: readonly { readonly from: Position; readonly step: MoveStep }[];
-}
+const CLEAR = 5;
 
-interface Seed {
-  readonly kind: 'rapid' | 'line' | 'arc' | 'circle' | 'nudge';
-  readonly x: number;
-  readonly y: number;
-  readonly z: number;
-  readonly size: number;
-  readonly turn: number;
-  readonly angle: number;
+interface LineSeed {
+  readonly kind: 'line' | 'rapid';
+  readonly to: Position;
   readonly feed: number;
-  readonly climbs: boolean;
 }
 
-const real = (min: number, max: number): fc.Arbitrary<number> =>
-  fc.double({ min, max, noNaN: true, noDefaultInfinity: true });
-
-const seed: fc.Arbitrary<Seed> = fc.record({
-  kind: fc.constantFrom('rapid', 'line', 'arc', 'arc', 'arc', 'circle', 'nudge'),
-  x: real(-60, 60),
-  y: real(-60, 60),
-  z: real(-3, 6),
-  size: real(-5, 1.9).map((power) => 10 ** power),
-  turn: fc.oneof(
-    real(-2 * Math.PI, 2 * Math.PI),
-    real(-0.05, 0.05),
-    fc.constantFrom(Math.PI, -Math.PI, 6.2831),
-  ),
-  angle: real(0, 2 * Math.PI),
-  feed: real(20, 700),
-  climbs: fc.boolean(),
-});
-
-export function randomMotion(clear: number): fc.Arbitrary<RandomMotion> {
-  return fc.array(seed, { minLength: 1, maxLength: 25 }).map((seeds) => motionOf(seeds, clear));
+interface ArcSeed {
+  readonly kind: 'arc';
+  readonly size: number;
+  readonly angle: number;
+  readonly turn: number;
+  /** mm, or the share of the arc's length that is less. */
+  readonly rise: number;
+  readonly feed: number;
 }
 
-function motionOf(seeds: readonly Seed[], clear: number): RandomMotion {
-  let place: Position = { x: 0, y: 0, z: clear };
+interface Interruption {
+  readonly kind: 'stop' | 'cutter' | 'top';
+  readonly number: number;
+  readonly text: string;
+}
+
+type Seed =
+  | LineSeed
+  | ArcSeed
+  | Interruption
+  | { readonly kind: 'spindle'; readonly part: number }
+  | { readonly kind: 'dwell'; readonly seconds: number }
+  | { readonly kind: 'note'; readonly text: string };
+
+const real = (min: number, max: number): fc.Arbitrary<number> => fc.double({ min, max, noNaN: true });
+const place = fc.record({ x: real(-60, 60), y: real(-60, 60), z: real(-3, 6) });
+/** Ten to the power: sizes spread over all decades. */
+const size = real(-5.5, 1.7).map((power) => 10 ** power);
+const turn = fc.oneof(
+  { weight: 3, arbitrary: real(0.01, 2 * Math.PI) },
+  { weight: 1, arbitrary: fc.constantFrom(Math.PI / 2, Math.PI, 1.5 * Math.PI) },
+  { weight: 1, arbitrary: fc.constant(2 * Math.PI) },
+  { weight: 1, arbitrary: real(2 * Math.PI - 0.01, 2 * Math.PI) },
+);
+
+/** Texts that would move the machine if one got out of its comment. */
+const note = fc.oneof(
+  fc.constantFrom('G0 Z-50', ') G1 X99 (', '; M3 S9000', '%', '/G1 X5', 'x\nG0 Z-99', 'N10 G28', 'Z-5', 'MSG, G0 X1', '#1=5', 'é – ½ ⌀', '(((', 'T5 M6', 'O1234'),
+  fc.string({ unit: 'grapheme', maxLength: 60 }),
+  fc.string({ unit: 'binary-ascii', maxLength: 60 }),
+); // prettier-ignore
+
+const feed = fc.oneof(real(10, 600), fc.constantFrom(60, 120, 150));
+
+const seed: fc.Arbitrary<Seed> = fc.oneof(
+  { weight: 5, arbitrary: fc.record({ kind: fc.constantFrom('line', 'rapid'), to: place, feed }) },
+  {
+    weight: 8,
+    arbitrary: fc.record({
+      kind: fc.constant('arc' as const),
+      size,
+      angle: real(-Math.PI, Math.PI),
+      turn: fc.tuple(turn, fc.constantFrom(1, -1)).map(([t, way]) => t * way),
+      rise: fc.oneof({ weight: 2, arbitrary: fc.constant(0) }, { weight: 1, arbitrary: real(-1, 1) }),
+      feed,
+    }),
+  },
+  { weight: 1, arbitrary: fc.record({ kind: fc.constant('spindle' as const), part: real(0, 1) }) },
+  { weight: 1, arbitrary: fc.record({ kind: fc.constant('dwell' as const), seconds: real(0.001, 9) }) },
+  { weight: 1, arbitrary: fc.record({ kind: fc.constant('note' as const), text: note }) },
+  {
+    weight: 1,
+    arbitrary: fc.record({
+      kind: fc.constantFrom('stop', 'cutter', 'top'),
+      number: fc.integer({ min: 1, max: 20 }),
+      text: note,
+    }),
+  },
+);
+
+export function randomMotion(machine: Machine): fc.Arbitrary<Motion> {
+  return fc
+    .tuple(fc.array(seed, { minLength: 1, maxLength: 24 }), place)
+    .map(([seeds, begin]) => motionOf(machine, seeds, begin));
+}
+
+function motionOf(machine: Machine, seeds: readonly Seed[], begin: Position): Motion {
+  const { spindleLowest, spindleHighest } = machine.limits;
+  let speed = Math.round((spindleLowest + spindleHighest) / 2);
   const steps: Step[] = [
     { kind: 'top' },
-    { kind: 'cutter', number: 3, say: [] },
-    { kind: 'spindle', speed: 12000 },
-    { kind: 'rapid', to: place },
+    { kind: 'cutter', number: 1, say: ['fit it'] },
+    { kind: 'spindle', speed },
   ];
-  const moves: { from: Position; step: MoveStep }[] = [];
-  for (const each of seeds) {
-    const step = moveOf(each, place);
-    steps.push({ kind: 'note', text: `step ${moves.length}` }, step);
-    moves.push({ from: place, step });
-    place = step.to;
-  }
-  steps.push({ kind: 'note', text: `step ${moves.length}` });
-  steps.push({ kind: 'rapid', to: { ...place, z: clear } }, { kind: 'spindle', speed: 0 }, { kind: 'top' });
-  return { motion: { steps }, moves };
-}
-
-function moveOf(of: Seed, from: Position): MoveStep {
-  switch (of.kind) {
-    case 'rapid':
-      return { kind: 'rapid', to: { x: of.x, y: of.y, z: of.z } };
-    case 'line':
-      return { kind: 'line', to: { x: of.x, y: of.y, z: of.z }, feed: of.feed };
-    case 'nudge': {
-      const to = {
-        x: from.x + of.size * Math.cos(of.angle),
-        y: from.y + of.size * Math.sin(of.angle),
-        z: from.z,
-      };
-      return { kind: 'line', to, feed: of.feed };
+  let at: Position | undefined;
+  const stand = (): Position => {
+    if (at === undefined) {
+      at = { ...begin, z: CLEAR };
+      steps.push({ kind: 'rapid', to: at });
     }
-    case 'arc':
-      return arcOf(of, from, of.turn);
-    case 'circle':
-      return arcOf(of, from, of.turn < 0 ? -2 * Math.PI : 2 * Math.PI);
+    return at;
+  };
+  for (const one of seeds) {
+    if (one.kind === 'spindle') {
+      speed = Math.round(spindleLowest + one.part * (spindleHighest - spindleLowest));
+      steps.push({ kind: 'spindle', speed });
+      at = machine.words.spindle.run === 'by-hand' ? undefined : at;
+    } else if (one.kind === 'note') {
+      steps.push({ kind: 'note', text: one.text });
+    } else if (one.kind === 'dwell') {
+      steps.push(
+        ...(machine.words.dwell.letter === 'none' ? [] : [{ kind: 'dwell', seconds: one.seconds } as const]),
+      );
+    } else if (one.kind === 'stop' || one.kind === 'cutter' || one.kind === 'top') {
+      const changed = interrupt(machine, one, steps, speed);
+      at = changed ? undefined : at;
+    } else if (one.kind === 'arc' || one.kind === 'line' || one.kind === 'rapid') {
+      at = moved(steps, stand(), one);
+    }
   }
+  stand();
+  steps.push({ kind: 'spindle', speed: 0 }, { kind: 'top' });
+  return { steps };
 }
 
-function arcOf(of: Seed, from: Position, turn: number): ArcStep {
-  const centre = { x: from.x - of.size * Math.cos(of.angle), y: from.y - of.size * Math.sin(of.angle) };
-  const whole = Math.abs(turn) === 2 * Math.PI;
-  const end = of.angle + turn;
-  const to = {
-    x: whole ? from.x : centre.x + of.size * Math.cos(end),
-    y: whole ? from.y : centre.y + of.size * Math.sin(end),
-    z: of.climbs ? from.z - (of.size * Math.abs(turn)) / 20 : from.z,
-  };
-  return { kind: 'arc', to, centre, turn, feed: of.feed };
+/** After it the place is not known; the spindle is started again. */
+function interrupt(machine: Machine, one: Interruption, steps: Step[], speed: number): boolean {
+  if (one.kind === 'cutter' && machine.words.cutters.change === 'one-program') {
+    return false;
+  }
+  if (one.kind === 'top') {
+    steps.push({ kind: 'top' });
+    return true;
+  }
+  steps.push(
+    one.kind === 'stop'
+      ? { kind: 'stop', say: [one.text] }
+      : { kind: 'cutter', number: one.number, say: [one.text] },
+  );
+  steps.push({ kind: 'spindle', speed });
+  return true;
+}
+
+function moved(steps: Step[], from: Position, one: LineSeed | ArcSeed): Position {
+  if (one.kind !== 'arc') {
+    steps.push(
+      one.kind === 'line' ? { kind: 'line', to: one.to, feed: one.feed } : { kind: 'rapid', to: one.to },
+    );
+    return one.to;
+  }
+  const centre = { x: from.x - one.size * Math.cos(one.angle), y: from.y - one.size * Math.sin(one.angle) };
+  const end = one.angle + one.turn;
+  const z = from.z + one.rise * Math.min(1, one.size * Math.abs(one.turn));
+  const isWhole = Math.abs(one.turn) === 2 * Math.PI;
+  const to = isWhole
+    ? { ...from, z }
+    : { x: centre.x + one.size * Math.cos(end), y: centre.y + one.size * Math.sin(end), z };
+  steps.push({ kind: 'arc', to, centre, turn: one.turn, feed: one.feed });
+  return to;
 }
