@@ -1,0 +1,182 @@
+/**
+ * The only file that touches the disk. Reading is bounded; writing is whole or not at all: every file of a run is first
+ * written beside its place under a name of its own, then all are renamed.
+ */
+import {
+  closeSync,
+  existsSync,
+  fstatSync,
+  mkdirSync,
+  openSync,
+  readdirSync,
+  readFileSync,
+  readSync,
+  renameSync,
+  rmSync,
+  writeFileSync,
+} from 'node:fs';
+import { basename, join } from 'node:path';
+import type { Outcome } from '../base/problem.ts';
+import { failure, success } from '../base/problem.ts';
+
+/** Bytes of the largest input that is read. Why: a program of a million lines has some 30 MB; an input file far less. */
+const LARGEST = 64_000_000;
+
+/** A text file as UTF-8. Not there, not a file, too large or not text: a problem. */
+export function readText(path: string, largest = LARGEST): Outcome<string> {
+  try {
+    const handle = openSync(path, 'r');
+    try {
+      const stat = fstatSync(handle);
+      if (stat.isDirectory()) {
+        return unreadable(path, 'is a folder, not a file');
+      }
+      if (stat.size > largest) {
+        return unreadable(path, `holds ${stat.size} bytes; at most ${largest} are read`);
+      }
+      const bytes = readBounded(handle, largest);
+      return bytes === undefined
+        ? unreadable(path, `holds more than ${largest} bytes`)
+        : success(bytes.toString('utf8'));
+    } finally {
+      closeSync(handle);
+    }
+  } catch (error) {
+    return unreadable(path, reasonOf(error));
+  }
+}
+
+/** Pipes and devices say no size: read until the end or the bound. */
+function readBounded(handle: number, largest: number): Buffer | undefined {
+  const chunks: Buffer[] = [];
+  let total = 0;
+  for (;;) {
+    const chunk = Buffer.alloc(65_536);
+    const count = readSync(handle, chunk, 0, chunk.length, null);
+    if (count === 0) {
+      return Buffer.concat(chunks);
+    }
+    total += count;
+    if (total > largest) {
+      return undefined;
+    }
+    chunks.push(chunk.subarray(0, count));
+  }
+}
+
+export interface NewFile {
+  readonly name: string;
+  readonly text: string;
+}
+
+export interface Change {
+  readonly write: readonly NewFile[];
+  /** Renamed within the folder before the new files take their places. */
+  readonly rename: readonly { readonly from: string; readonly to: string }[];
+}
+
+/** All of it or nothing. */
+export function changeFolder(folder: string, change: Change): Outcome<null> {
+  const temporary = (name: string): string => join(folder, `.${name}.part`);
+  const written: string[] = [];
+  const renamed: { from: string; to: string }[] = [];
+  try {
+    mkdirSync(folder, { recursive: true });
+    for (const file of change.write) {
+      const path = temporary(file.name);
+      written.push(path);
+      writeFileSync(path, file.text);
+    }
+    for (const { from, to } of change.rename) {
+      renameSync(join(folder, from), join(folder, to));
+      renamed.push({ from, to });
+    }
+    for (const file of change.write) {
+      renameSync(temporary(file.name), join(folder, file.name));
+    }
+    return success(null);
+  } catch (error) {
+    undo(folder, written, renamed);
+    return failure([
+      {
+        code: 'file.unwritable',
+        severity: 'error',
+        message: `cannot be written: ${reasonOf(error)}. Nothing was changed.`,
+        hint: 'Name a folder you may write to with --out.',
+        at: { kind: 'file', file: folder },
+      },
+    ]);
+  }
+}
+
+function undo(
+  folder: string,
+  written: readonly string[],
+  renamed: readonly { from: string; to: string }[],
+): void {
+  for (const path of written) {
+    rmSync(path, { force: true });
+  }
+  for (const { from, to } of renamed.toReversed()) {
+    if (!existsSync(join(folder, from))) {
+      renameSync(join(folder, to), join(folder, from));
+    }
+  }
+}
+
+/** Whether something of this name is there. */
+export function isThere(path: string): boolean {
+  return existsSync(path);
+}
+
+/** Names in a folder, sorted; none where it is not there. */
+export function namesIn(folder: string): readonly string[] {
+  try {
+    return readdirSync(folder).toSorted();
+  } catch {
+    return [];
+  }
+}
+
+/** A file that came with the program, by its place beside the bundle. */
+export function readOwn(url: URL): string | undefined {
+  try {
+    return readFileSync(url, 'utf8');
+  } catch {
+    return undefined;
+  }
+}
+
+export function namesInOwn(url: URL): readonly string[] {
+  try {
+    return readdirSync(url).toSorted();
+  } catch {
+    return [];
+  }
+}
+
+function unreadable(path: string, why: string): Outcome<never> {
+  return failure([
+    {
+      code: 'file.unreadable',
+      severity: 'error',
+      message: `${basename(path) === path ? '' : `${basename(path)} `}${why}.`,
+      at: { kind: 'file', file: path },
+    },
+  ]);
+}
+
+const REASONS: Readonly<Record<string, string>> = {
+  ENOENT: 'there is no such file or folder',
+  EACCES: 'permission is denied',
+  EPERM: 'permission is denied',
+  EROFS: 'the disk is read-only',
+  ENOSPC: 'the disk is full',
+  ENOTDIR: 'a part of the path is a file, not a folder',
+  EISDIR: 'it is a folder',
+};
+
+function reasonOf(error: unknown): string {
+  const code = (error as { code?: string }).code ?? '';
+  return REASONS[code] ?? (code === '' ? String(error) : code);
+}

@@ -1,0 +1,6 @@
+/** SHA-256 of a text's UTF-8 bytes, in hexadecimal. */
+import { createHash } from 'node:crypto';
+
+export function sha256(text: string): string {
+  return createHash('sha256').update(text, 'utf8').digest('hex');
+}

@@ -1,0 +1,133 @@
+/** `ogive cut`: reads the job, runs the flow, and puts its files in place; or says why there are none. */
+import { basename, dirname, join, resolve } from 'node:path';
+import type { Problem } from '../base/problem.ts';
+import { showProblem } from '../base/show-problem.ts';
+import { cut, type CutResult } from '../cut.ts';
+import { changeFolder, readText } from './files.ts';
+import { sha256 } from './hash.ts';
+import { findMachine, ownMachine } from './own-machines.ts';
+import { keepOldPrograms } from './old-programs.ts';
+import type { Exit } from './program.ts';
+import { terminalOf, type Terminal } from './terminal.ts';
+
+export interface CutOptions {
+  readonly out?: string;
+  readonly json?: boolean;
+  readonly quiet?: boolean;
+  readonly force?: boolean;
+}
+
+export function runCut(jobFile: string, options: CutOptions, version: string): Exit {
+  const terminal = terminalOf(options.quiet === true);
+  const job = readText(jobFile);
+  if (!job.ok) {
+    terminal.problems(job.problems);
+    return 2;
+  }
+  const result = cut({
+    file: jobFile,
+    text: job.value,
+    version,
+    findMachine: (name) => findMachine(name, jobFile),
+    loadMachine: ownMachine,
+    readCutters: (path) => readText(resolve(dirname(jobFile), path)),
+    hash: sha256,
+    stage: terminal.progress,
+  });
+  terminal.progressDone();
+  terminal.problems(result.problems);
+  if (result.exit === 2) {
+    return 2;
+  }
+  const folder = options.out ?? dirname(jobFile);
+  const put = putInPlace(folder, result, options.force === true, terminal);
+  if (put !== undefined) {
+    terminal.problems(put);
+    return 2;
+  }
+  report(result, folder, options, terminal);
+  return result.exit;
+}
+
+/** Everything of a run at once; problems where nothing was changed. */
+function putInPlace(
+  folder: string,
+  result: CutResult,
+  force: boolean,
+  terminal: Terminal,
+): readonly Problem[] | undefined {
+  if (result.facts === undefined) {
+    return undefined;
+  }
+  const { job, machine } = result.facts;
+  const old = keepOldPrograms(folder, job.name, machine.words.file.ending, result.files, force);
+  if (!old.ok) {
+    return old.problems;
+  }
+  const done = changeFolder(folder, { write: result.files, rename: old.value });
+  if (!done.ok) {
+    return done.problems;
+  }
+  for (const { from, to } of old.value) {
+    terminal.say(`${join(folder, from)} is from an earlier run; it is now ${to}`);
+  }
+  return undefined;
+}
+
+function report(result: CutResult, folder: string, options: CutOptions, terminal: Terminal): void {
+  const { facts } = result;
+  if (options.json === true && result.summary !== undefined) {
+    process.stdout.write(`${JSON.stringify(result.summary, null, 2)}\n`);
+  }
+  if (facts === undefined) {
+    return;
+  }
+  if (result.exit === 1) {
+    for (const finding of (facts.proof?.findings ?? []).slice(0, 12)) {
+      const at = { kind: 'program' as const, file: finding.file, line: finding.line };
+      const text = showProblem({ ...finding, code: 'post.cannot-say', at });
+      process.stderr.write(`${finding.severity === 'error' ? terminal.danger(text) : text}\n`);
+    }
+    const sheet = result.files.find(({ name }) => name.endsWith('.html'))?.name;
+    terminal.say(
+      sheet === undefined
+        ? 'Refused; no program was written.'
+        : `Refused; no program was written. The sheet says why: ${join(folder, sheet)}`,
+    );
+    return;
+  }
+  terminal.say(doneWords(result, folder));
+}
+
+/** The one thing that matters first, then the files in the order they are used. */
+function doneWords(result: CutResult, folder: string): string {
+  const { facts } = result;
+  const figures = facts?.proof?.figures;
+  if (facts === undefined || figures === undefined) {
+    return '';
+  }
+  const um = (mm: number): string => `${(mm * 1000).toFixed(2)} um`;
+  const time = (seconds: number): string => `${Math.max(1, Math.round(seconds / 60))} min`;
+  const place = (name: string): string => join(folder, name);
+  const names = [facts.walkFile ?? '', ...facts.programs.map(({ file }) => file)];
+  const width = Math.max(...names.map((name) => place(name).length), place(`${facts.job.name}.html`).length);
+  const rows = [
+    `${place(facts.walkFile ?? '').padEnd(width)}  run first: round the work at clear height, spindle still`,
+    ...facts.programs.map(
+      ({ file, cutters, seconds, blocks }) =>
+        `${place(file).padEnd(width)}  cutter ${cutters.join(', ')}; ${time(seconds)}; ${blocks} blocks`,
+    ),
+    `${place(`${facts.job.name}.html`).padEnd(width)}  the sheet to read beside the machine`,
+    `${place(`${facts.job.name}.svg`).padEnd(width)}  the drawing`,
+    `${place(`${facts.job.name}.json`).padEnd(width)}  the summary`,
+  ];
+  return [
+    `Proved. The cut flank lies ${um(figures.flankGouge)} inside and ${um(figures.flankLeft)} outside the exact curve at worst; ${um(figures.leftAtRoot)} stay at the root.`,
+    ...rows,
+    `Not checked: ${facts.proof?.notChecked.length ?? 0} things, listed on the sheet. Read it and the head of each program before the spindle turns.`,
+  ].join('\n');
+}
+
+export function nameOf(file: string): string {
+  return basename(file).replace(/\.[^.]*$/, '');
+}

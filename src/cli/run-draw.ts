@@ -1,0 +1,81 @@
+/** `ogive draw`: the exact outline of a job's wheel, or the one its cutter leaves, as SVG or DXF. */
+import { basename, dirname, join, resolve } from 'node:path';
+import type { Outcome } from '../base/problem.ts';
+import { failure, success } from '../base/problem.ts';
+import { readJob } from '../job/read-job.ts';
+import { outlineDxf } from '../report/draw-dxf.ts';
+import { outlineSvg } from '../report/draw-outline.ts';
+import type { OutlineShape } from '../report/outline-shape.ts';
+import { asCut } from '../tooth/as-cut.ts';
+import { crossings } from '../tooth/crossings.ts';
+import { wheelForm } from '../tooth/wheel-form.ts';
+import { changeFolder, readText } from './files.ts';
+import type { Exit } from './program.ts';
+import { terminalOf } from './terminal.ts';
+
+export interface DrawOptions {
+  readonly dxf?: boolean;
+  readonly asCut?: boolean;
+  readonly out?: string;
+  readonly quiet?: boolean;
+}
+
+export function runDraw(jobFile: string, options: DrawOptions): Exit {
+  const terminal = terminalOf(options.quiet === true);
+  const text = readText(jobFile);
+  if (!text.ok) {
+    terminal.problems(text.problems);
+    return 2;
+  }
+  const job = readJob(jobFile, text.value, (path) => readText(resolve(dirname(jobFile), path)));
+  terminal.problems(job.problems);
+  if (!job.ok) {
+    return 2;
+  }
+  const shape = shapeOf(job.value, options.asCut === true);
+  terminal.problems(shape.problems);
+  if (!shape.ok) {
+    return 1;
+  }
+  const drawing = options.dxf === true ? outlineDxf(shape.value) : outlineSvg(shape.value);
+  if (options.out === '-') {
+    process.stdout.write(drawing);
+    return 0;
+  }
+  const ending = options.dxf === true ? 'dxf' : 'svg';
+  const file = options.out ?? join(dirname(jobFile), `${job.value.name}-outline.${ending}`);
+  const done = changeFolder(dirname(file), { write: [{ name: basename(file), text: drawing }], rename: [] });
+  terminal.problems(done.problems);
+  if (!done.ok) {
+    return 2;
+  }
+  terminal.say(`${file} is written, in millimetres.`);
+  return 0;
+}
+
+function shapeOf(
+  job: ReturnType<typeof readJob> extends Outcome<infer T> ? T : never,
+  cut: boolean,
+): Outcome<OutlineShape> {
+  const form = wheelForm(job.wheel);
+  if (!form.ok) {
+    return failure(form.problems);
+  }
+  const windows = job.wheel.crossings && crossings(job.wheel.crossings, form.value.rootRadius);
+  if (windows !== undefined && !windows.ok) {
+    return failure(windows.problems);
+  }
+  const diameter = job.cuts.finishing.cutter.diameter;
+  const opened = cut ? asCut(form.value, diameter) : undefined;
+  if (opened !== undefined && !opened.ok) {
+    return failure(opened.problems);
+  }
+  return success({
+    title: job.title,
+    form: form.value,
+    sector: opened?.value.sector ?? form.value.sector,
+    ...(windows === undefined ? {} : { crossings: windows.value }),
+    bore: job.wheel.bore,
+    what: cut ? `as a cutter that cuts ${diameter} mm leaves it` : 'the exact outline',
+  });
+}

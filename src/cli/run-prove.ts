@@ -1,0 +1,139 @@
+/** `ogive prove`: programs read back from disk and held against the job they were made for; or the list of checks. */
+import { basename, dirname, resolve } from 'node:path';
+import { PROBLEM_CODES } from '../base/problem-codes.ts';
+import type { Outcome } from '../base/problem.ts';
+import { showProblem } from '../base/show-problem.ts';
+import { readJob } from '../job/read-job.ts';
+import type { Job } from '../job/job.ts';
+import { readMachine } from '../machine/read-machine.ts';
+import type { Machine } from '../machine/machine.ts';
+import { CHECK_CODES } from '../prove/check-codes.ts';
+import { proofJson } from '../prove/proof-json.ts';
+import type { Proof } from '../prove/proof.ts';
+import { proveProgram } from '../prove/prove-program.ts';
+import { crossings } from '../tooth/crossings.ts';
+import { wheelForm } from '../tooth/wheel-form.ts';
+import { changeFolder, readText } from './files.ts';
+import { findMachine, ownMachine } from './own-machines.ts';
+import type { Exit } from './program.ts';
+import { terminalOf, type Terminal } from './terminal.ts';
+
+export interface ProveOptions {
+  readonly job?: string;
+  readonly moves?: string;
+  readonly json?: boolean;
+  readonly quiet?: boolean;
+  readonly explain?: boolean;
+}
+
+export function runProve(files: readonly string[], options: ProveOptions): Exit {
+  const terminal = terminalOf(options.quiet === true);
+  if (options.explain === true) {
+    process.stdout.write(explanation());
+    return 0;
+  }
+  if (files.length === 0 || options.job === undefined) {
+    const lacking = files.length === 0 ? 'no program is named' : 'the job they belong to is not named';
+    process.stderr.write(`${lacking}; for example: ogive prove wheel.nc --job wheel.yaml\n`);
+    return 2;
+  }
+  const texts = files.map((file) => ({ file: basename(file), text: readText(file) }));
+  const unread = texts.flatMap(({ text }) => text.problems);
+  const understood = understand(options.job);
+  if (unread.length > 0 || !understood.ok) {
+    terminal.problems([...unread, ...understood.problems]);
+    return 2;
+  }
+  const programs = texts.map(({ file, text }) => ({ file, text: text.ok ? text.value : '' }));
+  const { job, machine } = understood.value;
+  const proof = proveProgram({ programs, machine, setup: job.setup, ...targetOf(job) });
+  return answer(files, proof, machine, options, terminal);
+}
+
+function understand(jobFile: string): Outcome<{ job: Job; machine: Machine }> {
+  const text = readText(jobFile);
+  if (!text.ok) {
+    return text;
+  }
+  const job = readJob(jobFile, text.value, (path) => readText(resolve(dirname(jobFile), path)));
+  if (!job.ok) {
+    return job;
+  }
+  const found = findMachine(job.value.machine, jobFile);
+  if (!found.ok) {
+    return found;
+  }
+  const machine = readMachine(found.value.name, found.value.file, found.value.text, ownMachine);
+  return machine.ok
+    ? {
+        ok: true,
+        value: { job: job.value, machine: machine.value },
+        problems: [...job.problems, ...machine.problems],
+      }
+    : machine;
+}
+
+function targetOf(job: Job): Pick<Parameters<typeof proveProgram>[0], 'target'> {
+  const form = wheelForm(job.wheel);
+  if (!form.ok) {
+    return {};
+  }
+  const windows = job.wheel.crossings && crossings(job.wheel.crossings, form.value.rootRadius);
+  return {
+    target: {
+      form: form.value,
+      ...(windows?.ok === true ? { crossings: windows.value } : {}),
+      thickness: job.wheel.thickness,
+      bore: Math.max(job.wheel.bore - 2 * job.cuts.bore.leave, 0),
+      finishingDiameter: job.cuts.finishing.cutter.diameter,
+      slugsHeld: job.setup.holding.includes('skin'),
+    },
+  };
+}
+
+function answer(
+  files: readonly string[],
+  proof: Proof,
+  machine: Machine,
+  options: ProveOptions,
+  terminal: Terminal,
+): Exit {
+  if (options.moves !== undefined) {
+    const text = proof.moves.map((move) => `${JSON.stringify(move)}\n`).join('');
+    const change = { write: [{ name: basename(options.moves), text }], rename: [] };
+    const done = changeFolder(dirname(options.moves), change);
+    terminal.problems(done.problems);
+    if (!done.ok) {
+      return 2;
+    }
+  }
+  if (options.json === true) {
+    process.stdout.write(
+      `${JSON.stringify(proofJson(files.map((file) => basename(file)).join(' '), proof, machine), null, 2)}\n`,
+    );
+  }
+  for (const finding of proof.findings) {
+    const at = { kind: 'program' as const, file: finding.file, line: finding.line };
+    const text = showProblem({ ...finding, code: 'post.cannot-say', at });
+    process.stderr.write(`${finding.severity === 'error' ? terminal.danger(text) : text}\n`);
+  }
+  terminal.say(verdictWords(proof));
+  return proof.verdict === 'pass' ? 0 : 1;
+}
+
+function verdictWords(proof: Proof): string {
+  const words = {
+    pass: 'Passed.',
+    refuse: 'Refused: do not run it.',
+    unread: 'Not read to its end: do not run it.',
+  };
+  return [words[proof.verdict], 'Not checked:', ...proof.notChecked.map((line) => `  ${line}`)].join('\n');
+}
+
+function explanation(): string {
+  const checks = Object.entries(CHECK_CODES).map(
+    ([code, { guards, blind }]) => `${code}\n  guards against  ${guards}\n  cannot see      ${blind}\n`,
+  );
+  const others = Object.entries(PROBLEM_CODES).map(([code, sentence]) => `${code}\n  ${sentence}\n`);
+  return `What the proof checks\n\n${checks.join('\n')}\nWhat else is said with a code\n\n${others.join('\n')}`;
+}
