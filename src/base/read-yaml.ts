@@ -5,16 +5,7 @@
  * several documents, numbers without an end, binary, too large, too deep, empty.
  * The only file that knows the yaml library; what it was given is walked here, never handed on.
  */
-import {
-  LineCounter,
-  isAlias,
-  isMap,
-  isScalar,
-  isSeq,
-  parseDocument,
-  type Node,
-  type YAMLParseError,
-} from 'yaml';
+import { LineCounter, isAlias, isMap, isScalar, isSeq, parseDocument, type Node } from 'yaml';
 import type { Outcome, Place, Problem } from './problem.ts';
 import { failure, success } from './problem.ts';
 import { tooTangled } from './yaml-tangle.ts';
@@ -65,8 +56,12 @@ export function readYaml(
     return { line: Math.max(line, 1), column: Math.max(col, 1) };
   };
   const root = document.contents;
+  // One fault makes the parser stumble on over the lines that follow: the first is the one to mend.
+  const first = document.errors[0];
   const whole =
-    document.errors.length > 0 ? firstFaults(document.errors, spotAt) : wholeFaults(document, code);
+    first === undefined
+      ? wholeFaults(document, code)
+      : [{ ...yamlSentence(first.code, first.message), spot: spotAt(first.pos[0]) }];
   if (whole.length > 0 || root === null) {
     return refuse(whole);
   }
@@ -74,8 +69,11 @@ export function readYaml(
   const value = unfold(root, [], (message, hint, node, path) => {
     faults.push({ message, hint, path, spot: spotAt(node.range?.[0] ?? 0) });
   });
-  return faults.length > 0 ? refuse(faults) : success(withPlaces(root, value, spotAt));
+  return faults.length > 0 ? refuse(faults.slice(0, MOST_FAULTS)) : success(withPlaces(root, value, spotAt));
 }
+
+/** Most faults of one file that are said. Why: a list that does not fit the screen is not read. */
+const MOST_FAULTS = 12;
 
 interface Fault {
   readonly message: string;
@@ -144,23 +142,6 @@ function spotOf(text: string, offset: number): Spot {
   const before = text.slice(0, offset).split('\n');
   return { line: before.length, column: (before.at(-1) ?? '').length + 1 };
 }
-
-/** One fault makes the parser stumble on; the first of each line is the one to mend, and three are enough. */
-function firstFaults(errors: readonly YAMLParseError[], spotAt: (offset: number) => Spot): Fault[] {
-  const faults: Fault[] = [];
-  for (const error of errors) {
-    const spot = spotAt(error.pos[0]);
-    if (faults.at(-1)?.spot.line !== spot.line) {
-      faults.push({ ...yamlSentence(error.code, error.message), spot });
-    }
-    if (faults.length === MOST_FAULTS) {
-      break;
-    }
-  }
-  return faults;
-}
-
-const MOST_FAULTS = 3;
 
 type Complain = (message: string, hint: string | undefined, node: Node, path: YamlPath) => void;
 

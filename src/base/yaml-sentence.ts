@@ -3,12 +3,32 @@
  * In: the parser's code and its own sentence, which is kept where nothing better is known.
  */
 export function yamlSentence(code: string, sentence: string): { message: string; hint?: string } {
+  const flow = FLOWS.find((one) => sentence.startsWith(one.begins));
   return (
+    flow?.says ??
     SENTENCES[code] ?? {
       message: `This is not valid YAML: ${sentence.split('\n')[0] ?? ''}.`.replace('..', '.'),
     }
   );
 }
+
+/** What the parser says of its flow collections, which it counts among the faults of indentation. */
+const FLOWS = [
+  {
+    begins: 'Flow map',
+    says: {
+      message: 'A brace that is opened before this place is not closed.',
+      hint: 'Look for a { without its }.',
+    },
+  },
+  {
+    begins: 'Flow sequence',
+    says: {
+      message: 'A bracket that is opened before this place is not closed.',
+      hint: 'Look for a [ without its ].',
+    },
+  },
+];
 
 const SENTENCES: Readonly<Record<string, { message: string; hint?: string }>> = {
   TAB_AS_INDENT: {
@@ -20,8 +40,8 @@ const SENTENCES: Readonly<Record<string, { message: string; hint?: string }>> = 
     hint: 'One file holds one job or one machine: make two files of it.',
   },
   BLOCK_AS_IMPLICIT_KEY: {
-    message: 'Two keys stand on one line.',
-    hint: 'Write the second on a line of its own, or both in braces: { arms: 5, rim: 1.8 }.',
+    message: 'Two keys stand on one line, or a text holds a colon.',
+    hint: 'A second key goes on a line of its own; a text with a colon goes between quotes: "Third wheel: brass".',
   },
   MULTILINE_IMPLICIT_KEY: {
     message: 'This line has no key that can be read.',
@@ -47,7 +67,7 @@ const SENTENCES: Readonly<Record<string, { message: string; hint?: string }>> = 
     hint: 'A comma too many, a brace without its partner, or text after a closed value.',
   },
   BAD_INDENT: {
-    message: 'The lines of one group do not begin in the same column, or a brace or bracket is not closed.',
+    message: 'The lines of one group do not begin in the same column.',
     hint: 'Let all keys of a group begin in the same column, further in than the key above them.',
   },
 };

@@ -23,7 +23,7 @@ function sizes(cutter: Cutter, text: JobText): JobProblem[] {
   const at = (key: string): (string | number)[] => ['cutters', String(cutter.number), key];
   const problems: JobProblem[] = [];
   if (Math.abs(cutter.diameter - cutter.nominal) > CUTS_SHARE * cutter.nominal) {
-    const message = `cuts: ${show(cutter.diameter)} is far from the diameter of ${show(cutter.nominal)}.`;
+    const message = `${show(cutter.diameter)} is far from the diameter of ${show(cutter.nominal)}.`;
     problems.push({
       path: at('cuts'),
       message,

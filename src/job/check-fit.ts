@@ -3,11 +3,10 @@
  * here gets its sheet, but no program.
  */
 import type { Problem } from '../base/problem.ts';
-import type { CutSettings, Cuts, PassKind } from './job.ts';
 import type { Cutter, Setup } from '../cutting/setup.ts';
 import type { WheelForm } from '../tooth/wheel.ts';
 import { jobProblem, type JobProblem } from './job-problem.ts';
-import type { WheelJob } from './job.ts';
+import type { CutSettings, Cuts, PassKind, WheelJob } from './job.ts';
 import { showLength } from './show-length.ts';
 import type { LengthUnit } from '../base/units.ts';
 
@@ -23,7 +22,8 @@ export function checkFit(ground: FitGround): Problem[] {
   const show = (mm: number): string => showLength(mm, ground.unit);
   return [
     ...blank(ground, show),
-    ...ground.cuts.order.flatMap((pass) => depth(pass, ground, show)),
+    ...reach(ground, show),
+    ...ground.cuts.order.flatMap((pass) => flute(pass, ground, show)),
     ...corners(ground, show),
     ...slot(ground, show),
   ].map((problem) => jobProblem({ code: 'job.does-not-fit', ...problem }));
@@ -65,28 +65,36 @@ function blank({ form, setup, cuts }: FitGround, show: Show): JobProblem[] {
   ];
 }
 
-/** From the top of the blank to the deepest cut. */
-function depth(pass: PassKind, { wheel, cuts }: FitGround, show: Show): JobProblem[] {
+/** From the top of the blank to the deepest cut: no cutter rubs above its reach. */
+function reach({ wheel, cuts }: FitGround, show: Show): JobProblem[] {
+  const deep = wheel.thickness + cuts.below;
+  const short = cuts.order.filter((pass) => cuts[pass].cutter.reach < deep);
+  const numbers = [...new Set(short.map((pass) => cuts[pass].cutter.number))];
+  return numbers.map((number) => {
+    const passes = short.filter((pass) => cuts[pass].cutter.number === number);
+    const reaches = show(cuts[passes[0] ?? 'roughing'].cutter.reach);
+    const message = `cutter ${number} reaches ${reaches}; ${passes.join(' and ')} ${passes.length > 1 ? 'are' : 'is'} ${deepOf({ wheel, cuts }, show)}.`;
+    const hint = 'Take a cutter with a longer neck or flute; this one would rub above its reach.';
+    return { path: ['cutters', String(number), 'reach'], message, hint };
+  });
+}
+
+function deepOf({ wheel, cuts }: Pick<FitGround, 'wheel' | 'cuts'>, show: Show): string {
+  const deep = show(wheel.thickness + cuts.below);
+  return cuts.below > 0
+    ? `${deep} deep (${show(wheel.thickness)} and ${show(cuts.below)} below)`
+    : `${deep} deep`;
+}
+
+function flute(pass: PassKind, { wheel, cuts }: FitGround, show: Show): JobProblem[] {
   const { cutter, step }: CutSettings = cuts[pass];
   const deep = wheel.thickness + cuts.below;
-  const sum = cuts.below > 0 ? ` (${show(wheel.thickness)} and ${show(cuts.below)} below)` : '';
-  const path = ['cutters', String(cutter.number), 'reach'];
-  if (cutter.reach < deep) {
-    const message = `${pass} is ${show(deep)} deep${sum}; cutter ${cutter.number} reaches ${show(cutter.reach)}.`;
-    return [
-      {
-        path,
-        message,
-        hint: 'Take a cutter with a longer neck or flute; this one would rub above its reach.',
-      },
-    ];
-  }
   if (step !== undefined && step > cutter.flute) {
     const message = `a step of ${show(step)} is more than the flute of cutter ${cutter.number}, ${show(cutter.flute)}.`;
     return [{ path: ['cuts', pass, 'step'], message, hint: `Give a step of at most ${show(cutter.flute)}.` }];
   }
-  if (pass === 'finishing' && step === undefined && cutter.flute < deep) {
-    const message = `finishing is ${show(deep)} deep${sum}, but cutter ${cutter.number} cuts only ${show(cutter.flute)} of its length.`;
+  if (pass === 'finishing' && step === undefined && cutter.flute < deep && cutter.reach >= deep) {
+    const message = `finishing is ${deepOf({ wheel, cuts }, show)}, but cutter ${cutter.number} cuts only ${show(cutter.flute)} of its length.`;
     const hint = `Give finishing a step of at most ${show(cutter.flute)}, or take a cutter with a longer flute.`;
     return [{ path: ['cutters', String(cutter.number), 'flute'], message, hint }];
   }

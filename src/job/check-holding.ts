@@ -64,7 +64,7 @@ function skin(text: JobText): JobProblem[] {
     });
   }
   if ((text.cuts?.below ?? 0) > 0) {
-    const message = `below: ${showLength(text.cuts?.below ?? 0, text.length ?? 'mm')} would cut through the skin.`;
+    const message = `${showLength(text.cuts?.below ?? 0, text.length ?? 'mm')} under the wheel would cut through the skin.`;
     problems.push({ path: ['cuts', 'below'], message, hint: 'Leave below out: with a skin it is 0.' });
   }
   if (text.blank.shape === 'disc') {

@@ -10,6 +10,7 @@ import { checkNut, type ClearanceGround } from './check-clearance.ts';
 import { checkTravel, type Travel } from './check-travel.ts';
 import { jobProblem, type JobProblem } from './job-problem.ts';
 import type { Job, PassKind } from './job.ts';
+import { placeInJob } from './place-problems.ts';
 import { showLength } from './show-length.ts';
 
 /** What a job asks of a machine; the limits and words of a machine file have all of it. */
@@ -42,11 +43,7 @@ export function checkJobOnMachine(job: Job, machine: MachineFacts): Problem[] {
     };
     problems.push(...checkTravel(job, form.value, machine), ...checkNut(ground, machine.limits.nut.diameter));
   }
-  return [...(job.misfits ?? []), ...problems.map((problem) => inFile(problem, job.file))];
-}
-
-function inFile(problem: Problem, file: string): Problem {
-  return problem.at.kind === 'value' ? { ...problem, at: { ...problem.at, file } } : problem;
+  return [...(job.misfits ?? []), ...problems.map((problem) => placeInJob(problem, job))];
 }
 
 function settings(job: Job, { name, limits }: MachineFacts, pass: PassKind): JobProblem[] {

@@ -27,7 +27,7 @@ function circles(text: JobText, wheel: WheelJob, form: WheelForm, show: Show): J
   }
   const leave = text.cuts?.bore?.leave ?? 0;
   if (leave > 0 && leave >= wheel.bore) {
-    const message = `leave: ${show(leave)} leaves nothing of a bore of ${show(wheel.bore)}.`;
+    const message = `${show(leave)} left leaves nothing of a bore of ${show(wheel.bore)}.`;
     problems.push({
       path: ['cuts', 'bore', 'leave'],
       message,

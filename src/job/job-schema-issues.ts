@@ -90,12 +90,10 @@ function wrongType(expected: string, path: Path, value: unknown, { schema }: Gro
       : value === null
         ? 'nothing stands under this key.'
         : `${showValue(value)} is not ${wanted}.`;
-  return {
-    code: 'job.invalid',
-    path,
-    message,
-    hint: known.length > 0 ? `Keys here: ${known.join(', ')}.` : undefined,
-  };
+  const says = describedAt(schema, path);
+  const hint =
+    expected !== 'array' && known.length > 0 ? `Keys here: ${known.join(', ')}.` : says && `${says}.`;
+  return { code: 'job.invalid', path, message, hint };
 }
 
 function unknownKey(key: string, path: Path, ground: Ground): JobIssue {
@@ -132,6 +130,17 @@ function valueAt(tree: unknown, path: Path): unknown {
 /** Keys that a group may have. */
 export function keysAt(schema: z.ZodType, path: Path): readonly string[] {
   return groupsOf(schema, path).flatMap((group) => Object.keys(group.shape));
+}
+
+/** What the schema says of a key. */
+function describedAt(schema: z.ZodType, path: Path): string | undefined {
+  const key = String(path.at(-1) ?? '');
+  const [said] = groupsOf(schema, path.slice(0, -1)).flatMap(({ shape }) => {
+    const child = shape[key] as z.ZodType | undefined;
+    const inner = child?.def as { innerType?: z.ZodType } | undefined;
+    return child?.description ?? inner?.innerType?.description ?? [];
+  });
+  return said;
 }
 
 type Group = z.ZodObject;

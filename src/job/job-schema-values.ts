@@ -77,7 +77,9 @@ export function pointIn(
   const count = example.split(',').length;
   if (!Array.isArray(value) || value.length !== count) {
     const held = Array.isArray(value) ? `a list of ${value.length}` : showValue(value);
-    return { message: `${held} is not a list of ${count} numbers. Use the form ${example}.` };
+    const message = `${held} is not a list of ${count} numbers. Use the form ${example}.`;
+    const more = Array.isArray(value) && value.length > count;
+    return { message, hint: more ? 'Decimals follow a point: 44.5, not 44,5.' : undefined };
   }
   const numbers: number[] = [];
   for (const one of value) {
@@ -108,7 +110,11 @@ function measured(value: unknown, { least, most, per, unit }: Measure): Read<num
     const hint = `Units are mm${per} and inch${per}: "0.5 mm${per}", "3/64 inch${per}".`;
     return { message: `${showValue(value)} has a unit that is not known here.`, hint };
   }
-  return bounded(tidy(said.number * factor), showValue(value), { least, most }, range);
+  const inMm = unit === 'inch' && name === undefined && said.number >= least && said.number <= most;
+  const result = bounded(tidy(said.number * factor), showValue(value), { least, most }, range);
+  return 'message' in result && inMm
+    ? { ...result, hint: `In mm? Then write ${showValue(value)} mm${per}.` }
+    : result;
 }
 
 /** A number without unit, or in modules. */

@@ -22,6 +22,8 @@ export interface Job {
   readonly machine: string;
   readonly cuts: Cuts;
   readonly derived: Readonly<Record<string, Derived>>;
+  /** Line and column of each value of the job file, by its path (`cuts.roughing.speed`): places of problems found later. */
+  readonly spots?: Readonly<Record<string, { readonly line: number; readonly column: number }>>;
   /** What was understood and still cannot be made: with an error among them only the sheet is written, not a program. */
   readonly misfits?: readonly Problem[];
 }

@@ -3,7 +3,9 @@
  * would stand under. Cutters may stand in a file of their own.
  */
 import type { Problem } from '../base/problem.ts';
-import type { YamlText } from '../base/read-yaml.ts';
+import type { Spot, YamlPath, YamlText } from '../base/read-yaml.ts';
+import { showPath } from '../base/show-problem.ts';
+import type { Job } from './job.ts';
 
 export interface PlacedText {
   readonly file: string;
@@ -15,11 +17,11 @@ export function placeProblems(
   job: PlacedText,
   cutters: PlacedText | undefined,
 ): readonly Problem[] {
-  const placed = problems.map((problem) => placed1(problem, job, cutters));
+  const placed = problems.map((problem) => placedOne(problem, job, cutters));
   return placed.toSorted((a, b) => lineOf(a) - lineOf(b));
 }
 
-function placed1(problem: Problem, job: PlacedText, cutters: PlacedText | undefined): Problem {
+function placedOne(problem: Problem, job: PlacedText, cutters: PlacedText | undefined): Problem {
   const { at } = problem;
   if (at.kind !== 'value' || at.file !== '') {
     return problem;
@@ -41,3 +43,33 @@ function lineOf({ at }: Problem): number {
 
 /** More than any line has. */
 const COLUMNS = 1e6;
+
+/** The places of all values of a file, for problems that are found when its text is no longer at hand. */
+export function spotsOf({ yaml }: PlacedText): Readonly<Record<string, Spot>> {
+  const spots: Record<string, Spot> = {};
+  const walk = (value: unknown, path: YamlPath): void => {
+    spots[showPath(path)] = yaml.placeOf(path);
+    if (typeof value === 'object' && value !== null) {
+      for (const [key, inner] of Object.entries(value)) {
+        walk(inner, [...path, Array.isArray(value) ? Number(key) : key]);
+      }
+    }
+  };
+  walk(yaml.value, []);
+  return spots;
+}
+
+/** A problem at a value of the job, with its line; a value that is left out is shown at the group it belongs to. */
+export function placeInJob(problem: Problem, job: Pick<Job, 'file' | 'spots'>): Problem {
+  const { at } = problem;
+  if (at.kind !== 'value' || at.line !== undefined || (at.file !== '' && at.file !== job.file)) {
+    return problem;
+  }
+  for (let length = at.path.length; length >= 0; length--) {
+    const spot = job.spots?.[showPath(at.path.slice(0, length))];
+    if (spot !== undefined) {
+      return { ...problem, at: { ...at, file: job.file, ...spot } };
+    }
+  }
+  return { ...problem, at: { ...at, file: job.file } };
+}

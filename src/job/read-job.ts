@@ -24,7 +24,7 @@ import { jobSchema, type CutterText, type JobText, type WheelText } from './job-
 import { issueProblem, readTree } from './job-schema-issues.ts';
 import type { Job, WheelJob } from './job.ts';
 import { takeNotes, type Notes } from './notes.ts';
-import { placeProblems, type PlacedText } from './place-problems.ts';
+import { placeProblems, spotsOf, type PlacedText } from './place-problems.ts';
 import { readCutters } from './read-cutters.ts';
 import { unitOf } from './unit-of.ts';
 
@@ -53,7 +53,7 @@ export function readJob(
     return failure(place(job.problems));
   }
   const misfits = place(job.value.misfits ?? []);
-  return success({ ...job.value, misfits }, place(job.problems));
+  return success({ ...job.value, misfits, spots: spotsOf(placed) }, place(job.problems));
 }
 
 function understand(
