@@ -10,6 +10,10 @@ export const FORM_ERROR = 0.001;
  *  Why: 0.6 of the form error, so that rounding to a unit of the last digit and the proof's own step stay inside it. */
 export const FIT_ERROR = FORM_ERROR * 0.6;
 
+/** Largest distance between the path and the exact offset where straight lines stand for its curves (a machine without arcs).
+ *  Why: all of it is metal left, none is gouge, so it may take nearly the whole form error; blocks grow as one over its root. */
+export const LINE_FIT_ERROR = FORM_ERROR * 0.95;
+
 /** Largest sag of the chords of a sampled curve, where a polygon stands for it (clipping, drawing).
  *  Why: the clipped polygon only says which pieces survive and where they meet; a fifth of the form error tells them apart. */
 export const CHORD_SAG = FORM_ERROR / 5;

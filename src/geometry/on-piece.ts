@@ -44,11 +44,18 @@ export function headingOn(piece: Piece, u: number): Point {
   }
 }
 
+/** So near a cusp (as a share of the greatest rate) rounding decides the rate's sign; it is asked for so far inside instead. */
+const AT_CUSP = 1e-9;
+const INSIDE = 1e-6;
+
 /** +1 where travelling the span follows `cycloidDirection`. */
 function travelSign(piece: CycloidPiece, u: number): number {
-  const t = rollAt(piece, u);
-  const rate = cycloidRate(piece, t) || cycloidRate(piece, rollAt(piece, u < 0.5 ? u + 1e-6 : u - 1e-6));
-  return Math.sign(rate) * (piece.to < piece.from ? -1 : 1);
+  const way = piece.to < piece.from ? -1 : 1;
+  const rate = cycloidRate(piece, rollAt(piece, u));
+  const greatest = Math.abs(2 * (piece.fixed + piece.rolling)) + Math.abs(piece.offset);
+  return Math.abs(rate) > AT_CUSP * greatest
+    ? Math.sign(rate) * way
+    : Math.sign(cycloidRate(piece, rollAt(piece, u < 0.5 ? u + INSIDE : u - INSIDE))) * way;
 }
 
 /** dP/du, mm: along the heading, or against it past a cusp of a cycloid's parallel; nothing on the cusp itself. */
