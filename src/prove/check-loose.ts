@@ -24,8 +24,7 @@ export function checkLoose(evidence: Evidence): Finding[] {
   if (target === undefined) {
     return [];
   }
-  const widest = Math.max(0, ...setup.cutters.map(({ diameter }) => diameter));
-  const reach = target.form.outsideRadius + 2 * widest;
+  const reach = cutReach(evidence, target.form.outsideRadius);
   const raster = blankRaster(setup, reach, Math.max(FINEST, reach / SQUARES));
   const body = wheelBody(target.form, target.bore, target.crossings);
   const through = setup.plateZ + lastDigit;
@@ -46,6 +45,18 @@ export function checkLoose(evidence: Evidence): Finding[] {
     }
   }
   return [...loose, ...(worst.solid === undefined ? [] : [tooDeep(worst.solid, worst.bite)])];
+}
+
+/** How far from the axis anything is cut, and a little more, so that the sheet's edge is seen round it. */
+function cutReach({ input, solids, paths, lastDigit }: Evidence, wheel: number): number {
+  let reach = wheel;
+  solids.forEach((solid, i) => {
+    if (Math.min(solid.z0, solid.z1) < input.setup.topZ - lastDigit) {
+      const away = Math.hypot(paths.mx[i]!, paths.my[i]!) + paths.bound[i]! + 2 * solid.radius;
+      reach = Math.max(reach, away);
+    }
+  });
+  return reach;
 }
 
 function takeBite(
