@@ -49,16 +49,24 @@ const NEVER = '()[]{};%/\\"\'#';
 /** First words that some controllers act on even inside brackets. */
 const ACTIVE_FIRST = /^(MSG|PRINT|DEBUG|LOG|PROBE)/i;
 
+const POINT = '.'.charCodeAt(0);
+const MINUS = '-'.charCodeAt(0);
+
 export type Cleaner = (text: string) => string;
 
 export function commentCleaner(file: FileWords): Cleaner {
   const allowed = allowedLetters(file);
   const has = (letter: string): boolean => allowed[letter.charCodeAt(0)] === 1;
+  // Points and signs stay until words that could be read are broken and figures are said in full.
+  const atFirst = allowed.slice();
+  atFirst[POINT] = 1;
+  atFirst[MINUS] = 1;
   return (text) => {
     const plain = NEEDS_STAND_IN.test(text) ? standIns(text) : text;
     const cased = file.letterCase === 'upper' ? plain.toUpperCase() : plain;
-    const kept = keepAllowed(signsInWords(cased, has), allowed);
-    return breakWords(kept, has('=')).replace(/ {2,}/g, ' ').trim();
+    const unread = breakWords(keepAllowed(cased, atFirst), has('='));
+    const kept = keepAllowed(signsInWords(unread, has), allowed);
+    return kept.replace(/ {2,}/g, ' ').trim();
   };
 }
 

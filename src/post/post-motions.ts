@@ -58,6 +58,7 @@ const FINISHING: Belongs = { pass: 'finishing', tooth: 1, depth: DEPTH };
 function lineSteps(feed: number): readonly Step[] {
   return [
     { kind: 'note', text: 'a square with a ramp' },
+    { kind: 'rapid', to: at(-4, -5, CLEAR + 2), belongs: ROUGHING },
     { kind: 'rapid', to: at(-5, -5, CLEAR), belongs: ROUGHING },
     { kind: 'line', to: at(-5, -5, 0.1), feed: feed / 2, belongs: ROUGHING },
     { kind: 'line', to: at(5, -5, DEPTH), feed, belongs: ROUGHING },
