@@ -78,45 +78,46 @@ function skin(text: JobText): JobProblem[] {
 function holes(text: JobText, wheel: WheelText): JobProblem[] {
   const bored = text.blank.bored ?? 0;
   const bore = wheel.bore ?? 0;
-  const unit = text.length ?? 'mm';
-  const problems: JobProblem[] = [];
+  const show = (mm: number): string => showLength(mm, text.length ?? 'mm');
   const through = holdingOf(text).filter((one) => one === 'arbor' || one === 'screw');
+  const problems: JobProblem[] = [];
   if (through.length > 0 && bored === 0) {
     const message = `${through.join(' and ')}: there is no hole that it could go through.`;
-    const hint = `Bore the blank first and say bored: ${bore > 0 ? showLength(bore, unit) : 'its diameter'}.`;
+    const hint = `Bore the blank first and say bored: ${bore > 0 ? show(bore) : 'its diameter'}.`;
     problems.push({ path: ['blank', 'bored'], message, hint });
   } else if (through.length > 0 && bore > bored) {
-    const message = `the bore of ${showLength(bore, unit)} cannot be cut: ${through.join(' and ')} fills the hole of ${showLength(bored, unit)}.`;
-    problems.push({
-      path: ['wheel', 'bore'],
-      message,
-      hint: 'Bore the blank to size first, or hold it with glue.',
-    });
+    const message = `the bore of ${show(bore)} cannot be cut: ${through.join(' and ')} fills the hole of ${show(bored)}.`;
+    const hint = 'Bore the blank to size first, or hold it with glue.';
+    problems.push({ path: ['wheel', 'bore'], message, hint });
   }
   if (bored > bore && bore > 0) {
-    const message = `the hole that is there, ${showLength(bored, unit)}, is larger than the bore, ${showLength(bore, unit)}.`;
+    const message = `the hole that is there, ${show(bored)}, is larger than the bore, ${show(bore)}.`;
     problems.push({ path: ['blank', 'bored'], message, hint: 'Measure both again; a bore can only grow.' });
   }
-  const holding = text.blank.holding;
-  for (const [i, one] of (typeof holding === 'string' ? [] : holding).entries()) {
-    if (typeof one !== 'string' && bored > 0 && one.screw.thread > bored) {
-      const message = `a thread of ${showLength(one.screw.thread, unit)} does not go through the hole of ${showLength(bored, unit)}.`;
-      problems.push({
-        path: ['blank', 'holding', i, 'screw', 'thread'],
-        message,
-        hint: 'Take a thinner screw.',
-      });
+  return [...problems, ...screws(text, Math.max(bored, bore), show)];
+}
+
+/** A screw goes through the hole, its head does not. */
+function screws({ blank }: JobText, hole: number, show: (mm: number) => string): JobProblem[] {
+  const held = typeof blank.holding === 'string' ? [] : blank.holding;
+  return held.flatMap((one, i) => {
+    if (typeof one === 'string' || hole === 0) {
+      return [];
     }
-    if (typeof one !== 'string' && one.screw.head <= Math.max(bored, bore)) {
-      const message = `a head of ${showLength(one.screw.head, unit)} goes through the hole of ${showLength(Math.max(bored, bore), unit)}.`;
-      problems.push({
-        path: ['blank', 'holding', i, 'screw', 'head'],
-        message,
-        hint: 'Put a washer under it and give its diameter.',
-      });
+    const { thread, head } = one.screw;
+    const path = ['blank', 'holding', i, 'screw'];
+    const problems: JobProblem[] = [];
+    if (thread > hole) {
+      const message = `a thread of ${show(thread)} does not go through the hole of ${show(hole)}.`;
+      problems.push({ path: [...path, 'thread'], message, hint: 'Take a thinner screw.' });
     }
-  }
-  return problems;
+    if (head <= hole) {
+      const message = `a head of ${show(head)} goes through the hole of ${show(hole)}.`;
+      const hint = 'Put a washer under it and give its diameter.';
+      problems.push({ path: [...path, 'head'], message, hint });
+    }
+    return problems;
+  });
 }
 
 function thickness(text: JobText, wheel: WheelText): JobProblem[] {

@@ -15,31 +15,44 @@ function deriveCutter(number: number, text: CutterText, notes: Notes): Cutter {
   const fill = <T>(given: T | undefined, key: string, value: T, why: string): T =>
     notes.fill(given, `cutters.${number}.${key}`, value, why);
   const { diameter } = text;
-  const reach = fill(
-    text.reach,
-    'reach',
-    text.flute ?? FLUTE_SHARE * diameter,
-    text.flute === undefined
-      ? 'twice the diameter, which almost any end mill has'
-      : 'no neck is known above the flute',
-  );
+  const lengths = lengthsOf(text, fill);
   const cutter = {
     number,
     nominal: diameter,
     diameter: fill(text.cuts, 'cuts', diameter, 'the size on the box; a test slot shows what it really cuts'),
     flutes: fill(text.flutes, 'flutes', 2, 'usual for end mills of this size'),
-    reach,
-    flute: fill(
-      text.flute,
-      'flute',
-      Math.min(reach, FLUTE_SHARE * diameter),
-      'twice the diameter, or the reach where that is shorter: short, so that it is not asked for too much',
-    ),
+    ...lengths,
     shank: fill(
       text.shank,
       'shank',
       shankOf(diameter),
       'the thickest that is usual, so that it strikes nothing',
+    ),
+    runout: fill(text.runout, 'runout', RUNOUT, 'usual for small collets; measure it with a dial gauge'),
+    plunges: fill(text.plunges, 'plunges', false, 'it may not cut over its centre'),
+  };
+  return text.helix === undefined ? cutter : { ...cutter, helix: text.helix };
+}
+
+type Fill = (given: number | undefined, key: string, value: number, why: string) => number;
+
+function lengthsOf(text: CutterText, fill: Fill): Pick<Cutter, 'reach' | 'flute' | 'stickOut'> {
+  const usual = FLUTE_SHARE * text.diameter;
+  const reach = fill(
+    text.reach,
+    'reach',
+    text.flute ?? usual,
+    text.flute === undefined
+      ? 'twice the diameter, as end mills have it'
+      : 'no neck is known above the flute',
+  );
+  return {
+    reach,
+    flute: fill(
+      text.flute,
+      'flute',
+      Math.min(reach, usual),
+      'twice the diameter, or the reach where that is shorter',
     ),
     stickOut: fill(
       text['stick-out'],
@@ -47,17 +60,10 @@ function deriveCutter(number: number, text: CutterText, notes: Notes): Cutter {
       reach + ABOVE_REACH,
       `${ABOVE_REACH} mm above the reach: set it so in the collet`,
     ),
-    runout: fill(
-      text.runout,
-      'runout',
-      RUNOUT,
-      'usual for the collets of small spindles; measure it with a dial gauge',
-    ),
-    plunges: fill(text.plunges, 'plunges', false, 'it may not cut over its centre'),
   };
-  return text.helix === undefined ? cutter : { ...cutter, helix: text.helix };
 }
 
+/** Short, so that not more is asked of a cutter than it has. */
 const FLUTE_SHARE = 2;
 const ABOVE_REACH = 12;
 /** From memory: 5 to 20 um at the collets of small spindles. */

@@ -8,8 +8,9 @@ import { failure, success, type Outcome, type Problem } from '../base/problem.ts
 import { readYaml, YAML_LARGEST } from '../base/read-yaml.ts';
 import type { LengthUnit } from '../base/units.ts';
 import { crossings } from '../tooth/crossings.ts';
-import { toothSide } from '../tooth/tooth-side.ts';
+import { toothSide, type ToothSide } from '../tooth/tooth-side.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
+import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 import { checkClearance } from './check-clearance.ts';
 import { checkCutters, checkOrder } from './check-cutters.ts';
 import { checkFit } from './check-fit.ts';
@@ -109,7 +110,6 @@ interface Ground {
 
 /** What needs the tooth's form. */
 function together(ground: Ground, wheel: WheelJob, before: readonly Problem[]): Outcome<Job> {
-  const { text, cutters, notes, unit } = ground;
   const form = wheelForm(wheel);
   const side = toothSide(wheel);
   if (!form.ok || !side.ok) {
@@ -119,35 +119,43 @@ function together(ground: Ground, wheel: WheelJob, before: readonly Problem[]): 
   const found = [
     ...before,
     ...form.problems,
-    ...checkWheel(text, wheel, form.value),
+    ...checkWheel(ground.text, wheel, form.value),
     ...(windows?.problems ?? []),
   ];
   if (found.some(({ severity }) => severity === 'error')) {
     return failure(found);
   }
+  const shapes = {
+    wheel,
+    form: form.value,
+    side: side.value,
+    windows: windows?.ok === true ? windows.value : undefined,
+  };
+  return success(fillIn(ground, shapes), found);
+}
+
+interface Shapes {
+  readonly wheel: WheelJob;
+  readonly form: WheelForm;
+  readonly side: ToothSide;
+  readonly windows: Crossings | undefined;
+}
+
+/** All that the job leaves open, from what is sound by now. */
+function fillIn({ file, text, unit, cutters, notes }: Ground, shapes: Shapes): Job {
   const skin = skinOf(text);
   const why = skin > 0 ? 'the skin is not cut' : 'clears the burr at the underside';
   const below = notes.fill(text.cuts?.below, 'cuts.below', skin > 0 ? 0 : BELOW, why);
-  const shared = { text, wheel, form: form.value, cutters, below };
-  const setup = deriveSetup(shared, notes);
-  const cuts = deriveCuts(
-    { ...shared, side: side.value, windows: windows?.ok === true ? windows.value : undefined },
-    notes,
-  );
-  const fit = {
-    unit,
-    wheel,
-    form: form.value,
-    windows: windows?.ok === true ? windows.value : undefined,
-    setup,
-    cuts,
-  };
-  const job: Job = {
-    name: nameOf(ground.file),
-    file: ground.file,
-    title: notes.fill(text.title, 'title', nameOf(ground.file), "the file's name"),
+  const ground = { text, ...shapes, cutters, below };
+  const setup = deriveSetup(ground, notes);
+  const cuts = deriveCuts(ground, notes);
+  const fit = { unit, ...shapes, setup, cuts };
+  return {
+    name: nameOf(file),
+    file,
+    title: notes.fill(text.title, 'title', nameOf(file), "the file's name"),
     length: notes.fill(text.length, 'length', unit, 'usual where nothing is said'),
-    wheel,
+    wheel: shapes.wheel,
     setup,
     zero: text.zero ?? 'top',
     machine: text.machine,
@@ -155,7 +163,6 @@ function together(ground: Ground, wheel: WheelJob, before: readonly Problem[]): 
     derived: notes.all(),
     misfits: [...checkFit(fit), ...checkClearance(fit)],
   };
-  return success(job, found);
 }
 
 /** How far under the wheel a cutter goes where nothing is said. Why: into what the blank is held on, past the burr. */
