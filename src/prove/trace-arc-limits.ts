@@ -20,9 +20,16 @@ export function arcMissAllowed(machine: Machine, unit: LengthUnit, radius: numbe
   return Math.max(absolute, Math.min(missShare * radius, missAtMost ?? Infinity));
 }
 
-/** Two units of the last digit, seen from the centre. */
+/**
+ * Rounding of an arc's ends, centre or radius, in units of the last digit. Why: in radius form at 120 degrees, the worst that
+ * is written, a chord sqrt(2) units off and a radius half a unit off turn it by sqrt(2) / cos 60 + tan 60 = 4.6 units.
+ */
+const ROUNDED_TURN_UNITS = 5;
+
+/** That rounding as an angle, seen from the centre. */
 function slack(machine: Machine, unit: LengthUnit, radius: number): number {
-  return (2 * millimetresPer(unit) * 10 ** -machine.words.numbers.lengthDecimals[unit]) / radius;
+  const last = millimetresPer(unit) * 10 ** -machine.words.numbers.lengthDecimals[unit];
+  return (ROUNDED_TURN_UNITS * last) / radius;
 }
 
 export function arcOutOfLimits(

@@ -13,7 +13,7 @@ import { compareMotion } from '../support/compare-motion.ts';
 import { randomMotion } from '../support/random-motion.ts';
 
 const SEED = 66025;
-const RUNS = 100;
+const RUNS = 60;
 
 const HEADER: HeaderFacts = {
   kind: 'cut',
@@ -68,9 +68,48 @@ function expectAsMeant(machine: Machine, motion: Motion): void {
   expect(compareMotion(motion, trace, machine), numbered()).toEqual([]);
 }
 
-describe.each(POSTS)('%s', (name) => {
-  const machine = post(name);
+/** Words that no machine file of posts/ has, or not in this company. */
+function variants(): readonly (readonly [string, Machine])[] {
+  const bench = post('bench-mill');
+  const desk = post('desk-three-axis');
+  const vary = (
+    machine: Machine,
+    words: { [G in keyof Machine['words']]?: Partial<Machine['words'][G]> },
+  ): Machine => ({
+    ...machine,
+    words: Object.fromEntries(
+      Object.entries(machine.words).map(([group, value]) => [
+        group,
+        { ...value, ...words[group as keyof Machine['words']] },
+      ]),
+    ) as unknown as Machine['words'],
+  });
+  return [
+    ['arcs by radius', vary(bench, { arcs: { centre: 'radius', longestSweep: 120, wholeCircle: 'split' } })],
+    ['centres from zero', vary(bench, { arcs: { centre: 'from-zero', centreWord: 'G90.1' } })],
+    ['circle feed, no helix', vary(bench, { arcs: { helix: false }, path: { helixFeedAlong: 'circle' } })],
+    ['home of all axes', vary(bench, { positions: { top: 'G28-all', topMachineZ: null } })],
+    [
+      'T alone, length with it',
+      vary(bench, { cutters: { words: 'T-only', lengthOffset: 'with-T', lengthCancel: 'none' } }),
+    ],
+    [
+      'T then M6, left-hand cutters',
+      vary(bench, { cutters: { words: 'T-then-M6' }, spindle: { forward: 'M4' } }),
+    ],
+    ['three decimals', vary(desk, { numbers: { lengthDecimals: { mm: 3, inch: 4 } } })],
+    ['no comments', vary(desk, { file: { commentForm: 'none' } })],
+    ['dwell by X', vary(desk, { dwell: { letter: 'X', unit: 'seconds' } })],
+    ['dwell by S', vary(desk, { dwell: { letter: 'S', unit: 'seconds' } })],
+  ];
+}
 
+const MACHINES: readonly (readonly [string, Machine])[] = [
+  ...POSTS.map((name) => [name, post(name)] as const),
+  ...variants(),
+];
+
+describe.each(MACHINES)('%s', (_, machine) => {
   it.each(postMotions(machine))('$name: $what', ({ motion }) => expectAsMeant(machine, motion));
 
   it(`random motions come back (seed ${String(SEED)})`, () => {
@@ -78,7 +117,7 @@ describe.each(POSTS)('%s', (name) => {
       fc.property(randomMotion(machine), (motion) => expectAsMeant(machine, motion)),
       { seed: SEED, numRuns: RUNS },
     );
-  });
+  }, 60_000);
 });
 
 describe('the comparison itself', () => {
