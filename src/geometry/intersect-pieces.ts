@@ -11,7 +11,7 @@ import { nearestOnPiece } from './nearest-on-piece.ts';
 import { pointOn } from './on-piece.ts';
 import type { ArcPiece, LinePiece, Piece } from './piece.ts';
 import { addScaled, cross, distance, dot, subtract, unit, type Point } from './point.ts';
-import { surroundOf, surroundsTouch } from './surround.ts';
+import { sleeveOf, sleevesTouch } from './sleeve.ts';
 
 export interface Meeting {
   readonly u: number;
@@ -19,7 +19,7 @@ export interface Meeting {
 }
 
 export function intersectPieces(a: Piece, b: Piece): Meeting[] {
-  if (!surroundsTouch(surroundOf(a), surroundOf(b))) {
+  if (!sleevesTouch(sleeveOf(a), sleeveOf(b))) {
     return [];
   }
   const found = [...endsOnOther(a, b), ...crossingsOf(a, b)];

@@ -60,7 +60,7 @@ export function offsetSector(sector: Chain, count: number, distance: number): Ou
   const { worst, at } = disagreement({
     corners: main.filter((corner) => within(corner, count, ground.far + 1.5 * Math.abs(distance))),
     rings: [main],
-    exact: chain.map(({ piece }) => piece),
+    chains: [chain.map(({ piece }) => piece)],
   });
   const pockets = rings.length - 1;
   return worst > 0 ? disagrees(distance, worst, at) : success({ chain, pockets });
@@ -84,7 +84,7 @@ export function offsetLoop(loop: Loop, distance: number): Outcome<readonly Loop[
   const parts = trimOffset({ raw, outline: loop, distance, knives: [], rings });
   const { loops, broken } = linkLoops(parts);
   const exact = loops.map((way) => mergeParts(way, raw, true).map(({ piece }) => piece));
-  const { worst, at } = disagreement({ corners: rings.flat(), rings, exact: exact.flat() });
+  const { worst, at } = disagreement({ corners: rings.flat(), rings, chains: exact });
   return worst > 0 || broken > 0 ? disagrees(distance, worst, at) : success(exact);
 }
 

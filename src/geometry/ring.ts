@@ -1,5 +1,6 @@
 /** Closed polygons (the last corner joins the first): area, inside, and the distance from a point. mm. */
 import type { Point } from './point.ts';
+import { distanceToSegment } from './sleeve.ts';
 
 /** Positive where the ring runs counter-clockwise. */
 export function ringArea(ring: readonly Point[]): number {
@@ -37,19 +38,11 @@ export function cleanRing(ring: readonly Point[]): Point[] {
 /** The least distance from a point to the edges of a ring. */
 export function distanceToRing(ring: readonly Point[], point: Point): number {
   let best = Infinity;
-  let a = ring.at(-1) as Point;
-  for (const b of ring) {
-    const dx = b.x - a.x;
-    const dy = b.y - a.y;
-    const ox = point.x - a.x;
-    const oy = point.y - a.y;
-    const along = (ox * dx + oy * dy) / (dx * dx + dy * dy || 1);
-    const u = along <= 0 ? 0 : along >= 1 ? 1 : along;
-    const ex = ox - u * dx;
-    const ey = oy - u * dy;
-    const square = ex * ex + ey * ey;
-    best = square < best ? square : best;
-    a = b;
+  let before = ring.at(-1) as Point;
+  for (const corner of ring) {
+    const off = distanceToSegment(point, before, corner);
+    best = off < best ? off : best;
+    before = corner;
   }
-  return Math.sqrt(best);
+  return best;
 }

@@ -12,7 +12,7 @@ import type { Chain, Piece } from './piece.ts';
 import { cross, distance as distanceOf, type Point } from './point.ts';
 import type { OffsetPiece } from './raw-offset.ts';
 import { distanceToRing } from './ring.ts';
-import { surroundOf, surroundsTouch, type Surround } from './surround.ts';
+import { distanceToSleeve, sleeveOf, sleevesTouch, type Sleeve } from './sleeve.ts';
 
 /** A part that remains. `raw` and `at` tell it from the other parts of its piece; ends are kept for the linking. */
 export interface Remaining extends OffsetPiece {
@@ -33,7 +33,7 @@ export interface Trim {
 
 export function trimOffset({ raw, outline, distance, knives, rings }: Trim): Remaining[] {
   const cuts = cutsOf(raw, knives);
-  const near = outline.map((piece) => ({ piece, round: surroundOf(piece) }));
+  const near = outline.map((piece) => ({ piece, sleeve: sleeveOf(piece) }));
   return raw.flatMap((offset, index) => {
     const places = cleanCuts(offset.piece, cuts[index] as number[]);
     return places.slice(1).flatMap((to, i) => {
@@ -50,14 +50,17 @@ export function trimOffset({ raw, outline, distance, knives, rings }: Trim): Rem
 /** For each raw piece the parameters at which it is cut, unsorted. */
 function cutsOf(raw: readonly OffsetPiece[], knives: Chain): number[][] {
   const cuts: number[][] = raw.map(() => [0, 1]);
-  const round = raw.map(({ piece }) => surroundOf(piece));
+  const sleeves = raw.map(({ piece }) => sleeveOf(piece));
+  const knifeSleeves = knives.map(sleeveOf);
   raw.forEach((a, i) => {
-    for (const knife of knives) {
-      cuts[i]?.push(...intersectPieces(a.piece, knife).map(({ u }) => u));
-    }
+    knives.forEach((knife, k) => {
+      if (sleevesTouch(sleeves[i] as Sleeve, knifeSleeves[k] as Sleeve)) {
+        cuts[i]?.push(...intersectPieces(a.piece, knife).map(({ u }) => u));
+      }
+    });
     for (let j = i + 1; j < raw.length; j++) {
       const b = raw[j] as OffsetPiece;
-      const far = !surroundsTouch(round[i] as Surround, round[j] as Surround);
+      const far = !sleevesTouch(sleeves[i] as Sleeve, sleeves[j] as Sleeve);
       if (far || tangentNeighbours(a.piece, b.piece) || tangentNeighbours(b.piece, a.piece)) {
         continue;
       }
@@ -102,12 +105,12 @@ function remainingPart(offset: OffsetPiece, raw: number, from: number, to: numbe
 }
 
 function nearerThan(
-  outline: readonly { readonly piece: Piece; readonly round: Surround }[],
+  outline: readonly { readonly piece: Piece; readonly sleeve: Sleeve }[],
   point: Point,
   limit: number,
 ): boolean {
   return outline.some(
-    ({ piece, round }) =>
-      distanceOf(round.centre, point) - round.radius < limit && nearestOnPiece(piece, point).distance < limit,
+    ({ piece, sleeve }) =>
+      distanceToSleeve(point, sleeve) < limit && nearestOnPiece(piece, point).distance < limit,
   );
 }

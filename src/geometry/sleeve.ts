@@ -1,0 +1,70 @@
+/**
+ * The chord of a piece and how far the piece may stray from it: to leave out what is far away before anything is reckoned
+ * exactly. A curve that turns by a lies within a triangle over its chord, whose height is at most chord / 2 tan(a/2). mm.
+ */
+import { SAME_POINT } from '../base/tolerances.ts';
+import { cycloidCusps } from './cycloid.ts';
+import { endOf, lengthOf, startOf, turnOf } from './on-piece.ts';
+import type { Piece } from './piece.ts';
+import { cross, distance, subtract, type Point } from './point.ts';
+
+export interface Sleeve {
+  readonly from: Point;
+  readonly to: Point;
+  readonly width: number;
+}
+
+export function sleeveOf(piece: Piece): Sleeve {
+  const from = startOf(piece);
+  const to = endOf(piece);
+  return { from, to, width: widthOf(piece, from, to) };
+}
+
+function widthOf(piece: Piece, from: Point, to: Point): number {
+  if (piece.kind === 'line') {
+    return 0;
+  }
+  const turn = turnOf(piece);
+  if (piece.kind === 'arc') {
+    return turn <= Math.PI ? piece.radius * (1 - Math.cos(turn / 2)) : 2 * piece.radius;
+  }
+  const smooth = turn < Math.PI / 2 && cycloidCusps(piece).length === 0;
+  // No point of a curve is further than half its length from the nearer end.
+  return smooth ? (distance(from, to) / 2) * Math.tan(turn / 2) : lengthOf(piece) / 2;
+}
+
+/** Whether the pieces inside may come within SAME_POINT of each other. */
+export function sleevesTouch(a: Sleeve, b: Sleeve): boolean {
+  const least = a.width + b.width + SAME_POINT;
+  return (
+    distanceToSegment(a.from, b.from, b.to) <= least ||
+    distanceToSegment(a.to, b.from, b.to) <= least ||
+    distanceToSegment(b.from, a.from, a.to) <= least ||
+    distanceToSegment(b.to, a.from, a.to) <= least ||
+    segmentsCross(a, b)
+  );
+}
+
+/** Never more than the distance from the point to the piece inside. */
+export function distanceToSleeve(point: Point, sleeve: Sleeve): number {
+  return distanceToSegment(point, sleeve.from, sleeve.to) - sleeve.width;
+}
+
+export function distanceToSegment(point: Point, from: Point, to: Point): number {
+  const dx = to.x - from.x;
+  const dy = to.y - from.y;
+  const ox = point.x - from.x;
+  const oy = point.y - from.y;
+  const along = (ox * dx + oy * dy) / (dx * dx + dy * dy || 1);
+  const u = along <= 0 ? 0 : along >= 1 ? 1 : along;
+  const ex = ox - u * dx;
+  const ey = oy - u * dy;
+  return Math.sqrt(ex * ex + ey * ey);
+}
+
+function segmentsCross(a: Sleeve, b: Sleeve): boolean {
+  const along = subtract(a.to, a.from);
+  const other = subtract(b.to, b.from);
+  const parted = cross(along, subtract(b.from, a.from)) > 0 !== cross(along, subtract(b.to, a.from)) > 0;
+  return parted && cross(other, subtract(a.from, b.from)) > 0 !== cross(other, subtract(a.to, b.from)) > 0;
+}
