@@ -5,9 +5,12 @@
  */
 
 /** No line may hold more words: a controller's line of 256 characters holds 128. */
-const MOST_WORDS = 512;
+const MOST_WORDS = 192;
 
 export interface LineWords {
+  /** The line's span in the text, line end not in it. */
+  start: number;
+  end: number;
   count: number;
   readonly letters: Uint8Array;
   readonly values: Float64Array;
@@ -35,6 +38,8 @@ export interface LineWords {
 
 export function emptyLineWords(): LineWords {
   return {
+    start: 0,
+    end: 0,
     count: 0,
     letters: new Uint8Array(MOST_WORDS),
     values: new Float64Array(MOST_WORDS),

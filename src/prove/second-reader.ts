@@ -38,6 +38,58 @@ export function secondReading(line: string, words: LineWords): string | undefine
   return undefined;
 }
 
+/**
+ * Whether the second reader finds, in lines that follow each other, the very words that ours found, in order. Every line
+ * begins with a letter, so none can lend a digit to another; only lines without comments, / and % are read so.
+ */
+export function secondReadingAgrees(
+  text: string,
+  lines: readonly LineWords[],
+  from: number,
+  to: number,
+): boolean {
+  const second = parseLine(text.slice(lines[from]?.start, lines[to - 1]?.end), COMPACT);
+  if (!ONLY_WORDS.test(second.line) || second.cmds !== undefined || second.err !== undefined) {
+    return false;
+  }
+  let at = 0;
+  let numbered = false;
+  for (let i = from; i < to; i++) {
+    const words = lines[i];
+    if (words === undefined) {
+      return false;
+    }
+    if (words.number >= 0) {
+      // Of several line numbers the library keeps the first apart and hands out the others as words.
+      if (numbered ? !isWord(second.words[at++], LETTER_N, words.number) : second.ln !== words.number) {
+        return false;
+      }
+      numbered = true;
+    }
+    for (let k = 0; k < words.count; k++) {
+      if (!isWord(second.words[at++], words.letters[k], words.values[k])) {
+        return false;
+      }
+    }
+  }
+  return at === second.words.length && (numbered || second.ln === undefined);
+}
+
+const LETTER_N = 78;
+
+function isWord(
+  word: readonly [letter: string, value: number | string] | undefined,
+  letter: number | undefined,
+  value: number | undefined,
+): boolean {
+  return (
+    word !== undefined &&
+    word[0].charCodeAt(0) === letter &&
+    typeof word[1] === 'number' &&
+    same(word[1], value)
+  );
+}
+
 /** Equal and finite; 0 and -0 are one place. */
 function same(a: number, b: number | undefined): boolean {
   return a === b && Number.isFinite(a);

@@ -33,6 +33,8 @@ export function tokenizeLine(
   into: LineWords,
 ): void {
   clearLineWords(into);
+  into.start = start;
+  into.end = end;
   let at = start;
   if (at < end && text.charCodeAt(at) === SLASH) {
     into.skipped = true;

@@ -26,7 +26,8 @@ export interface FileState {
 const LAST_NUMBER = 99999;
 
 /** What the controller could not load of this line as it is written. */
-export function checkLine(run: Run, text: string, start: number, end: number, words: LineWords): void {
+export function checkLine(run: Run, text: string, words: LineWords): void {
+  const { start, end } = words;
   const { file } = run.machine.words;
   if (end - start > file.lineLongest) {
     const message = `a line of ${String(end - start)} characters; this machine holds ${String(file.lineLongest)}`;
@@ -36,11 +37,12 @@ export function checkLine(run: Run, text: string, start: number, end: number, wo
     remark(run, 'prove.file', 'error', 'small letters in words; this machine reads capitals only', 'small');
   }
   if (words.comments.length > 0) {
-    checkComments(run, text, start, end, words);
+    checkComments(run, text, words);
   }
 }
 
-function checkComments(run: Run, text: string, start: number, end: number, words: LineWords): void {
+function checkComments(run: Run, text: string, words: LineWords): void {
+  const { start, end } = words;
   const { file } = run.machine.words;
   if (file.commentOwnLine && (words.count > 0 || words.number >= 0)) {
     remark(

@@ -9,19 +9,15 @@
 import type { Machine } from '../machine/machine.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
 import { emptyBlock, sortWords, type Block } from './block.ts';
-import { emptyLineWords, type LineWords } from './line-words.ts';
+import type { LineWords } from './line-words.ts';
 import { codesOf, M_GROUP } from './modes-codes.ts';
 import { NOWHERE, powerOn, type FinalModes } from './modes.ts';
 import type { Finding } from './proof.ts';
-import { secondReading } from './second-reader.ts';
-import { tokenizeLine } from './tokenize.ts';
+import { emptyAhead, readAhead } from './read-ahead.ts';
 import { runBlock } from './trace-block.ts';
 import { handsDone, readComments, type ByHand } from './trace-comments.ts';
 import { checkEnd, checkLine, checkNumber, readLabel, readPercent, type FileState } from './trace-file.ts';
 import { countRemarks, unread, type Refusal, type Run, type TracedEvent } from './trace-run.ts';
-
-const LINE_FEED = 10;
-const RETURN = 13;
 
 export interface Trace {
   readonly file: string;
@@ -84,52 +80,41 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
 
 /** Reads until the program ends or a line is refused; says whether it came to the end. */
 function readLines(run: Run, text: string, start: TraceStart, state: FileState): boolean {
-  const words = emptyLineWords();
+  const ahead = emptyAhead();
   const block = emptyBlock();
   const byHand: ByHand = { cutter: undefined, speed: undefined };
   const { commentForm } = run.machine.words.file;
   let at = 0;
+  let rest = 0;
   while (at < text.length && !state.ended) {
-    const end = lineEnd(text, at);
-    run.line += 1;
-    tokenizeLine(text, at, end, commentForm, words);
-    const refused =
-      checkWords(run, text, at, end, words, state) ?? readLine(run, words, block, start, state, byHand);
-    if (refused !== undefined) {
-      run.findings.push({ ...refused, severity: 'error', file: run.file, line: run.line });
-      return false;
+    at = readAhead(text, at, commentForm, ahead);
+    for (let i = 0; i < ahead.count && !state.ended; i++) {
+      const words = ahead.lines[i];
+      if (words === undefined) {
+        break;
+      }
+      run.line += 1;
+      rest = words.end;
+      const refused =
+        checkWords(run, text, words, state, ahead.differs === i ? ahead.how : undefined) ??
+        readLine(run, words, block, start, state, byHand);
+      if (refused !== undefined) {
+        run.findings.push({ ...refused, severity: 'error', file: run.file, line: run.line });
+        return false;
+      }
     }
-    at = afterLineEnd(text, end);
   }
-  checkEnd(run, state, text.slice(at));
+  checkEnd(run, state, text.slice(rest));
   return true;
-}
-
-function lineEnd(text: string, from: number): number {
-  let at = from;
-  while (at < text.length) {
-    const code = text.charCodeAt(at);
-    if (code === LINE_FEED || code === RETURN) {
-      break;
-    }
-    at += 1;
-  }
-  return at;
-}
-
-/** CR LF is one line end. */
-function afterLineEnd(text: string, end: number): number {
-  return text.charCodeAt(end) === RETURN && text.charCodeAt(end + 1) === LINE_FEED ? end + 2 : end + 1;
 }
 
 /** Whether the line's words are certain: ours could split it, the file may hold it, and a second reader agrees. */
 function checkWords(
   run: Run,
   text: string,
-  start: number,
-  end: number,
   words: LineWords,
   state: FileState,
+  differs: string | undefined,
 ): Refusal | undefined {
   if (words.fault !== undefined) {
     return unread(`column ${String(words.faultColumn)}: ${words.fault}`);
@@ -138,17 +123,13 @@ function checkWords(
     state.alone += 1;
     return undefined;
   }
-  if (words.count === 0 && words.number < 0 && words.comments.length === 0) {
-    return undefined;
-  }
-  checkLine(run, text, start, end, words);
+  checkLine(run, text, words);
   if (words.number >= 0) {
     const refused = checkNumber(run, words);
     if (refused !== undefined) {
       return refused;
     }
   }
-  const differs = secondReading(text.slice(words.skipped ? start + 1 : start, end), words);
   return differs === undefined ? undefined : { code: 'prove.readers-disagree', message: differs };
 }
 

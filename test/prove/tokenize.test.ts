@@ -2,7 +2,8 @@
 import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { emptyLineWords } from '../../src/prove/line-words.ts';
-import { secondReading } from '../../src/prove/second-reader.ts';
+import { emptyAhead, readAhead } from '../../src/prove/read-ahead.ts';
+import { secondReading, secondReadingAgrees } from '../../src/prove/second-reader.ts';
 import { tokenizeLine } from '../../src/prove/tokenize.ts';
 
 const words = emptyLineWords();
@@ -116,5 +117,50 @@ describe('the second reader', () => {
     expect(secondReading('G1 Y1.5', words)).toMatch(/Y1.5/);
     expect(secondReading('G1', words)).toMatch(/1 words, not 2/);
     expect(secondReading('N5 G1 X1.5', words)).toMatch(/number/);
+  });
+});
+
+describe('lines read ahead', () => {
+  const text = ['N10 G1 X1', 'Y2 X-0.5', '', 'N30G2 X4I5', 'N40', '  Z 1. 5 '].join('\n');
+
+  it('are split one by one and agreed about together', () => {
+    const ahead = emptyAhead();
+    expect(readAhead(text, 0, 'brackets', ahead)).toBeGreaterThanOrEqual(text.length);
+    expect([ahead.count, ahead.differs]).toEqual([6, -1]);
+    expect(secondReadingAgrees(text, ahead.lines, 0, 6)).toBe(true);
+  });
+
+  it.each([
+    ['a place', 'X-0.5', 'X-0.6'],
+    ['a letter', 'Y2', 'Z2'],
+    ['a number of a line', 'N30', 'N31'],
+    ['the first number of a line', 'N10', 'N11'],
+    ['a word more', 'I5', 'I5J1'],
+    ['a word less', 'X4', '  '],
+    ['what is no word', 'X4', '[4'],
+  ])('%s read otherwise is seen', (_, ours, theirs) => {
+    const ahead = emptyAhead();
+    const end = readAhead(text, 0, 'brackets', ahead);
+    expect(end).toBeGreaterThan(0);
+    const other = text.replace(ours, theirs);
+    const last = ahead.lines[5];
+    if (last !== undefined) {
+      last.end += other.length - text.length;
+    }
+    expect(secondReadingAgrees(other, ahead.lines, 0, 6)).toBe(false);
+  });
+
+  it('gives a line of its own the blame, with its number', () => {
+    const ahead = emptyAhead();
+    readAhead('G1 X1\nG1 X2\nG1 X3', 0, 'brackets', ahead);
+    expect(ahead.differs).toBe(-1);
+    const lines = Array.from({ length: 100 }, (_, i) => `X${String(i)}`).join('\r\n');
+    let at = 0;
+    let count = 0;
+    while (at < lines.length) {
+      at = readAhead(lines, at, 'brackets', ahead);
+      count += ahead.count;
+    }
+    expect(count).toBe(100);
   });
 });
