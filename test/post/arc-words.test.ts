@@ -1,6 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { failure } from '../../src/base/problem.ts';
 import type { ArcStep, Position } from '../../src/motion/motion.ts';
+import { arcOnGrid } from '../../src/post/arc-on-grid.ts';
+import { programGrid } from '../../src/post/program-grid.ts';
 import { writeProgram } from '../../src/post/write-program.ts';
 import { headerFacts } from '../support/header-facts.ts';
 import { changedMachine, postMachine } from '../support/post-machines.ts';
@@ -113,6 +115,13 @@ describe('arcs after rounding', () => {
       blocks.findLast((block) => block.includes(letter))?.match(new RegExp(`${letter}(\\S+)`))?.[1] ?? '';
     expect(Number(last('X'))).toBeCloseTo(from.x, 4);
     expect(Number(last('Y'))).toBeCloseTo(from.y, 4);
+  });
+
+  it('is a line where the start, as written, has passed the end: the controller would turn nearly all the way round', () => {
+    const step = arc(start, about, 0.01);
+    const past = { x: 30000, y: 25, z: -10000 };
+    const moves = arcOnGrid(programGrid(bench), bench.words.arcs, start, past, step);
+    expect(moves).toEqual([{ kind: 'line', x: 30000, y: 5, z: -10000 }]);
   });
 
   it('almost a whole circle is halved where its ends nearly meet', () => {

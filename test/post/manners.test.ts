@@ -86,6 +86,24 @@ it('writes all modes again after hands were at the machine, units among them, so
   }
 });
 
+it('goes to the top before the spindle turns again, as hands may have left the cutter low', () => {
+  const stop = postMotions(bench).find(({ name }) => name === 'changes');
+  const lines = blocks(writeOne(bench, stop?.motion ?? { steps: [] }).text);
+  const stopped = lines.findIndex((line) => line === 'M0');
+  const after = lines.slice(stopped + 1);
+  expect(stopped).toBeGreaterThan(0);
+  expect(after.findIndex((line) => line.startsWith('G53 G0 Z'))).toBeLessThan(after.indexOf('M3'));
+  expect(after.findIndex((line) => line.startsWith('G53 G0 Z'))).toBeGreaterThanOrEqual(0);
+});
+
+it('asks for the cutter to be raised where the machine has no top of its own', () => {
+  const machine = postMachine('lines-only');
+  const stop = postMotions(machine).find(({ name }) => name === 'changes');
+  expect(writeOne(machine, stop?.motion ?? { steps: [] }).text).toMatch(
+    /RAISE THE CUTTER TO HEIGHT 5\.000 MM OR\r\n;ABOVE, OVER A FREE PLACE\r\nM00/,
+  );
+});
+
 it('divides the program where pass, lap or tooth change, and only there', () => {
   const at = (x: number, belongs: Belongs): Step => ({
     kind: 'line',
