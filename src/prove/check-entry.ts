@@ -4,7 +4,7 @@
  */
 import { degrees, radians } from '../base/units.ts';
 import { materialNamed } from '../cutting/materials.ts';
-import { eachMove, type EachMove } from './each-move.ts';
+import type { TracedMove } from '../motion/traced-move.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, gathered, lengthText } from './finding-at.ts';
 import { isCleared } from './metal-cover.ts';
@@ -14,40 +14,40 @@ import type { Finding } from './proof.ts';
 const GENTLEST = 1;
 
 export function checkEntry(evidence: Evidence): Finding[] {
-  return gathered(eachMove(evidence).flatMap((each) => entryFinding(evidence, each) ?? []));
+  const { solids, input, lastDigit } = evidence;
+  const findings: Finding[] = [];
+  for (let i = 0; i < solids.length; i++) {
+    const { z0, z1, move } = solids[i]!;
+    if (z1 < z0 && z1 < input.setup.topZ - lastDigit && move.kind !== 'rapid') {
+      findings.push(...entryFinding(evidence, i));
+    }
+  }
+  return gathered(findings);
 }
 
-function entryFinding(evidence: Evidence, each: EachMove): Finding | undefined {
-  const { move, path, before } = each;
+/** Of move i, that goes down below the top. */
+function entryFinding(evidence: Evidence, i: number): Finding[] {
   const { setup } = evidence.input;
-  if (move.kind === 'rapid' || path < 0) {
-    return undefined;
-  }
-  const { x0, y0, z0, x1, y1, z1, radius } = evidence.solids[path]!;
+  const { move, x0, y0, z0, x1, y1, z1, radius } = evidence.solids[i]!;
   const fall = z0 - z1;
-  if (fall <= 0 || z1 >= setup.topZ - evidence.lastDigit) {
-    return undefined;
-  }
-  const length = 2 * evidence.paths.bound[path]!;
-  const flat = move.turn === undefined ? Math.hypot(x1 - x0, y1 - y0) : arcLength(evidence, path, length);
+  const flat = move.turn === undefined ? Math.hypot(x1 - x0, y1 - y0) : arcLength(evidence, i);
   const ramp = materialNamed(setup.material)?.ramp ?? GENTLEST;
   const allowed = flat * Math.tan(radians(ramp)) + 2 * evidence.lastDigit;
   if (fall <= allowed || (flat === 0 && evidence.cutterOf(move)?.plunges === true)) {
-    return undefined;
+    return [];
   }
   const stands = { x: x1, y: y1, z: z1, radius };
-  if (isCleared(evidence.paths, before, setup, stands, evidence.lastDigit)) {
-    return undefined;
+  if (isCleared(evidence.paths, i, setup, stands, evidence.lastDigit)) {
+    return [];
   }
-  return flat === 0 ? plunge(evidence, each, z1) : steep(each, fall, flat, ramp);
+  return [flat === 0 ? plunge(evidence, move, z1) : steep(move, fall, flat, ramp)];
 }
 
-function arcLength({ paths }: Evidence, path: number, fallback: number): number {
-  const length = paths.arc[path]! * Math.abs(paths.turn[path]!);
-  return length > 0 ? length : fallback;
+function arcLength({ paths }: Evidence, i: number): number {
+  return paths.arc[i]! * Math.abs(paths.turn[i]!);
 }
 
-function plunge(evidence: Evidence, { move }: EachMove, z: number): Finding {
+function plunge(evidence: Evidence, move: TracedMove, z: number): Finding {
   const cutter = evidence.cutterOf(move);
   return findingAt(move, {
     code: 'prove.plunge',
@@ -57,7 +57,7 @@ function plunge(evidence: Evidence, { move }: EachMove, z: number): Finding {
   });
 }
 
-function steep({ move }: EachMove, fall: number, flat: number, ramp: number): Finding {
+function steep(move: TracedMove, fall: number, flat: number, ramp: number): Finding {
   const angle = degrees(Math.atan2(fall, flat));
   return findingAt(move, {
     code: 'prove.ramp',

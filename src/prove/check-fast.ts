@@ -3,7 +3,7 @@
  * Above it anything may, once Z is known to be there.
  */
 import { FORM_ERROR } from '../base/tolerances.ts';
-import { eachMove, type EachMove } from './each-move.ts';
+import type { EachMove } from './each-move.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, gathered, lengthText } from './finding-at.ts';
 import { isCleared } from './metal-cover.ts';
@@ -13,7 +13,7 @@ import type { Finding } from './proof.ts';
 const GAP = 10 * FORM_ERROR;
 
 export function checkFast(evidence: Evidence): Finding[] {
-  const fast = eachMove(evidence).filter(({ move }) => move.kind === 'rapid');
+  const fast = evidence.each.filter(({ move }) => move.kind === 'rapid');
   return gathered(
     fast.flatMap((each) => {
       const message = sideways(evidence, each) ?? downwards(evidence, each);

@@ -9,12 +9,15 @@ import { loosePiece, type Piece } from './loose-piece.ts';
 import { wheelBody } from './metal-inside.ts';
 import { blankRaster, cutRaster, type Raster } from './metal-raster.ts';
 import type { Finding } from './proof.ts';
-import type { SolidMove } from './metal-paths.ts';
+import type { PathSet, SolidMove } from './metal-paths.ts';
+import { twinOf } from './metal-twins.ts';
 
 /** Squares from the axis to the edge of what is looked at: what a wheel needs so that its spaces are seen. */
-const SQUARES = 200;
+const SQUARES = 150;
 /** mm; finer shows nothing that matters. */
 const FINEST = 0.06;
+/** A slot is at least this many squares wide. */
+const ACROSS = 3;
 /** A slot deeper than this share of the diameter breaks small cutters, whatever the material. */
 const DEEPEST_BITE = 1.05;
 
@@ -25,26 +28,33 @@ export function checkLoose(evidence: Evidence): Finding[] {
     return [];
   }
   const reach = cutReach(evidence, target.form.outsideRadius);
-  const raster = blankRaster(setup, reach, Math.max(FINEST, reach / SQUARES));
+  const raster = blankRaster(setup, reach, squareSize(evidence, reach));
+  const cutting: Cutting = { raster, known: new Map(), height: new Map(), waiting: new Set() };
   const body = wheelBody(target.form, target.bore, target.crossings);
   const through = setup.plateZ + lastDigit;
-  const worst: { bite: number; share: number; solid?: SolidMove } = { bite: 0, share: DEEPEST_BITE };
+  const worst: Bite = { bite: 0, share: DEEPEST_BITE };
   const loose: Finding[] = [];
   let cutThrough = false;
   for (let i = 0; i < solids.length && loose.length === 0; i++) {
     const solid = solids[i]!;
     if (solid.move.kind !== 'rapid') {
-      takeBite(raster, evidence, i, worst);
+      takeBite(cutting, evidence, i, worst);
       cutThrough ||= Math.min(solid.z0, solid.z1) <= through;
     }
     const lifts = solid.z1 > setup.topZ || i === solids.length - 1;
     if (cutThrough && lifts) {
       cutThrough = false;
+      drawWaiting(cutting, evidence.paths);
       const piece = loosePiece(raster, body, through, setup.shape.kind === 'sheet');
       loose.push(...(piece === undefined ? [] : [cameLoose(solid, piece)]));
     }
   }
   return [...loose, ...(worst.solid === undefined ? [] : [tooDeep(worst.solid, worst.bite)])];
+}
+
+function squareSize({ input }: Evidence, reach: number): number {
+  const narrowest = Math.min(...input.setup.cutters.map(({ diameter }) => diameter));
+  return Math.max(FINEST, Math.min(reach / SQUARES, narrowest / ACROSS));
 }
 
 /** How far from the axis anything is cut, and a little more, so that the sheet's edge is seen round it. */
@@ -59,21 +69,50 @@ function cutReach({ input, solids, paths, lastDigit }: Evidence, wheel: number):
   return reach;
 }
 
-function takeBite(
-  raster: Raster,
-  { paths, solids }: Evidence,
-  i: number,
-  worst: { bite: number; share: number; solid?: SolidMove },
-): void {
+interface Bite {
+  bite: number;
+  share: number;
+  solid?: SolidMove;
+}
+
+/** What has been run, so that a lap that repeats another need not be drawn again at once. */
+interface Cutting {
+  readonly raster: Raster;
+  readonly known: Map<number, number[]>;
+  /** Height each path has been cut down to. */
+  readonly height: Map<number, number>;
+  /** Paths whose height the raster does not show yet. */
+  readonly waiting: Set<number>;
+}
+
+function takeBite(cutting: Cutting, { paths, solids }: Evidence, i: number, worst: Bite): void {
   const solid = solids[i]!;
   // A fall is taken at its upper end: what is left is never said to be less than it is.
-  const bite = cutRaster(raster, paths, i, Math.max(solid.z0, solid.z1));
+  const z = Math.max(solid.z0, solid.z1);
+  const twin = twinOf(paths, cutting.known, i);
+  const was = twin < 0 ? undefined : cutting.height.get(twin);
+  let bite: number;
+  if (was === undefined) {
+    drawWaiting(cutting, paths);
+    bite = cutRaster(cutting.raster, paths, i, z);
+  } else {
+    bite = was - z;
+    cutting.waiting.add(twin);
+  }
+  cutting.height.set(twin < 0 ? i : twin, Math.min(z, was ?? z));
   const share = bite / (2 * solid.radius);
   if (share > worst.share) {
     worst.bite = bite;
     worst.share = share;
     worst.solid = solid;
   }
+}
+
+function drawWaiting({ raster, height, waiting }: Cutting, paths: PathSet): void {
+  for (const path of waiting) {
+    cutRaster(raster, paths, path, height.get(path) ?? Infinity);
+  }
+  waiting.clear();
 }
 
 function cameLoose(solid: SolidMove, { x, y, area }: Piece): Finding {

@@ -1,6 +1,5 @@
 /** Travel: where zero lies in the machine's own coordinates every place must be within its ends; else only the size is judged. */
 import type { Evidence } from './evidence.ts';
-import { extentsOf } from './extents.ts';
 import { findingAt, lengthText } from './finding-at.ts';
 import type { Finding } from './proof.ts';
 
@@ -8,8 +7,8 @@ export function checkTravel(evidence: Evidence): Finding[] {
   return (['x', 'y', 'z'] as const).flatMap((axis) => axisFindings(evidence, axis));
 }
 
-function axisFindings({ input, moves, lastDigit }: Evidence, axis: 'x' | 'y' | 'z'): Finding[] {
-  const [low, high] = extentsOf(moves)[axis];
+function axisFindings({ input, moves, extents, lastDigit }: Evidence, axis: 'x' | 'y' | 'z'): Finding[] {
+  const [low, high] = extents[axis];
   const [first, last] = input.machine.limits.travel[axis];
   const zero = input.setup.zeroAt?.[axis];
   const name = axis.toUpperCase();

@@ -12,7 +12,7 @@ import type { Field, Readings } from './deviation-measure.ts';
 import { worseTooth, type WorstTooth } from './deviation-plot.ts';
 import { REGION } from './deviation-stations.ts';
 import { rootFactor, toothRing, toothStations } from './deviation-tooth.ts';
-import { pathsBelow, type SolidMove } from './metal-paths.ts';
+import { pathsBelow, type PathSet, type SolidMove } from './metal-paths.ts';
 import type { DepthFigures } from './proof.ts';
 import { NO_ROLLING, readRollingLaw, rollingLaw, type RollingReading } from './rolling-law.ts';
 
@@ -40,6 +40,8 @@ const LEVELS = 4;
 
 export function toothFigures(
   solids: readonly SolidMove[],
+  /** Their paths below the wheel's top and bottom. */
+  set: PathSet,
   form: WheelForm,
   cutterDiameter: number,
   heights: Heights,
@@ -57,7 +59,7 @@ export function toothFigures(
   };
   const bottom = heights.bottom + heights.slack;
   const top = heights.top - heights.slack;
-  const edges = measureContour(pathsBelow(solids, bottom, top), stations, ring, farthest, readCopy);
+  const edges = measureContour(set, stations, ring, farthest, readCopy);
   const at = (z: number): ContourFigures =>
     measureContour(pathsBelow(solids, z, z), stations, ring, farthest).low;
   const low = depthFigures(heights.bottom, edges.low);

@@ -41,13 +41,15 @@ export interface Stations {
   readonly beyond: Float64Array;
 }
 
-/** mm of cutter path from one station to the next: several to each arc or facet of a fitted path at any scale in use. */
-const SPACING = 0.02;
+/** mm of cutter path from one station to the next along a cycloid: several to each arc or facet of a fitted path. */
+const SPACING = 0.025;
+/** Lines and arcs are cut by lines and arcs; only where a machine has no arcs are there facets, and those are longer. */
+const PLAIN_SPACING = 0.06;
 const FEWEST = 5;
 const MOST = 400;
 
 export function placeStations(pieces: readonly StationPiece[], cutterRadius: number): Stations {
-  const counts = pieces.map(({ piece }) => stationCount(piece, cutterRadius));
+  const counts = pieces.map((entry) => stationCount(entry, cutterRadius));
   const count = counts.reduce((sum, n) => sum + n, 0);
   const field = (): Float64Array => new Float64Array(count);
   const stations = {
@@ -91,9 +93,10 @@ export function stationAt(piece: Piece, u: number): { x: number; y: number; nx: 
   return { x: point.x, y: point.y, nx: heading.y, ny: -heading.x };
 }
 
-function stationCount(piece: Piece, cutterRadius: number): number {
+function stationCount({ piece }: StationPiece, cutterRadius: number): number {
+  const spacing = piece.kind === 'cycloid' ? SPACING : PLAIN_SPACING;
   const path = lengthOf(piece) + cutterRadius * turningOf(piece);
-  return Math.min(MOST, Math.max(FEWEST, Math.ceil(path / SPACING) + 1));
+  return Math.min(MOST, Math.max(FEWEST, Math.ceil(path / spacing) + 1));
 }
 
 /** How far the heading turns along a piece, radians. */

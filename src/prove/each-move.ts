@@ -3,7 +3,8 @@
  * before it, and whether the spindle stood at the machine's top when its Z is not known.
  */
 import type { TracedMove } from '../motion/traced-move.ts';
-import type { Evidence } from './evidence.ts';
+import type { SolidMove } from './metal-paths.ts';
+import type { Trace } from './trace-program.ts';
 
 export interface EachMove {
   readonly move: TracedMove;
@@ -15,7 +16,7 @@ export interface EachMove {
   readonly atTop: boolean;
 }
 
-export function eachMove({ traces, solids }: Evidence): EachMove[] {
+export function eachMove(traces: readonly Trace[], solids: readonly SolidMove[]): EachMove[] {
   const moves: EachMove[] = [];
   let before = 0;
   for (const { moves: own, events } of traces) {

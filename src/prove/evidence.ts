@@ -5,6 +5,8 @@
 import { millimetresPer } from '../base/units.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
+import { eachMove, type EachMove } from './each-move.ts';
+import { extentsOf, type Extents } from './extents.ts';
 import { pathsBelow, solidMoves, type PathSet, type SolidMove } from './metal-paths.ts';
 import type { ProofInput } from './proof.ts';
 import type { Trace } from './trace-program.ts';
@@ -18,6 +20,8 @@ export interface Evidence {
   readonly solids: readonly SolidMove[];
   /** Their paths, whole and in the same order. */
   readonly paths: PathSet;
+  readonly extents: Extents;
+  readonly each: readonly EachMove[];
   readonly cutterOf: (move: TracedMove) => Cutter | undefined;
   /** One unit of the last digit the machine file writes, mm. */
   readonly lastDigit: number;
@@ -42,5 +46,16 @@ export function gatherEvidence(input: ProofInput, traces: readonly Trace[]): Evi
       ? undefined
       : wheelFigures(input.target, input.setup, solids, lastDigit);
   const paths = pathsBelow(solids, Infinity, Infinity);
-  return { input, traces, moves, solids, paths, cutterOf, lastDigit, figures };
+  return {
+    input,
+    traces,
+    moves,
+    solids,
+    paths,
+    extents: extentsOf(moves),
+    each: eachMove(traces, solids),
+    cutterOf,
+    lastDigit,
+    figures,
+  };
 }

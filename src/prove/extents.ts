@@ -18,6 +18,8 @@ export function extentsOf(moves: Iterable<TracedMove>): Extents {
       high[axis] = Math.max(high[axis]!, value);
     }
   };
+  const isWithin = (left: number, right: number, front: number, back: number): boolean =>
+    left >= low[0]! && right <= high[0]! && front >= low[1]! && back <= high[1]!;
   for (const move of moves) {
     for (const { x, y, z } of [move.from, move.to]) {
       take(0, x);
@@ -25,7 +27,7 @@ export function extentsOf(moves: Iterable<TracedMove>): Extents {
       take(2, z);
     }
     if (move.turn !== undefined) {
-      takeArc(move, take);
+      takeArc(move, take, isWithin);
     }
   }
   const range = (axis: number): Range => (low[axis]! > high[axis]! ? [0, 0] : [low[axis]!, high[axis]!]);
@@ -33,11 +35,18 @@ export function extentsOf(moves: Iterable<TracedMove>): Extents {
 }
 
 /** The quarters that an arc passes: there it reaches furthest. */
-function takeArc({ from, centre, turn }: TracedMove, take: (axis: number, value: number) => void): void {
+function takeArc(
+  { from, centre, turn }: TracedMove,
+  take: (axis: number, value: number) => void,
+  isWithin: (left: number, right: number, low: number, high: number) => boolean,
+): void {
   if (centre === undefined || turn === undefined || from.x === null || from.y === null) {
     return;
   }
-  const radius = Math.hypot(from.x - centre.x, from.y - centre.y);
+  const radius = Math.sqrt((from.x - centre.x) ** 2 + (from.y - centre.y) ** 2);
+  if (isWithin(centre.x - radius, centre.x + radius, centre.y - radius, centre.y + radius)) {
+    return;
+  }
   const start = Math.atan2(from.y - centre.y, from.x - centre.x);
   const [low, high] = turn < 0 ? [start + turn, start] : [start, start + turn];
   const quarter = Math.PI / 2;

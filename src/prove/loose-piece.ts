@@ -1,6 +1,8 @@
 /**
- * Pieces of metal by squares that touch along a side or a corner, of all that is not cut through. The sheet's edge and what
- * lies inside the exact wheel are not loose.
+ * Pieces of metal that are cut free: squares that are not cut through, joined along sides and corners. The sheet's edge and
+ * what lies inside the exact wheel are not loose.
+ *
+ * Row by row, squares that lie side by side are one run; runs of neighbouring rows that touch are joined (union-find).
  */
 import { isInsideWheel, type WheelBody } from './metal-inside.ts';
 import type { Raster } from './metal-raster.ts';
@@ -13,8 +15,15 @@ export interface Piece {
   readonly area: number;
 }
 
-/** One square may be a ridge between two cuts, which goes as a chip. */
+/** One square or two may be a ridge between two cuts, which goes as a chip. */
 const FEWEST = 3;
+
+interface Run {
+  readonly row: number;
+  readonly from: number;
+  /** One past the last. */
+  readonly to: number;
+}
 
 /** The largest loose piece, if there is one. */
 export function loosePiece(
@@ -23,53 +32,92 @@ export function loosePiece(
   through: number,
   isSheet: boolean,
 ): Piece | undefined {
-  const { size, columns, left } = raster;
-  const seen = new Uint8Array(left.length);
-  const stack = new Int32Array(left.length);
-  let worst: Piece | undefined;
-  for (let start = 0; start < left.length; start++) {
-    if (seen[start] === 1 || left[start]! <= through) {
-      continue;
+  const runs = runsOf(raster, through);
+  const root = joinRuns(runs);
+  const count = new Map<number, number>();
+  const held = new Set<number>();
+  runs.forEach((run, k) => {
+    const piece = root(k);
+    count.set(piece, (count.get(piece) ?? 0) + run.to - run.from);
+    if (isSheet && isAtEdge(raster, run)) {
+      held.add(piece);
     }
-    const { count, held } = flood(raster, body, through, isSheet, start, seen, stack);
-    const area = count * size * size;
-    if (!held && count >= FEWEST && area > (worst?.area ?? 0)) {
-      const column = start % columns;
-      worst = { x: raster.x0 + column * size, y: raster.y0 + ((start - column) / columns) * size, area };
+  });
+  runs.forEach((run, k) => {
+    if (!held.has(root(k)) && isInWheel(raster, body, run)) {
+      held.add(root(k));
     }
-  }
-  return worst;
+  });
+  return largestOf(raster, runs, count, held);
 }
 
-function flood(
-  raster: Raster,
-  body: WheelBody,
-  through: number,
-  isSheet: boolean,
-  start: number,
-  seen: Uint8Array,
-  stack: Int32Array,
-): { count: number; held: boolean } {
-  const { size, columns, rows, x0, y0, left } = raster;
-  let [count, top, held] = [0, 0, false];
-  stack[top++] = start;
-  seen[start] = 1;
-  while (top > 0) {
-    const at = stack[--top]!;
-    const column = at % columns;
-    const row = (at - column) / columns;
-    count += 1;
-    const edge = column === 0 || row === 0 || column === columns - 1 || row === rows - 1;
-    held ||= (isSheet && edge) || isInsideWheel(body, x0 + column * size, y0 + row * size);
-    for (let r = Math.max(0, row - 1); r <= Math.min(rows - 1, row + 1); r++) {
-      for (let c = Math.max(0, column - 1); c <= Math.min(columns - 1, column + 1); c++) {
-        const next = r * columns + c;
-        if (seen[next] === 0 && left[next]! > through) {
-          seen[next] = 1;
-          stack[top++] = next;
-        }
+function runsOf({ columns, rows, left }: Raster, through: number): Run[] {
+  const runs: Run[] = [];
+  for (let row = 0; row < rows; row++) {
+    const base = row * columns;
+    let from = -1;
+    for (let column = 0; column <= columns; column++) {
+      const solid = column < columns && left[base + column]! > through;
+      if (solid && from < 0) {
+        from = column;
+      } else if (!solid && from >= 0) {
+        runs.push({ row, from, to: column });
+        from = -1;
       }
     }
   }
-  return { count, held };
+  return runs;
+}
+
+/** Which run stands for the piece a run belongs to: the first one in reading order. */
+function joinRuns(runs: readonly Run[]): (k: number) => number {
+  const parent = runs.map((_, k) => k);
+  const root = (k: number): number => {
+    let at = k;
+    while (parent[at] !== at) {
+      at = parent[at] = parent[parent[at]!]!;
+    }
+    return at;
+  };
+  let above = 0;
+  runs.forEach((run, k) => {
+    while (runs[above]!.row < run.row - 1 || (runs[above]!.row < run.row && runs[above]!.to < run.from)) {
+      above++;
+    }
+    for (let other = above; other < k && runs[other]!.row < run.row && runs[other]!.from <= run.to; other++) {
+      const [a, b] = [root(other), root(k)];
+      parent[Math.max(a, b)] = Math.min(a, b);
+    }
+  });
+  return root;
+}
+
+function isAtEdge({ rows, columns }: Raster, { row, from, to }: Run): boolean {
+  return row === 0 || row === rows - 1 || from === 0 || to === columns;
+}
+
+function isInWheel({ size, x0, y0 }: Raster, body: WheelBody, { row, from, to }: Run): boolean {
+  for (let column = from; column < to; column++) {
+    if (isInsideWheel(body, x0 + column * size, y0 + row * size)) {
+      return true;
+    }
+  }
+  return false;
+}
+
+function largestOf(
+  { size, x0, y0 }: Raster,
+  runs: readonly Run[],
+  count: ReadonlyMap<number, number>,
+  held: ReadonlySet<number>,
+): Piece | undefined {
+  let worst: Piece | undefined;
+  for (const [piece, squares] of count) {
+    const area = squares * size * size;
+    if (!held.has(piece) && squares >= FEWEST && area > (worst?.area ?? 0)) {
+      const { row, from, to } = runs[piece]!;
+      worst = { x: x0 + ((from + to - 1) / 2) * size, y: y0 + row * size, area };
+    }
+  }
+  return worst;
 }

@@ -7,8 +7,9 @@
  */
 import { pointOn } from '../geometry/on-piece.ts';
 import type { Loop } from '../geometry/piece.ts';
-import { angleOf, norm, turnPoint, type Point } from '../geometry/point.ts';
+import { add, angleOf, norm, ORIGIN, turnPoint, type Point } from '../geometry/point.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
+import type { TracedMove } from '../motion/traced-move.ts';
 import type { Worst } from './deviation-contour.ts';
 import type { SolidMove } from './metal-paths.ts';
 import type { Target } from './proof.ts';
@@ -17,10 +18,11 @@ export interface WheelBody {
   readonly form: WheelForm;
   readonly boreRadius: number;
   readonly crossings: Crossings | undefined;
-  /** Radius and half angle of the tooth, outward. */
-  readonly rho: readonly number[];
-  readonly half: readonly number[];
+  /** Half angle of the tooth at radii evenly spread from root to tip. */
+  readonly half: Float64Array;
   readonly window: readonly Point[];
+  /** Polar angle of the window's middle. */
+  readonly windowAngle: number;
   /** Points of one pitch of the outline. */
   readonly sector: readonly Point[];
 }
@@ -32,13 +34,14 @@ export function wheelBody(form: WheelForm, bore: number, crossings: Crossings | 
   const side = risen
     .filter(({ role }) => role !== 'root' && role !== 'land')
     .flatMap(({ piece }) => pointsOn(piece));
+  const window = crossings === undefined ? [] : loopPoints(crossings.window);
   return {
     form,
     boreRadius: bore / 2,
     crossings,
-    rho: side.map(norm),
-    half: side.map((point) => Math.abs(angleOf(point))),
-    window: crossings === undefined ? [] : loopPoints(crossings.window),
+    half: halfAngles(form, side),
+    window,
+    windowAngle: angleOf(window.reduce(add, ORIGIN)),
     sector: loopPoints(form.sector.map(({ piece }) => piece)),
   };
 }
@@ -65,30 +68,38 @@ export function isInsideWheel(body: WheelBody, x: number, y: number): boolean {
   return !isInWindow(body, rho, x, y);
 }
 
-function halfAngle(body: WheelBody, rho: number): number {
-  const { rho: radii, half } = body;
+const TABLE = 256;
+
+function halfAngles(form: WheelForm, side: readonly Point[]): Float64Array {
+  const table = new Float64Array(TABLE + 1);
   let k = 1;
-  while (k < radii.length - 1 && radii[k]! < rho) {
-    k++;
+  for (let i = 0; i <= TABLE; i++) {
+    const rho = form.rootRadius + (i / TABLE) * (form.outsideRadius - form.rootRadius);
+    while (k < side.length - 1 && norm(side[k]!) < rho) {
+      k++;
+    }
+    const [low, high] = [norm(side[k - 1]!), norm(side[k]!)];
+    const share = high > low ? Math.min(1, Math.max(0, (rho - low) / (high - low))) : 0;
+    const from = Math.abs(angleOf(side[k - 1]!));
+    table[i] = from + share * (Math.abs(angleOf(side[k]!)) - from);
   }
-  const span = radii[k]! - radii[k - 1]!;
-  const share = span > 0 ? Math.min(1, Math.max(0, (rho - radii[k - 1]!) / span)) : 0;
-  return half[k - 1]! + share * (half[k]! - half[k - 1]!);
+  return table;
+}
+
+function halfAngle({ form, half }: WheelBody, rho: number): number {
+  const at = (TABLE * (rho - form.rootRadius)) / (form.outsideRadius - form.rootRadius);
+  return half[Math.min(TABLE, Math.max(0, Math.round(at)))]!;
 }
 
 function isInWindow(body: WheelBody, rho: number, x: number, y: number): boolean {
-  const { crossings, window } = body;
+  const { crossings, window, windowAngle } = body;
   if (crossings === undefined || rho < crossings.windowInner || rho > crossings.windowOuter) {
     return false;
   }
-  for (let k = 0; k < crossings.count; k++) {
-    const angle = (-2 * Math.PI * k) / crossings.count;
-    const [c, s] = [Math.cos(angle), Math.sin(angle)];
-    if (isInPolygon(window, x * c - y * s, x * s + y * c)) {
-      return true;
-    }
-  }
-  return false;
+  const pitch = (2 * Math.PI) / crossings.count;
+  const angle = -pitch * Math.round((Math.atan2(y, x) - windowAngle) / pitch);
+  const [c, s] = [Math.cos(angle), Math.sin(angle)];
+  return isInPolygon(window, x * c - y * s, x * s + y * c);
 }
 
 export function isInWindowAt(body: WheelBody, x: number, y: number): boolean {
@@ -116,13 +127,23 @@ export function isInPolygon(polygon: readonly Point[], x: number, y: number): bo
 export function deepestInside(target: Target, solids: readonly SolidMove[], top: number): Worst | undefined {
   const body = wheelBody(target.form, target.bore, target.crossings);
   let worst: Worst | undefined;
-  for (const { move, x0, y0, z0, x1, y1, z1, radius } of solids) {
-    for (const [x, y, z] of [[x0, y0, z0] as const, [x1, y1, z1] as const]) {
-      if (z < top && isInsideWheel(body, x, y)) {
-        const value = radius + depthInside(body, x, y);
-        worst = worst === undefined || value > worst.value ? { value, copy: 0, x, y, move } : worst;
-      }
+  const take = (move: TracedMove, radius: number, x: number, y: number): void => {
+    if (isInsideWheel(body, x, y)) {
+      const value = radius + depthInside(body, x, y);
+      worst = worst === undefined || value > worst.value ? { value, copy: 0, x, y, move } : worst;
     }
+  };
+  let last: SolidMove | undefined;
+  for (const solid of solids) {
+    const { move, x0, y0, z0, x1, y1, z1, radius } = solid;
+    // The end of the move before is the start of this one, and has been asked already.
+    if (z0 < top && (last === undefined || last.x1 !== x0 || last.y1 !== y0 || last.z1 >= top)) {
+      take(move, radius, x0, y0);
+    }
+    if (z1 < top) {
+      take(move, radius, x1, y1);
+    }
+    last = solid;
   }
   return worst;
 }

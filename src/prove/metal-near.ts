@@ -4,6 +4,7 @@
  *
  * In : paths, number of copies, radii between which the outline lies. Out: for each copy the indices of its paths.
  */
+import { twinOf } from './metal-twins.ts';
 import type { PathSet } from './metal-paths.ts';
 
 /** The paths of one copy, the deep ones first. */
@@ -22,7 +23,7 @@ export interface Ring {
 
 export function nearLists(set: PathSet, ring: Ring, slack: number): NearList[] {
   const pitch = (2 * Math.PI) / ring.copies;
-  const lists: number[][] = Array.from({ length: ring.copies }, () => []);
+  const lists = Array.from({ length: ring.copies }, (): Gathered => ({ paths: [], byEnds: new Map() }));
   for (let i = 0; i < set.count; i++) {
     const mx = set.mx[i]!;
     const my = set.my[i]!;
@@ -39,7 +40,7 @@ export function nearLists(set: PathSet, ring: Ring, slack: number): NearList[] {
       addOnce(set, lists[((k % ring.copies) + ring.copies) % ring.copies]!, i);
     }
   }
-  return lists.map((list) => deepFirst(set, list));
+  return lists.map(({ paths }) => deepFirst(set, paths));
 }
 
 function deepFirst(set: PathSet, list: readonly number[]): NearList {
@@ -50,25 +51,14 @@ function deepFirst(set: PathSet, list: readonly number[]): NearList {
   };
 }
 
-function addOnce(set: PathSet, list: number[], i: number): void {
-  const x0 = set.x0[i]!;
-  const y1 = set.y1[i]!;
-  for (const k of list) {
-    if (set.x0[k] === x0 && set.y1[k] === y1 && samePath(set, i, k)) {
-      return;
-    }
-  }
-  list.push(i);
+/** The paths of one copy so far, and those of them that share a start and an end. */
+interface Gathered {
+  readonly paths: number[];
+  readonly byEnds: Map<number, number[]>;
 }
 
-function samePath(set: PathSet, i: number, k: number): boolean {
-  return (
-    set.y0[i] === set.y0[k] &&
-    set.x1[i] === set.x1[k] &&
-    set.cx[i] === set.cx[k] &&
-    set.cy[i] === set.cy[k] &&
-    set.turn[i] === set.turn[k] &&
-    set.deep[i] === set.deep[k] &&
-    set.radius[i] === set.radius[k]
-  );
+function addOnce(set: PathSet, { paths, byEnds }: Gathered, i: number): void {
+  if (twinOf(set, byEnds, i) < 0) {
+    paths.push(i);
+  }
 }

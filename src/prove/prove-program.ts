@@ -15,7 +15,6 @@ import { checkObstacles } from './check-obstacles.ts';
 import { checkOrder } from './check-order.ts';
 import { checkSpindle } from './check-spindle.ts';
 import { checkTravel } from './check-travel.ts';
-import { extentsOf } from './extents.ts';
 import { gatherEvidence, type Evidence } from './evidence.ts';
 import { notChecked } from './not-checked.ts';
 import type { Finding, Proof, ProofInput } from './proof.ts';
@@ -52,7 +51,7 @@ export function proveProgram(input: ProofInput): Proof {
     notChecked: notChecked(evidence),
     moves: evidence.moves,
     blocks: traces.reduce((sum, trace) => sum + trace.blocks, 0),
-    extents: extentsOf(evidence.moves),
+    extents: evidence.extents,
     ...(figures === undefined ? {} : { figures }),
   };
 }

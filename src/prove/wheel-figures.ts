@@ -10,7 +10,7 @@ import { measureContour, NOWHERE, type ContourFigures, type Worst } from './devi
 import { toothFigures, type Heights, type ToothFigures } from './deviation-depths.ts';
 import { boreWall, windowWall, type Wall } from './deviation-walls.ts';
 import { deepestInside } from './metal-inside.ts';
-import { pathsBelow, type SolidMove } from './metal-paths.ts';
+import { pathsBelow, type PathSet, type SolidMove } from './metal-paths.ts';
 import type { Target } from './proof.ts';
 
 export interface WheelFigures {
@@ -44,25 +44,20 @@ export function wheelFigures(
   const allowed = FORM_ERROR + lastDigit;
   const cutterRadius = finishingDiameter / 2;
   const farthest = (Math.PI * form.pitchRadius) / form.proportions.teeth;
-  const wall = (made: Wall): WallFigures => wallFigures(solids, heights, made, farthest);
+  const set = pathsBelow(solids, heights.bottom + heights.slack, heights.top - heights.slack);
+  const wall = (made: Wall): WallFigures => wallFigures(set, made, farthest);
   const isBored = setup.bored >= target.bore;
   return {
     heights,
     allowed,
-    teeth: toothFigures(solids, form, finishingDiameter, heights, allowed),
+    teeth: toothFigures(solids, set, form, finishingDiameter, heights, allowed),
     bore: isBored ? undefined : wall(boreWall(target.bore, cutterRadius)),
     window: crossings === undefined ? undefined : wall(windowWall(crossings, cutterRadius)),
     inside: deepestInside(target, solids, heights.top - heights.slack) ?? NOWHERE,
   };
 }
 
-function wallFigures(
-  solids: readonly SolidMove[],
-  heights: Heights,
-  { stations, ring }: Wall,
-  farthest: number,
-): WallFigures {
-  const set = pathsBelow(solids, heights.bottom + heights.slack, heights.top - heights.slack);
+function wallFigures(set: PathSet, { stations, ring }: Wall, farthest: number): WallFigures {
   const { low, high } = measureContour(set, stations, ring, farthest);
   return { gouge: high.gouge, left: mostLeft(low) };
 }

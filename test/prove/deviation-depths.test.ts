@@ -6,7 +6,7 @@ import { describe, expect, it } from 'vitest';
 import type { TracedMove } from '../../src/motion/traced-move.ts';
 import { toothFigures, type ToothFigures } from '../../src/prove/deviation-depths.ts';
 import { REGION } from '../../src/prove/deviation-stations.ts';
-import { solidMoves } from '../../src/prove/metal-paths.ts';
+import { pathsBelow, solidMoves } from '../../src/prove/metal-paths.ts';
 import { asCut } from '../../src/tooth/as-cut.ts';
 import { exactWheel } from '../support/exact-wheel.ts';
 import { offsetPath, pathStart, type PathOptions } from '../support/offset-path.ts';
@@ -38,8 +38,10 @@ function loop(offset: number, z: number, options: PathOptions = {}, form = FORM)
 
 function figuresOf(moves: readonly TracedMove[], form = FORM): ToothFigures {
   const heights = { top: 0, bottom: -1.5, slack: 1e-4 };
+  const solids = solidMoves(moves, () => RADIUS);
   return toothFigures(
-    solidMoves(moves, () => RADIUS),
+    solids,
+    pathsBelow(solids, heights.bottom + heights.slack, heights.top - heights.slack),
     form,
     DIAMETER,
     heights,
