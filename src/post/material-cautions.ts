@@ -19,7 +19,7 @@ const CAUTIONS: readonly MaterialCaution[] = [
     say: 'Make sure of the alloy: beryllium copper looks alike and is NOT brass. Its dust harms the lungs for good. Where nobody can say what the sheet is, do not cut it',
   },
   {
-    when: /lead|free-cutting-brass|cz120|engraving/,
+    when: /(?<!un)leaded-(?!steel)|free-cutting-brass|cz120|engraving-brass/,
     say: 'This metal holds lead, commonly 2 to 4 per cent in brass: do not eat, drink or smoke here, wipe and do not blow, wash hands before anything else, keep the dust from home and children',
   },
   {
@@ -29,6 +29,14 @@ const CAUTIONS: readonly MaterialCaution[] = [
   {
     when: /steel|iron/,
     say: 'Steel chips come hot and sharp, and a cutter this small breaks sooner than in brass: shield, brush, cutting oil kept clean and off the skin, nothing near that can catch fire',
+  },
+  {
+    when: /free-cutting-steel|leaded-steel/,
+    say: 'Free-cutting steel commonly holds some tenths of a per cent of lead: wash hands before eating, wipe and do not blow',
+  },
+  {
+    when: /acetal|nylon/,
+    say: 'Plastic melts when the cutter rubs and smokes when it burns, and the smoke harms: sharp cutter, chips cleared, stop at the first smell',
   },
   {
     when: /magnesium/,

@@ -129,6 +129,12 @@ describe('cautions', () => {
     ['brass', [/needles/, /NOT brass/], [/holds lead/, /Steel/]],
     ['silver-steel', [/Steel chips/], [/beryllium/i, /needles/, /holds lead/]],
     ['beryllium-copper', [/DANGER, BERYLLIUM COPPER/, /0\.2 micrograms/], [/Make sure of the alloy/]],
+    [
+      'free-cutting-steel',
+      [/Steel chips/, /tenths of a per cent of lead/],
+      [/beryllium/i, /2 to 4 per cent/],
+    ],
+    ['acetal', [/Plastic melts/], [/beryllium/i, /lead/]],
     ['aluminium', [/Aluminium/], [/beryllium/i]],
     ['unobtainium', [/data sheet/, /beryllium/], [/needles/]],
   ])('for %s [29 CFR 1910.1024: beryllium copper, not brass]', (material, holds, lacks) => {
