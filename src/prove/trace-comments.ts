@@ -3,7 +3,8 @@
  * no words for it. Everything else in a comment means nothing to the machine.
  *
  * In: "Cutter 2", "Set the spindle to 12000 turns a minute …", "Switch the spindle off", each at a comment's beginning.
- * They hold from the next stop for hands; where one program runs for one cutter, its number holds at once.
+ * They hold from the next stop for hands, if nothing moves before it; where one program runs for one cutter, its number
+ * holds at once, before anything has moved.
  */
 import { spindleOf } from './modes.ts';
 import { loadCutter } from './trace-settings.ts';
@@ -44,7 +45,7 @@ function readCutter(run: Run, text: string, byHand: ByHand): void {
   }
   if (run.machine.words.cutters.change === 'by-hand') {
     byHand.cutter = Number(number);
-  } else if (run.modes.cutter === null) {
+  } else if (run.moves.length === 0 && run.modes.cutter !== Number(number)) {
     loadCutter(run, Number(number));
   }
 }

@@ -167,7 +167,12 @@ function readLine(
     return label === true ? undefined : label;
   }
   state.blocks += 1;
+  const moves = run.moves.length;
   const refused = runBlock(run, block);
+  if (run.moves.length > moves) {
+    byHand.cutter = undefined;
+    byHand.speed = undefined;
+  }
   const stop = block.m[M_GROUP.stop] ?? -1;
   if (stop === 0) {
     handsDone(run, byHand);

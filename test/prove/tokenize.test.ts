@@ -150,17 +150,22 @@ describe('lines read ahead', () => {
     expect(secondReadingAgrees(other, ahead.lines, 0, 6)).toBe(false);
   });
 
-  it('gives a line of its own the blame, with its number', () => {
+  it('say which line the readers differ about: a number beyond all numbers', () => {
     const ahead = emptyAhead();
-    readAhead('G1 X1\nG1 X2\nG1 X3', 0, 'brackets', ahead);
-    expect(ahead.differs).toBe(-1);
+    readAhead(`G1 X1\nG1 X${'9'.repeat(400)}\nG1 X3`, 0, 'brackets', ahead);
+    expect(ahead.differs).toBe(1);
+    expect(ahead.how).toMatch(/Infinity/);
+  });
+
+  it('are all there, however many', () => {
     const lines = Array.from({ length: 100 }, (_, i) => `X${String(i)}`).join('\r\n');
+    const ahead = emptyAhead();
     let at = 0;
-    let count = 0;
+    const values: number[] = [];
     while (at < lines.length) {
       at = readAhead(lines, at, 'brackets', ahead);
-      count += ahead.count;
+      values.push(...ahead.lines.slice(0, ahead.count).map((line) => line.values[0] ?? NaN));
     }
-    expect(count).toBe(100);
+    expect(values).toEqual(Array.from({ length: 100 }, (_, i) => i));
   });
 });

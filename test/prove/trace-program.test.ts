@@ -2,6 +2,7 @@
 import { describe, expect, it } from 'vitest';
 import { traceProgram } from '../../src/prove/trace-program.ts';
 import { readPost } from '../machine/read-posts.ts';
+import { post } from '../support/bench-program.ts';
 
 const bench = readPost('bench-mill');
 
@@ -50,5 +51,51 @@ describe('a plain program', () => {
       ['machine-place', 12, 5],
       ['end', 13, 5],
     ]);
+  });
+});
+
+describe('what hands do, said in comments', () => {
+  const cuttersOf = (machine: string, lines: readonly string[]): (number | null)[] =>
+    traceProgram('h', lines.join('\n'), post(machine)).moves.map(({ cutter }) => cutter);
+
+  it('holds at once where one program runs for one cutter, the last word before anything moves', () => {
+    const lines = ['(CUTTER 5)', '(CUTTER 2)', 'G90 G21 G54', 'G0 X1', '(CUTTER 7)', 'X2', 'M2'];
+    expect(cuttersOf('desk-three-axis', lines)).toEqual([2, 2]);
+  });
+
+  it('holds from the stop for hands, if nothing moves before it', () => {
+    const lines = [
+      '%1',
+      '(CUTTER 3)',
+      'N1 G71',
+      'N2 G90',
+      'N3 G54',
+      'N4 M00',
+      'N5 G00 X1.',
+      '(CUTTER 9)',
+      'N6 X2.',
+      'N7 M00',
+      'N8 X3.',
+      'N9 M30',
+      '%',
+    ];
+    expect(cuttersOf('din-66025', lines)).toEqual([3, 3, 3]);
+  });
+
+  it('sets the speed where hands do', () => {
+    const lines = [
+      ';SET THE SPINDLE TO 12000 TURNS A MINUTE',
+      'M00',
+      'G90',
+      'G21',
+      'G00X1.',
+      ';SWITCH THE SPINDLE OFF',
+      'M00',
+      'X2.',
+      'M02',
+    ];
+    const trace = traceProgram('h', lines.join('\n'), post('lines-only'));
+    expect(trace.findings).toEqual([]);
+    expect(trace.moves.map(({ spindle }) => spindle)).toEqual([12000, 0]);
   });
 });
