@@ -18,7 +18,7 @@ export interface HeaderFacts {
   readonly version: string;
   /** What is made, a line each: "Wheel, 60 teeth, module 0.5, 1.500 mm thick". */
   readonly part: readonly string[];
-  /** This program's place in the order they are run, 1-based. */
+  /** This program's place in the order they are run, 1-based; 0 for the walk-round and for all of them together. */
   readonly program: { readonly number: number; readonly of: number };
   readonly blank: string;
   readonly holding: string;
@@ -36,7 +36,7 @@ export interface HeaderFacts {
   /** Where to leave the cutter before the start. */
   readonly park: Position;
   readonly zero: 'top' | 'plate';
-  /** Where X and Y zero can be found again once the bore is cut: "the edges of the sheet at X -22.000 and Y -22.000". */
+  /** Where X and Y zero can be found again once the bore is cut: a sentence: "touch the edges of the sheet at X -22 and Y -22". */
   readonly again: string;
   /** A size to measure that tells a wrong unit at once; mm. */
   readonly check: { readonly what: string; readonly size: number };

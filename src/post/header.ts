@@ -28,7 +28,7 @@ export function setUpLines(facts: HeaderFacts, machine: Machine): readonly strin
   return [
     `Title: ${facts.title}`,
     `Mark ${facts.mark}, made by version ${facts.version}`,
-    `${KINDS[facts.kind]}, number ${facts.program.number} of ${facts.program.of}`,
+    KINDS[facts.kind] + placeInOrder(facts),
     ...facts.part.map((line) => `Part: ${line}`),
     `Machine file ${machine.name}, ${machine.proved === 'unproved' ? 'not yet proved on a machine' : `proved: ${machine.proved}`}`,
     `Units: ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. To check: ${check.what} is ${bothUnits(check.size)}`,
@@ -38,12 +38,17 @@ export function setUpLines(facts: HeaderFacts, machine: Machine): readonly strin
         `Cutter ${cutter.number}: cuts ${length(cutter.diameter)} wide, ${cutter.flutes} flutes, sticking out ${length(cutter.stickOut)}`,
     ),
     spindleLine(facts, machine),
-    `Zero of X and Y: the axis of the wheel. Zero of height: ${facts.zero === 'top' ? 'the top of the blank' : 'the plate under the blank'}. Found again by ${facts.again}`,
+    `Zero of X and Y: the axis of the wheel. Zero of height: ${facts.zero === 'top' ? 'the top of the blank' : 'the plate under the blank'}. To find it again: ${facts.again}`,
     `Reaches in X ${span(extents.x)}, in Y ${span(extents.y)}, in height ${span(extents.z)}. Clear height ${length(facts.clear)}`,
     `Park before the start: X ${length(park.x)}, Y ${length(park.y)}, height ${length(park.z)}`,
     ...facts.proved.map((line) => `Proved: ${line}`),
     ...facts.notProved.map((line) => `Not proved: ${line}`),
   ];
+}
+
+/** Where this is one of the programs that are run in order; a walk-round and a sheet are none. */
+function placeInOrder({ program }: HeaderFacts): string {
+  return program.number === 0 ? '' : `, number ${program.number} of ${program.of}`;
 }
 
 function spindleLine(facts: HeaderFacts, machine: Machine): string {

@@ -23,7 +23,7 @@ export function headerFacts(motion: Motion, changes: Partial<HeaderFacts> = {}):
     plateZ: -1.5,
     park: { x: 0, y: 0, z: 20 },
     zero: 'top',
-    again: 'the edges of the sheet',
+    again: 'touch the edges of the sheet',
     check: { what: 'outside diameter', size: 31.471 },
     proved: ['read back from its own text'],
     notProved: ['bending of the cutter'],
