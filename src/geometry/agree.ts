@@ -1,10 +1,10 @@
 /**
  * Whether a clipped polygon and an exact chain tell the same story: no point of the one lies further than CLIP_AGREEMENT
- * from the other, both ways (the chain stands in chords to CHORD_SAG, which the agreement has room for). Where two curves
+ * from the other, both ways (the chain stands in chords to CLIP_SAG, which the agreement has room for). Where two curves
  * meet at a sharp inside corner of angle a, the chords that stand for them meet further out by 1 / sin(a/2), so that much
  * is allowed near such a corner. Both run the same way round, so each search begins where the last one ended. mm.
  */
-import { CHORD_SAG, CLIP_AGREEMENT } from '../base/tolerances.ts';
+import { CLIP_SAG, CLIP_AGREEMENT } from '../base/tolerances.ts';
 import { headingOn, startOf } from './on-piece.ts';
 import type { Chain } from './piece.ts';
 import { distance, dot, type Point } from './point.ts';
@@ -24,7 +24,7 @@ export function disagreement({ corners, rings, chains }: Agreement): {
   readonly worst: number;
   readonly at: Point;
 } {
-  const lines = chains.map((chain) => sampleChain(chain, CHORD_SAG));
+  const lines = chains.map((chain) => sampleChain(chain, CLIP_SAG));
   const closed = rings.map((ring) => [...ring, ring[0] as Point]);
   const sharp = chains.flatMap(sharpCorners);
   let worst = 0;

@@ -6,16 +6,18 @@ import type { OffsetPiece } from './raw-offset.ts';
 import type { Remaining } from './trim-offset.ts';
 
 /** Meetings are found within SAME_POINT on each side. */
-const JOINED = 4 * SAME_POINT;
+export function samePlace(a: Point, b: Point): boolean {
+  return distance(a, b) <= 4 * SAME_POINT;
+}
 
-/** The parts from `first` on, until one ends at `goal`; undefined where the way is broken. */
+/** The parts from `first` on, until one ends where it should; undefined where the way is broken. */
 export function linkUntil(
   parts: readonly Remaining[],
   first: Remaining,
-  goal: Point,
+  arrived: (end: Point) => boolean,
 ): Remaining[] | undefined {
   const way = [first];
-  for (let at = first; distance(at.to, goal) > JOINED;) {
+  for (let at = first; !arrived(at.to);) {
     const next = successor(parts, at, way);
     if (next === undefined) {
       return undefined;
@@ -33,7 +35,7 @@ export function linkLoops(parts: readonly Remaining[]): { loops: Remaining[][]; 
   let broken = 0;
   while (left.length > 0) {
     const first = left[0] as Remaining;
-    const way = linkUntil(left, first, first.from);
+    const way = linkUntil(left, first, (end) => samePlace(end, first.from));
     if (way === undefined) {
       broken++;
       left = left.slice(1);
@@ -53,7 +55,7 @@ function successor(
 ): Remaining | undefined {
   let best: Remaining | undefined;
   for (const part of parts) {
-    const joins = distance(at.to, part.from) <= JOINED && !taken.includes(part);
+    const joins = samePlace(at.to, part.from) && !taken.includes(part);
     if (joins && (best === undefined || reachOf(part) > reachOf(best))) {
       best = part;
     }

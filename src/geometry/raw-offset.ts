@@ -22,34 +22,35 @@ export interface OffsetPiece {
   readonly part: readonly [number, number];
 }
 
-/** `closed`: the last piece meets the first. Indexes run from 0 along the chain. */
-export function rawOffset(chain: Chain, distance: number, closed: boolean): OffsetPiece[] {
-  return chain.flatMap((piece, index) => {
-    const last = index === chain.length - 1;
-    const next = chain[last ? 0 : index + 1] as Piece;
-    const parallels = parallelsOf(piece, distance).map((part) => ({ ...part, source: index }));
-    const corner = last && !closed ? undefined : cornerArc(piece, next, distance);
-    return corner === undefined
-      ? parallels
-      : [
-          ...parallels,
-          {
-            piece: corner,
-            source: 'corner' as const,
-            between: [index, last ? 0 : index + 1] as const,
-            part: [0, 1] as const,
-          },
-        ];
+/** `after`: the piece that follows the last, and its index, where there is one. Indexes run from 0 along the chain. */
+export function rawOffset(
+  chain: Chain,
+  distance: number,
+  after?: { readonly piece: Piece; readonly index: number },
+): OffsetPiece[] {
+  const raw: OffsetPiece[] = [];
+  chain.forEach((piece, source) => {
+    for (const { parallel, part } of parallelsOf(piece, distance)) {
+      raw.push({ piece: parallel, source, part });
+    }
+    const inside = source + 1 < chain.length;
+    const next = inside ? chain[source + 1] : after?.piece;
+    const corner = next === undefined ? undefined : cornerArc(piece, next, distance);
+    if (corner !== undefined) {
+      const index = inside ? source + 1 : (after?.index ?? 0);
+      raw.push({ piece: corner, source: 'corner', between: [source, index], part: [0, 1] });
+    }
   });
+  return raw;
 }
 
-function parallelsOf(piece: Piece, distance: number): { piece: Piece; part: readonly [number, number] }[] {
+function parallelsOf(piece: Piece, distance: number): { parallel: Piece; part: readonly [number, number] }[] {
   const parallel = offsetPiece(piece, distance);
   if (parallel === undefined) {
     return [];
   }
   if (parallel.kind !== 'cycloid') {
-    return [{ piece: parallel, part: [0, 1] }];
+    return [{ parallel, part: [0, 1] }];
   }
   const span = parallel.to - parallel.from;
   const cuts = [0, ...cycloidCusps(parallel).map((t) => (t - parallel.from) / span), 1];
@@ -58,7 +59,7 @@ function parallelsOf(piece: Piece, distance: number): { piece: Piece; part: read
     const middle = (from + to) / 2;
     // Past its cusp the parallel runs against the curve.
     const forward = dot(velocityOn(parallel, middle), headingOn(piece, middle)) > 0;
-    return forward ? [{ piece: partOf(parallel, from, to), part: [from, to] as const }] : [];
+    return forward ? [{ parallel: partOf(parallel, from, to), part: [from, to] as const }] : [];
   });
 }
 

@@ -28,13 +28,24 @@ export function sampleParameters(piece: Piece, sag: number): number[] {
 
 /** Closed: the last point is not the first again. */
 export function sampleLoop(loop: Chain, sag: number): Point[] {
-  return loop.flatMap((piece) => samplePiece(piece, sag).slice(0, -1));
+  const points: Point[] = [];
+  for (const piece of loop) {
+    const parameters = sampleParameters(piece, sag);
+    for (let i = 0; i + 1 < parameters.length; i++) {
+      points.push(pointOn(piece, parameters[i] as number));
+    }
+  }
+  return points;
 }
 
 /** Open: both ends are there. */
 export function sampleChain(chain: Chain, sag: number): Point[] {
+  const points = sampleLoop(chain, sag);
   const last = chain.at(-1);
-  return last === undefined ? [] : [...sampleLoop(chain, sag), pointOn(last, 1)];
+  if (last !== undefined) {
+    points.push(pointOn(last, 1));
+  }
+  return points;
 }
 
 function evenly(steps: number): number[] {

@@ -1,24 +1,24 @@
 /**
- * What has to be looked at to offset one pitch of an outline that repeats round the origin: the pieces of the pitch and
- * of as many neighbours as the distance reaches, and the polygon that stands for the solid on their far side.
+ * What has to be looked at to offset one pitch of an outline that repeats round the origin, and the polygon that stands
+ * for the solid on its far side.
  *
- * A pitch that is its own mirror image needs no neighbour: the nearest point of a place between two mirror lines lies
- * between them too (reflected, any other is at least as near). The polygon closes through the origin, or, where the
- * offset goes inward, round the outside; those edges bulge away from the pitch, never into it. mm.
+ * A pitch that is its own mirror image needs its first half only, up to the ray through the tooth's middle: the nearest
+ * outline point of a place between two mirror lines lies between them too (reflected, any other is at least as near).
+ * Any other pitch needs as many neighbours as the distance reaches. The polygon closes through the origin, or, where the
+ * offset goes inward, round the outside; those edges bulge away from the wedge, never into it. mm.
  */
-import { CHORD_SAG, SAME_POINT } from '../base/tolerances.ts';
+import { CLIP_SAG, SAME_POINT } from '../base/tolerances.ts';
 import { mirrorPiece, turnChain } from './change-piece.ts';
 import { pointOn } from './on-piece.ts';
-import type { Chain } from './piece.ts';
+import type { Chain, Piece } from './piece.ts';
 import { distance as distanceOf, norm, ORIGIN, polar, type Point } from './point.ts';
 import { sampleChain, sampleLoop } from './sample-piece.ts';
 
 export interface SectorGround {
+  readonly kind: 'half' | 'wedge' | 'whole';
   readonly outline: Chain;
-  /** For each piece of `outline`, its index within one pitch. */
-  readonly indexes: readonly number[];
-  /** Whether `outline` goes all the way round. */
-  readonly closed: boolean;
+  /** What follows the last piece of the outline, where a corner there matters. */
+  readonly after?: { readonly piece: Piece; readonly index: number };
   /** What to clip, and the distance to grow it by: its size, but for a whole outline that shrinks. */
   readonly polygon: readonly Point[];
   readonly growth: number;
@@ -27,23 +27,50 @@ export interface SectorGround {
 }
 
 export function sectorGround(sector: Chain, count: number, distance: number): SectorGround {
-  const points = sampleChain(sector, CHORD_SAG);
-  const radii = points.map(norm);
-  const far = Math.max(...radii);
-  const near = Math.min(...radii);
-  const sides = neighboursNeeded(sector, count, near, distance);
-  const closed = 2 * sides + 1 >= count && !(sides === 0 && count > 2);
-  const turns = closed ? countFrom(0, count) : countFrom(-sides, sides + 1);
-  const outline = turns.flatMap((k) => turnChain(sector, (2 * Math.PI * k) / count));
-  const indexes = turns.flatMap(() => sector.map((_, index) => index));
-  const line =
-    turns.length === 1 ? points : closed ? sampleLoop(outline, CHORD_SAG) : sampleChain(outline, CHORD_SAG);
-  if (closed) {
-    return { outline, indexes, closed, far, polygon: line, growth: distance };
+  const reach = Math.abs(distance);
+  if (count > 2 && isMirrored(sector)) {
+    return halfGround(sector, count, distance);
   }
+  const radii = sampleChain(sector, CLIP_SAG).map(norm);
+  const far = Math.max(...radii);
+  const sides = neighboursNeeded(count, Math.min(...radii), reach);
+  if (2 * sides + 1 >= count) {
+    const outline = turned(sector, count, 0, count);
+    const after = { piece: sector[0] as Piece, index: 0 };
+    return { kind: 'whole', outline, after, far, polygon: sampleLoop(outline, CLIP_SAG), growth: distance };
+  }
+  const outline = turned(sector, count, -sides, sides + 1);
   const half = (Math.PI / count) * (2 * sides + 1);
-  const closing = distance > 0 ? [ORIGIN] : outside(half, far + 2 * Math.abs(distance));
-  return { outline, indexes, closed, far, polygon: [...line, ...closing], growth: Math.abs(distance) };
+  const closing = distance > 0 ? [ORIGIN] : outside(-half, half, far + 2 * reach);
+  const polygon = [...sampleChain(outline, CLIP_SAG), ...closing];
+  return { kind: 'wedge', outline, far, polygon, growth: reach };
+}
+
+/** Up to the tooth's middle; a piece across it is taken whole, a corner on it is rounded. */
+function halfGround(sector: Chain, count: number, distance: number): SectorGround {
+  const outline = sector.slice(0, Math.ceil(sector.length / 2));
+  const line = sampleChain(outline, CLIP_SAG);
+  const far = line.reduce((most, point) => Math.max(most, norm(point)), 0);
+  const end = line.at(-1) as Point;
+  const closing =
+    distance > 0
+      ? [ORIGIN]
+      : outside(-Math.PI / count, Math.atan2(end.y, end.x), far + 2 * Math.abs(distance));
+  const ground = {
+    kind: 'half',
+    outline,
+    far,
+    polygon: [...line, ...closing],
+    growth: Math.abs(distance),
+  } as const;
+  const next = sector[outline.length];
+  return sector.length % 2 === 0 && next !== undefined
+    ? { ...ground, after: { piece: next, index: outline.length } }
+    : ground;
+}
+
+function turned(sector: Chain, count: number, first: number, end: number): Chain {
+  return countFrom(first, end).flatMap((k) => turnChain(sector, (2 * Math.PI * k) / count));
 }
 
 function countFrom(first: number, end: number): number[] {
@@ -51,27 +78,26 @@ function countFrom(first: number, end: number): number[] {
 }
 
 /** On each side; half a turn or more of them means the whole outline. */
-function neighboursNeeded(sector: Chain, count: number, near: number, distance: number): number {
-  if (count > 2 && isMirrored(sector)) {
-    return 0;
-  }
-  const reach = Math.abs(distance);
+function neighboursNeeded(count: number, near: number, reach: number): number {
   return reach >= near ? count : Math.ceil((2 * Math.asin(reach / near) * count) / (2 * Math.PI)) + 1;
 }
 
 /** Each piece is the mirror image, across the X axis, of the one as far from the other end. */
 function isMirrored(sector: Chain): boolean {
-  return sector.every((piece, i) => {
-    const image = mirrorPiece(sector[sector.length - 1 - i] as Chain[number]);
-    return [0, 0.5, 1].every(
-      (u) => distanceOf(pointOn(piece, u), pointOn(image, 1 - u)) <= SAME_POINT && image.kind === piece.kind,
-    );
-  });
+  for (let i = 0; 2 * i < sector.length; i++) {
+    const piece = sector[i] as Piece;
+    const image = mirrorPiece(sector[sector.length - 1 - i] as Piece);
+    const same = (u: number): boolean => distanceOf(pointOn(piece, u), pointOn(image, 1 - u)) <= SAME_POINT;
+    if (piece.kind !== image.kind || !same(0) || !same(0.5) || !same(1)) {
+      return false;
+    }
+  }
+  return true;
 }
 
-/** From the end of the wedge round to its start, at least `radius` from the origin everywhere. */
-function outside(half: number, radius: number): Point[] {
-  const steps = Math.max(1, Math.ceil((2 * half) / (Math.PI / 3)));
-  const corner = radius / Math.cos(half / steps);
-  return countFrom(0, steps + 1).map((i) => polar(corner, half - (2 * half * i) / steps));
+/** From the ray at `to` back round to the ray at `from`, at least `radius` from the origin everywhere. */
+function outside(from: number, to: number, radius: number): Point[] {
+  const steps = Math.max(1, Math.ceil((to - from) / (Math.PI / 3)));
+  const corner = radius / Math.cos((to - from) / (2 * steps));
+  return countFrom(0, steps + 1).map((i) => polar(corner, to - ((to - from) * i) / steps));
 }

@@ -11,8 +11,7 @@ import { endOf, headingOn, lengthOf, pointOn, startOf, turnOf } from './on-piece
 import type { Chain, Piece } from './piece.ts';
 import { cross, distance as distanceOf, type Point } from './point.ts';
 import type { OffsetPiece } from './raw-offset.ts';
-import { distanceToRing } from './ring.ts';
-import { distanceToSleeve, sleeveOf, sleevesTouch, type Sleeve } from './sleeve.ts';
+import { distanceToSegment, distanceToSleeve, sleeveOf, sleevesTouch, type Sleeve } from './sleeve.ts';
 
 /** A part that remains. `raw` and `at` tell it from the other parts of its piece; ends are kept for the linking. */
 export interface Remaining extends OffsetPiece {
@@ -34,17 +33,30 @@ export interface Trim {
 export function trimOffset({ raw, outline, distance, knives, rings }: Trim): Remaining[] {
   const cuts = cutsOf(raw, knives);
   const near = outline.map((piece) => ({ piece, sleeve: sleeveOf(piece) }));
-  return raw.flatMap((offset, index) => {
+  const limit = Math.abs(distance) - OFFSET_NOISE;
+  const parts: Remaining[] = [];
+  raw.forEach((offset, index) => {
     const places = cleanCuts(offset.piece, cuts[index] as number[]);
-    return places.slice(1).flatMap((to, i) => {
-      const part = remainingPart(offset, index, places[i] as number, to);
-      const middle = pointOn(part.piece, 0.5);
-      const kept =
-        rings.some((ring) => distanceToRing(ring, middle) <= CLIP_AGREEMENT) &&
-        !nearerThan(near, middle, Math.abs(distance) - OFFSET_NOISE);
-      return kept ? [part] : [];
-    });
+    for (let i = 1; i < places.length; i++) {
+      const [from, to] = [places[i - 1] as number, places[i] as number];
+      const middle = pointOn(offset.piece, (from + to) / 2);
+      if (rings.some((ring) => runsAlong(ring, middle)) && !nearerThan(near, middle, limit)) {
+        parts.push(remainingPart(offset, index, from, to));
+      }
+    }
   });
+  return parts;
+}
+
+function runsAlong(ring: readonly Point[], point: Point): boolean {
+  let before = ring.at(-1) as Point;
+  for (const corner of ring) {
+    if (distanceToSegment(point, before, corner) <= CLIP_AGREEMENT) {
+      return true;
+    }
+    before = corner;
+  }
+  return false;
 }
 
 /** For each raw piece the parameters at which it is cut, unsorted. */
@@ -98,10 +110,15 @@ function cleanCuts(piece: Piece, cuts: readonly number[]): number[] {
 }
 
 function remainingPart(offset: OffsetPiece, raw: number, from: number, to: number): Remaining {
-  const piece = partOf(offset.piece, from, to);
+  const whole = from === 0 && to === 1;
+  const piece = whole ? offset.piece : partOf(offset.piece, from, to);
+  const { source, between } = offset;
   const [u0, u1] = offset.part;
-  const part = [u0 + from * (u1 - u0), u0 + to * (u1 - u0)] as const;
-  return { ...offset, piece, part, raw, at: [from, to], from: startOf(piece), to: endOf(piece) };
+  const part = whole ? offset.part : ([u0 + from * (u1 - u0), u0 + to * (u1 - u0)] as const);
+  const ends = { from: startOf(piece), to: endOf(piece) };
+  return between === undefined
+    ? { piece, source, part, raw, at: [from, to], ...ends }
+    : { piece, source, between, part, raw, at: [from, to], ...ends };
 }
 
 function nearerThan(

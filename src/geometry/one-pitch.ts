@@ -1,0 +1,56 @@
+/** The rays between which one pitch, or half of a mirrored one, lies; and the way from the first ray to the last. mm. */
+import { SAME_POINT } from '../base/tolerances.ts';
+import { linkUntil, samePlace } from './link-offset.ts';
+import { pointOn } from './on-piece.ts';
+import type { LinePiece } from './piece.ts';
+import { ORIGIN, polar, turnPoint, type Point } from './point.ts';
+import type { SectorGround } from './sector-ground.ts';
+import type { Remaining } from './trim-offset.ts';
+
+/** From the origin out: the first at -pi/count, the last at the tooth's middle or at +pi/count. */
+export function pitchRays(reach: number, count: number, kind: SectorGround['kind']): LinePiece[] {
+  const last = kind === 'half' ? 0 : Math.PI / count;
+  return [-Math.PI / count, last].map((angle) => ({ kind: 'line', from: ORIGIN, to: polar(reach, angle) }));
+}
+
+export function withinRays(part: Remaining, rays: readonly LinePiece[]): boolean {
+  const middle = pointOn(part.piece, 0.5);
+  return across(middle, rays[0] as LinePiece) > 0 && across(middle, rays[1] as LinePiece) < 0;
+}
+
+export function startsPitch(part: Remaining, rays: readonly LinePiece[]): boolean {
+  return touches(part.from, rays[0] as LinePiece);
+}
+
+/** From the outermost crossing of the first ray (the innermost where the distance is negative) to the last ray. */
+export function linkPitch(
+  parts: readonly Remaining[],
+  rays: readonly LinePiece[],
+  count: number,
+  kind: SectorGround['kind'],
+  distance: number,
+): Remaining[] | undefined {
+  const outward = Math.sign(distance);
+  const starts = parts
+    .filter((part) => startsPitch(part, rays))
+    .sort((a, b) => outward * (Math.hypot(b.from.x, b.from.y) - Math.hypot(a.from.x, a.from.y)));
+  for (const first of starts) {
+    const image = turnPoint(first.from, (2 * Math.PI) / count);
+    const way = linkUntil(parts, first, (end) =>
+      kind === 'half' ? touches(end, rays[1] as LinePiece) : samePlace(end, image),
+    );
+    if (way !== undefined) {
+      return way;
+    }
+  }
+  return undefined;
+}
+
+/** Signed distance to the ray's line, positive on its left. */
+function across(point: Point, { to }: LinePiece): number {
+  return (to.x * point.y - to.y * point.x) / Math.hypot(to.x, to.y);
+}
+
+function touches(point: Point, ray: LinePiece): boolean {
+  return Math.abs(across(point, ray)) <= 2 * SAME_POINT && ray.to.x * point.x + ray.to.y * point.y > 0;
+}
