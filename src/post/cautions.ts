@@ -49,7 +49,7 @@ function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[]
   return [
     `Before the start park the cutter at X ${length(park.x)}, Y ${length(park.y)}, at height ${length(park.z)} or above, with nothing between it and the clear height ${length(clear)}`,
     `Set zero with care, then move by hand to X 0, Y 0 and the clear height ${length(clear)} and look whether the place is right. Take off shifts, turns, scales and mirrors left by earlier work`,
-    `First run: raise the zero of height by ${length(raise(facts))} so that everything happens in the air, rapid override low, a hand on feed hold. Then block by block down to the first cut`,
+    ...(facts.kind === 'cut' ? [airRun(facts, length)] : []),
     `The lowest point is height ${length(deepest)}${underTheBlank(facts, length)}. Compare all the reaches above with clamps, screws, vice, table edges and the ends of travel`,
     `The words are in ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. A part that measures anything but ${lengthInWords(facts.check.size, 'mm')} at ${facts.check.what} is in the wrong unit or badly set: stop`,
     ...facts.cutters.map(
@@ -58,6 +58,10 @@ function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[]
     ),
     `The blank is held by ${facts.holding}: pull at it before the start, and keep every clamp outside the reaches above or named in the job`,
   ];
+}
+
+function airRun(facts: HeaderFacts, length: (mm: number) => string): string {
+  return `First run: raise the zero of height by ${length(raise(facts))} so that everything happens in the air, rapid override low, a hand on feed hold. Then block by block down to the first cut`;
 }
 
 /** From the lowest point to above the blank, with a clear height to spare. */
@@ -89,7 +93,7 @@ function atTheCutter(facts: HeaderFacts, machine: Machine): readonly string[] {
 function whenItStops(facts: HeaderFacts, machine: Machine): readonly string[] {
   const change = machine.words.cutters.change;
   return [
-    ...(change === 'automatic' || facts.program.of + facts.cutters.length <= 2
+    ...(facts.kind !== 'cut' || change === 'automatic' || facts.program.of + facts.cutters.length <= 2
       ? []
       : [
           'After every change of cutter touch off height anew at the same spot: no two cutters stick out alike',

@@ -39,9 +39,10 @@ const STAND_INS: Readonly<Record<string, string>> = {
   "'": '',
   '\u2019': '',
   '"': '',
+  ';': ',',
 };
 
-const NEEDS_STAND_IN = /[^ -~]|[%&'"]/;
+const NEEDS_STAND_IN = /[^ -~]|[%&'";]/;
 
 /** Never in a comment, whatever the machine file allows: these open, close or delimit. */
 const NEVER = '()[]{};%/\\"\'#';
@@ -66,7 +67,7 @@ export function commentCleaner(file: FileWords): Cleaner {
     const cased = file.letterCase === 'upper' ? plain.toUpperCase() : plain;
     const unread = breakWords(keepAllowed(cased, atFirst), has('='));
     const kept = keepAllowed(signsInWords(unread, has), allowed);
-    return kept.replace(/ {2,}/g, ' ').trim();
+    return kept.replace(/ +(?=[ .,:])/g, '').trim();
   };
 }
 
@@ -98,7 +99,7 @@ function keepAllowed(text: string, allowed: Uint8Array): string {
 
 /** Accents dropped, signs spelt; what has no stand-in is left for the filter. */
 function standIns(text: string): string {
-  const spelt = text.normalize('NFC').replace(/[^ -~]|[%&'"]/g, (letter) => STAND_INS[letter] ?? letter);
+  const spelt = text.normalize('NFC').replace(/[^ -~]|[%&'";]/g, (letter) => STAND_INS[letter] ?? letter);
   return spelt.normalize('NFKD').replace(/[\u0300-\u036f]/g, '');
 }
 

@@ -92,6 +92,7 @@ describe('what a person wrote stays readable', () => {
     ["the owner's 50% share & more", 'THE OWNERS 50 PERCENT SHARE AND MORE'],
     ['Mark 0A1B2C3D, made', 'MARK 0A1B2C3D, MADE'],
     ['M0.5', 'M=0.5'],
+    ['stays there; touch it (twice).', 'STAYS THERE, TOUCH IT TWICE.'],
   ])('%s', (text, expected) => {
     expect(clean(text)).toBe(expected);
   });

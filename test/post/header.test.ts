@@ -94,6 +94,7 @@ describe('head of a program [29 CFR 1910.212; ISO 12100; what a set-up needs to 
     expect(lines).toContain('Walk-round');
     expect(lines).toContain('Spindle: stays still');
     expect(lines).not.toContain('glasses');
+    expect(lines).not.toContain('First run');
   });
 });
 
