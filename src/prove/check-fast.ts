@@ -3,7 +3,7 @@
  * Above it anything may, once Z is known to be there.
  */
 import { FORM_ERROR } from '../base/tolerances.ts';
-import type { EachMove } from './each-move.ts';
+import { fastMoves, type FastMove } from './fast-moves.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, gathered, lengthText } from './finding-at.ts';
 import { isCleared } from './metal-cover.ts';
@@ -13,7 +13,7 @@ import type { Finding } from './proof.ts';
 const GAP = 10 * FORM_ERROR;
 
 export function checkFast(evidence: Evidence): Finding[] {
-  const fast = evidence.each.filter(({ move }) => move.kind === 'rapid');
+  const fast = fastMoves(evidence.traces, evidence.solids);
   return gathered(
     fast.flatMap((each) => {
       const message = sideways(evidence, each) ?? downwards(evidence, each);
@@ -22,7 +22,7 @@ export function checkFast(evidence: Evidence): Finding[] {
   );
 }
 
-function fastFinding({ move }: EachMove, message: string): Finding {
+function fastFinding({ move }: FastMove, message: string): Finding {
   return findingAt(move, {
     code: 'prove.fast-move',
     message,
@@ -32,7 +32,7 @@ function fastFinding({ move }: EachMove, message: string): Finding {
 }
 
 /** Fast and not straight up or down. */
-function sideways({ input, lastDigit }: Evidence, { move, atTop }: EachMove): string | undefined {
+function sideways({ input, lastDigit }: Evidence, { move, atTop }: FastMove): string | undefined {
   const { from, to } = move;
   if (from.x === to.x && from.y === to.y) {
     return undefined;
@@ -47,7 +47,7 @@ function sideways({ input, lastDigit }: Evidence, { move, atTop }: EachMove): st
     : undefined;
 }
 
-function downwards(evidence: Evidence, { move, before, path }: EachMove): string | undefined {
+function downwards(evidence: Evidence, { move, before, path }: FastMove): string | undefined {
   const { input, solids, lastDigit } = evidence;
   const { setup } = input;
   const { from, to } = move;

@@ -10,7 +10,6 @@ import { wheelBody } from './metal-inside.ts';
 import { blankRaster, cutRaster, type Raster } from './metal-raster.ts';
 import type { Finding } from './proof.ts';
 import type { PathSet, SolidMove } from './metal-paths.ts';
-import { twinOf } from './metal-twins.ts';
 
 /** Squares from the axis to the edge of what is looked at: what a wheel needs so that its spaces are seen. */
 const SQUARES = 150;
@@ -29,7 +28,12 @@ export function checkLoose(evidence: Evidence): Finding[] {
   }
   const reach = cutReach(evidence, target.form.outsideRadius);
   const raster = blankRaster(setup, reach, squareSize(evidence, reach));
-  const cutting: Cutting = { raster, known: new Map(), height: new Map(), waiting: new Set() };
+  const cutting: Cutting = {
+    raster,
+    height: new Float64Array(solids.length).fill(Number.NaN),
+    waiting: [],
+    waits: new Uint8Array(solids.length),
+  };
   const body = wheelBody(target.form, target.bore, target.crossings);
   const through = setup.plateZ + lastDigit;
   const worst: Bite = { bite: 0, share: DEEPEST_BITE };
@@ -78,28 +82,28 @@ interface Bite {
 /** What has been run, so that a lap that repeats another need not be drawn again at once. */
 interface Cutting {
   readonly raster: Raster;
-  readonly known: Map<number, number[]>;
-  /** Height each path has been cut down to. */
-  readonly height: Map<number, number>;
-  /** Paths whose height the raster does not show yet. */
-  readonly waiting: Set<number>;
+  /** Height each path has been cut down to; NaN before. */
+  readonly height: Float64Array;
+  /** Paths whose height the raster does not show yet, and a mark for each of them. */
+  readonly waiting: number[];
+  readonly waits: Uint8Array;
 }
 
 function takeBite(cutting: Cutting, { paths, solids }: Evidence, i: number, worst: Bite): void {
   const solid = solids[i]!;
   // A fall is taken at its upper end: what is left is never said to be less than it is.
   const z = Math.max(solid.z0, solid.z1);
-  const twin = twinOf(paths, cutting.known, i);
-  const was = twin < 0 ? undefined : cutting.height.get(twin);
+  const twin = paths.twin[i]!;
+  const was = cutting.height[twin]!;
   let bite: number;
-  if (was === undefined) {
+  if (Number.isNaN(was)) {
     drawWaiting(cutting, paths);
     bite = cutRaster(cutting.raster, paths, i, z);
+    cutting.height[twin] = z;
   } else {
     bite = was - z;
-    cutting.waiting.add(twin);
+    waitFor(cutting, twin, Math.min(z, was));
   }
-  cutting.height.set(twin < 0 ? i : twin, Math.min(z, was ?? z));
   const share = bite / (2 * solid.radius);
   if (share > worst.share) {
     worst.bite = bite;
@@ -108,11 +112,20 @@ function takeBite(cutting: Cutting, { paths, solids }: Evidence, i: number, wors
   }
 }
 
-function drawWaiting({ raster, height, waiting }: Cutting, paths: PathSet): void {
-  for (const path of waiting) {
-    cutRaster(raster, paths, path, height.get(path) ?? Infinity);
+function waitFor({ height, waiting, waits }: Cutting, path: number, z: number): void {
+  height[path] = z;
+  if (waits[path] === 0) {
+    waits[path] = 1;
+    waiting.push(path);
   }
-  waiting.clear();
+}
+
+function drawWaiting({ raster, height, waiting, waits }: Cutting, paths: PathSet): void {
+  for (const path of waiting) {
+    cutRaster(raster, paths, path, height[path]!);
+    waits[path] = 0;
+  }
+  waiting.length = 0;
 }
 
 function cameLoose(solid: SolidMove, { x, y, area }: Piece): Finding {

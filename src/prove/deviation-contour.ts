@@ -10,6 +10,7 @@ import {
   decidingPath,
   deviationOn,
   measureCopy,
+  narrowed,
   readingsFor,
   type Field,
   type Height,
@@ -45,7 +46,7 @@ export interface ContourFigures {
 export type CopyReader = (copy: number, field: Field, readings: Readings) => void;
 
 /** A peak that cannot beat the worst known by this is not looked into. */
-const WORTH = PROOF_RESOLUTION / 10;
+const WORTH = PROOF_RESOLUTION / 5;
 
 export function measureContour(
   set: PathSet,
@@ -82,35 +83,34 @@ interface Copy {
   readonly height: Height;
 }
 
-/** What is read at a station: from the deviation to the figure that is wanted at its worst. */
-type Figure = (deviation: number, piece: number, u: number) => number;
+/** What is wanted at its worst: metal cut away, metal left, or how far the metal's surface is from the exact outline. */
+type Figure = 'gouge' | 'left' | 'thickness';
 
 function takeWorst(copy: Copy, figures: ContourFigures): void {
   const { stations } = copy;
   const deviations = copy.readings[copy.height];
-  const asThick: Figure = (deviation, piece, u) => thicknessAt(stations, piece, u, deviation);
   for (let i = 0; i < stations.count; i++) {
     const region = stations.region[i]!;
+    const deviation = deviations[i]!;
     if (region === REGION.root) {
-      figures.rootMiss = better(copy, figures.rootMiss, asLeft, i);
+      figures.rootMiss = better(copy, figures.rootMiss, 'left', i);
       // The surface is no further from the outline than the station is, and what stands beyond it.
-      const most = stations.beyond[i]! + Math.max(0, deviations[i]!);
-      if (most > figures.left[region]!.value + WORTH) {
-        figures.left[region] = better(copy, figures.left[region]!, asThick, i);
+      if (stations.beyond[i]! + Math.max(0, deviation) > figures.left[region]!.value + WORTH) {
+        figures.left[region] = better(copy, figures.left[region]!, 'thickness', i);
       }
-    } else if (deviations[i]! < 0) {
-      figures.gouge = better(copy, figures.gouge, asGouge, i);
+    } else if (deviation < 0) {
+      figures.gouge = better(copy, figures.gouge, 'gouge', i);
     } else if (region !== REGION.bare) {
-      figures.left[region] = better(copy, figures.left[region]!, asLeft, i);
+      figures.left[region] = better(copy, figures.left[region]!, 'left', i);
     }
   }
 }
 
-const asLeft: Figure = (deviation) => deviation;
-const asGouge: Figure = (deviation) => -deviation;
-
-/** How far the metal's surface is from the exact outline, where the station is on what the cutter should leave. */
-function thicknessAt(stations: Stations, piece: number, u: number, deviation: number): number {
+/** The figure that a deviation at u of a piece makes. */
+function figureOf(stations: Stations, figure: Figure, piece: number, u: number, deviation: number): number {
+  if (figure !== 'thickness') {
+    return figure === 'gouge' ? -deviation : deviation;
+  }
   const { piece: exact, beyond } = stations.pieces[piece]!;
   const at = stationAt(exact, u);
   return beyond?.(at.x + deviation * at.nx, at.y + deviation * at.ny) ?? deviation;
@@ -118,22 +118,38 @@ function thicknessAt(stations: Stations, piece: number, u: number, deviation: nu
 
 /** The worse of what is known and the peak at station i, found between its neighbours where it could be worse. */
 function better(copy: Copy, known: Worst, figure: Figure, i: number): Worst {
-  const { stations, readings, height, field } = copy;
+  const { stations } = copy;
   const piece = stations.piece[i]!;
-  const read = (k: number): number => figure(readings[height][k]!, piece, stations.u[k]!);
   const before = i > 0 && stations.piece[i - 1] === piece ? i - 1 : i;
   const after = i + 1 < stations.count && stations.piece[i + 1] === piece ? i + 1 : i;
-  const value = read(i);
-  const rise = value - read(before);
-  const fall = value - read(after);
+  const deviations = copy.readings[copy.height];
+  const value = figureOf(stations, figure, piece, stations.u[i]!, deviations[i]!);
+  const rise = value - figureOf(stations, figure, piece, stations.u[before]!, deviations[before]!);
+  const fall = value - figureOf(stations, figure, piece, stations.u[after]!, deviations[after]!);
   if (rise < 0 || fall < 0 || value + Math.max(rise, fall) <= known.value + WORTH) {
     return known;
   }
-  const between = (u: number): number => figure(deviationOn(field, stations, piece, u, height), piece, u);
+  const between = peakReader(copy, figure, piece, before, after);
   const u = highestOf(between, stations.u[before]!, stations.u[after]!);
   const top = between(u);
   const [at, most] = top > value ? [u, top] : [stations.u[i]!, value];
   return most <= known.value ? known : worstAt(copy, piece, at, most);
+}
+
+/** The figure anywhere between two stations of a piece. */
+function peakReader(
+  { stations, field, height }: Copy,
+  figure: Figure,
+  piece: number,
+  before: number,
+  after: number,
+): (u: number) => number {
+  const few = narrowed(field, stations, before, after);
+  return (u) => {
+    const quick = deviationOn(few.field, stations, piece, u, height);
+    const sure = quick > few.trusted ? deviationOn(field, stations, piece, u, height) : quick;
+    return figureOf(stations, figure, piece, u, sure);
+  };
 }
 
 function worstAt({ field, stations, copy, height }: Copy, piece: number, u: number, value: number): Worst {

@@ -78,6 +78,19 @@ export function deviationOn(
   return deviationAt(field, field.near.paths, 0, count, region !== REGION.bare);
 }
 
+/** The same field with only the paths that can decide deviations up to `trusted` between two stations. */
+export function narrowed(
+  field: Field,
+  stations: Stations,
+  first: number,
+  last: number,
+): { readonly field: Field; readonly trusted: number } {
+  const picked = pickingRoom(field.near.paths.length);
+  pickPaths(field, stations, first, last + 1, picked);
+  const near = { paths: picked.paths.subarray(0, picked.count), deep: picked.deep };
+  return { field: { ...field, near }, trusted: picked.trusted };
+}
+
 const nearest: Nearest = { path: -1 };
 
 /** The path that decided the last deviation. */

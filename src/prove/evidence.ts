@@ -5,7 +5,6 @@
 import { millimetresPer } from '../base/units.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
-import { eachMove, type EachMove } from './each-move.ts';
 import { extentsOf, type Extents } from './extents.ts';
 import { pathsBelow, solidMoves, type PathSet, type SolidMove } from './metal-paths.ts';
 import type { ProofInput } from './proof.ts';
@@ -21,7 +20,6 @@ export interface Evidence {
   /** Their paths, whole and in the same order. */
   readonly paths: PathSet;
   readonly extents: Extents;
-  readonly each: readonly EachMove[];
   readonly cutterOf: (move: TracedMove) => Cutter | undefined;
   /** One unit of the last digit the machine file writes, mm. */
   readonly lastDigit: number;
@@ -53,7 +51,6 @@ export function gatherEvidence(input: ProofInput, traces: readonly Trace[]): Evi
     solids,
     paths,
     extents: extentsOf(moves),
-    each: eachMove(traces, solids),
     cutterOf,
     lastDigit,
     figures,

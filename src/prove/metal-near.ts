@@ -4,7 +4,6 @@
  *
  * In : paths, number of copies, radii between which the outline lies. Out: for each copy the indices of its paths.
  */
-import { twinOf } from './metal-twins.ts';
 import type { PathSet } from './metal-paths.ts';
 
 /** The paths of one copy, the deep ones first. */
@@ -23,8 +22,11 @@ export interface Ring {
 
 export function nearLists(set: PathSet, ring: Ring, slack: number): NearList[] {
   const pitch = (2 * Math.PI) / ring.copies;
-  const lists = Array.from({ length: ring.copies }, (): Gathered => ({ paths: [], byEnds: new Map() }));
+  const lists: number[][] = Array.from({ length: ring.copies }, () => []);
   for (let i = 0; i < set.count; i++) {
+    if (set.twin[i] !== i) {
+      continue;
+    }
     const mx = set.mx[i]!;
     const my = set.my[i]!;
     const rho = Math.sqrt(mx * mx + my * my);
@@ -37,10 +39,10 @@ export function nearLists(set: PathSet, ring: Ring, slack: number): NearList[] {
     const first = Math.ceil((middle - half) / pitch);
     const last = Math.min(Math.floor((middle + half) / pitch), first + ring.copies - 1);
     for (let k = first; k <= last; k++) {
-      addOnce(set, lists[((k % ring.copies) + ring.copies) % ring.copies]!, i);
+      lists[((k % ring.copies) + ring.copies) % ring.copies]!.push(i);
     }
   }
-  return lists.map(({ paths }) => deepFirst(set, paths));
+  return lists.map((list) => deepFirst(set, list));
 }
 
 function deepFirst(set: PathSet, list: readonly number[]): NearList {
@@ -49,16 +51,4 @@ function deepFirst(set: PathSet, list: readonly number[]): NearList {
     paths: Int32Array.from([...deep, ...list.filter((i) => set.deep[i] === 0)]),
     deep: deep.length,
   };
-}
-
-/** The paths of one copy so far, and those of them that share a start and an end. */
-interface Gathered {
-  readonly paths: number[];
-  readonly byEnds: Map<number, number[]>;
-}
-
-function addOnce(set: PathSet, { paths, byEnds }: Gathered, i: number): void {
-  if (twinOf(set, byEnds, i) < 0) {
-    paths.push(i);
-  }
 }

@@ -8,6 +8,7 @@
  * In: traced moves with the radius of their cutter. Out: lines and arcs of the cutter's axis; mm, the program's frame.
  */
 import type { TracedMove } from '../motion/traced-move.ts';
+import { twinsOf } from './metal-twins.ts';
 
 /** A move whose two ends and cutter are known. */
 export interface SolidMove {
@@ -41,6 +42,8 @@ export interface PathSet {
   readonly radius: Float64Array;
   /** 1 where the whole path lies at or below the lower height. */
   readonly deep: Uint8Array;
+  /** For each path the first one in the same place: itself, where there was none. */
+  readonly twin: Int32Array;
   /** The move each path is part of. */
   readonly solids: readonly SolidMove[];
 }
@@ -86,7 +89,7 @@ export function pathsBelow(solids: readonly SolidMove[], lower: number, upper: n
     const high = deep[i] === 1 ? lower : upper;
     place(set, i, parts[i]!, shareWithin(z0, z1, low, high), 1 - shareWithin(z1, z0, low, high));
   }
-  return set;
+  return { ...set, twin: twinsOf(set) };
 }
 
 /** Share of the way from z0 to z1 after which the height is between low and high. */
@@ -97,7 +100,9 @@ function shareWithin(z0: number, z1: number, low: number, high: number): number 
   return z0 === z1 ? 0 : ((z0 < low ? low : high) - z0) / (z1 - z0);
 }
 
-function emptySet(solids: readonly SolidMove[], deep: Uint8Array): PathSet {
+type UntwinnedSet = Omit<PathSet, 'twin'>;
+
+function emptySet(solids: readonly SolidMove[], deep: Uint8Array): UntwinnedSet {
   const field = (): Float64Array => new Float64Array(solids.length);
   return {
     count: solids.length,
@@ -119,7 +124,7 @@ function emptySet(solids: readonly SolidMove[], deep: Uint8Array): PathSet {
 }
 
 /** The part of the move between u and v, as path i. */
-function place(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
+function place(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: number): void {
   set.radius[i] = solid.radius;
   if (solid.move.turn === undefined) {
     placeLine(set, i, solid, u, v);
@@ -128,7 +133,7 @@ function place(set: PathSet, i: number, solid: SolidMove, u: number, v: number):
   }
 }
 
-function placeLine(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
+function placeLine(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: number): void {
   const { x0, y0, x1, y1 } = solid;
   const dx = x1 - x0;
   const dy = y1 - y0;
@@ -141,7 +146,7 @@ function placeLine(set: PathSet, i: number, solid: SolidMove, u: number, v: numb
   set.bound[i] = (Math.sqrt(dx * dx + dy * dy) * (v - u)) / 2;
 }
 
-function placeArc(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
+function placeArc(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: number): void {
   const { x0, y0, x1, y1 } = solid;
   const turn = solid.move.turn ?? 0;
   const { x: cx, y: cy } = solid.move.centre ?? { x: 0, y: 0 };
@@ -171,7 +176,7 @@ function placeArc(set: PathSet, i: number, solid: SolidMove, u: number, v: numbe
 
 /** The spoke (x, y) of path i's arc, turned: where its end lies. */
 function turned(
-  set: PathSet,
+  set: UntwinnedSet,
   i: number,
   angle: number,
   x: number,

@@ -1,25 +1,30 @@
-/** Paths that lie in the same place as one before: the laps of a descent, a spring pass. Told apart by exact comparison. */
+/**
+ * Paths that lie in the same place as one before: the laps of a descent, a spring pass. For each path the first one in its
+ * place, itself where it is that. Told apart by exact comparison; the mixture of ends only finds what to compare.
+ */
 import type { PathSet } from './metal-paths.ts';
 
-/** The first path among `known` that path i repeats (-1 if none, and i is then known too). */
-export function twinOf(set: PathSet, known: Map<number, number[]>, i: number): number {
-  // Any mixture of the ends will do for a key: what shares it is compared in full.
-  const key = set.x0[i]! + 7 * set.y1[i]!;
-  const alike = known.get(key);
-  if (alike === undefined) {
-    known.set(key, [i]);
-    return -1;
-  }
-  for (const k of alike) {
-    if (samePath(set, i, k)) {
-      return k;
+export function twinsOf(set: Omit<PathSet, 'twin'>): Int32Array {
+  const twin = new Int32Array(set.count);
+  const newest = new Map<number, number>();
+  const older = new Int32Array(set.count).fill(-1);
+  for (let i = 0; i < set.count; i++) {
+    const key = set.x0[i]! + 7 * set.y1[i]! + 3 * set.deep[i]!;
+    const last = newest.get(key) ?? -1;
+    let k = last;
+    while (k >= 0 && !samePath(set, i, k)) {
+      k = older[k]!;
+    }
+    twin[i] = k < 0 ? i : k;
+    if (k < 0) {
+      older[i] = last;
+      newest.set(key, i);
     }
   }
-  alike.push(i);
-  return -1;
+  return twin;
 }
 
-function samePath(set: PathSet, i: number, k: number): boolean {
+function samePath(set: Omit<PathSet, 'twin'>, i: number, k: number): boolean {
   return (
     set.x0[i] === set.x0[k] &&
     set.y0[i] === set.y0[k] &&

@@ -1,12 +1,12 @@
 /**
- * Every move in the order it is run, with what the checks of motion ask of it: its path among the known ones, how many were run
+ * Every fast move in the order it is run, with what is asked of it: its path among the known ones, how many were run
  * before it, and whether the spindle stood at the machine's top when its Z is not known.
  */
 import type { TracedMove } from '../motion/traced-move.ts';
 import type { SolidMove } from './metal-paths.ts';
 import type { Trace } from './trace-program.ts';
 
-export interface EachMove {
+export interface FastMove {
   readonly move: TracedMove;
   /** How many moves of known place were run before this one. */
   readonly before: number;
@@ -16,8 +16,8 @@ export interface EachMove {
   readonly atTop: boolean;
 }
 
-export function eachMove(traces: readonly Trace[], solids: readonly SolidMove[]): EachMove[] {
-  const moves: EachMove[] = [];
+export function fastMoves(traces: readonly Trace[], solids: readonly SolidMove[]): FastMove[] {
+  const moves: FastMove[] = [];
   let before = 0;
   for (const { moves: own, events } of traces) {
     let atTop = false;
@@ -28,7 +28,9 @@ export function eachMove(traces: readonly Trace[], solids: readonly SolidMove[])
         atTop = event.kind === 'machine-place' && event.axes.includes('z') ? true : atTop;
       }
       const path = solids[before]?.move === move ? before : -1;
-      moves.push({ move, before, path, atTop: atTop && move.from.z === null });
+      if (move.kind === 'rapid') {
+        moves.push({ move, before, path, atTop: atTop && move.from.z === null });
+      }
       before += path < 0 ? 0 : 1;
       atTop = atTop && move.to.z === null;
     });
