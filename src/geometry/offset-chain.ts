@@ -13,7 +13,7 @@ import { linkLoops, mergeParts } from './link-offset.ts';
 import { offsetPolygon, type Ring } from './offset-polygon.ts';
 import { linkPitch, pitchRays, startsPitch, withinRays } from './one-pitch.ts';
 import type { Chain, LinePiece, Loop } from './piece.ts';
-import { ORIGIN, type Point } from './point.ts';
+import { ORIGIN, unit, type Point } from './point.ts';
 import { rawOffset, type OffsetPiece } from './raw-offset.ts';
 import { distanceToRing } from './ring.ts';
 import { sampleLoop } from './sample-piece.ts';
@@ -62,7 +62,7 @@ export function offsetSector(sector: Chain, count: number, distance: number): Ou
   const found = mergeParts(way, raw, false);
   const main = nearestRing(rings, way[0]?.from ?? ORIGIN);
   const { worst, at } = disagreement({
-    corners: main.filter((corner) => inWedge(corner, knives, far + 1.5 * Math.abs(distance))),
+    corners: cornersBetween(main, knives, far + 1.5 * Math.abs(distance)),
     rings: [main],
     chains: [found.map(({ piece }) => piece)],
   });
@@ -105,12 +105,14 @@ function nearestRing(rings: readonly Ring[], point: Point): Ring {
 }
 
 /** Between the rays and not on the polygon's far side; a little off the rays, so that nothing beyond them is asked for. */
-function inWedge(point: Point, knives: readonly LinePiece[], far: number): boolean {
-  if (Math.hypot(point.x, point.y) > far) {
-    return false;
-  }
-  const [first, last] = knives.map(({ to }) => (to.x * point.y - to.y * point.x) / Math.hypot(to.x, to.y));
-  return (first as number) > 2 * CLIP_AGREEMENT && (last as number) < -2 * CLIP_AGREEMENT;
+function cornersBetween(ring: Ring, knives: readonly LinePiece[], far: number): Point[] {
+  const [first, last] = knives.map(({ to }) => unit(to)) as [Point, Point];
+  const off = 2 * CLIP_AGREEMENT;
+  return ring.filter((point) => {
+    const { x, y } = point;
+    const between = first.x * y - first.y * x > off && last.x * y - last.y * x < -off;
+    return between && x * x + y * y < far * far;
+  });
 }
 
 function disagrees(distance: number, worst: number, at: Point): Outcome<never> {

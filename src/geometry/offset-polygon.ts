@@ -30,10 +30,9 @@ export function offsetPolygon(rings: readonly Ring[], distance: number, sag: num
   if (!Number.isFinite(distance) || !(sag > 0)) {
     throw new Bug(`cannot offset a polygon by ${distance} mm to ${sag} mm`);
   }
-  const most = rings.flat().reduce((far, { x, y }) => Math.max(far, finite(x), finite(y)), 0);
-  const reach = (most + Math.abs(distance)) / CLIPPER_STEP;
-  if (reach >= MOST_STEPS) {
-    return tooLarge(most + Math.abs(distance));
+  const reach = furthest(rings) + Math.abs(distance);
+  if (reach / CLIPPER_STEP >= MOST_STEPS) {
+    return tooLarge(reach);
   }
   const solid = turnedByNesting(rings.map(cleanRing).filter((ring) => ring.length > 2));
   const grown = clip(
@@ -42,19 +41,20 @@ export function offsetPolygon(rings: readonly Ring[], distance: number, sag: num
     (ARC_SHARE * sag) / CLIPPER_STEP,
   );
   const start = solid[0]?.[0];
-  return success(
-    grown
-      .map((path) => withoutSpikes(path).map(fromSteps))
-      .filter((ring) => ring.length > 2)
-      .map((ring) => startedNear(ring, start)),
-  );
+  return success(grown.map((path) => toRing(withoutSpikes(path), start)).filter((ring) => ring.length > 2));
 }
 
-function finite(coordinate: number): number {
-  if (!Number.isFinite(coordinate)) {
-    throw new Bug('a polygon has a corner that is not a number');
+function furthest(rings: readonly Ring[]): number {
+  let most = 0;
+  for (const ring of rings) {
+    for (const { x, y } of ring) {
+      if (!Number.isFinite(x) || !Number.isFinite(y)) {
+        throw new Bug('a polygon has a corner that is not a number');
+      }
+      most = Math.max(most, Math.abs(x), Math.abs(y));
+    }
   }
-  return Math.abs(coordinate);
+  return most;
 }
 
 function tooLarge(reach: number): Outcome<Ring[]> {
@@ -70,7 +70,7 @@ function tooLarge(reach: number): Outcome<Ring[]> {
 }
 
 /** Rings inside an even number of others are outer ones and turn counter-clockwise, the rest are holes. */
-function turnedByNesting(rings: readonly Ring[]): Ring[] {
+function turnedByNesting(rings: readonly Ring[]): readonly Ring[] {
   return rings.map((ring) => {
     const depth = rings.filter((other) => other !== ring && holdsPoint(other, ring[0] as Point)).length;
     const outer = depth % 2 === 0;
@@ -94,40 +94,48 @@ function toSteps({ x, y }: Point): { X: number; Y: number } {
   return { X: Math.round(x / CLIPPER_STEP), Y: Math.round(y / CLIPPER_STEP) };
 }
 
-function fromSteps({ X, Y }: { X: number; Y: number }): Point {
-  return { x: X * CLIPPER_STEP, y: Y * CLIPPER_STEP };
-}
-
 /** Without corners that turn back on a leg as short as the rounding: they say nothing of place and all of direction wrong. */
 function withoutSpikes(path: Path): Path {
   const kept: Path = [];
-  path.forEach((corner, i) => {
-    const before = kept.at(-1) ?? (path.at(-1) as Path[number]);
-    const after = path[(i + 1) % path.length] as Path[number];
-    const [ax, ay] = [corner.X - before.X, corner.Y - before.Y];
-    const [bx, by] = [after.X - corner.X, after.Y - corner.Y];
-    const [a, b] = [Math.hypot(ax, ay), Math.hypot(bx, by)];
-    const back = ax * bx + ay * by < -0.5 * a * b;
-    if (a > 0 && !(back && Math.min(a, b) <= SPIKE_STEPS)) {
+  let before = path.at(-1);
+  for (let i = 0; before !== undefined && i < path.length; i++) {
+    const corner = path[i] as Path[number];
+    const after = path[i + 1] ?? (path[0] as Path[number]);
+    const ax = corner.X - before.X;
+    const ay = corner.Y - before.Y;
+    const bx = after.X - corner.X;
+    const by = after.Y - corner.Y;
+    const along = ax * bx + ay * by;
+    if ((ax !== 0 || ay !== 0) && !(along < 0 && turnsBack(along, Math.hypot(ax, ay), Math.hypot(bx, by)))) {
       kept.push(corner);
+      before = corner;
     }
-  });
+  }
   return kept;
 }
 
-/** Clipper begins where it likes: begun again at the corner nearest to where the first ring was begun. */
-function startedNear(ring: Ring, start: Point | undefined): Ring {
-  if (start === undefined) {
-    return ring;
-  }
+/** By more than 120 degrees, one leg a step or three long. */
+function turnsBack(along: number, before: number, after: number): boolean {
+  return along < -0.5 * before * after && Math.min(before, after) <= SPIKE_STEPS;
+}
+
+/** In mm. Clipper begins where it likes: begun again at the corner nearest to where the first ring was begun. */
+function toRing(path: Path, start: Point | undefined): Ring {
   let nearest = 0;
   let best = Infinity;
-  ring.forEach(({ x, y }, i) => {
-    const square = (x - start.x) ** 2 + (y - start.y) ** 2;
+  const target = start && toSteps(start);
+  for (let i = 0; target !== undefined && i < path.length; i++) {
+    const { X, Y } = path[i] as Path[number];
+    const square = (X - target.X) ** 2 + (Y - target.Y) ** 2;
     if (square < best) {
       best = square;
       nearest = i;
     }
-  });
-  return [...ring.slice(nearest), ...ring.slice(0, nearest)];
+  }
+  const ring: Point[] = [];
+  for (let i = 0; i < path.length; i++) {
+    const { X, Y } = path[(nearest + i) % path.length] as Path[number];
+    ring.push({ x: X * CLIPPER_STEP, y: Y * CLIPPER_STEP });
+  }
+  return ring;
 }

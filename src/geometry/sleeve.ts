@@ -1,12 +1,12 @@
 /**
  * The chord of a piece and how far the piece may stray from it: to leave out what is far away before anything is reckoned
- * exactly. A curve that turns by a lies within a triangle over its chord, whose height is at most chord / 2 tan(a/2). mm.
+ * exactly. A curve that turns one way strays furthest where it runs along its chord. mm.
  */
 import { SAME_POINT } from '../base/tolerances.ts';
-import { cycloidCusps } from './cycloid.ts';
+import { cycloidCusps, cycloidPoint } from './cycloid.ts';
 import { endOf, lengthOf, startOf, turnOf } from './on-piece.ts';
-import type { Piece } from './piece.ts';
-import { cross, distance, subtract, type Point } from './point.ts';
+import type { CycloidPiece, Piece } from './piece.ts';
+import { cross, norm, subtract, type Point } from './point.ts';
 
 export interface Sleeve {
   readonly from: Point;
@@ -28,9 +28,22 @@ function widthOf(piece: Piece, from: Point, to: Point): number {
   if (piece.kind === 'arc') {
     return turn <= Math.PI ? piece.radius * (1 - Math.cos(turn / 2)) : 2 * piece.radius;
   }
-  const smooth = turn < Math.PI / 2 && cycloidCusps(piece).length === 0;
+  if (turn < Math.PI / 2 && cycloidCusps(piece).length === 0) {
+    return turn === 0 ? 0 : furthestFromChord(piece, from, to);
+  }
   // No point of a curve is further than half its length from the nearer end.
-  return smooth ? (distance(from, to) / 2) * Math.tan(turn / 2) : lengthOf(piece) / 2;
+  return lengthOf(piece) / 2;
+}
+
+/** Where the curve runs along its chord it is furthest from it; the heading's direction is sense (1 + R/2r) t + cusp. */
+function furthestFromChord(piece: CycloidPiece, from: Point, to: Point): number {
+  const chord = subtract(to, from);
+  const bend = piece.sense * (1 + piece.fixed / (2 * piece.rolling));
+  const start = bend * piece.from + piece.cusp;
+  // From the first heading to the chord's, as lines: less than a quarter turn.
+  const turned = Math.atan2(chord.y, chord.x) - start;
+  const t = piece.from + (turned - Math.PI * Math.round(turned / Math.PI)) / bend;
+  return Math.abs(cross(subtract(cycloidPoint(piece, t), from), chord)) / (norm(chord) || 1) + SAME_POINT;
 }
 
 /** Whether the pieces inside may come within SAME_POINT of each other. */

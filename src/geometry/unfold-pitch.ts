@@ -6,7 +6,7 @@ import type { OffsetPiece } from './raw-offset.ts';
 
 /** The half up to the X axis and its mirror image; a piece across the axis is one piece. `count`: pieces of the outline. */
 export function unfolded(half: readonly OffsetPiece[], count: number): OffsetPiece[] {
-  const images = half.map((offset) => image(offset, count)).reverse();
+  const images = half.toReversed().map((offset) => image(offset, count));
   const last = half.at(-1);
   const first = images[0];
   const whole = last && first && acrossAxis(last, first);

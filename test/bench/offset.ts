@@ -67,7 +67,7 @@ function wasm(): number {
   return library.grow(ring, DISTANCE * STEPS_PER_MM, SAG * STEPS_PER_MM, STEPS_PER_MM);
 }
 
-const ROUNDS = 400;
+const ROUNDS = 1000;
 
 /** Milliseconds, the middle of many runs after as many to warm up; contestants take turns, so that all see the same load. */
 function medians(contestants: readonly (() => unknown)[]): number[] {
