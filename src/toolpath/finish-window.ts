@@ -1,0 +1,126 @@
+/**
+ * The wall of a window, finished in one loop at the cutter's radius, joined and left on tangent arcs from the cleared middle.
+ *
+ * In  : the exact loop (counter-clockwise), cutter, metal left on the wall. Wheel frame, mm.
+ * Out : one run, or nothing where no free place for the arcs was found. All pieces of the wall have their parallel as the
+ *       corners are not smaller than the cutter. Feed on inside arcs as `insideArcFeed`.
+ */
+import { SAME_POINT } from '../base/tolerances.ts';
+import { insideArcFeed } from '../cutting/arc-feed.ts';
+import { offsetPiece, partOf, reversePiece } from '../geometry/change-piece.ts';
+import { nearestOnChain } from '../geometry/nearest-on-piece.ts';
+import { endOf, headingOn, lengthOf, startOf } from '../geometry/on-piece.ts';
+import type { Loop, Piece } from '../geometry/piece.ts';
+import { addScaled, leftOf, type Point } from '../geometry/point.ts';
+import type { Belongs, MoveStep } from '../motion/motion.ts';
+import type { Heights } from './heights.ts';
+import { arcLeg, flat, lineLeg, vertical, type Leg, type Run } from './leg.ts';
+import { levelsFor, type Settings } from './settings.ts';
+
+export interface WallTask {
+  readonly window: Loop;
+  readonly settings: Settings;
+  readonly heights: Heights;
+  readonly way: 1 | -1;
+  readonly pass: string;
+  readonly radialDepth: number;
+}
+
+/** How far the loop runs past its start, mm. Judgement: no step shows where it was joined. */
+const OVERLAP = 0.2;
+/** The arcs in and out are tried from this share of the cutter's radius, each try this much smaller. */
+const SMALLER = 0.8;
+const TRIES = 12;
+
+export function finishWindow(task: WallTask): Run | undefined {
+  const { settings, heights, way, pass } = task;
+  const path = wallPath(task);
+  const join = startOf(path[0] as Piece);
+  const heading = headingOn(path[0] as Piece, 0);
+  const inward = way === 1 ? leftOf(heading) : leftOf({ x: -heading.x, y: -heading.y });
+  const overlap = Math.min(OVERLAP, lengthOf(path[0] as Piece) / 2);
+  const left = addScaled(join, heading, overlap);
+  const lead = leadRadius(task, [join, left], heading, inward);
+  if (lead === undefined) {
+    return undefined;
+  }
+  const depth = heights.top - heights.bottom;
+  const levels = levelsFor(depth, settings.cutter.flute);
+  const begin = addScaled(addScaled(join, inward, lead), heading, -lead);
+  const end = addScaled(addScaled(left, inward, lead), heading, lead);
+  const quarter = (way * Math.PI) / 2;
+  const { feed } = settings.data;
+  const legs = [
+    arcLeg(join, addScaled(join, inward, lead), quarter, feed),
+    ...path.map((piece) => wallLeg(task, piece)),
+    lineLeg(left, feed),
+    arcLeg(end, addScaled(left, inward, lead), quarter, feed),
+    lineLeg(begin, feed),
+  ];
+  const steps: MoveStep[] = [];
+  for (let level = 1; level <= levels; level++) {
+    const z = level === levels ? heights.bottom : heights.top - (depth * level) / levels;
+    const belongs: Belongs = { pass, lap: level, laps: levels, depth: z };
+    steps.push(vertical(begin, z, feed, belongs), ...flat(legs, z, belongs));
+  }
+  return { at: begin, fastTo: heights.approach, steps };
+}
+
+/** The wall's parallel in travel order, from the middle of its longest straight side. */
+function wallPath({ window, settings, way }: WallTask): Loop {
+  const parallel = window
+    .map((piece) => offsetPiece(piece, -settings.radius))
+    .filter((piece) => piece !== undefined)
+    .filter((piece) => lengthOf(piece) > SAME_POINT);
+  const travelled = way === 1 ? parallel : parallel.toReversed().map(reversePiece);
+  const straight = travelled.map((piece) => (piece.kind === 'line' ? lengthOf(piece) : 0));
+  const index = straight.indexOf(Math.max(...straight));
+  const first = travelled[index] as Piece;
+  return [
+    partOf(first, 0.5, 1),
+    ...travelled.slice(index + 1),
+    ...travelled.slice(0, index),
+    partOf(first, 0, 0.5),
+  ];
+}
+
+function wallLeg({ settings, way, radialDepth }: WallTask, piece: Piece): Leg {
+  const { data, cutter } = settings;
+  if (piece.kind !== 'arc') {
+    return lineLeg(endOf(piece), data.feed);
+  }
+  const feed =
+    way * piece.turn > 0
+      ? insideArcFeed({
+          feed: data.feed,
+          pathRadius: piece.radius,
+          cutterDiameter: cutter.diameter,
+          radialDepth,
+          flutes: cutter.flutes,
+          speed: data.speed,
+        })
+      : data.feed;
+  return arcLeg(endOf(piece), piece.centre, piece.turn, feed);
+}
+
+/** The largest arc in and out that stays free of the wall. */
+function leadRadius(
+  task: WallTask,
+  ends: readonly Point[],
+  heading: Point,
+  inward: Point,
+): number | undefined {
+  let lead = task.settings.radius;
+  for (let i = 0; i < TRIES; i++, lead *= SMALLER) {
+    const radius = lead;
+    const free = ends.every((on, k) => {
+      const along = k === 0 ? -radius : radius;
+      const at = addScaled(addScaled(on, inward, radius), heading, along);
+      return (nearestOnChain(task.window, at)?.distance ?? 0) >= task.settings.radius + radius / 2;
+    });
+    if (free) {
+      return radius;
+    }
+  }
+  return undefined;
+}

@@ -1,0 +1,100 @@
+/**
+ * The runs of some passes, laid out as one program: starts, cutter changes, moves between runs at clear height, the end.
+ *
+ * In  : passes in order, heights, what stands in the way, where to park. Out: one motion in the program's frame.
+ * Kept: cutter and spindle first, Z first and up; nothing fast below the clear height but straight up, or straight down
+ *       to just above metal; over whatever stands higher than the clear height; parked high and aside at every end.
+ */
+import type { Job } from '../job/job.ts';
+import type { Machine } from '../machine/machine.ts';
+import type { Belongs, MoveStep, Position, Step } from '../motion/motion.ts';
+import type { Heights } from './heights.ts';
+import { inTheWay } from './in-the-way.ts';
+import type { Run } from './leg.ts';
+import type { PassCuts } from './pass-cuts.ts';
+
+export interface LayTask {
+  readonly job: Job;
+  readonly machine: Machine;
+  readonly heights: Heights;
+  readonly park: Position;
+  /** What a stop for a change of cutter says, besides which cutter. */
+  readonly sayAtChange: readonly string[];
+  readonly notes: readonly string[];
+}
+
+export function layProgram(task: LayTask, passes: readonly PassCuts[]): readonly Step[] {
+  const { park } = task;
+  const steps: Step[] = [...task.notes.map((text): Step => ({ kind: 'note', text }))];
+  let at: Position = park;
+  passes.forEach((pass, i) => {
+    const before = passes[i - 1];
+    if (pass.cutter.number !== before?.cutter.number) {
+      if (before !== undefined) {
+        steps.push(...rest(at, park));
+      }
+      steps.push(
+        { kind: 'top' },
+        { kind: 'cutter', number: pass.cutter.number, say: before === undefined ? [] : task.sayAtChange },
+      );
+      steps.push({ kind: 'rapid', to: park }, { kind: 'spindle', speed: pass.speed });
+      at = park;
+    } else if (pass.speed !== before.speed) {
+      at = rise(steps, at, task.heights.over);
+      steps.push({ kind: 'spindle', speed: pass.speed });
+    }
+    for (const run of pass.runs) {
+      at = layRun(steps, task, pass, run, at);
+    }
+  });
+  return [...steps, ...rest(at, park)];
+}
+
+/** Straight up, spindle off, aside. */
+function rest(at: Position, park: Position): readonly Step[] {
+  return [
+    { kind: 'rapid', to: { ...at, z: park.z } },
+    { kind: 'spindle', speed: 0 },
+    { kind: 'top' },
+    { kind: 'rapid', to: park },
+  ];
+}
+
+function rise(steps: Step[], at: Position, z: number): Position {
+  const up = { ...at, z: Math.max(at.z, z) };
+  steps.push({ kind: 'rapid', to: up });
+  return up;
+}
+
+/** Up, across, down, and the run itself. */
+function layRun(steps: Step[], task: LayTask, pass: PassCuts, run: Run, from: Position): Position {
+  const { heights } = task;
+  const belongs = run.steps[0]?.belongs;
+  const low: Position = { ...run.at, z: Math.max(heights.clear, Math.min(from.z, heights.over)) };
+  const blocked = acrossBlocked(task, pass, from, low);
+  const z = Math.max(blocked ? heights.over : heights.clear, Math.min(from.z, heights.park));
+  const across: Position = { ...run.at, z };
+  const moves = [{ ...from, z }, across, { ...run.at, z: Math.min(run.fastTo, z) }];
+  let at = from;
+  for (const to of moves) {
+    if (to.x !== at.x || to.y !== at.y || to.z !== at.z) {
+      steps.push(rapid(to, belongs));
+      at = to;
+    }
+  }
+  for (const step of run.steps) {
+    steps.push(step);
+  }
+  return run.steps.at(-1)?.to ?? at;
+}
+
+function acrossBlocked(task: LayTask, pass: PassCuts, from: Position, to: Position): boolean {
+  const start = { ...from, z: to.z };
+  return (
+    inTheWay(start, { kind: 'rapid', to }, task.job.setup.obstacles, pass.cutter, task.machine) !== undefined
+  );
+}
+
+function rapid(to: Position, belongs: Belongs | undefined): MoveStep {
+  return belongs === undefined ? { kind: 'rapid', to } : { kind: 'rapid', to, belongs };
+}

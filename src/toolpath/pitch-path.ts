@@ -1,0 +1,173 @@
+/**
+ * The cutter centre's path along one pitch of the outline, as lines and arcs, and where on it a loop is joined.
+ *
+ * In  : the form's exact outline, the distance kept from it, the way round, whether the machine has arcs.
+ * Out : pieces in travel order from the tip corner of tooth 1 at which loops are joined to the same corner of the next
+ *       tooth, wheel frame, mm. Turned round by whole pitches they make the loop.
+ * The pieces of the exact offset stay what they are; arcs stand for the addendum's offset within FIT_ERROR.
+ */
+import { Bug } from '../base/bug.ts';
+import { success, type Outcome } from '../base/problem.ts';
+import { FIT_ERROR, FORM_ERROR, SAME_POINT } from '../base/tolerances.ts';
+import { reversePiece, turnPiece } from '../geometry/change-piece.ts';
+import { fitArcs } from '../geometry/fit-arcs.ts';
+import { fitLines } from '../geometry/fit-lines.ts';
+import { offsetSector } from '../geometry/offset-chain.ts';
+import type { ArcPiece, LinePiece, Piece } from '../geometry/piece.ts';
+import { headingOn } from '../geometry/on-piece.ts';
+import { cross, dot, norm } from '../geometry/point.ts';
+import type { WheelForm } from '../tooth/wheel.ts';
+import { overLand } from './over-land.ts';
+
+export type PathRole = 'root' | 'fillet' | 'flank' | 'addendum' | 'corner' | 'land';
+
+export interface PathPiece {
+  readonly role: PathRole;
+  readonly piece: LinePiece | ArcPiece;
+  /** Belongs to the tooth after this pitch's, in travel order. */
+  readonly next: boolean;
+}
+
+export interface PitchPath {
+  readonly distance: number;
+  /** +1 counter-clockwise round the wheel. */
+  readonly way: 1 | -1;
+  readonly made: 'arcs' | 'lines';
+  /** The corner at which loops are joined, whole: the first piece. It stays an arc until it is cut where it is joined. */
+  readonly corner: ArcPiece;
+  /** What follows it, up to the next tooth's. */
+  readonly rest: readonly PathPiece[];
+  /** Whether a land lies before the corner (else the corner is the tooth's whole tip). */
+  readonly land: boolean;
+}
+
+export interface PathRequest {
+  readonly form: WheelForm;
+  readonly distance: number;
+  readonly way: 1 | -1;
+  readonly made: 'arcs' | 'lines';
+  /** 'clear': the lands are not cut (a disc turned to the tip circle). */
+  readonly lands: 'cut' | 'clear';
+}
+
+/** A stretch of the exact offset. */
+export interface OffsetPiece {
+  readonly role: PathRole;
+  readonly piece: Piece;
+  readonly next: boolean;
+}
+
+export function pitchPath(request: PathRequest): Outcome<PitchPath> {
+  const { form, distance, way, made, lands } = request;
+  const { teeth } = form.proportions;
+  const outline = form.sector.map(({ piece }) => piece);
+  const offset = offsetSector(outline, teeth, distance);
+  if (!offset.ok) {
+    return offset;
+  }
+  const named = offset.value.chain.map(({ piece }) => ({
+    piece,
+    role: roleOf(form, piece, distance),
+    next: false,
+  }));
+  const travelled =
+    way === 1 ? named : named.toReversed().map((part) => ({ ...part, piece: reversePiece(part.piece) }));
+  const exact = fromCorner(mergeRoot(travelled), teeth, way);
+  const { corner, rest } = lands === 'clear' ? overLand(exact, teeth, way) : exact;
+  return success({
+    distance,
+    way,
+    made,
+    corner,
+    rest: joined(rest.flatMap((part) => plainly(part, made, way))),
+    land: rest.at(-1)?.role === 'land',
+  });
+}
+
+/** What a piece of the offset runs along, told by its kind and place. */
+function roleOf(form: WheelForm, piece: Piece, distance: number): PathRole {
+  if (piece.kind !== 'arc') {
+    return piece.kind === 'line' ? 'flank' : 'addendum';
+  }
+  const centre = norm(piece.centre);
+  if (centre < SAME_POINT) {
+    return piece.radius < form.pitchRadius + distance ? 'root' : 'land';
+  }
+  if (piece.turn < 0) {
+    return 'fillet';
+  }
+  return Math.abs(centre - form.outsideRadius) < SAME_TIP ? 'corner' : 'addendum';
+}
+
+/** Slack on the radius at which a tip corner lies. Far above the rounding of turned points, far below any curve's centre. */
+const SAME_TIP = SAME_POINT * 1000;
+
+/** The root arc is cut in two where pitches meet: the second half goes on to the middle of the next space and beyond. */
+function mergeRoot(pieces: readonly OffsetPiece[]): readonly OffsetPiece[] {
+  const first = pieces[0];
+  const last = pieces.at(-1);
+  if (first?.role !== 'root' || last?.role !== 'root' || last.piece.kind !== 'arc') {
+    return pieces;
+  }
+  return [...pieces.slice(1, -1), { ...last, piece: { ...last.piece, turn: 2 * last.piece.turn } }];
+}
+
+/** Begins at the last tip corner of tooth 1 in travel order; what lies before it is the next tooth's. */
+function fromCorner(
+  pieces: readonly OffsetPiece[],
+  teeth: number,
+  way: 1 | -1,
+): { readonly corner: ArcPiece; readonly rest: readonly OffsetPiece[] } {
+  const at = pieces.findLastIndex(({ role }) => role === 'corner');
+  const corner = pieces[at]?.piece;
+  if (corner?.kind !== 'arc') {
+    throw new Bug('an outline without a tip corner');
+  }
+  const pitch = (way * 2 * Math.PI) / teeth;
+  const before = pieces
+    .slice(0, at)
+    .map(({ role, piece }) => ({ role, piece: turnPiece(piece, pitch), next: true }));
+  return { corner, rest: [...pieces.slice(at + 1), ...before] };
+}
+
+/** Lines and arcs only, or lines only. */
+function plainly(
+  { role, piece, next }: OffsetPiece,
+  made: 'arcs' | 'lines',
+  way: 1 | -1,
+): readonly PathPiece[] {
+  if (made === 'lines') {
+    return chords(piece, way).map((line) => ({ role, piece: line, next }));
+  }
+  return piece.kind === 'cycloid'
+    ? fitArcs(piece, FIT_ERROR).map((arc) => ({ role, piece: arc, next }))
+    : [{ role, piece, next }];
+}
+
+/** Lines in place of a piece, where the machine has no arcs; never on the wheel's side of it. */
+export function chords(piece: Piece, way: 1 | -1): readonly LinePiece[] {
+  return piece.kind === 'line' ? [piece] : fitLines([piece], FORM_ERROR, way === 1 ? 'right' : 'left');
+}
+
+/** A line that goes on straight in the next is one line: the tangents at the ends of curves, and flanks before them. */
+function joined(parts: readonly PathPiece[]): readonly PathPiece[] {
+  const out: PathPiece[] = [];
+  for (const part of parts) {
+    const last = out.at(-1);
+    if (last?.piece.kind === 'line' && part.piece.kind === 'line' && goesOn(last.piece, part.piece)) {
+      const role = part.role === 'flank' ? 'flank' : last.role;
+      out[out.length - 1] = { role, piece: { ...last.piece, to: part.piece.to }, next: part.next };
+    } else {
+      out.push(part);
+    }
+  }
+  return out;
+}
+
+function goesOn(a: LinePiece, b: LinePiece): boolean {
+  const [before, after] = [headingOn(a, 0), headingOn(b, 0)];
+  return dot(before, after) > 0 && Math.abs(cross(before, after)) < SAME_HEADING;
+}
+
+/** Sine between lines that are one. Far above rounding, far below what a tolerance of a micrometre makes of a curve. */
+const SAME_HEADING = SAME_POINT * 1000;

@@ -1,0 +1,98 @@
+/**
+ * A round hole, all of its metal turned to chips: helices side by side from the middle outward, each with a flat turn at
+ * the bottom, so that no core is left. Wall on the right of travel (climb) where it runs counter-clockwise.
+ *
+ * In  : centre, radius of the wall that is left, what hole is there already, cutter and depth a turn, mm.
+ * Out : one run. Pitch of a turn: at most the step, and at most 2 pi rho tan(ramp).
+ * A helix of radius rho <= r leaves no core; the next ones lie less than a cutter's radius apart.
+ */
+import { SAME_POINT } from '../base/tolerances.ts';
+import { radians } from '../base/units.ts';
+import { insideArcFeed } from '../cutting/arc-feed.ts';
+import type { Point } from '../geometry/point.ts';
+import type { Belongs, MoveStep } from '../motion/motion.ts';
+import type { Heights } from './heights.ts';
+import { circleLegs, falling, flat, vertical, type Leg, type Run } from './leg.ts';
+import { levelsFor, type Settings } from './settings.ts';
+
+export interface RoundHole {
+  readonly centre: Point;
+  /** Of the wall that is left. */
+  readonly radius: number;
+  /** Radius of a hole that is there already, 0 for none. */
+  readonly existing: number;
+  readonly settings: Settings;
+  readonly heights: Heights;
+  /** +1 counter-clockwise. */
+  readonly way: 1 | -1;
+  readonly pass: string;
+}
+
+/** Radius of the first helix over the cutter's: no core is left, nor does the cutter's dead middle press on one. */
+const FIRST_HELIX = 0.9;
+/** Distance of the next helix over the cutter's radius. */
+const NEXT_HELIX = 0.8;
+/** A helix begins this far above the metal. Judgement: the waviness of a glued blank. */
+const HELIX_ABOVE = 0.05;
+
+export function roundHole(hole: RoundHole): Run {
+  const { centre, settings, heights, pass } = hole;
+  const r = settings.radius;
+  const steps: MoveStep[] = [];
+  const radii = helixRadii(hole);
+  radii.forEach((radius, i) => {
+    const inner = radii[i - 1];
+    const start = { x: centre.x + radius, y: centre.y };
+    if (inner !== undefined) {
+      const up = { x: centre.x + inner, y: centre.y, z: heights.approach };
+      steps.push({ kind: 'rapid', to: up, belongs: { pass } });
+      steps.push(vertical(start, heights.approach, settings.data.feed, { pass }));
+    }
+    const open = inner ?? hole.existing - r;
+    steps.push(...helix(hole, start, radius, open > 0 ? radius - open : 2 * r));
+  });
+  return {
+    at: { x: centre.x + (radii[0] ?? 0), y: centre.y },
+    fastTo: heights.approach,
+    steps,
+  };
+}
+
+/** Path radii, inner first; the last one makes the wall. */
+export function helixRadii(hole: Pick<RoundHole, 'radius' | 'existing' | 'settings'>): number[] {
+  const r = hole.settings.radius;
+  const last = hole.radius - r;
+  const open = hole.existing - r;
+  const first = Math.min(last, open > 0 ? open + NEXT_HELIX * r : FIRST_HELIX * r);
+  const more = Math.ceil((last - first) / (NEXT_HELIX * r) - SAME_POINT);
+  return Array.from({ length: more + 1 }, (_, i) =>
+    more === 0 ? last : first + ((last - first) * i) / more,
+  );
+}
+
+function helix(hole: RoundHole, start: Point, radius: number, radialDepth: number): MoveStep[] {
+  const { centre, settings, heights, way, pass } = hole;
+  const { data } = settings;
+  const top = heights.top + HELIX_ABOVE;
+  const pitch = Math.min(settings.step, 2 * Math.PI * radius * Math.tan(radians(data.ramp)));
+  const turns = levelsFor(top - heights.bottom, pitch);
+  const beside = insideArcFeed({
+    feed: data.feed,
+    pathRadius: radius,
+    cutterDiameter: 2 * settings.radius,
+    radialDepth,
+    flutes: settings.cutter.flutes,
+    speed: data.speed,
+  });
+  const feed = radialDepth < 2 * settings.radius ? beside : Math.min(beside, data.plunge);
+  const zAt = (turn: number): number =>
+    turn === turns ? heights.bottom : top + ((heights.bottom - top) * turn) / turns;
+  const round = (at: number): Leg[] => circleLegs(centre, start, way * 2 * Math.PI, at);
+  const steps: MoveStep[] = [vertical(start, top, data.plunge, { pass, depth: heights.bottom })];
+  for (let turn = 1; turn <= turns; turn++) {
+    const belongs: Belongs = { pass, lap: turn, laps: turns, depth: zAt(turn) };
+    steps.push(...falling(start, round(feed), zAt(turn - 1), zAt(turn), belongs));
+  }
+  steps.push(...flat(round(beside), heights.bottom, { pass, depth: heights.bottom }));
+  return steps;
+}

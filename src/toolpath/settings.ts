@@ -1,0 +1,86 @@
+/**
+ * Speed, feed and depth of a pass: what the job says, else what follows from cutter and material, each with its why.
+ *
+ * In  : the job, the machine, which pass, the radial depth it cuts with once its metal is open.
+ * Out : figures of a full slot (for entries, bays, first rings, contour slots) with the depth a level may have, or the
+ *       refusal that no depth keeps the cutter from breaking.
+ */
+import { Bug } from '../base/bug.ts';
+import { failure, success, type Outcome } from '../base/problem.ts';
+import { SAME_POINT } from '../base/tolerances.ts';
+import { cutData, type CutData } from '../cutting/cut-data.ts';
+import { materialNamed, type Material } from '../cutting/materials.ts';
+import type { Cutter } from '../cutting/setup.ts';
+import { slotDepth } from '../cutting/slot-depth.ts';
+import type { CutSettings, Job, PassKind } from '../job/job.ts';
+import type { Machine } from '../machine/machine.ts';
+
+export interface Settings {
+  readonly cutter: Cutter;
+  readonly radius: number;
+  readonly data: CutData;
+  /** Deepest level of a full slot. */
+  readonly step: number;
+  readonly why: readonly string[];
+}
+
+/** Breakage margin a slot keeps, with a sharp cutter. Judgement: wear takes 1.3 to 2 of it, the forces are known to 40 %. */
+const MARGIN = 3;
+/** Shallower than this share of the diameter a level only rubs its floor and a wheel takes hours. Judgement. */
+const SHALLOWEST = 0.015;
+/** Bending is weighed against this share of the diameter where no allowance is left for another pass. Judgement. */
+const BENDING_ALLOWANCE = 0.05;
+
+export function materialOf(job: Job): Material {
+  const material = materialNamed(job.setup.material);
+  if (material === undefined) {
+    throw new Bug(`no material ${job.setup.material}`);
+  }
+  return material;
+}
+
+export function settingsFor(
+  job: Job,
+  machine: Machine,
+  kind: PassKind,
+  radialDepth: 'slot' | number,
+  allowance: number,
+): Outcome<Settings> {
+  const asked: CutSettings = job.cuts[kind];
+  const { cutter } = asked;
+  const material = materialOf(job);
+  const data = cutData({ material, cutter, radialDepth, limits: machine.limits, asked });
+  const slot = slotDepth(
+    { material, cutter, speed: data.speed, feed: data.feed, runout: cutter.runout },
+    {
+      ...(asked.step === undefined ? {} : { asked: asked.step }),
+      margin: MARGIN,
+      allowance: allowance > 0 ? allowance : BENDING_ALLOWANCE * cutter.diameter,
+    },
+  );
+  if (!(slot.depth >= SHALLOWEST * cutter.diameter) && slot.limitedBy !== 'asked') {
+    return failure([
+      {
+        code: 'toolpath.load',
+        severity: 'error',
+        message:
+          `${kind}: cutter ${cutter.number} (${cutter.diameter} mm, ${cutter.stickOut} mm out) could cut only ` +
+          `${slot.depth.toFixed(4)} mm deep a lap: ${slot.why}`,
+        hint: 'use a stouter cutter, let it stand out less, or lower the feed',
+        at: { kind: 'value', file: job.file, path: ['cuts', kind, 'cutter'] },
+      },
+    ]);
+  }
+  return success({
+    cutter,
+    radius: cutter.diameter / 2,
+    data,
+    step: slot.depth,
+    why: [...data.why, `at most ${slot.depth.toFixed(3)} mm a lap: ${slot.why}`],
+  });
+}
+
+/** The same depth for every level, none deeper than `step`. */
+export function levelsFor(depth: number, step: number): number {
+  return Math.max(1, Math.ceil(depth / step - SAME_POINT));
+}
