@@ -63,6 +63,10 @@ export const CHECK_CODES = {
     guards: 'fast moves into metal, or sideways below the clear height',
     blind: 'what stands above the clear height and was not said to be there',
   },
+  'prove.unknown-place': {
+    guards: 'cutting from or to a place that the program has not named yet',
+    blind: 'where the cutter was left by hand',
+  },
   'prove.plunge': {
     guards: 'a cutter driven straight down into metal that was not said to plunge',
     blind: 'whether one that was said to plunge does',

@@ -126,7 +126,8 @@ function better(copy: Copy, known: Worst, figure: Figure, i: number): Worst {
   const value = figureOf(stations, figure, piece, stations.u[i]!, deviations[i]!);
   const rise = value - figureOf(stations, figure, piece, stations.u[before]!, deviations[before]!);
   const fall = value - figureOf(stations, figure, piece, stations.u[after]!, deviations[after]!);
-  if (rise < 0 || fall < 0 || value + Math.max(rise, fall) <= known.value + WORTH) {
+  // A crown, or a kink between two slopes, rises above its highest station by half the larger step at most.
+  if (rise < 0 || fall < 0 || value + Math.max(rise, fall) / 2 <= known.value + WORTH) {
     return known;
   }
   const between = peakReader(copy, figure, piece, before, after);

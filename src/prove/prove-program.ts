@@ -5,6 +5,7 @@
  * Out : findings, the figures of the cut wheel, and what could not be checked. 'unread' where a line could not be read
  *       for certain, 'refuse' where any check found an error.
  */
+import { checkArcs } from './check-arcs.ts';
 import { checkDepth } from './check-depth.ts';
 import { checkEnd } from './check-end.ts';
 import { checkEntry } from './check-entry.ts';
@@ -13,6 +14,7 @@ import { checkForm } from './check-form.ts';
 import { checkLoose } from './check-loose.ts';
 import { checkObstacles } from './check-obstacles.ts';
 import { checkOrder } from './check-order.ts';
+import { checkPlace } from './check-place.ts';
 import { checkSpindle } from './check-spindle.ts';
 import { checkTravel } from './check-travel.ts';
 import { gatherEvidence, type Evidence } from './evidence.ts';
@@ -24,12 +26,14 @@ import { traceProgram } from './trace-program.ts';
 /** Every check, in the order its findings are given. */
 const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [
   checkForm,
+  checkPlace,
   checkFast,
   checkEntry,
   checkObstacles,
   checkDepth,
   checkSpindle,
   checkTravel,
+  checkArcs,
   checkLoose,
   checkOrder,
   checkEnd,

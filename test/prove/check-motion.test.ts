@@ -38,6 +38,13 @@ describe('fast moves', () => {
   });
 });
 
+describe('an unknown place', () => {
+  it('is refused as the beginning of a cut', () => {
+    const lines = edited(bore + 1, 2, 'G1 Z0.2 F50');
+    expect(errorsOf(prove(lines))).toContain('prove.unknown-place');
+  });
+});
+
 describe('the way into metal', () => {
   const hole = ['G0 X8 Y8', 'G0 Z0.2', 'G1 Z-0.3 F50', 'G0 Z5'];
 
@@ -160,6 +167,23 @@ describe('travel', () => {
     expect(errorsOf(prove(GOOD, { machine: at, ...inside }))).toEqual([]);
     const outside = withSetup({ zeroAt: { x: 97, y: 50, z: -35 } });
     expect(errorsOf(prove(GOOD, { machine: at, ...outside }))).toEqual(['prove.travel']);
+  });
+});
+
+describe('arcs by size', () => {
+  const { words } = machine();
+  const arcs = (changes: Partial<typeof words.arcs>) => ({
+    machine: { ...machine(), words: { ...words, arcs: { ...words.arcs, ...changes } } },
+  });
+
+  it('refuses a radius this machine does not run [the bore has rings of 0.25 mm]', () => {
+    const proof = prove(GOOD, arcs({ smallestRadius: 0.27 }));
+    expect(errorsOf(proof)).toEqual(['prove.arc']);
+    expect(findingOf(proof, 'prove.arc').message).toMatch(/0.25 mm.*0.27 mm/);
+  });
+
+  it('refuses a chord shorter than this machine wants', () => {
+    expect(errorsOf(prove(GOOD, arcs({ shortestChord: 0.3 })))).toEqual(['prove.arc']);
   });
 });
 

@@ -1,0 +1,48 @@
+/**
+ * Arcs by size: a radius this controller does not run, or a chord so short that it may take the arc for a whole circle. How the
+ * centre fits the ends is judged where the arc is read.
+ */
+import type { TracedMove } from '../motion/traced-move.ts';
+import type { Evidence } from './evidence.ts';
+import { findingAt, gathered, type Said } from './finding-at.ts';
+import type { Finding } from './proof.ts';
+
+export function checkArcs(evidence: Evidence): Finding[] {
+  return gathered(
+    evidence.moves.flatMap((move) => {
+      const fault = move.turn === undefined ? undefined : outOfSize(evidence, move, move.turn);
+      return fault === undefined ? [] : [findingAt(move, fault)];
+    }),
+  );
+}
+
+function outOfSize({ input, lastDigit }: Evidence, move: TracedMove, turn: number): Said | undefined {
+  const { from, centre } = move;
+  if (centre === undefined || from.x === null || from.y === null) {
+    return undefined;
+  }
+  const { smallestRadius, largestRadius, shortestChord } = input.machine.words.arcs;
+  const dx = from.x - centre.x;
+  const dy = from.y - centre.y;
+  const radius = Math.sqrt(dx * dx + dy * dy);
+  const chord = 2 * radius * Math.abs(Math.sin(turn / 2));
+  // Both ends and the centre are rounded.
+  const slack = 2 * lastDigit;
+  if (radius < smallestRadius - slack || radius > largestRadius + slack) {
+    return said(
+      `an arc of radius ${text(radius)}; this machine runs ${text(smallestRadius)} to ${text(largestRadius)}`,
+    );
+  }
+  const whole = Math.abs(turn) > Math.PI;
+  return !whole && chord < shortestChord - slack
+    ? said(`an arc whose ends lie ${text(chord)} apart; this machine wants ${text(shortestChord)} at least`)
+    : undefined;
+}
+
+function said(message: string): Said {
+  return { code: 'prove.arc', message, hint: 'Write a straight move in its place.' };
+}
+
+function text(length: number): string {
+  return `${String(Number(length.toFixed(4)))} mm`;
+}
