@@ -62,8 +62,8 @@ export function measureContour(
     const angle = (2 * Math.PI * copy) / ring.copies;
     const field: Field = { set, near: lists[copy]!, cos: Math.cos(angle), sin: Math.sin(angle), farthest };
     measureCopy(field, stations, readings);
-    takeWorst({ field, stations, readings, copy, height: 'low' }, figures.low);
-    takeWorst({ field, stations, readings, copy, height: 'high' }, figures.high);
+    const one = { field, stations, readings, copy };
+    takeWorst({ ...one, height: 'low' }, { ...one, height: 'high' }, figures);
     read?.(copy, field, readings);
   }
   return figures;
@@ -86,23 +86,50 @@ interface Copy {
 /** What is wanted at its worst: metal cut away, metal left, or how far the metal's surface is from the exact outline. */
 type Figure = 'gouge' | 'left' | 'thickness';
 
-function takeWorst(copy: Copy, figures: ContourFigures): void {
-  const { stations } = copy;
-  const deviations = copy.readings[copy.height];
+/** Both heights of one copy. Where they read the same and know the same, they are looked into once. */
+function takeWorst(low: Copy, high: Copy, figures: Record<Height, ContourFigures>): void {
+  const { stations, readings } = low;
   for (let i = 0; i < stations.count; i++) {
-    const region = stations.region[i]!;
-    const deviation = deviations[i]!;
-    if (region === REGION.root) {
-      figures.rootMiss = better(copy, figures.rootMiss, 'left', i);
-      // The surface is no further from the outline than the station is, and what stands beyond it.
-      if (stations.beyond[i]! + Math.max(0, deviation) > figures.left[region]!.value + WORTH) {
-        figures.left[region] = better(copy, figures.left[region]!, 'thickness', i);
-      }
-    } else if (deviation < 0) {
-      figures.gouge = better(copy, figures.gouge, 'gouge', i);
-    } else if (region !== REGION.bare) {
-      figures.left[region] = better(copy, figures.left[region]!, 'left', i);
+    if (readsAlike(readings, i) && knowAlike(figures, stations.region[i]!)) {
+      takeStation(low, figures.low, i);
+      copyFigures(figures, stations.region[i]!);
+    } else {
+      takeStation(low, figures.low, i);
+      takeStation(high, figures.high, i);
     }
+  }
+}
+
+function readsAlike({ low, high }: Readings, i: number): boolean {
+  const after = Math.min(i + 1, low.length - 1);
+  const before = Math.max(i - 1, 0);
+  return low[i] === high[i] && low[before] === high[before] && low[after] === high[after];
+}
+
+function knowAlike({ low, high }: Record<Height, ContourFigures>, region: number): boolean {
+  return low.gouge === high.gouge && low.rootMiss === high.rootMiss && low.left[region] === high.left[region];
+}
+
+function copyFigures({ low, high }: Record<Height, ContourFigures>, region: number): void {
+  high.gouge = low.gouge;
+  high.rootMiss = low.rootMiss;
+  high.left[region] = low.left[region]!;
+}
+
+function takeStation(copy: Copy, figures: ContourFigures, i: number): void {
+  const { stations } = copy;
+  const region = stations.region[i]!;
+  const deviation = copy.readings[copy.height][i]!;
+  if (region === REGION.root) {
+    figures.rootMiss = better(copy, figures.rootMiss, 'left', i);
+    // The surface is no further from the outline than the station is, and what stands beyond it.
+    if (stations.beyond[i]! + Math.max(0, deviation) > figures.left[region]!.value + WORTH) {
+      figures.left[region] = better(copy, figures.left[region]!, 'thickness', i);
+    }
+  } else if (deviation < 0) {
+    figures.gouge = better(copy, figures.gouge, 'gouge', i);
+  } else if (region !== REGION.bare) {
+    figures.left[region] = better(copy, figures.left[region]!, 'left', i);
   }
 }
 
