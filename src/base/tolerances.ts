@@ -6,6 +6,10 @@
  *  Why: a desktop machine steps 1.25 um; the program should not be the larger error. */
 export const FORM_ERROR = 0.001;
 
+/** The same where FIT_ERROR would take more blocks a pitch than a slow controller reads in time.
+ *  Why: a tenth of the form error is left for the proof's own step; rounding has a unit of the last digit besides. */
+export const FIT_ERROR_MOST = FORM_ERROR * 0.9;
+
 /** Largest distance between the path and the exact offset where arcs stand for the addendum's offset.
  *  Why: 0.6 of the form error, so that rounding to a unit of the last digit and the proof's own step stay inside it. */
 export const FIT_ERROR = FORM_ERROR * 0.6;

@@ -57,7 +57,8 @@ export function dipsFor({ form, distance, settings }: Omit<MouthTask, 'heights'>
   const clearance = (x: number, y: number): number => nearestOnChain(walls, { x, y })?.distance ?? 0;
   const foot = innermost(form, (x) => clearance(x, 0) >= band);
   const width = 2 * pillar + OVERLAP * r;
-  const more = Math.max(0, Math.ceil((width - 2 * r) / ((2 - OVERLAP) * r)));
+  // An odd number, so that one runs down the middle line to the foot.
+  const more = 2 * Math.max(0, Math.ceil((width - 2 * r) / (2 * (2 - OVERLAP) * r)));
   return Array.from({ length: more + 1 }, (_, i) => {
     const across = more === 0 ? 0 : (width / 2 - r) * ((2 * i) / more - 1);
     const deep = innermost(form, (x) => clearance(x, across) >= distance);

@@ -8,7 +8,7 @@
  */
 import { Bug } from '../base/bug.ts';
 import { success, type Outcome } from '../base/problem.ts';
-import { FIT_ERROR, FORM_ERROR, SAME_POINT } from '../base/tolerances.ts';
+import { FIT_ERROR, FIT_ERROR_MOST, FORM_ERROR, SAME_POINT } from '../base/tolerances.ts';
 import { reversePiece, turnPiece } from '../geometry/change-piece.ts';
 import { fitArcs } from '../geometry/fit-arcs.ts';
 import { fitLines } from '../geometry/fit-lines.ts';
@@ -79,7 +79,7 @@ export function pitchPath(request: PathRequest): Outcome<PitchPath> {
     way,
     made,
     corner,
-    rest: joined(rest.flatMap((part) => plainly(part, made, way))),
+    rest: fewest(rest, made, way),
     land: rest.at(-1)?.role === 'land',
   });
 }
@@ -130,17 +130,25 @@ function fromCorner(
   return { corner, rest: [...pieces.slice(at + 1), ...before] };
 }
 
+/** Fitted as closely as a usual number of blocks allows. */
+function fewest(rest: readonly OffsetPiece[], made: 'arcs' | 'lines', way: 1 | -1): readonly PathPiece[] {
+  const close = joined(rest.flatMap((part) => plainly(part, made, way, FIT_ERROR)));
+  return made === 'arcs' && close.length > USUAL_BLOCKS
+    ? joined(rest.flatMap((part) => plainly(part, made, way, FIT_ERROR_MOST)))
+    : close;
+}
+
+/** Blocks a pitch, besides the corner and the split before the root. Judgement: 16 a pitch is what slow controllers keep up with. */
+const USUAL_BLOCKS = 14;
+
 /** Lines and arcs only, or lines only. */
-function plainly(
-  { role, piece, next }: OffsetPiece,
-  made: 'arcs' | 'lines',
-  way: 1 | -1,
-): readonly PathPiece[] {
+function plainly(part: OffsetPiece, made: 'arcs' | 'lines', way: 1 | -1, fit: number): readonly PathPiece[] {
+  const { role, piece, next } = part;
   if (made === 'lines') {
     return chords(piece, way).map((line) => ({ role, piece: line, next }));
   }
   return piece.kind === 'cycloid'
-    ? fitArcs(piece, FIT_ERROR).map((arc) => ({ role, piece: arc, next }))
+    ? fitArcs(piece, fit).map((arc) => ({ role, piece: arc, next }))
     : [{ role, piece, next }];
 }
 

@@ -43,9 +43,9 @@ export function roundHole(hole: RoundHole): Run {
   radii.forEach((radius, i) => {
     const inner = radii[i - 1];
     const start = { x: centre.x + radius, y: centre.y };
-    if (inner !== undefined) {
-      const up = { x: centre.x + inner, y: centre.y, z: heights.approach };
-      steps.push({ kind: 'rapid', to: up, belongs: { pass } });
+    const last = steps.at(-1)?.to;
+    if (last !== undefined) {
+      steps.push({ kind: 'rapid', to: { ...last, z: heights.approach }, belongs: { pass } });
       steps.push(vertical(start, heights.approach, settings.data.feed, { pass }));
     }
     const open = inner ?? hole.existing - r;

@@ -14,7 +14,6 @@ import {
   angleOf,
   dot,
   leftOf,
-  norm,
   ORIGIN,
   subtract,
   turnPoint,
@@ -87,7 +86,7 @@ function halfRing(
   }
   const hub = onCircle(foot, outward, inner);
   const meet = addScaled(foot, outward, -foot.y / outward.y);
-  const pointed = hub === undefined || hub.y >= 0 || norm(hub) > norm(meet);
+  const pointed = hub === undefined || hub.y >= 0;
   const from = pointed ? meet : hub;
   const line: LinePiece = { kind: 'line', from, to: rim };
   const rimArc: Piece = {

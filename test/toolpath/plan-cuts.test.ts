@@ -1,0 +1,212 @@
+/** What the plan decides: reach, refusals, depth a lap, programs by the machine's way with cutters, keep-outs. */
+import { describe, expect, it } from 'vitest';
+import { pinion } from '../tooth/proportions.ts';
+import { cutter, disc, inPass, makeCase, movesOf, planOf, problemsOf, type Wanted } from './make-job.ts';
+
+const stepOf = (wanted: Wanted): number =>
+  planOf(wanted).passes.find(({ name }) => name === 'roughing')!.step;
+
+describe('depth a lap', () => {
+  const rough = (stickOut: number, step?: number): Wanted => ({
+    crossings: null,
+    cuts: {
+      roughing: {
+        cutter: cutter(2, 0.5, { stickOut, shank: 1 }),
+        allowance: 0.03,
+        ...(step === undefined ? {} : { step }),
+      },
+      finishing: { cutter: cutter(2, 0.5) },
+    },
+  });
+
+  it('changes when only the stick-out changes', () => {
+    expect(stepOf(rough(30))).toBeLessThan(stepOf(rough(10)));
+  });
+
+  it('is never more than the job asks, nor than a quarter of the diameter', () => {
+    expect(stepOf(rough(10, 0.05))).toBeLessThanOrEqual(0.05);
+    expect(stepOf(rough(10, 5))).toBeLessThanOrEqual(0.125);
+  });
+});
+
+describe('reach', () => {
+  it('agrees with the closed form r = Rr sin(s) / (1 - sin(s)) for radial flanks [plane trigonometry]', () => {
+    const made = makeCase();
+    const s = Math.PI / 120;
+    const radius = (made.form.rootRadius * Math.sin(s)) / (1 - Math.sin(s));
+    expect(planOf(made).reach.largestCutter).toBeCloseTo(2 * radius, 9);
+  });
+
+  it('names the largest cutter that would do when the working flank is out of reach', () => {
+    const wide = cutter(1, 1);
+    const problems = problemsOf({
+      cuts: { roughing: { cutter: wide, allowance: 0.03 }, finishing: { cutter: wide } },
+    });
+    expect(problems.map(({ code }) => code)).toEqual(['reach.flank']);
+    expect(problems[0]!.hint).toMatch(/largest cutter that would do is 0\.\d+ mm/);
+  });
+
+  it('recommends the largest cutter of the list by the root width rule', () => {
+    const made: Wanted = { setup: { cutters: [cutter(1, 1), cutter(2, 0.5), cutter(3, 0.6)] } };
+    const plan = planOf(made);
+    expect(plan.reach.roughingCutter).toBe(0.6);
+    expect(plan.reach.remarks.join(' ')).toMatch(/cutter 3 of 0.6 mm would rough/);
+  });
+
+  it.each<[string, string, Wanted]>([
+    ['a bore narrower than the cutter', 'reach.space', { bore: 1, cuts: { bore: { cutter: cutter(1, 1) } } }],
+    [
+      'corners of windows sharper than the cutter',
+      'reach.corner',
+      { cuts: { crossings: { cutter: cutter(4, 2.5) } } },
+    ],
+    [
+      'a finishing cutter wider than its slot',
+      'toolpath.no-entry',
+      { cuts: { roughing: { cutter: cutter(3, 0.4) } } },
+    ],
+    ['finishing before roughing', 'toolpath.no-entry', { order: ['bore', 'finishing', 'roughing'] }],
+    [
+      'a clamp in the path',
+      'job.does-not-fit',
+      { setup: { obstacles: [{ name: 'keep-out', x: 15, y: 0, radius: 2, fromZ: -1.5, toZ: 8 }] } },
+    ],
+    [
+      'a cutter too slender for any depth',
+      'toolpath.load',
+      {
+        cuts: {
+          roughing: { cutter: cutter(2, 0.5, { reach: 40, flute: 40, stickOut: 60 }) },
+          finishing: { cutter: cutter(2, 0.5) },
+        },
+      },
+    ],
+  ])('refuses %s', (_, code, wanted) => {
+    expect(problemsOf(wanted).map((problem) => problem.code)).toContain(code);
+  });
+});
+
+describe('programs', () => {
+  it('is one for each uninterrupted run of a cutter where the machine takes one cutter a program', () => {
+    const plan = planOf({ machine: 'desk-three-axis' });
+    expect(plan.programs.map(({ suffix, cutters }) => [suffix, cutters])).toEqual([
+      ['-1', [1]],
+      ['-2', [2]],
+      ['-3', [1]],
+    ]);
+  });
+
+  it('is one where the machine changes cutters', () => {
+    const plan = planOf({ machine: 'bench-mill' });
+    expect(plan.programs.map(({ suffix, cutters }) => [suffix, cutters])).toEqual([['', [1, 2, 1]]]);
+  });
+
+  it('has no suffix where one cutter does everything', () => {
+    const one = cutter(2, 0.5);
+    const plan = planOf({
+      cuts: {
+        bore: { cutter: one },
+        crossings: { cutter: one },
+        roughing: { cutter: one },
+        finishing: { cutter: one },
+      },
+    });
+    expect(plan.programs.map(({ suffix }) => suffix)).toEqual(['']);
+  });
+
+  it('follows the order of the job', () => {
+    const plan = planOf({ order: ['crossings', 'bore', 'roughing', 'finishing'] });
+    expect(plan.passes.map(({ name }) => name)).toEqual([
+      'crossings',
+      'crossings finishing',
+      'bore',
+      'bore finishing',
+      'bay',
+      'roughing',
+      'finishing',
+      'spring',
+    ]);
+  });
+
+  it('is the same twice', () => {
+    expect(planOf({})).toEqual(planOf({}));
+  });
+
+  it('grows in proportion to the teeth', () => {
+    const steps = (teeth: number): number =>
+      inPass(
+        movesOf(
+          planOf({
+            wheel: { teeth },
+            crossings: null,
+            setup: { shape: { kind: 'sheet', width: 300, height: 300 } },
+          }),
+        ),
+        'roughing',
+      ).length;
+    expect(steps(240) / steps(60)).toBeLessThan(4.1);
+  });
+});
+
+describe('what stands in the way', () => {
+  const clamp = { name: 'keep-out', x: 0, y: -20, radius: 1.5, fromZ: -1.5, toZ: 9 } as const;
+
+  it('is crossed above its top, never at the clear height', () => {
+    const plan = planOf({ setup: { obstacles: [clamp] } });
+    for (const { from, step } of [...movesOf(plan)]) {
+      const dx = step.to.x - from.x;
+      const dy = step.to.y - from.y;
+      const length = Math.hypot(dx, dy);
+      if (step.kind !== 'rapid' || length === 0) {
+        continue;
+      }
+      const u = Math.min(1, Math.max(0, ((clamp.x - from.x) * dx + (clamp.y - from.y) * dy) / length ** 2));
+      const off = Math.hypot(from.x + u * dx - clamp.x, from.y + u * dy - clamp.y);
+      if (off < clamp.radius + 1.5) {
+        expect(Math.min(from.z, step.to.z)).toBeGreaterThan(clamp.toZ);
+      }
+    }
+  });
+
+  it('is walked over with the spindle off', () => {
+    const { walk } = planOf({ setup: { obstacles: [clamp] } });
+    expect(
+      walk.steps.some((step) => step.kind === 'spindle' || step.kind === 'line' || step.kind === 'arc'),
+    ).toBe(false);
+    expect(walk.steps).toContainEqual({
+      kind: 'rapid',
+      to: { x: 0, y: -20, z: 11 },
+      belongs: { pass: 'over what stands in the way' },
+    });
+  });
+});
+
+describe('blanks and holdings', () => {
+  it('opens a bay in sheet and the mouths of a disc, and cuts no land of a disc', () => {
+    const wide: Wanted['wheel'] = { teeth: 30, module: 1, mate: pinion(10) };
+    const names = (wanted: Wanted): readonly string[] => planOf(wanted).passes.map(({ name }) => name);
+    expect(names({ crossings: null })).toContain('bay');
+    const inDisc = names({ wheel: wide, crossings: null, setup: disc(wide) });
+    expect(inDisc).toContain('mouths');
+    expect(inDisc).not.toContain('bay');
+  });
+
+  it('cuts only round the slugs where a skin holds them', () => {
+    const held = planOf({ setup: { holding: ['skin'], skin: 0.08 }, cuts: { below: 0 } });
+    const whole = planOf({});
+    const count = (plan: typeof held): number => inPass(movesOf(plan), 'crossing 1').length;
+    expect(count(held)).toBeLessThan(count(whole) / 2);
+    expect(Math.min(...movesOf(held).map(({ step }) => step.to.z))).toBeCloseTo(-1.42, 9);
+  });
+
+  it('climbs clockwise round the wheel and counter-clockwise in the bore', () => {
+    const turns = (climb: boolean, pass: string): number =>
+      inPass(movesOf(planOf({ cuts: { climb } })), pass)
+        .filter(({ belongs }) => pass === 'bore' || belongs?.tooth !== undefined)
+        .reduce((sum, { from, step }) => sum + Math.sign(from.x * step.to.y - from.y * step.to.x), 0);
+    expect(turns(true, 'roughing')).toBeLessThan(0);
+    expect(turns(true, 'bore')).toBeGreaterThan(0);
+    expect(turns(false, 'roughing')).toBeGreaterThan(0);
+    expect(turns(false, 'bore')).toBeLessThan(0);
+  });
+});
