@@ -23,7 +23,9 @@ export interface SlotDepthRules {
 /** Share of the allowance that bending may take, so that roughing never marks the finished flank. Judgement: the rest is for runout and play. */
 export const BENDING_SHARE = 0.4;
 const QUARTER = 0.25;
-const HALVINGS = 30;
+/** Depths closer than this share of the diameter are one: a thousandth of it is far below what a machine repeats. */
+const DEPTH_STEP = 0.001;
+const MOST_STEPS = 24;
 
 export function slotDepth(cut: SlotCut, rules: SlotDepthRules): SlotDepth {
   const { cutter, material } = cut;
@@ -36,14 +38,14 @@ export function slotDepth(cut: SlotCut, rules: SlotDepthRules): SlotDepth {
     },
     {
       by: 'margin',
-      depth: deepest(cutter.diameter, (depth) => slotLoad(cut, depth).margin >= rules.margin),
+      depth: deepest(cutter.diameter, (depth) => rules.margin / slotLoad(cut, depth).margin),
       why: `a breakage margin of ${rules.margin} with a sharp cutter (forces are known to about 40 %)`,
     },
     {
       by: 'bending',
       depth: deepest(
         cutter.diameter,
-        (depth) => slotLoad(cut, depth).bending <= BENDING_SHARE * rules.allowance,
+        (depth) => slotLoad(cut, depth).bending / (BENDING_SHARE * rules.allowance),
       ),
       why: `bending of at most ${BENDING_SHARE} of the ${rules.allowance} mm allowance`,
     },
@@ -55,19 +57,30 @@ export function slotDepth(cut: SlotCut, rules: SlotDepthRules): SlotDepth {
   return { depth: least.depth, limitedBy: least.by, load: slotLoad(cut, least.depth), why: least.why };
 }
 
-/** The greatest depth up to one diameter for which `holds`; it holds for shallower ones too. */
-function deepest(diameter: number, holds: (depth: number) => boolean): number {
-  if (holds(diameter)) {
+/**
+ * The greatest depth up to one diameter at which `measure` stays at or below 1. It grows with the depth, nearly in
+ * proportion, so a few steps of false position (Illinois rule) find it; the answer is always a depth that was measured good.
+ */
+function deepest(diameter: number, measure: (depth: number) => number): number {
+  let good = 0;
+  let low = -1;
+  let bad = diameter;
+  let high = measure(diameter) - 1;
+  if (high <= 0) {
     return diameter;
   }
-  let good = 0;
-  let bad = diameter;
-  for (let i = 0; i < HALVINGS; i++) {
-    const middle = (good + bad) / 2;
-    if (holds(middle)) {
-      good = middle;
+  for (let i = 0; i < MOST_STEPS && bad - good > DEPTH_STEP * diameter; i++) {
+    const crossing = good + ((bad - good) * -low) / (high - low);
+    const depth = Math.min(Math.max(crossing, good + (bad - good) / 64), bad - (bad - good) / 64);
+    const over = measure(depth) - 1;
+    if (over <= 0) {
+      good = depth;
+      low = over === 0 ? -Number.EPSILON : over;
+      high /= 2;
     } else {
-      bad = middle;
+      bad = depth;
+      high = over;
+      low /= 2;
     }
   }
   return good;
