@@ -22,9 +22,10 @@ export function intersectPieces(a: Piece, b: Piece): Meeting[] {
   if (!sleevesTouch(sleeveOf(a), sleeveOf(b))) {
     return [];
   }
+  // Ends first: of two answers for one place the exact end is kept.
   const found = [...endsOnOther(a, b), ...crossingsOf(a, b)];
-  found.sort((p, q) => p.u - q.u);
-  return found.filter((meeting, i) => !found.slice(0, i).some((other) => same(a, meeting, other)));
+  const kept = found.filter((meeting, i) => !found.slice(0, i).some((other) => same(a, meeting, other)));
+  return kept.sort((p, q) => p.u - q.u);
 }
 
 function same(a: Piece, p: Meeting, q: Meeting): boolean {
@@ -34,16 +35,28 @@ function same(a: Piece, p: Meeting, q: Meeting): boolean {
 function endsOnOther(a: Piece, b: Piece): Meeting[] {
   const found: Meeting[] = [];
   for (const end of [0, 1]) {
-    const onB = nearestOnPiece(b, pointOn(a, end));
-    if (onB.distance <= SAME_POINT) {
-      found.push({ u: end, v: onB.u });
+    const onB = touchAt(b, pointOn(a, end));
+    if (onB !== undefined) {
+      found.push({ u: end, v: onB });
     }
-    const onA = nearestOnPiece(a, pointOn(b, end));
-    if (onA.distance <= SAME_POINT) {
-      found.push({ u: onA.u, v: end });
+  }
+  for (const end of [0, 1]) {
+    const onA = touchAt(a, pointOn(b, end));
+    if (onA !== undefined) {
+      found.push({ u: onA, v: end });
     }
   }
   return found;
+}
+
+/** Where a point lies on a piece, if it does; an end of it where that is as good. */
+function touchAt(piece: Piece, point: Point): number | undefined {
+  const { u, distance: off } = nearestOnPiece(piece, point);
+  if (off > SAME_POINT) {
+    return undefined;
+  }
+  const end = u < 0.5 ? 0 : 1;
+  return distance(pointOn(piece, end), point) <= SAME_POINT ? end : u;
 }
 
 function crossingsOf(a: Piece, b: Piece): Meeting[] {

@@ -1,7 +1,7 @@
 /**
  * Meetings of two pieces of any kind, by halving both until they either lie apart, or cross at a clear angle (the
  * headings differ by more than both spans turn, so they meet once at most) and Newton's method can finish.
- * Spans that stay near and parallel down to nothing touch: they count where they come within SAME_POINT. mm.
+ * Spans that stay near and parallel until they are as good as straight count where they come within SAME_POINT. mm.
  */
 import { SAME_POINT } from '../base/tolerances.ts';
 import { cycloidRate, cycloidVertices } from './cycloid.ts';
@@ -23,8 +23,11 @@ interface Meeting {
 /** Spans looked at before two pieces are taken to lie on one another, where only their ends are meetings. */
 const MOST_SPANS = 5000;
 
-/** Halvings of both together: 2^-26 of a piece is shorter than SAME_POINT needs for a touch. */
-const DEPTH = 52;
+/** Both together; far more than it takes to make any span flat. */
+const DEPTH = 60;
+
+/** Sag under which a span is as good as straight. */
+const FLAT = SAME_POINT / 10;
 
 export function meetByHalving(a: Piece, b: Piece): Meeting[] {
   const search: Search = { found: [], spans: 0 };
@@ -52,11 +55,13 @@ function halve(a: Span, b: Span, depth: number, search: Search): void {
     }
     return;
   }
-  if (depth === 0 || halfA + halfB < SAME_POINT) {
-    const known = search.found.at(-1);
-    const here = pointOn(a.piece, middle(a));
-    if (known === undefined || distance(pointOn(a.piece, known.u), here) > 4 * SAME_POINT) {
-      search.found.push({ u: middle(a), v: middle(b) });
+  const sag = (halfA * turnOf(a.piece) * (a.to - a.from) + halfB * turnOf(b.piece) * (b.to - b.from)) / 4;
+  if (depth === 0 || sag < FLAT) {
+    const touch = newton(a, b);
+    const near = 8 * (halfA + halfB);
+    const known = touch && search.found.at(-1);
+    if (touch && !(known && distance(pointOn(a.piece, known.u), pointOn(a.piece, touch.u)) < near)) {
+      search.found.push(touch);
     }
     return;
   }

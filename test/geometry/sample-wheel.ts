@@ -38,13 +38,20 @@ export function toothSector(shape: ToothShape): Chain {
   const pointed = findRoot(seen, 1e-9, end);
   const addendum = norm(cycloidPoint({ ...base, to: end }, pointed)) - fixed;
   const outside = fixed + height * addendum;
-  const to = height < 1 ? findRoot((t) => norm(cycloidPoint({ ...base, to: end }, t)) - outside, 0, pointed) : pointed;
+  const to =
+    height < 1 ? findRoot((t) => norm(cycloidPoint({ ...base, to: end }, t)) - outside, 0, pointed) : pointed;
   const flankTop = contactPoint({ ...base, to }, 0);
   const addendumPiece: CycloidPiece = { ...base, to };
   const landStart = angleOf(cycloidPoint(addendumPiece, to));
   const root = fixed - dedendum * module;
   const side: Chain = [
-    { kind: 'arc', centre: { x: 0, y: 0 }, radius: root, start: -Math.PI / teeth, turn: Math.PI / teeth - half },
+    {
+      kind: 'arc',
+      centre: { x: 0, y: 0 },
+      radius: root,
+      start: -Math.PI / teeth,
+      turn: Math.PI / teeth - half,
+    },
     { kind: 'line', from: polar(root, -half), to: flankTop },
     addendumPiece,
   ];
