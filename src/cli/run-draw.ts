@@ -76,6 +76,8 @@ function shapeOf(
     sector: opened?.value.sector ?? form.value.sector,
     ...(windows === undefined ? {} : { crossings: windows.value }),
     bore: job.wheel.bore,
+    thickness: job.wheel.thickness,
+    unit: job.length,
     what: cut ? `as a cutter that cuts ${diameter} mm leaves it` : 'the exact outline',
   });
 }

@@ -1,9 +1,12 @@
 /** What a program's header and the sheet's set-up say, gathered from job, machine, shapes and plan. mm. */
+import { millimetresPer, type LengthUnit } from '../base/units.ts';
 import type { Job } from '../job/job.ts';
 import type { Machine } from '../machine/machine.ts';
 import type { HeaderCutter, HeaderFacts } from '../post/header-facts.ts';
-import { motionFacts } from '../post/motion-facts.ts';
+import type { Motion } from '../motion/motion.ts';
+import { motionFacts, type MotionFacts, type Span } from '../post/motion-facts.ts';
 import type { CutPlan } from '../toolpath/plan.ts';
+import { overTips } from '../tooth/span.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 import { materialNamed } from '../cutting/materials.ts';
 
@@ -24,16 +27,18 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
   const { job, mark, version, form, plan } = sources;
   const programs = plan.programs.filter((_, k) => i === 'all' || k === i);
   const motions = kind === 'walk' ? [plan.walk] : programs.map(({ motion }) => motion);
-  const { x, y, z, speeds } = motionFacts({ steps: motions.flatMap(({ steps }) => steps) });
+  const { x, y, z, speeds } = together(motions.map(factsOf));
   const numbers = kind === 'walk' ? [] : programs.flatMap(({ cutters }) => cutters);
+  // A program speaks its machine's unit, the sheet the job's.
+  const unit = i === 'all' ? job.length : sources.machine.units;
   return {
     kind,
     title: job.title,
     mark,
     version,
-    part: partLines(sources),
+    part: partLines(sources, unit),
     program: { number: kind === 'walk' || i === 'all' ? 0 : i + 1, of: plan.programs.length },
-    blank: blankWords(job),
+    blank: blankWords(job, unit),
     holding: job.setup.holding.join(' and '),
     material: job.setup.material,
     cutters: job.setup.cutters.filter(({ number }) => numbers.includes(number)).map(headerCutter),
@@ -44,8 +49,8 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
     plateZ: job.setup.plateZ,
     park: plan.park,
     zero: job.zero,
-    again: againWords(job),
-    check: { what: 'the diameter over the tips', size: 2 * form.outsideRadius },
+    again: againWords(job, unit),
+    check: { what: 'the diameter over the tips', size: overTips(form).most },
     proved: [
       'read back from this text: the flanks against the exact curve at every depth, bore and crossings, travel, fast moves, keep-outs, feeds and spindle, loose metal',
     ],
@@ -55,45 +60,75 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
   };
 }
 
+/** Reckoned once for each motion. Why: a program is long, and its head and the sheet both ask. */
+const KNOWN = new WeakMap<Motion, MotionFacts>();
+
+function factsOf(motion: Motion): MotionFacts {
+  const facts = KNOWN.get(motion) ?? motionFacts(motion);
+  KNOWN.set(motion, facts);
+  return facts;
+}
+
+type Reach = Pick<MotionFacts, 'x' | 'y' | 'z' | 'speeds'>;
+
+function together(all: readonly Reach[]): Reach {
+  const span = (pick: (facts: Reach) => Span): Span => [
+    Math.min(...all.map((facts) => pick(facts)[0])),
+    Math.max(...all.map((facts) => pick(facts)[1])),
+  ];
+  const speeds = new Set(all.flatMap((facts) => facts.speeds));
+  return {
+    x: span((facts) => facts.x),
+    y: span((facts) => facts.y),
+    z: span((facts) => facts.z),
+    speeds: [...speeds].sort((a, b) => a - b),
+  };
+}
+
 function headerCutter({ number, diameter, flutes, stickOut }: Job['setup']['cutters'][number]): HeaderCutter {
   return { number, diameter, flutes, stickOut };
 }
 
-function partLines({ job, form, crossings }: HeaderSources): readonly string[] {
+function partLines({ job, form, crossings }: HeaderSources, unit: LengthUnit): readonly string[] {
   const { teeth, module, mate } = form.proportions;
   const mateWords =
     mate.kind === 'pinion' ? `pinion of ${mate.leaves} leaves` : `lantern of ${mate.trundles} trundles`;
   const holes = [
-    job.wheel.bore > 0 ? `bore ${decimal(job.wheel.bore)} mm` : 'no bore',
+    job.wheel.bore > 0 ? `bore ${size(job.wheel.bore, unit)}` : 'no bore',
     crossings === undefined ? 'no crossings' : `${crossings.count} crossings`,
   ];
   return [
-    `wheel of ${teeth} teeth, module ${decimal(module)}, for a ${mateWords}, ${decimal(job.wheel.thickness)} mm thick, ${holes.join(', ')}`,
+    `wheel of ${teeth} teeth, module ${decimal(module)}, for a ${mateWords}, ${size(job.wheel.thickness, unit)} thick, ${holes.join(', ')}`,
   ];
 }
 
-function blankWords(job: Job): string {
+function blankWords(job: Job, unit: LengthUnit): string {
   const { shape, topZ, plateZ } = job.setup;
-  const thick = `${decimal(topZ - plateZ)} mm thick`;
+  const thick = `${size(topZ - plateZ, unit)} thick`;
   const words =
     shape.kind === 'sheet'
-      ? `sheet ${decimal(shape.width)} by ${decimal(shape.height)} mm, ${thick}, its middle at zero`
-      : `disc ${decimal(shape.diameter)} mm across, ${thick}, its axis at zero`;
+      ? `sheet ${size(shape.width, unit)} by ${size(shape.height, unit)}, ${thick}, its middle at zero`
+      : `disc ${size(shape.diameter, unit)} across, ${thick}, its axis at zero`;
   const material = materialNamed(job.setup.material)?.words;
   return material === undefined ? words : `${words}, ${material}`;
 }
 
 /** Zero may be bored away: a place that stays. */
-function againWords(job: Job): string {
+function againWords(job: Job, unit: LengthUnit): string {
   const { shape, bored } = job.setup;
   if (shape.kind === 'disc') {
     return bored > 0
       ? 'run a dial gauge round the hole, which is the axis'
       : 'run a dial gauge round the rim of the disc before the teeth are cut, and mark two edges of the plate';
   }
-  return `the edges of the sheet lie at X ${decimal(-shape.width / 2)} and Y ${decimal(-shape.height / 2)} mm, and stay there; touch them and write down what the machine shows`;
+  return `the edges of the sheet lie at X ${size(-shape.width / 2, unit)} and Y ${size(-shape.height / 2, unit)}, and stay there; touch them and write down what the machine shows`;
 }
 
-function decimal(value: number): string {
-  return value.toFixed(4).replace(/\.?0+$/, '');
+/** A size as it is said: "44 mm", "0.0625 inch". */
+function size(mm: number, unit: LengthUnit): string {
+  return `${decimal(mm / millimetresPer(unit), unit === 'mm' ? 4 : 5)} ${unit}`;
+}
+
+function decimal(value: number, decimals = 4): string {
+  return value.toFixed(decimals).replace(/\.?0+$/, '');
 }

@@ -5,10 +5,10 @@ import type { Machine } from '../machine/machine.ts';
 import type { Motion } from '../motion/motion.ts';
 import { timeProgram, type ProgramTime } from '../motion/time-program.ts';
 import { cautions } from '../post/cautions.ts';
-import { setUpLines } from '../post/header.ts';
 import type { ProgramText } from '../post/write-program.ts';
 import type { Proof } from '../prove/proof.ts';
 import type { SheetFacts, SheetPass, SheetProgram } from '../report/facts.ts';
+import { passPaths } from '../report/pass-paths.ts';
 import type { CutPlan } from '../toolpath/plan.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
@@ -65,16 +65,14 @@ export function sheetFacts(
       ? { walkFile: written.walk.file, walkSha256: hash(written.walk.text) }
       : {}),
     motions: plan?.programs.map((program) => program.motion) ?? [],
+    paths: passPaths(plan?.programs.map((program) => program.motion) ?? []),
     passes: plan === undefined ? [] : passesOf(plan, times),
     ...(proof === undefined ? {} : { proof }),
     problems,
-    setUp: header === undefined ? [] : setUpLines(header, machine).filter((line) => !ON_THE_SHEET.test(line)),
+    again: header?.again ?? '',
     cautions: header === undefined ? [] : cautions(header, machine),
   };
 }
-
-/** Lines of a program's head that the sheet shows elsewhere. */
-const ON_THE_SHEET = /^(?:Title|Mark|Cutting program|Part|Machine file|Proved|Not proved)\b/;
 
 function timeOf(motion: Motion, machine: Machine): ProgramTime {
   return timeProgram(motion, machine.limits, machine.words.spindle.spinUpSeconds);

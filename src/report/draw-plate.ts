@@ -1,15 +1,10 @@
-/**
- * NAME.svg: Plate I as a file of its own, with its look inside it, so that any viewer shows it: the wheel, the paths and the
- * dial, the scale bar, and a line that says what it shows.
- */
-import { drawWheel } from './draw-wheel.ts';
+/** NAME.svg: the plate of the work as a file of its own, with its look inside it, so that any viewer shows it. */
+import { drawWork } from './draw-work.ts';
 import type { SheetFacts } from './facts.ts';
-import { SHEET_STYLE } from './sheet-style.ts';
-import { escapeText } from './words.ts';
+import { standAlone } from './stand-alone.ts';
 
 export function drawPlate(facts: SheetFacts): string {
-  const { svg } = drawWheel(facts);
-  const at = svg.indexOf('>') + 1;
-  const title = `<title>${escapeText(facts.job.title)}: ${facts.form.proportions.teeth} teeth, paths of the cutters' centres; millimetres</title>`;
-  return `${svg.slice(0, at)}${title}<style>svg{background:#fbf8f1}${SHEET_STYLE}</style>${svg.slice(at)}\n`;
+  const { job, form } = facts;
+  const title = `${job.title}: ${form.proportions.teeth} teeth, paths of the cutters' centres; coordinates in millimetres`;
+  return standAlone(drawWork(facts, 'here').svg, title);
 }

@@ -1,95 +1,143 @@
 /**
- * Plate II: one tooth space magnified: the exact outline, what the cutter leaves at the root, the finishing cutter standing
- * where it goes deepest, and the paths. Drawn with the space upright.
+ * One tooth space magnified: the exact outline, what the finishing cutter leaves, the cutter where it stands deepest, the paths
+ * of the last laps, and beside them the radii that matter. A space far from tooth 1, where entries and exits are, is turned upright. mm of paper, Y down.
  */
 import { turnChain } from '../geometry/change-piece.ts';
-import { isMove, type MoveStep } from '../motion/motion.ts';
-import { lastLaps } from './draw-wheel.ts';
+import { turnPoint, type Point } from '../geometry/point.ts';
+import type { WheelPiece } from '../tooth/wheel.ts';
+import { isRoughPass } from './dial.ts';
+import { words } from './dimension.ts';
 import type { SheetFacts } from './facts.ts';
-import { hair, plateSvg, scaleBar, scaleToFit, type PlateFrame } from './plate.ts';
-import { chainPath, movesPath } from './svg-path.ts';
-import { plain } from './words.ts';
+import { bareLength } from './lengths.ts';
+import { nearbyPaths } from './nearby-paths.ts';
+import {
+  axisDashes,
+  HEAVY,
+  LIGHT,
+  onWork,
+  plateSvg,
+  scaleBar,
+  scaleToFit,
+  type PlateFrame,
+} from './plate.ts';
+import { spread } from './spread.ts';
+import { chainPath, drawable } from './svg-path.ts';
+import { coordinate, escapeText, fixed, plain } from './words.ts';
 
-const PAPER = 110;
+const PICTURE = 112;
+const LABELS = 58;
+const LABEL_GAP = 5.2;
+/** Pitches that are seen: a little more than a tooth on each side of the space. */
+const SEEN = 0.85;
 
 export function drawSpace(facts: SheetFacts): { readonly svg: string; readonly scale: number } {
   const { form } = facts;
   const pitch = (2 * Math.PI) / form.proportions.teeth;
   const cutter = facts.job.cuts.finishing.cutter;
-  // The space after tooth 1 lies at angle pitch/2; turned so that it points up.
+  const middle = (Math.floor(form.proportions.teeth / 2) + 0.5) * pitch;
   const upright = Math.PI / 2 - pitch / 2;
-  const halfWidth = form.outsideRadius * Math.sin(Math.min(0.85 * pitch, Math.PI / 2));
+  const wide = form.outsideRadius * Math.sin(Math.min(SEEN * pitch, Math.PI / 2));
+  const scale = scaleToFit(2 * wide, PICTURE);
+  const low =
+    form.rootRadius * Math.cos(Math.min(SEEN * pitch, 1)) - 0.35 * (form.outsideRadius - form.rootRadius);
   const frame: PlateFrame = {
-    left: -halfWidth,
-    right: halfWidth,
-    bottom:
-      form.rootRadius * Math.cos(Math.min(0.85 * pitch, 1)) - 0.35 * (form.outsideRadius - form.rootRadius),
-    top: form.outsideRadius + cutter.diameter * 0.75,
-    scale: scaleToFit(2 * halfWidth, PAPER),
+    left: -wide * scale,
+    right: wide * scale + LABELS,
+    top: -(form.outsideRadius + cutter.diameter * 0.75) * scale,
+    bottom: -low * scale,
+    scale,
   };
-  const exact = [-1, 0, 1, 2].flatMap((k) =>
-    turnChain(
-      form.sector.map(({ piece }) => piece),
-      upright + k * pitch,
-    ),
-  );
-  const cut = [-1, 0, 1, 2].flatMap((k) =>
-    turnChain(
-      (facts.asCut?.sector ?? []).map(({ piece }) => piece),
-      upright + k * pitch,
-    ),
-  );
-  const foot = `L${plain(halfWidth * 3, 3)} 0L${plain(-halfWidth * 3, 3)} 0Z`;
   const body =
-    (cut.length > 0 ? `<path class="left" d="${chainPath(cut, false)}${foot}"/>` : '') +
-    `<path class="metal" data-figure="tooth" stroke-width="${hair(frame, 0.25)}" d="${chainPath(exact, false)}${foot}"/>` +
-    (cut.length > 0
-      ? `<path class="cut" stroke-width="${hair(frame, 0.18)}" d="${chainPath(cut, false)}"/>`
-      : '') +
-    pitchArc(form.pitchRadius, frame) +
-    nearbyPaths(facts, frame, upright) +
-    cutterRing(facts, frame);
-  const labels = scaleBar(frame, frame.left + 2 / frame.scale, -frame.top + 4 / frame.scale);
-  return { svg: plateSvg(frame, 'One tooth space', body, labels), scale: frame.scale };
+    `<defs><clipPath id="space"><rect x="${coordinate(-wide)}" y="${coordinate(low)}" width="${coordinate(2 * wide)}" height="${coordinate(-frame.top / scale - low)}"/></clipPath></defs>` +
+    `<g clip-path="url(#space)">${metal(facts, wide, upright, pitch)}${circles(facts, frame)}${paths(facts, frame, middle, wide)}${cutterRing(facts, upright, frame)}</g>`;
+  const marks =
+    radii(facts, frame, wide * scale) + scaleBar(frame, wide * scale + 8, frame.top + 4, facts.job.length);
+  return { svg: plateSvg(frame, 'One tooth space, magnified', body, marks), scale };
 }
 
-function pitchArc(radius: number, frame: PlateFrame): string {
-  const dash = `${hair(frame, 3)} ${hair(frame, 0.8)} ${hair(frame, 0.4)} ${hair(frame, 0.8)}`;
-  return `<circle class="construction" r="${plain(radius, 4)}" stroke-width="${hair(frame, 0.1)}" stroke-dasharray="${dash}"/>`;
-}
-
-/** The moves of roughing and finishing that pass through the picture. */
-function nearbyPaths(facts: SheetFacts, frame: PlateFrame, upright: number): string {
-  const near = (move: MoveStep): boolean => {
-    const angle = Math.atan2(move.to.y, move.to.x) + upright - Math.PI / 2;
-    const radius = Math.hypot(move.to.x, move.to.y);
-    const wide = Math.atan2(frame.right, facts.form.rootRadius) * 1.3;
-    return Math.abs(angle) < wide && radius > frame.bottom && radius < frame.top * 1.1;
+/** Under the exact metal what the cutter leaves, so that only the rest of it shows. */
+function metal(facts: SheetFacts, wide: number, upright: number, pitch: number): string {
+  const around = (sector: readonly WheelPiece[]): string => {
+    const one = drawable(sector);
+    return chainPath(
+      [-1, 0, 1, 2].flatMap((k) => turnChain(one, upright + k * pitch)),
+      false,
+    );
   };
-  return facts.motions
-    .flatMap(lastLaps)
-    .filter(({ pass }) => /rough|finish|mouth|spring/.test(pass))
-    .map(({ pass, from, moves }) => {
-      const kind = pass.includes('finish') || pass.includes('spring') ? 'path fine' : 'path rough';
-      let at = from;
-      const runs: string[] = [];
-      for (const move of moves.filter(isMove)) {
-        if (near(move)) {
-          runs.push(movesPath(at, [move]));
-        }
-        at = move.to;
-      }
-      return `<g transform="rotate(${plain((upright * 180) / Math.PI, 6)})"><path class="${kind}" stroke-width="${hair(frame, 0.18)}" d="${runs.join('')}"/></g>`;
-    })
+  const foot = `L${coordinate(-3 * wide)} 0L${coordinate(3 * wide)} 0Z`;
+  const exact = around(facts.form.sector);
+  const cut = facts.asCut === undefined ? '' : around(facts.asCut.sector);
+  return (
+    (cut === '' ? '' : `<path class="left-metal" d="${cut}${foot}"/>`) +
+    `<g class="metal"><path data-figure="tooth" d="${exact}${foot}"/></g>` +
+    (cut === '' ? '' : `<path class="cut" data-figure="as-cut" d="${cut}"/>`)
+  );
+}
+
+function circles({ form }: SheetFacts, frame: PlateFrame): string {
+  return `<circle class="axis" r="${coordinate(form.pitchRadius)}" stroke-width="${onWork(frame, LIGHT)}" stroke-dasharray="${axisDashes(frame)}"/>`;
+}
+
+/** Of passes that lie on one another only the first. */
+function paths(facts: SheetFacts, frame: PlateFrame, middle: number, wide: number): string {
+  const near = nearbyPaths(facts, middle, wide);
+  const seen = new Set<string>();
+  return near
+    .filter(({ d }) => d !== '' && !seen.has(d) && seen.add(d))
+    .map(
+      ({ pass, d }) =>
+        `<g class="way" transform="rotate(${plain(90 - (middle * 180) / Math.PI, 6)})"><path class="${isRoughPass(pass) ? 'rough' : 'fine'}" data-pass="${escapeText(pass)}" stroke-width="${onWork(frame, HEAVY)}" d="${d}"/></g>`,
+    )
     .join('');
 }
 
-/** The finishing cutter where it stands lowest in the space: tangent to the floor or wedged between the flanks. */
-function cutterRing(facts: SheetFacts, frame: PlateFrame): string {
-  const radius = facts.job.cuts.finishing.cutter.diameter / 2;
-  const floor = facts.asCut?.floorRadius;
-  if (floor === undefined) {
+/** Where it lies against floor and flank, or between the flanks: the arc it leaves at the root is its own. */
+function cutterRing({ asCut, job }: SheetFacts, upright: number, frame: PlateFrame): string {
+  const radius = job.cuts.finishing.cutter.diameter / 2;
+  const centre = restingPlace(asCut?.sector ?? [], radius, upright);
+  if (centre === undefined) {
     return '';
   }
-  return `<circle class="cutter" cy="${plain(floor + radius, 4)}" r="${plain(radius, 4)}" stroke-width="${hair(frame, 0.18)}"/>`;
+  const [x, y] = [coordinate(centre.x), coordinate(centre.y)];
+  return `<g stroke-width="${onWork(frame, LIGHT)}"><circle class="cutter" data-figure="cutter" cx="${x}" cy="${y}" r="${coordinate(radius)}"/><path class="cutter" d="M${x} ${y}m${onWork(frame, -1.2)} 0h${onWork(frame, 2.4)}m${onWork(frame, -1.2)} ${onWork(frame, -1.2)}v${onWork(frame, 2.4)}"/></g>`;
+}
+
+/** The last of the sector's arcs that the cutter leaves is on the far side of tooth 1, which is in the space drawn. */
+function restingPlace(sector: readonly WheelPiece[], radius: number, upright: number): Point | undefined {
+  const found = sector.findLast(
+    ({ role, piece }) =>
+      (role === 'root' || role === 'fillet') &&
+      piece.kind === 'arc' &&
+      piece.turn < 0 &&
+      Math.abs(piece.radius - radius) < radius * OWN_ARC,
+  )?.piece;
+  return found?.kind === 'arc' ? turnPoint(found.centre, upright) : undefined;
+}
+
+/** Share of its radius by which the cutter's own arc may seem off. Why: doubles, turned and mirrored. */
+const OWN_ARC = 1e-9;
+
+/** The radii from the axis, spread beside the picture, each with a leader to its height on the right edge. */
+function radii({ form, asCut, job }: SheetFacts, frame: PlateFrame, edge: number): string {
+  const rows = [
+    { figure: 'tip-radius', name: 'tip', radius: form.outsideRadius },
+    { figure: 'pitch-radius', name: 'pitch circle', radius: form.pitchRadius },
+    { figure: 'working-radius', name: 'working flank begins', radius: form.workingRadius },
+    ...(asCut === undefined
+      ? []
+      : [{ figure: 'foot-radius', name: 'foot: straight flank ends', radius: asCut.footRadius }]),
+    { figure: 'root-radius', name: 'root', radius: form.rootRadius },
+  ].toSorted((a, b) => b.radius - a.radius);
+  const heights = rows.map(
+    ({ radius }) => -Math.sqrt(Math.max(radius ** 2 - (edge / frame.scale) ** 2, 0)) * frame.scale,
+  );
+  const places = spread(heights, LABEL_GAP, frame.top + 14, frame.bottom - 2);
+  const lines = rows.map(({ figure, name, radius }, i) => {
+    const [y, label] = [heights[i] ?? 0, places[i] ?? 0];
+    return (
+      `<g data-figure="${figure}" data-value="${fixed(radius, 6)}"><path class="line" d="M${plain(edge, 3)} ${plain(y, 3)}h2L${plain(edge + 6, 3)} ${plain(label, 3)}"/>` +
+      `${words(`r ${bareLength(radius, job.length)}`, edge + 7, label + 1)}${words(name, edge + 22, label + 1)}</g>`
+    );
+  });
+  return lines.join('');
 }

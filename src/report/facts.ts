@@ -7,6 +7,7 @@ import type { Job } from '../job/job.ts';
 import type { Machine } from '../machine/machine.ts';
 import type { Motion } from '../motion/motion.ts';
 import type { Proof } from '../prove/proof.ts';
+import type { PassPath } from './pass-paths.ts';
 import type { AsCut } from '../tooth/as-cut.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 
@@ -57,15 +58,18 @@ export interface SheetFacts {
   readonly programs: readonly SheetProgram[];
   readonly walkFile?: string;
   readonly walkSha256?: string;
-  /** The motion of each program, for its paths by pass (`belongs`). */
+  /** The motion of each program, for what hands do at its stops. */
   readonly motions: readonly Motion[];
+  /** The way of the cutter's centre in each pass, from those motions. */
+  readonly paths: readonly PassPath[];
   readonly passes: readonly SheetPass[];
   /** Where to park before starting. */
   readonly park?: { readonly x: number; readonly y: number; readonly z: number };
   readonly proof?: Proof;
   /** Everything found on the way that is not in the proof: warnings, and reasons where nothing was made. */
   readonly problems: readonly Problem[];
+  /** A sentence: where zero of X and Y can be found again. As in the programs' headers. */
+  readonly again: string;
   /** The same sentences as in the programs' headers. */
-  readonly setUp: readonly string[];
   readonly cautions: readonly string[];
 }

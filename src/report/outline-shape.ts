@@ -1,4 +1,5 @@
 /** The whole part's outlines as closed loops of exact pieces: teeth, bore, windows. mm, the wheel's frame. */
+import type { LengthUnit } from '../base/units.ts';
 import { repeatRound, turnChain } from '../geometry/change-piece.ts';
 import { ORIGIN } from '../geometry/point.ts';
 import type { Loop } from '../geometry/piece.ts';
@@ -12,6 +13,10 @@ export interface OutlineShape {
   readonly crossings?: Crossings;
   /** Diameter, 0 for none. */
   readonly bore: number;
+  /** Of the plate, 0 where only the outline matters. */
+  readonly thickness?: number;
+  /** Unit of the figures on the drawing. */
+  readonly unit?: LengthUnit;
   /** "exact outline", "as a 0.5 mm cutter leaves it". */
   readonly what: string;
 }

@@ -1,23 +1,34 @@
 /**
- * The frame every plate shares: a picture of so many millimetres of paper, its scale bar, and the line beneath that says
- * what it shows. Drawn in the work's millimetres with Y up; `scale` says how many millimetres of paper one of them takes.
+ * The frame every plate shares: so many millimetres of paper, the work drawn to a scale on it, a scale bar.
+ * The work stands in its own millimetres with Y up, in a group that is scaled and turned over; lines, figures and words beside
+ * it are in millimetres of paper with Y down, the work's zero at (0, 0).
  */
+import { millimetresPer, type LengthUnit } from '../base/units.ts';
+import { shortUnit } from './lengths.ts';
 import { escapeText, plain } from './words.ts';
 
 export interface PlateFrame {
-  /** Millimetres of the work, from left to right and from bottom to top. */
+  /** Edges in millimetres of paper, Y down: top is less than bottom. */
   readonly left: number;
   readonly right: number;
-  readonly bottom: number;
   readonly top: number;
+  readonly bottom: number;
   /** Paper over work: 4 is drawn four times its size. */
   readonly scale: number;
 }
 
+/** Width of the page's text, mm. */
+export const PAPER = 170;
+/** The two weights of line, mm of paper. */
+export const HEAVY = 0.25;
+export const LIGHT = 0.12;
+/** Height of the letters, mm of paper. */
+export const LETTER = 3;
+
 /** Scales a draughtsman would use. */
 const SCALES: readonly number[] = [
   1000, 500, 400, 300, 250, 200, 150, 100, 80, 60, 50, 40, 30, 25, 20, 15, 12, 10, 8, 6, 5, 4, 3, 2.5, 2, 1.5,
-  1, 0.5, 0.25, 0.2, 0.1, 0.05,
+  1.25, 1, 0.8, 0.6, 0.5, 0.4, 0.3, 0.25, 0.2, 0.15, 0.1, 0.05,
 ];
 
 /** The largest of them at which `extent` mm of work fit on `paper` mm. */
@@ -30,35 +41,36 @@ export function scaleWords(scale: number): string {
   return scale >= 1 ? `${plain(scale, 2)} : 1` : `1 : ${plain(1 / scale, 2)}`;
 }
 
-/**
- * An SVG whose user unit is one millimetre of the work, Y down as SVG has it; `body` is drawn Y up within a turned group,
- * `labels` stand upright (give them with Y down, already negated).
- */
-export function plateSvg(frame: PlateFrame, name: string, body: string, labels: string): string {
-  const width = frame.right - frame.left;
-  const height = frame.top - frame.bottom;
-  const box = `${plain(frame.left, 4)} ${plain(-frame.top, 4)} ${plain(width, 4)} ${plain(height, 4)}`;
-  const paper = (length: number): string => plain(length * frame.scale, 2);
+/** `body` in millimetres of the work, Y up; `marks` in millimetres of paper, Y down. */
+export function plateSvg(frame: PlateFrame, name: string, body: string, marks: string): string {
+  const width = plain(frame.right - frame.left, 2);
+  const height = plain(frame.bottom - frame.top, 2);
+  const scale = plain(frame.scale, 6);
   return (
-    `<svg xmlns="http://www.w3.org/2000/svg" role="img" aria-label="${escapeText(name)}" viewBox="${box}" ` +
-    `width="${paper(width)}mm" height="${paper(height)}mm" font-size="${plain(3 / frame.scale, 4)}">` +
-    `<g transform="scale(1 -1)" fill="none" stroke-linejoin="round">${body}</g>${labels}</svg>`
+    `<svg xmlns="http://www.w3.org/2000/svg" class="plate" role="img" aria-label="${escapeText(name)}" ` +
+    `viewBox="${plain(frame.left, 2)} ${plain(frame.top, 2)} ${width} ${height}" width="${width}mm" height="${height}mm" font-size="${LETTER}">` +
+    `<g data-scale="${scale}" transform="scale(${scale} -${scale})" fill="none" stroke-linejoin="round" stroke-width="${onWork(frame, HEAVY)}">${body}</g>` +
+    `<g stroke-width="${LIGHT}">${marks}</g></svg>`
   );
 }
 
-/** A hairline's width in millimetres of the work: `paper` mm on the page. */
-export function hair(frame: PlateFrame, paper: number): string {
-  return plain(paper / frame.scale, 5);
+/** A length of paper in millimetres of the work, for widths of lines and dashes. */
+export function onWork(frame: PlateFrame, paper: number): string {
+  return plain(paper / frame.scale, 6);
 }
 
-/** A bar of a round length with its figure, its left end at (x, y), Y down. */
-export function scaleBar(frame: PlateFrame, x: number, y: number): string {
-  const length = SCALES.toReversed().find((candidate) => candidate * frame.scale >= 15) ?? 1;
-  const thin = hair(frame, 0.18);
-  const tick = 1.2 / frame.scale;
+/** A dash-dot line's dashes in millimetres of the work. */
+export function axisDashes(frame: PlateFrame): string {
+  return [3.2, 0.9, 0.5, 0.9].map((length) => onWork(frame, length)).join(' ');
+}
+
+/** A bar of a round length with its figure, its left end at (x, y) of the paper. */
+export function scaleBar(frame: PlateFrame, x: number, y: number, unit: LengthUnit = 'mm'): string {
+  const perUnit = millimetresPer(unit);
+  const length = SCALES.toReversed().find((candidate) => candidate * perUnit * frame.scale >= 15) ?? 1;
+  const paper = length * perUnit * frame.scale;
   return (
-    `<path d="M${plain(x, 4)} ${plain(y - tick, 4)}v${plain(2 * tick, 4)}m0 ${plain(-tick, 4)}h${plain(length, 4)}` +
-    `m0 ${plain(-tick, 4)}v${plain(2 * tick, 4)}" fill="none" stroke="currentColor" stroke-width="${thin}"/>` +
-    `<text x="${plain(x + length + 1.5 / frame.scale, 4)}" y="${plain(y + 1 / frame.scale, 4)}">${plain(length, 2)} mm</text>`
+    `<path class="line" data-figure="scale-bar" data-value="${plain(length * perUnit, 6)}" d="M${plain(x, 2)} ${plain(y - 1, 2)}v2m0 -1h${plain(paper, 3)}m0 -1v2"/>` +
+    `<text x="${plain(x + paper + 1.5, 2)}" y="${plain(y + 1, 2)}">${plain(length, 3)} ${shortUnit(unit)}</text>`
   );
 }

@@ -4,6 +4,8 @@ import { arc, line } from 'd3-shape';
 
 export interface Scale {
   readonly at: (value: number) => number;
+  /** What stands at a place. */
+  readonly value: (at: number) => number;
   readonly ticks: readonly number[];
 }
 
@@ -13,7 +15,7 @@ export function linearScale(
   ticks: number,
 ): Scale {
   const scale = scaleLinear().domain(domain).range(range);
-  return { at: (value) => scale(value), ticks: scale.ticks(ticks) };
+  return { at: (value) => scale(value), value: (at) => scale.invert(at), ticks: scale.ticks(ticks) };
 }
 
 /** Path data through points that are already in the picture's units. */

@@ -1,67 +1,88 @@
-/** What to measure on the first-off, with room to write the reading beside it. */
-import { bestSpan, overTips, SPAN_SENSITIVITY, spanOver, toothChord } from '../tooth/span.ts';
+/** What to measure on the first-off, with room to write the reading beside it, and what a difference means. */
+import { overTips, SPAN_SENSITIVITY, toothChord } from '../tooth/span.ts';
+import { spansOf } from './draw-jaws.ts';
 import type { SheetFacts } from './facts.ts';
-import { bothUnits, fixed, millimetres } from './words.ts';
+import { lengthBoth, lengthOnly } from './lengths.ts';
+import { head } from './sheet-set-up.ts';
+import { fixed } from './words.ts';
 
 export function measureSection(facts: SheetFacts): string {
-  const rows = [...tipRows(facts), ...spanRows(facts), ...boreRows(facts), ...chordRows(facts)].join('\n');
+  const rows = [
+    ...tipRows(facts),
+    ...spanRows(facts),
+    ...boreRows(facts),
+    ...chordRows(facts),
+    thicknessRow(facts),
+  ].join('\n');
+  const example = lengthBoth(0.01, facts.job.length);
   return (
-    '<section>\n<h2>Measure on the first-off</h2>\n<p>Deburr first, and measure before the wheel leaves its holding if you can. ' +
-    `A cutter that cuts wide or narrow shows twice in the span over teeth, whatever the tooth form: half the difference is the error of each flank.</p>\n` +
-    '<div class="scroll"><table>\n<thead><tr><th>size</th><th class="n">should read</th><th>read</th><th>how</th></tr></thead>\n' +
-    `<tbody>${rows}</tbody>\n</table></div>\n</section>`
+    '<section>\n<h2>Measure on the first-off</h2>\n<p>Take the burr off first, and measure while the wheel is still held if you can, spindle still. ' +
+    `The span over teeth tells what the cutter really cuts, whatever the form of the teeth: ${example} more than it should read is half of that left on every flank, and a cutter that cuts ${example} narrower than the job says.</p>\n` +
+    `<div class="whole"><div class="scroll"><table class="measures">\n<thead><tr>${head(['size', 'should read', 'read', 'how'], [1])}</tr></thead>\n` +
+    `<tbody>${rows}</tbody>\n</table></div>\n` +
+    '<p class="soft record">Cut on <span class="rule"></span> by <span class="rule"></span> in the plates it runs <span class="rule"></span></p></div>\n</section>'
   );
 }
 
-function row(name: string, value: number, figure: string, how: string): string {
-  return `<tr><td>${name}</td><td class="n" data-figure="${figure}" data-value="${fixed(value, 6)}">${bothUnits(value)}</td><td class="blank"></td><td>${how}</td></tr>`;
+function row({ job }: SheetFacts, name: string, value: number, figure: string, how: string): string {
+  return `<tr><th scope="row">${name}</th><td class="n" data-figure="${figure}" data-value="${fixed(value, 6)}">${lengthBoth(value, job.length)}</td><td class="blank"></td><td>${how}</td></tr>`;
 }
 
-function tipRows({ form }: SheetFacts): readonly string[] {
-  const tips = overTips(form);
-  const odd = form.proportions.teeth % 2 === 1;
-  const how = odd
-    ? `Flat jaws, the largest reading as they turn; an odd count reads less than the tip circle, ${millimetres(tips.diameter)}.`
-    : 'Flat jaws over two opposite tips.';
-  return [row('over the tips', tips.most, 'tip', how)];
+function tipRows(facts: SheetFacts): readonly string[] {
+  const tips = overTips(facts.form);
+  const how =
+    facts.form.proportions.teeth % 2 === 1
+      ? `Flat jaws, the largest reading as they turn; an odd count reads less than the tip circle, ${lengthOnly(tips.diameter, facts.job.length)}.`
+      : 'Flat jaws over two opposite tips.';
+  return [row(facts, 'over the tips', tips.most, 'tip', how)];
 }
 
-function spanRows({ form }: SheetFacts): readonly string[] {
-  const best = bestSpan(form);
-  if (best === undefined) {
-    return [];
-  }
-  const next = spanOver(form, best.teeth + 1);
-  return [best, ...(next === undefined ? [] : [next])].map((span) =>
+function spanRows(facts: SheetFacts): readonly string[] {
+  return spansOf(facts.form).map((span) =>
     row(
+      facts,
       `over ${span.teeth} teeth`,
       span.reading,
       `span-${span.teeth}`,
-      `Flat jaws touch the flanks ${millimetres(span.height, 2)} above the pitch circle; ${SPAN_SENSITIVITY} times the error of one flank shows.`,
+      `Flat jaws, which touch ${lengthOnly(span.height, facts.job.length)} above the pitch circle; reads ${SPAN_SENSITIVITY} times the error of one flank.`,
     ),
   );
 }
 
-function boreRows({ job }: SheetFacts): readonly string[] {
-  const bore = job.wheel.bore - 2 * job.cuts.bore.leave;
-  if (job.wheel.bore <= 0) {
+function boreRows(facts: SheetFacts): readonly string[] {
+  const { wheel, cuts, setup, length } = facts.job;
+  if (wheel.bore <= 0) {
     return [];
   }
-  const left =
-    job.cuts.bore.leave > 0
-      ? `Pin gauge; ${millimetres(job.cuts.bore.leave)} a side is left for the broach, the finished bore is ${millimetres(job.wheel.bore)}.`
-      : 'Pin gauge, entering from both faces.';
-  return [row('bore', bore, 'bore', left)];
+  const ready = setup.bored >= wheel.bore;
+  const bore = ready ? wheel.bore : wheel.bore - 2 * cuts.bore.leave;
+  const how = ready
+    ? 'Pin gauge; the hole was there before and is not cut.'
+    : cuts.bore.leave > 0
+      ? `Pin gauge; ${lengthOnly(cuts.bore.leave, length)} a side is left for broach or reamer, the finished bore is ${lengthOnly(wheel.bore, length)}.`
+      : 'Pin gauge, from both faces.';
+  return [row(facts, 'bore', bore, 'bore', how)];
 }
 
-function chordRows({ form }: SheetFacts): readonly string[] {
-  const chord = toothChord(form);
+function chordRows(facts: SheetFacts): readonly string[] {
+  const chord = toothChord(facts.form);
   return [
     row(
-      'tooth thickness',
+      facts,
+      'one tooth',
       chord.thickness,
       'chord',
-      `Straight across at the pitch circle, ${millimetres(chord.height)} below the tip; for those with a projector.`,
+      `Straight across at the pitch circle, ${lengthOnly(chord.height, facts.job.length)} below the tip; for those with a projector.`,
     ),
   ];
+}
+
+function thicknessRow(facts: SheetFacts): string {
+  return row(
+    facts,
+    'plate',
+    facts.job.wheel.thickness,
+    'thickness-read',
+    'Thickness, clear of burr and glue.',
+  );
 }

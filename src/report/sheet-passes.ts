@@ -1,62 +1,99 @@
-/** The passes in the order of the work, and the programs that hold them. */
+/** The plate of the work, the programs, the passes with speed, feed, depth and time, and where the figures come from. */
+import { millimetresPer } from '../base/units.ts';
+import { drawWork } from './draw-work.ts';
 import type { SheetFacts, SheetPass } from './facts.ts';
-import { capitalised, duration, escapeText, fixed, numeral, plain } from './words.ts';
+import { bareLength, shortUnit, unitInWords } from './lengths.ts';
+import { scaleWords } from './plate.ts';
+import { head } from './sheet-set-up.ts';
+import { capitalised, duration, escapeText, fixed, numeral, numeralList, plain } from './words.ts';
 
 export function passesSection(facts: SheetFacts): string {
-  if (facts.passes.length === 0) {
-    return '';
-  }
-  const total = facts.passes.reduce((sum, pass) => sum + pass.seconds, 0);
-  return (
-    `<section>\n<h2>Programs and passes</h2>\n${programsTable(facts)}` +
-    '<div class="scroll"><table>\n<caption>Passes. Times are reckoned with the acceleration in the machine file; stops for hands come on top.</caption>\n' +
-    '<thead><tr><th></th><th>pass</th><th>cutter</th><th class="n">spindle<br>1/min</th><th class="n">feed<br>mm/min</th><th class="n">down<br>mm/min</th><th class="n">step<br>mm</th><th class="n">laps</th><th class="n">to Z<br>mm</th><th class="n">time</th></tr></thead>\n' +
-    `<tbody>${facts.passes.map((pass, i) => passRow(facts, pass, i)).join('\n')}</tbody>\n` +
-    `<tfoot><tr><td></td><td colspan="8">all passes</td><td class="n">${duration(total)}</td></tr></tfoot>\n</table></div>\n` +
-    `${reasons(facts.passes)}</section>`
-  );
+  return facts.passes.length === 0
+    ? ''
+    : `<section>\n<h2>${facts.programs.length === 0 ? 'Passes that were planned' : 'Programs and passes'}</h2>\n${programsTable(facts)}${workPlate(facts)}${passesTable(facts)}${reasons(facts.passes)}</section>`;
 }
 
 function programsTable(facts: SheetFacts): string {
+  if (facts.programs.length === 0) {
+    return '';
+  }
   const rows = facts.programs.map(
-    (program) =>
-      `<tr><td class="mark">${escapeText(program.file)}</td><td>${program.cutters.map((number) => cutterWords(facts, number)).join('; ')}</td>` +
-      `<td>${program.units === 'mm' ? 'millimetres' : 'inches'}</td><td class="n">${program.blocks}</td><td class="n">${duration(program.seconds)}</td><td class="mark">${program.sha256.slice(0, 12)}</td></tr>`,
+    (program, i) =>
+      `<tr><th scope="row" class="n">${i + 1}</th><td class="mark">${escapeText(program.file)}</td><td>${program.cutters.join(', ')}</td>` +
+      `<td>${unitInWords(program.units)}</td><td class="n">${program.blocks}</td><td class="n">${duration(program.seconds)}</td><td class="mark">${program.sha256.slice(0, 12)}</td></tr>`,
   );
   const walk =
     facts.walkFile === undefined
       ? ''
-      : `<tr><td class="mark">${escapeText(facts.walkFile)}</td><td colspan="5">run this first: round the work and over what stands in the way, high up, spindle still</td></tr>`;
+      : `<tr><td></td><td class="mark">${escapeText(facts.walkFile)}</td><td colspan="5">before all others: round the work and over what stands in the way, high up, spindle still</td></tr>`;
   return (
-    '<div class="scroll"><table>\n<caption>Programs, in the order they are run.</caption>\n' +
-    '<thead><tr><th>file</th><th>cutters</th><th>written in</th><th class="n">blocks</th><th class="n">time</th><th>SHA-256 begins</th></tr></thead>\n' +
-    `<tbody>${walk}${rows.join('\n')}</tbody>\n</table></div>\n`
+    '<div class="scroll whole"><table>\n<caption>Programs, in the order they are run.</caption>\n<thead><tr>' +
+    head(['', 'file', 'cutter', 'written in', 'blocks', 'time', 'SHA-256 begins'], [4, 5]) +
+    `</tr></thead>\n<tbody>${walk}${rows.join('\n')}</tbody>\n</table></div>\n`
   );
 }
 
-function cutterWords(facts: SheetFacts, number: number): string {
-  const cutter = facts.job.setup.cutters.find((candidate) => candidate.number === number);
-  return cutter === undefined
-    ? `cutter ${number}`
-    : `${number}: ${plain(cutter.diameter, 4)} mm, ${cutter.flutes} flutes`;
-}
-
-function passRow(facts: SheetFacts, pass: SheetPass, i: number): string {
+function workPlate(facts: SheetFacts): string {
+  const { svg, scale } = drawWork(facts, 'elsewhere');
   return (
-    `<tr><td>${numeral(i + 1)}</td><td>${escapeText(capitalised(pass.name))}</td><td>${cutterWords(facts, pass.cutter)}</td>` +
-    `<td class="n">${plain(pass.speed, 0)}</td><td class="n">${plain(pass.feed, 1)}</td><td class="n">${plain(pass.plunge, 1)}</td>` +
-    `<td class="n">${fixed(pass.step, 3)}</td><td class="n">${pass.laps}</td><td class="n">${fixed(pass.depth, 3)}</td><td class="n">${duration(pass.seconds)}</td></tr>`
+    `<figure>\n${svg}\n<figcaption><b>Plate III.</b> The work, ${scaleWords(scale)} on A4: the wheel in its stock, the channels the cutters clear, and the paths of their centres in the last lap of each pass, ` +
+    `grey where they rough, blue where they finish. Round it the minutes, clockwise from twelve; each pass is a chapter, as long as it takes. Tooth 1 is marked; teeth are counted counter-clockwise.</figcaption>\n</figure>\n`
   );
 }
 
+function passesTable(facts: SheetFacts): string {
+  const unit = shortUnit(facts.job.length);
+  const total = facts.passes.reduce((sum, pass) => sum + pass.seconds, 0);
+  return (
+    '<div class="scroll whole"><table>\n<caption>Passes. Times are reckoned with the acceleration in the machine file; what hands do comes on top.</caption>\n<thead><tr>' +
+    head(
+      [
+        '',
+        'pass',
+        'cutter',
+        'spindle<br>1/min',
+        `feed<br>${unit}/min`,
+        `down<br>${unit}/min`,
+        `a lap<br>${unit}`,
+        'laps',
+        `to Z<br>${unit}`,
+        'time',
+      ],
+      [3, 4, 5, 6, 7, 8, 9],
+    ) +
+    `</tr></thead>\n<tbody>${facts.passes.map((pass, i) => passRow(facts, pass, i)).join('\n')}</tbody>\n` +
+    `<tfoot><tr><td></td><td colspan="8">all passes</td><td class="n" data-figure="seconds" data-value="${fixed(total, 3)}">${duration(total)}</td></tr></tfoot>\n</table></div>\n`
+  );
+}
+
+function passRow({ job }: SheetFacts, pass: SheetPass, i: number): string {
+  const rate = (feed: number): string =>
+    plain(feed / millimetresPer(job.length), job.length === 'mm' ? 0 : 2);
+  const length = (mm: number): string => bareLength(mm, job.length);
+  return (
+    `<tr><th scope="row">${numeral(i + 1)}</th><td>${escapeText(capitalised(pass.name))}</td><td>${pass.cutter}</td>` +
+    `<td class="n">${plain(pass.speed, 0)}</td><td class="n">${rate(pass.feed)}</td><td class="n">${rate(pass.plunge)}</td>` +
+    `<td class="n">${length(pass.step)}</td><td class="n">${pass.laps}</td><td class="n">${length(pass.depth)}</td><td class="n">${duration(pass.seconds)}</td></tr>`
+  );
+}
+
+/** Each sentence once, with the passes it holds for; sentences of the same passes together. */
 function reasons(passes: readonly SheetPass[]): string {
-  const items = passes
-    .filter((pass) => pass.why.length > 0)
-    .map(
-      (pass) =>
-        `<dt>${escapeText(capitalised(pass.name))}</dt><dd>${pass.why.map(escapeText).join('; ')}.</dd>`,
-    );
+  const holds = new Map<string, number[]>();
+  passes.forEach((pass, i) => {
+    for (const why of pass.why) {
+      holds.set(why, [...(holds.get(why) ?? []), i + 1]);
+    }
+  });
+  const together = new Map<string, string[]>();
+  for (const [why, numbers] of holds) {
+    const key = numeralList(numbers);
+    together.set(key, [...(together.get(key) ?? []), why]);
+  }
+  const items = [...together].map(
+    ([numbers, whys]) => `<dt>${numbers}</dt><dd>${escapeText(capitalised(whys.join('; ')))}.</dd>`,
+  );
   return items.length === 0
     ? ''
-    : `<details open><summary>Where these figures come from</summary><dl>${items.join('')}</dl></details>\n`;
+    : `<h3>Where these figures come from</h3>\n<dl class="whys">${items.join('\n')}</dl>\n`;
 }

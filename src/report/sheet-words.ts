@@ -1,51 +1,80 @@
-/** The sheet's parts that are mostly words: set-up, findings, what was not checked, cautions, what was derived. */
+/** The sheet's parts that are mostly words: what was found, what was not checked, cautions, what was derived. */
+import { displayed } from './derived-words.ts';
 import type { SheetFacts } from './facts.ts';
-import { escapeText, plain } from './words.ts';
-
-export function setUpSection(facts: SheetFacts): string {
-  return facts.setUp.length === 0
-    ? ''
-    : `<section>\n<h2>Set-up</h2>\n<ol>${facts.setUp.map((line) => `<li>${escapeText(line)}</li>`).join('\n')}</ol>\n${remarks(facts)}</section>`;
-}
-
-function remarks(facts: SheetFacts): string {
-  const lines = facts.reach?.remarks ?? [];
-  return lines.map((line) => `<p class="soft">${escapeText(line)}</p>`).join('\n');
-}
+import { head } from './sheet-set-up.ts';
+import { escapeText } from './words.ts';
 
 export function findingsSection(facts: SheetFacts): string {
-  const warnings = facts.problems
-    .filter((problem) => problem.severity === 'warning')
-    .map(
-      ({ message, hint }) =>
-        `<li>${escapeText(message)}${hint === undefined ? '' : ` ${escapeText(hint)}`}</li>`,
-    );
-  const findings = (facts.proof?.findings ?? []).map(
-    ({ code, severity, message, hint, file, line }) =>
-      `<li${severity === 'error' ? ' class="danger"' : ''}><span class="mark">${escapeText(file)}:${line}</span> ${escapeText(message)}${hint === undefined ? '' : ` ${escapeText(hint)}`} <span class="soft mark">${code}</span></li>`,
+  const found = [...warnings(facts), ...findings(facts, 'warning')];
+  const unseen = facts.proof?.notChecked ?? ['No program was made, so nothing was proved.'];
+  return (
+    `<section>\n<h2>What was found</h2>\n${found.length === 0 ? `<p>${facts.verdict === 'pass' ? 'Nothing that needs a word.' : 'Nothing besides why it was refused.'}</p>` : list(found)}\n` +
+    `<h2>What was not checked</h2>\n<ul class="columns">${[...new Set(unseen)].map((line) => `<li>${escapeText(line)}</li>`).join('\n')}</ul>\n</section>`
   );
-  const found = [...warnings, ...findings];
-  const list = found.length === 0 ? '<p>Nothing was found.</p>' : `<ul>${found.join('\n')}</ul>`;
-  const unseen = (facts.proof?.notChecked ?? ['No program was made, so nothing was proved.'])
-    .map((line) => `<li>${escapeText(line)}</li>`)
-    .join('\n');
-  return `<section>\n<h2>What the proof found</h2>\n${list}\n<h2>What was not checked</h2>\n<ul>${unseen}</ul>\n</section>`;
 }
 
-export function cautionsSection(facts: SheetFacts): string {
-  return facts.cautions.length === 0
-    ? ''
-    : `<section>\n<h2>Cautions</h2>\n<ol>${facts.cautions.map((line) => `<li>${escapeText(line)}</li>`).join('\n')}</ol>\n</section>`;
-}
-
-export function derivedSection(facts: SheetFacts): string {
-  const entries = Object.entries(facts.job.derived);
-  if (entries.length === 0) {
+/** Of the job: reasons where nothing was made, and what the proof holds against the program. */
+export function refusalSection(facts: SheetFacts): string {
+  const reasons = facts.problems
+    .filter(({ severity }) => severity === 'error')
+    .map(({ message, hint }) => `<li><span class="danger">${escapeText(message)}</span>${after(hint)}</li>`);
+  const found = findings(facts, 'error');
+  if (reasons.length + found.length === 0) {
     return '';
   }
-  const rows = entries.map(
-    ([key, { value, why }]) =>
-      `<tr><td class="mark">${escapeText(key)}</td><td class="n">${typeof value === 'number' ? plain(value, 5) : escapeText(value)}</td><td>${escapeText(why)}</td></tr>`,
+  const shown = [...reasons, ...found.slice(0, MOST_SHOWN)];
+  const more =
+    found.length > MOST_SHOWN
+      ? `<p>And ${found.length - MOST_SHOWN} more of the kind; the summary has all.</p>\n`
+      : '';
+  return `<section>\n<h2>Why it was refused</h2>\n<ol>${shown.join('\n')}</ol>\n${more}</section>`;
+}
+
+const MOST_SHOWN = 20;
+
+function warnings({ problems }: SheetFacts): readonly string[] {
+  return problems
+    .filter(({ severity }) => severity === 'warning')
+    .map(({ message, hint }) => `<li>${escapeText(message)}${after(hint)}</li>`);
+}
+
+function findings({ proof }: SheetFacts, wanted: 'error' | 'warning'): readonly string[] {
+  return (proof?.findings ?? [])
+    .filter(({ severity }) => severity === wanted)
+    .map(
+      ({ code, message, hint, file, line }) =>
+        `<li><span class="mark">${escapeText(file)}, line ${line}:</span> <span${wanted === 'error' ? ' class="danger"' : ''}>${escapeText(message)}</span>${after(hint)} <span class="soft mark">${code}</span></li>`,
+    );
+}
+
+function after(hint: string | undefined): string {
+  return hint === undefined ? '' : ` ${escapeText(hint)}`;
+}
+
+function list(items: readonly string[]): string {
+  return `<ul>${items.join('\n')}</ul>`;
+}
+
+export function cautionsSection({ cautions }: SheetFacts): string {
+  return cautions.length === 0
+    ? ''
+    : `<section>\n<h2>Cautions</h2>\n<ol class="columns">${cautions.map((line) => `<li>${escapeText(line)}.</li>`).join('\n')}</ol>\n</section>`;
+}
+
+/** Values that share a reason share a row. */
+export function derivedSection({ job }: SheetFacts): string {
+  const byWhy = new Map<string, string[]>();
+  for (const [key, derived] of Object.entries(job.derived)) {
+    const value = displayed(key, derived.value, job.length);
+    byWhy.set(derived.why, [
+      ...(byWhy.get(derived.why) ?? []),
+      `<span class="mark">${escapeText(key)}</span> ${escapeText(value)}`,
+    ]);
+  }
+  const rows = [...byWhy].map(
+    ([why, values]) => `<tr><td>${values.join('<br>')}</td><td>${escapeText(why)}</td></tr>`,
   );
-  return `<section>\n<h2>What the job left out</h2>\n<div class="scroll"><table><thead><tr><th>value</th><th class="n">taken</th><th>why</th></tr></thead><tbody>${rows.join('\n')}</tbody></table></div>\n</section>`;
+  return rows.length === 0
+    ? ''
+    : `<section>\n<h2>What the job left out</h2>\n<div class="scroll"><table class="small">\n<thead><tr>${head(['taken', 'why'], [])}</tr></thead>\n<tbody>${rows.join('\n')}</tbody>\n</table></div>\n</section>`;
 }

@@ -38,14 +38,14 @@ export function summaryOf(facts: SheetFacts): Record<string, unknown> {
     })),
     ...(facts.walkFile === undefined ? {} : { walk: { file: facts.walkFile, sha256: facts.walkSha256 } }),
     reach: {
-      largestCutter: figure(reach?.largestCutter ?? 0),
-      leftAtRoot: figure(reach?.leftAtRoot ?? 0),
+      largestCutter: known(reach?.largestCutter ?? facts.asCut?.largestCutter),
+      leftAtRoot: known(reach?.leftAtRoot ?? facts.asCut?.leftAtRoot),
     },
     proof: {
       passed: facts.verdict === 'pass',
-      flankGouge: figure(proof?.figures?.flankGouge ?? 0),
-      flankLeft: figure(proof?.figures?.flankLeft ?? 0),
-      leftAtRoot: figure(proof?.figures?.leftAtRoot ?? 0),
+      flankGouge: known(proof?.figures?.flankGouge),
+      flankLeft: known(proof?.figures?.flankLeft),
+      leftAtRoot: known(proof?.figures?.leftAtRoot),
       notChecked: proof?.notChecked ?? ['No program was made, so nothing was proved.'],
       findings: [
         ...facts.problems.map((problem) => ({
@@ -68,7 +68,12 @@ export function summaryOf(facts: SheetFacts): Record<string, unknown> {
   };
 }
 
-/** mm to a hundredth of a micrometre: what is printed is what can be meant. */
+/** mm to a thousandth of a micrometre, never -0. */
 function figure(value: number): number {
-  return Math.round(value * 1e5) / 1e5 + 0;
+  return Math.round(value * 1e6) / 1e6 + 0;
+}
+
+/** What was never reckoned is no figure, and not nought either. */
+function known(value: number | undefined): number | null {
+  return value === undefined ? null : figure(value);
 }

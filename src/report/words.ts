@@ -1,6 +1,4 @@
 /** How the report writes numbers, times and names: every figure with its unit, the same in every country. */
-import { MM_PER_INCH } from '../base/units.ts';
-
 /** Text as it may stand between tags or in a quoted attribute. */
 export function escapeText(text: string): string {
   return text
@@ -18,23 +16,15 @@ export function plain(value: number, decimals: number): string {
   return short === '-0' ? '0' : short;
 }
 
+/** A place on a drawing, mm: four decimals, quickly. */
+export function coordinate(value: number): string {
+  return String(Math.round(value * 1e4) / 1e4);
+}
+
 /** A number with just so many decimals. */
 export function fixed(value: number, decimals: number): string {
   const text = value.toFixed(decimals);
   return Number(text) === 0 ? text.replace('-', '') : text;
-}
-
-export function millimetres(value: number, decimals = 3): string {
-  return `${fixed(value, decimals)} mm`;
-}
-
-/** In mm, and in inches beside it. */
-export function bothUnits(value: number): string {
-  return `${fixed(value, 3)} mm (${fixed(value / MM_PER_INCH, 4)} in)`;
-}
-
-export function micrometres(value: number, decimals = 2): string {
-  return `${fixed(value * 1000, decimals)} µm`;
 }
 
 /** "45 s", "12 min", "1 h 05 min". */
@@ -67,6 +57,27 @@ export function numeral(count: number): string {
     }
   }
   return text;
+}
+
+/** Numerals of a rising list of counts, neighbours drawn together: "I, III-V". */
+export function numeralList(counts: readonly number[]): string {
+  const parts: string[] = [];
+  for (let i = 0; i < counts.length; i++) {
+    const first = counts[i] ?? 0;
+    let last = first;
+    while (counts[i + 1] === last + 1) {
+      last++;
+      i++;
+    }
+    parts.push(
+      last > first + 1
+        ? `${numeral(first)}–${numeral(last)}`
+        : last > first
+          ? `${numeral(first)}, ${numeral(last)}`
+          : numeral(first),
+    );
+  }
+  return parts.join(', ');
 }
 
 export function capitalised(text: string): string {

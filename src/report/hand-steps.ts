@@ -1,0 +1,51 @@
+/** What hands do while the programs run: which program next, and at each change of cutter what the program itself says there. */
+import type { SheetFacts, SheetProgram } from './facts.ts';
+import { capitalised, duration, escapeText, numeral, numeralList } from './words.ts';
+import { sheetName } from './pass-paths.ts';
+
+export function handSteps(facts: SheetFacts): readonly string[] {
+  return facts.programs.map((program, i) => {
+    const steps = facts.motions[i]?.steps ?? [];
+    let cutter = 0;
+    const stops: string[] = [];
+    const notes: string[] = [];
+    for (const step of steps) {
+      if (step.kind === 'note') {
+        notes.push(sentence(step.text));
+      } else if (step.kind === 'cutter') {
+        const first = cutter === 0;
+        stops.push(first ? fitted(facts, step.number) : changed(facts, step.number));
+        stops.push(...step.say.map(sentence));
+        cutter = step.number;
+      } else if (step.kind === 'stop') {
+        stops.push(`At the stop: ${step.say.map(sentence).join(' ')}`);
+      }
+    }
+    return `<b>Run</b> <span class="mark">${escapeText(program.file)}</span>, ${passWords(facts, program)}, ${duration(program.seconds)}. ${escapeText([...stops, ...notes].join(' '))}`;
+  });
+}
+
+function fitted(facts: SheetFacts, number: number): string {
+  return facts.machine.words.cutters.change === 'automatic'
+    ? `It calls cutter ${number} first.`
+    : `Cutter ${number} is in the collet.`;
+}
+
+/** By the machine itself, or at a stop. */
+function changed(facts: SheetFacts, number: number): string {
+  return facts.machine.words.cutters.change === 'automatic'
+    ? `Then it changes to cutter ${number} by itself; its length must be in the table of the controller.`
+    : `It stops, parked high and aside with the spindle still: fit cutter ${number}.`;
+}
+
+function sentence(text: string): string {
+  const trimmed = capitalised(text.trim());
+  return /[.!?]$/.test(trimmed) ? trimmed : `${trimmed}.`;
+}
+
+/** The numerals of the passes it holds. */
+function passWords({ passes }: SheetFacts, program: SheetProgram): string {
+  const own = new Set(program.passes.map(sheetName));
+  const numbers = passes.flatMap(({ name }, i) => (own.has(name) ? [i + 1] : []));
+  return numbers.length === 1 ? `pass ${numeral(numbers[0] ?? 1)}` : `passes ${numeralList(numbers)}`;
+}
