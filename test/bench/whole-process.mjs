@@ -48,6 +48,8 @@ for (const [kind, value] of Object.entries(m)) {
   console.log(`${kind.padEnd(6)} ${value.toFixed(0).padStart(6)} ms`);
 }
 console.log(`cut of 60 teeth / bare node           ${(m.sixty / m.bare).toFixed(2)}  (6 or less)`);
-console.log(`(240 - bare) / (60 - bare)            ${((m.many - m.bare) / (m.sixty - m.bare)).toFixed(2)}  (4.4 or less)`);
+console.log(
+  `(240 - bare) / (60 - bare)            ${((m.many - m.bare) / (m.sixty - m.bare)).toFixed(2)}  (4.4 or less)`,
+);
 console.log(`--help / bare node                    ${(m.help / m.bare).toFixed(2)}  (1.3 or less)`);
 console.log(`bad job reported / bare node          ${(m.bad / m.bare).toFixed(2)}  (2.5 or less)`);
