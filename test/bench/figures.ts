@@ -84,6 +84,9 @@ function formAlone(facts: SheetFacts, loop: readonly Travelled[]): { gouge: numb
       const point = pointOf(from, move, i / 40);
       const folded = turnPoint(point, -pitch * Math.round(Math.atan2(point.y, point.x) / pitch));
       const nearest = nearestOnChain(chain, folded);
+      if (nearest === undefined) {
+        continue;
+      }
       const off = nearest.distance - radius;
       const reached = Math.hypot(nearest.point.x, nearest.point.y);
       gouge = Math.max(gouge, -off);
