@@ -5,7 +5,7 @@
  * is allowed near such a corner. Both run the same way round, so each search begins where the last one ended. mm.
  */
 import { CLIP_SAG, CLIP_AGREEMENT } from '../base/tolerances.ts';
-import { headingOn, startOf } from './on-piece.ts';
+import { endOf, headingOn, startOf } from './on-piece.ts';
 import type { Chain } from './piece.ts';
 import { distance, dot, type Point } from './point.ts';
 import { sampleChain } from './sample-piece.ts';
@@ -90,6 +90,9 @@ const MOST_STRETCH = 1000;
 function sharpCorners(exact: Chain): SharpCorner[] {
   return exact.flatMap((piece, i) => {
     const next = exact[i + 1] ?? (exact[0] as Chain[number]);
+    if (distance(endOf(piece), startOf(next)) > CLIP_AGREEMENT) {
+      return [];
+    }
     // The cosine of how far the heading turns; the half angle between the sides is what is left to a quarter turn.
     const turned = Math.min(1, Math.max(-1, dot(headingOn(piece, 1), headingOn(next, 0))));
     const stretch = Math.min(1 / Math.cos(Math.acos(turned) / 2), MOST_STRETCH);

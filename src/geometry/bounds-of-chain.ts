@@ -1,8 +1,8 @@
 /**
- * The exact box round pieces: their ends and the places where they run along or across the axes. mm.
+ * The exact box round pieces: their ends, their cusps and the places where they run along or across the axes. mm.
  * The heading of a cycloid at t is cusp +- (1 + R/2r) t, so those places are closed form.
  */
-import { solutionsInside } from './cycloid.ts';
+import { cycloidCusps, solutionsInside } from './cycloid.ts';
 import { pointOn } from './on-piece.ts';
 import type { Chain, Piece } from './piece.ts';
 import type { Point } from './point.ts';
@@ -18,7 +18,7 @@ export function boundsOfChain(chain: Chain): Box {
   return boundsOfPoints(
     chain.flatMap((piece) => [
       pointOn(piece, 0),
-      ...quarterParameters(piece).map((u) => pointOn(piece, u)),
+      ...turningParameters(piece).map((u) => pointOn(piece, u)),
       pointOn(piece, 1),
     ]),
   );
@@ -35,8 +35,8 @@ export function boundsOfPoints(points: readonly Point[]): Box {
   return { minX, maxX, minY, maxY };
 }
 
-/** Where the piece runs along X or along Y, strictly inside, in the order of travel. */
-export function quarterParameters(piece: Piece): number[] {
+/** Where the piece runs along X or along Y, or has a cusp, strictly inside, in the order of travel. */
+export function turningParameters(piece: Piece): number[] {
   switch (piece.kind) {
     case 'line':
       return [];
@@ -55,11 +55,8 @@ export function quarterParameters(piece: Piece): number[] {
     case 'cycloid': {
       const bend = 1 + piece.fixed / (2 * piece.rolling);
       const span = piece.to - piece.from;
-      return bend === 0
-        ? []
-        : solutionsInside(piece, bend, -piece.sense * piece.cusp, Math.PI / 2)
-            .map((t) => (t - piece.from) / span)
-            .sort((a, b) => a - b);
+      const quarters = bend === 0 ? [] : solutionsInside(piece, bend, -piece.sense * piece.cusp, Math.PI / 2);
+      return [...quarters, ...cycloidCusps(piece)].map((t) => (t - piece.from) / span).sort((a, b) => a - b);
     }
   }
 }

@@ -11,25 +11,37 @@
  *        which neighbouring arcs are made longer and shorter in turn, brings the last heading home.
  */
 import { arcDeviation, arcThrough } from './arc-through.ts';
+import { SAME_POINT } from '../base/tolerances.ts';
 import { cycloidCusps, cycloidVertices } from './cycloid.ts';
 import { endOf, headingOn, lengthOf, pointOn, startOf } from './on-piece.ts';
-import { partOf } from './change-piece.ts';
 import type { ArcPiece, CycloidPiece, LinePiece } from './piece.ts';
 import { cross, dot, type Point } from './point.ts';
 import { findRoot } from './roots.ts';
 
 /** Straight where the span is straight (a point of a circle rolling in one of twice its size). */
 export function fitArcs(piece: CycloidPiece, tolerance: number): readonly (ArcPiece | LinePiece)[] {
-  if (1 + piece.fixed / (2 * piece.rolling) === 0) {
-    return lengthOf(piece) > 0 ? [{ kind: 'line', from: startOf(piece), to: endOf(piece) }] : [];
+  const length = lengthOf(piece);
+  if (length <= SAME_POINT || 1 + piece.fixed / (2 * piece.rolling) === 0) {
+    return length > 0 ? [{ kind: 'line', from: startOf(piece), to: endOf(piece) }] : [];
   }
-  const cuts = [...cycloidCusps(piece), ...cycloidVertices(piece)]
-    .map((t) => (t - piece.from) / (piece.to - piece.from))
-    .sort((a, b) => a - b);
-  const ends = [0, ...cuts, 1];
-  return ends
-    .slice(1)
-    .flatMap((to, i) => fitSpiral(partOf(piece, ends[i] as number, to) as CycloidPiece, tolerance));
+  return spirals(piece).flatMap((spiral) => fitSpiral(spiral, tolerance));
+}
+
+/** Cut at cusps and where the curvature turns, but not so near another end that nothing would lie between. */
+function spirals(piece: CycloidPiece): CycloidPiece[] {
+  const cuts = [...cycloidCusps(piece), ...cycloidVertices(piece)].sort((a, b) =>
+    piece.to < piece.from ? b - a : a - b,
+  );
+  const found: CycloidPiece[] = [];
+  let from = piece.from;
+  for (const to of cuts) {
+    const part = { ...piece, from, to };
+    if (lengthOf(part) > SAME_POINT && lengthOf({ ...piece, from: to }) > SAME_POINT) {
+      found.push(part);
+      from = to;
+    }
+  }
+  return [...found, { ...piece, from }];
 }
 
 /** More arcs than any span needs: at this many the answer is taken as it is. */
@@ -37,9 +49,6 @@ const MOST_ARCS = 400;
 
 /** The fewest arcs that keep the tolerance on a span whose curvature only grows or only falls. */
 function fitSpiral(spiral: CycloidPiece, tolerance: number): ArcPiece[] {
-  if (lengthOf(spiral) === 0) {
-    return [];
-  }
   const measure = spiralMeasure(spiral);
   const longest = Math.cbrt(LEVEL * tolerance);
   const expected = Math.ceil(measure(1) / longest + ENDS_SHORT);

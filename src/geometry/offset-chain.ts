@@ -11,7 +11,8 @@ import { disagreement } from './agree.ts';
 import { areaOfChain } from './area-of-chain.ts';
 import { linkLoops, mergeParts } from './link-offset.ts';
 import { offsetPolygon, type Ring } from './offset-polygon.ts';
-import { linkPitch, pitchRays, startsPitch, withinRays } from './one-pitch.ts';
+import { liesApart, linkPitch, pitchRays, withinRays } from './one-pitch.ts';
+import { pointOn } from './on-piece.ts';
 import type { Chain, LinePiece, Loop } from './piece.ts';
 import { ORIGIN, unit, type Point } from './point.ts';
 import { rawOffset, type OffsetPiece } from './raw-offset.ts';
@@ -26,8 +27,8 @@ export type { OffsetPiece } from './raw-offset.ts';
 export interface OffsetSector {
   /** One pitch, counter-clockwise, from the ray at -pi/count; empty where nothing remains. */
   readonly chain: readonly OffsetPiece[];
-  /** Hollows that the cutter can't get into from outside, closed off by the offset, among what was looked at. */
-  readonly pockets: number;
+  /** Whether the offset closes off hollows, which the cutter can't get into from outside. */
+  readonly pockets: boolean;
 }
 
 /**
@@ -39,7 +40,7 @@ export function offsetSector(sector: Chain, count: number, distance: number): Ou
   if (distance === 0) {
     return success({
       chain: sector.map((piece, source) => ({ piece, source, part: [0, 1] as const })),
-      pockets: 0,
+      pockets: false,
     });
   }
   const ground = sectorGround(sector, count, distance);
@@ -49,28 +50,29 @@ export function offsetSector(sector: Chain, count: number, distance: number): Ou
   }
   const rings = clipped.value;
   const { outline, kind, far } = ground;
-  const raw = rawOffset(outline, distance, ground.after);
+  const raw = rawOffset(outline, distance, ground.neighbours);
   const knives = pitchRays(far + 2 * Math.abs(distance), count, kind);
   const all = trimOffset({ raw, outline, distance, knives, rings });
   const parts = kind === 'half' ? all.filter((part) => withinRays(part, knives)) : all;
   const way = linkPitch(parts, knives, count, kind, distance);
   if (way === undefined) {
-    return parts.some((part) => startsPitch(part, knives))
-      ? disagrees(distance, Infinity, ORIGIN)
-      : success({ chain: [], pockets: 0 });
+    return parts.length > 0
+      ? disagrees(distance, Infinity, parts[0]?.from ?? ORIGIN)
+      : success({ chain: [], pockets: false });
   }
   const found = mergeParts(way, raw, false);
+  const walls = parts.filter((part) => liesApart(part, way, knives, count));
   const main = nearestRing(rings, way[0]?.from ?? ORIGIN);
   const { worst, at } = disagreement({
     corners: cornersBetween(main, knives, far + 1.5 * Math.abs(distance)),
     rings: [main],
-    chains: [found.map(({ piece }) => piece)],
+    chains: [found.map(({ piece }) => piece), ...wallsOn(main, walls)],
   });
   if (worst > 0) {
     return disagrees(distance, worst, at);
   }
   const chain = kind === 'half' ? unfolded(found, sector.length) : withinPitch(found, sector.length);
-  return success({ chain, pockets: rings.length - 1 });
+  return success({ chain, pockets: walls.length > 0 });
 }
 
 /**
@@ -88,7 +90,7 @@ export function offsetLoop(loop: Loop, distance: number): Outcome<readonly Loop[
   }
   const rings = clipped.value;
   const first = loop[0];
-  const raw = rawOffset(loop, distance, first && { piece: first, index: 0 });
+  const raw = rawOffset(loop, distance, first ? { after: { piece: first, index: 0 } } : {});
   const parts = trimOffset({ raw, outline: loop, distance, knives: [], rings });
   const { loops, broken } = linkLoops(parts);
   const exact = loops.map((way) => mergeParts(way, raw, true).map(({ piece }) => piece));
@@ -102,6 +104,13 @@ function nearestRing(rings: readonly Ring[], point: Point): Ring {
   }
   const off = rings.map((ring) => distanceToRing(ring, point));
   return rings[off.indexOf(Math.min(...off))] as Ring;
+}
+
+/** Walls of hollows that the same ring runs along, where the polygon of a half leaves hollows open. */
+function wallsOn(ring: Ring, walls: readonly OffsetPiece[]): Chain[] {
+  return walls
+    .filter(({ piece }) => distanceToRing(ring, pointOn(piece, 0.5)) <= CLIP_AGREEMENT)
+    .map(({ piece }) => [piece]);
 }
 
 /** Between the rays and not on the polygon's far side; a little off the rays, so that nothing beyond them is asked for. */

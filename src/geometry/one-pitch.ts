@@ -1,6 +1,7 @@
 /** The rays between which one pitch, or half of a mirrored one, lies; and the way from the first ray to the last. mm. */
 import { SAME_POINT } from '../base/tolerances.ts';
 import { linkUntil, samePlace } from './link-offset.ts';
+import { nearestOnPiece } from './nearest-on-piece.ts';
 import { pointOn } from './on-piece.ts';
 import type { LinePiece } from './piece.ts';
 import { ORIGIN, polar, turnPoint, type Point } from './point.ts';
@@ -18,7 +19,7 @@ export function withinRays(part: Remaining, rays: readonly LinePiece[]): boolean
   return across(middle, rays[0] as LinePiece) > 0 && across(middle, rays[1] as LinePiece) < 0;
 }
 
-export function startsPitch(part: Remaining, rays: readonly LinePiece[]): boolean {
+function startsPitch(part: Remaining, rays: readonly LinePiece[]): boolean {
   return touches(part.from, rays[0] as LinePiece);
 }
 
@@ -44,6 +45,23 @@ export function linkPitch(
     }
   }
   return undefined;
+}
+
+/** A part of this pitch that is neither on the way nor on the way of a neighbour: the wall of a hollow. */
+export function liesApart(
+  part: Remaining,
+  way: readonly Remaining[],
+  rays: readonly LinePiece[],
+  count: number,
+): boolean {
+  if (way.includes(part) || !withinRays(part, rays)) {
+    return false;
+  }
+  const middle = pointOn(part.piece, 0.5);
+  const images = [-1, 0, 1].map((k) => turnPoint(middle, (2 * Math.PI * k) / count));
+  return !way.some(({ piece }) =>
+    images.some((image) => nearestOnPiece(piece, image).distance <= SAME_POINT),
+  );
 }
 
 /** Signed distance to the ray's line, positive on its left. */

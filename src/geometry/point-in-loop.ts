@@ -3,8 +3,7 @@
  * Each piece is taken in spans that only rise or only fall; a span counts its lower end and not its upper, so that a ray
  * through a joint counts once. Points nearer to the loop than rounding may be called either way. mm.
  */
-import { boundsOfPoints, quarterParameters } from './bounds-of-chain.ts';
-import { cycloidCusps } from './cycloid.ts';
+import { boundsOfPoints, turningParameters } from './bounds-of-chain.ts';
 import { pointOn } from './on-piece.ts';
 import type { Loop, Piece } from './piece.ts';
 import type { Point } from './point.ts';
@@ -19,20 +18,12 @@ export function pointInLoop(loop: Loop, point: Point): boolean {
 }
 
 function crossings(piece: Piece, point: Point): number {
-  const cuts = [0, ...spanEnds(piece), 1];
+  const cuts = [0, ...turningParameters(piece), 1];
   let count = 0;
   for (let i = 1; i < cuts.length; i++) {
     count += spanCrosses(piece, cuts[i - 1] as number, cuts[i] as number, point) ? 1 : 0;
   }
   return count;
-}
-
-function spanEnds(piece: Piece): number[] {
-  const cusps =
-    piece.kind === 'cycloid'
-      ? cycloidCusps(piece).map((t) => (t - piece.from) / (piece.to - piece.from))
-      : [];
-  return [...quarterParameters(piece), ...cusps].sort((a, b) => a - b);
 }
 
 function spanCrosses(piece: Piece, u0: number, u1: number, point: Point): boolean {

@@ -22,25 +22,33 @@ export interface OffsetPiece {
   readonly part: readonly [number, number];
 }
 
-/** `after`: the piece that follows the last, and its index, where there is one. Indexes run from 0 along the chain. */
-export function rawOffset(
-  chain: Chain,
-  distance: number,
-  after?: { readonly piece: Piece; readonly index: number },
-): OffsetPiece[] {
+/** A piece that joins the chain at one of its ends, for the corner there. */
+export interface Neighbour {
+  readonly piece: Piece;
+  readonly index: number;
+}
+
+/** What comes before the first piece and after the last, where it matters. Indexes run from 0 along the chain. */
+export interface Neighbours {
+  readonly before?: Neighbour;
+  readonly after?: Neighbour;
+}
+
+export function rawOffset(chain: Chain, distance: number, { before, after }: Neighbours): OffsetPiece[] {
   const raw: OffsetPiece[] = [];
-  chain.forEach((piece, source) => {
-    for (const { parallel, part } of parallelsOf(piece, distance)) {
-      raw.push({ piece: parallel, source, part });
+  const joints = [before, ...chain.map((piece, index) => ({ piece, index })), after];
+  for (let i = 1; i < joints.length; i++) {
+    const [from, to] = [joints[i - 1], joints[i]];
+    const corner = from && to && cornerArc(from.piece, to.piece, distance);
+    if (from && to && corner) {
+      raw.push({ piece: corner, source: 'corner', between: [from.index, to.index], part: [0, 1] });
     }
-    const inside = source + 1 < chain.length;
-    const next = inside ? chain[source + 1] : after?.piece;
-    const corner = next === undefined ? undefined : cornerArc(piece, next, distance);
-    if (corner !== undefined) {
-      const index = inside ? source + 1 : (after?.index ?? 0);
-      raw.push({ piece: corner, source: 'corner', between: [source, index], part: [0, 1] });
+    if (to !== undefined && i + 1 < joints.length) {
+      for (const { parallel, part } of parallelsOf(to.piece, distance)) {
+        raw.push({ piece: parallel, source: to.index, part });
+      }
     }
-  });
+  }
   return raw;
 }
 

@@ -58,12 +58,25 @@ function arcSteps(radius: number, turn: number, sag: number): number {
   return radius > 0 ? Math.max(1, Math.ceil(turn / most)) : 1;
 }
 
+/** Cut at cusps, where a chord across would leave out the tip of the fold. */
 function cycloidParameters(piece: CycloidPiece, sag: number): number[] {
   const bend = Math.abs(1 + piece.fixed / (2 * piece.rolling));
-  if (bend === 0) {
-    const span = piece.to - piece.from;
-    return [0, ...cycloidCusps(piece).map((t) => (t - piece.from) / span), 1];
+  const span = piece.to - piece.from;
+  const found = [0];
+  let from = piece.from;
+  for (const to of [...cycloidCusps(piece), piece.to]) {
+    const part = { ...piece, from, to };
+    const inside = bend === 0 ? [1] : smoothParameters(part, sag, bend).slice(1);
+    found.push(
+      ...inside.map((u) => (u === 1 ? to - piece.from : from - piece.from + u * (to - from)) / span),
+    );
+    from = to;
   }
+  found[found.length - 1] = 1;
+  return found;
+}
+
+function smoothParameters(piece: CycloidPiece, sag: number, bend: number): number[] {
   // Weight of each cell: the number of chords it needs on the largest radius seen at its ends and middle.
   const cells = Math.max(8, Math.ceil((bend * Math.abs(piece.to - piece.from)) / 0.1));
   const total = [0];

@@ -8,17 +8,18 @@
  * offset goes inward, round the outside; those edges bulge away from the wedge, never into it. mm.
  */
 import { CLIP_SAG, SAME_POINT } from '../base/tolerances.ts';
-import { mirrorPiece, turnChain } from './change-piece.ts';
+import { mirrorPiece, turnChain, turnPiece } from './change-piece.ts';
 import { pointOn } from './on-piece.ts';
 import type { Chain, Piece } from './piece.ts';
 import { distance as distanceOf, norm, ORIGIN, polar, type Point } from './point.ts';
+import type { Neighbours } from './raw-offset.ts';
 import { sampleChain, sampleLoop } from './sample-piece.ts';
 
 export interface SectorGround {
   readonly kind: 'half' | 'wedge' | 'whole';
   readonly outline: Chain;
-  /** What follows the last piece of the outline, where a corner there matters. */
-  readonly after?: { readonly piece: Piece; readonly index: number };
+  /** What joins the outline at its ends, where a corner there matters. */
+  readonly neighbours: Neighbours;
   /** What to clip, and the distance to grow it by: its size, but for a whole outline that shrinks. */
   readonly polygon: readonly Point[];
   readonly growth: number;
@@ -37,13 +38,20 @@ export function sectorGround(sector: Chain, count: number, distance: number): Se
   if (2 * sides + 1 >= count) {
     const outline = turned(sector, count, 0, count);
     const after = { piece: sector[0] as Piece, index: 0 };
-    return { kind: 'whole', outline, after, far, polygon: sampleLoop(outline, CLIP_SAG), growth: distance };
+    return {
+      kind: 'whole',
+      outline,
+      neighbours: { after },
+      far,
+      polygon: sampleLoop(outline, CLIP_SAG),
+      growth: distance,
+    };
   }
   const outline = turned(sector, count, -sides, sides + 1);
   const half = (Math.PI / count) * (2 * sides + 1);
   const closing = distance > 0 ? [ORIGIN] : outside(-half, half, far + 2 * reach);
   const polygon = [...sampleChain(outline, CLIP_SAG), ...closing];
-  return { kind: 'wedge', outline, far, polygon, growth: reach };
+  return { kind: 'wedge', outline, neighbours: {}, far, polygon, growth: reach };
 }
 
 /** Up to the tooth's middle; a piece across it is taken whole, a corner on it is rounded. */
@@ -56,17 +64,12 @@ function halfGround(sector: Chain, count: number, distance: number): SectorGroun
     distance > 0
       ? [ORIGIN]
       : outside(-Math.PI / count, Math.atan2(end.y, end.x), far + 2 * Math.abs(distance));
-  const ground = {
-    kind: 'half',
-    outline,
-    far,
-    polygon: [...line, ...closing],
-    growth: Math.abs(distance),
-  } as const;
-  const next = sector[outline.length];
-  return sector.length % 2 === 0 && next !== undefined
-    ? { ...ground, after: { piece: next, index: outline.length } }
-    : ground;
+  const last = sector.length - 1;
+  const before = { piece: turnPiece(sector[last] as Piece, (-2 * Math.PI) / count), index: last };
+  const after = { piece: sector[outline.length] as Piece, index: outline.length };
+  const neighbours = sector.length % 2 === 0 ? { before, after } : { before };
+  const polygon = [...line, ...closing];
+  return { kind: 'half', outline, neighbours, far, polygon, growth: Math.abs(distance) };
 }
 
 function turned(sector: Chain, count: number, first: number, end: number): Chain {

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { areaOfChain } from '../../src/geometry/area-of-chain.ts';
 import { offsetPiece, partOf, reversePiece } from '../../src/geometry/change-piece.ts';

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { intersectPieces } from '../../src/geometry/intersect-pieces.ts';
 import { headingOn, pointOn } from '../../src/geometry/on-piece.ts';

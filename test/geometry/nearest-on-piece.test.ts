@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { expect, it } from 'vitest';
 import { nearestOnChain, nearestOnPiece } from '../../src/geometry/nearest-on-piece.ts';
 import { pointOn } from '../../src/geometry/on-piece.ts';

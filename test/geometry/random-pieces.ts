@@ -1,5 +1,5 @@
 /** Arbitrary pieces, points and outlines for property tests. mm, radians. */
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import type { ArcPiece, CycloidPiece, LinePiece, Piece } from '../../src/geometry/piece.ts';
 import type { Point } from '../../src/geometry/point.ts';
 
