@@ -57,12 +57,20 @@ export function cycloidCusps(piece: CycloidPiece): number[] {
     return [];
   }
   const slope = R / (2 * r);
+  if (level <= 0 && withinArch(slope * piece.from) && withinArch(slope * piece.to)) {
+    return [];
+  }
   const rising = Math.asin(level);
   const found = [
     ...solutionsInside(piece, slope, rising, 2 * Math.PI),
     ...solutionsInside(piece, slope, Math.PI - rising, 2 * Math.PI),
   ];
   return found.sort((a, b) => (piece.to < piece.from ? b - a : a - b));
+}
+
+/** Within an arch sin R t / 2r is not negative: the common case, answered without looking further. */
+function withinArch(angle: number): boolean {
+  return angle >= 0 && angle <= Math.PI;
 }
 
 /** Where the curvature is greatest or least inside the span (R t / 2r an odd quarter turn), in the order of travel. */

@@ -19,9 +19,11 @@ export interface Meeting {
 }
 
 export function intersectPieces(a: Piece, b: Piece): Meeting[] {
-  if (!sleevesTouch(sleeveOf(a), sleeveOf(b))) {
-    return [];
-  }
+  return sleevesTouch(sleeveOf(a), sleeveOf(b)) ? intersectNearPieces(a, b) : [];
+}
+
+/** The same for pieces whose sleeves are known to touch. */
+export function intersectNearPieces(a: Piece, b: Piece): Meeting[] {
   // Ends first: of two answers for one place the exact end is kept.
   const found = [...endsOnOther(a, b), ...crossingsOf(a, b)];
   const kept = found.filter((meeting, i) => !found.slice(0, i).some((other) => same(a, meeting, other)));

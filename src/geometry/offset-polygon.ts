@@ -122,15 +122,14 @@ function turnsBack(along: number, before: number, after: number): boolean {
 /** In mm. Clipper begins where it likes: begun again at the corner nearest to where the first ring was begun. */
 function toRing(path: Path, start: Point | undefined): Ring {
   let nearest = 0;
-  let best = Infinity;
-  const target = start && toSteps(start);
-  for (let i = 0; target !== undefined && i < path.length; i++) {
-    const { X, Y } = path[i] as Path[number];
-    const square = (X - target.X) ** 2 + (Y - target.Y) ** 2;
-    if (square < best) {
-      best = square;
-      nearest = i;
-    }
+  if (start !== undefined) {
+    const { X, Y } = toSteps(start);
+    let best = Infinity;
+    path.forEach((corner, i) => {
+      const square = (corner.X - X) ** 2 + (corner.Y - Y) ** 2;
+      nearest = square < best ? i : nearest;
+      best = Math.min(square, best);
+    });
   }
   const ring: Point[] = [];
   for (let i = 0; i < path.length; i++) {

@@ -5,7 +5,7 @@
  */
 import { CLIP_AGREEMENT, OFFSET_NOISE, SAME_POINT, TANGENT } from '../base/tolerances.ts';
 import { partOf } from './change-piece.ts';
-import { intersectPieces } from './intersect-pieces.ts';
+import { intersectNearPieces } from './intersect-pieces.ts';
 import { nearestOnPiece } from './nearest-on-piece.ts';
 import { endOf, headingOn, lengthOf, pointOn, startOf, turnOf } from './on-piece.ts';
 import type { Chain, Piece } from './piece.ts';
@@ -67,7 +67,7 @@ function cutsOf(raw: readonly OffsetPiece[], knives: Chain): number[][] {
   raw.forEach((a, i) => {
     knives.forEach((knife, k) => {
       if (sleevesTouch(sleeves[i] as Sleeve, knifeSleeves[k] as Sleeve)) {
-        cuts[i]?.push(...intersectPieces(a.piece, knife).map(({ u }) => u));
+        cuts[i]?.push(...intersectNearPieces(a.piece, knife).map(({ u }) => u));
       }
     });
     for (let j = i + 1; j < raw.length; j++) {
@@ -76,7 +76,7 @@ function cutsOf(raw: readonly OffsetPiece[], knives: Chain): number[][] {
       if (far || tangentNeighbours(a.piece, b.piece) || tangentNeighbours(b.piece, a.piece)) {
         continue;
       }
-      for (const { u, v } of intersectPieces(a.piece, b.piece)) {
+      for (const { u, v } of intersectNearPieces(a.piece, b.piece)) {
         cuts[i]?.push(u);
         cuts[j]?.push(v);
       }

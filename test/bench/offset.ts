@@ -67,29 +67,35 @@ function wasm(): number {
   return library.grow(ring, DISTANCE * STEPS_PER_MM, SAG * STEPS_PER_MM, STEPS_PER_MM);
 }
 
-const ROUNDS = 1000;
+const WARM_UP = 3000;
+const BLOCKS = 20;
+const RUNS = 50;
 
-/** Milliseconds, the middle of many runs after as many to warm up; contestants take turns, so that all see the same load. */
+/** Milliseconds, the middle of many runs after many to warm up; contestants take turns, so that all see the same load. */
 function medians(contestants: readonly (() => unknown)[]): number[] {
   const times: number[][] = contestants.map(() => []);
-  for (let round = 0; round < 2 * ROUNDS; round++) {
-    contestants.forEach((run, i) => {
-      const start = performance.now();
+  contestants.forEach((run) => {
+    for (let i = 0; i < WARM_UP; i++) {
       run();
-      const time = performance.now() - start;
-      if (round >= ROUNDS) {
-        times[i]?.push(time);
+    }
+  });
+  for (let block = 0; block < BLOCKS; block++) {
+    contestants.forEach((run, i) => {
+      for (let k = 0; k < RUNS; k++) {
+        const start = performance.now();
+        run();
+        times[i]?.push(performance.now() - start);
       }
     });
   }
-  return times.map((all) => all.toSorted((a, b) => a - b)[ROUNDS / 2] as number);
+  return times.map((all) => all.toSorted((a, b) => a - b)[(BLOCKS * RUNS) / 2] as number);
 }
 
 const [whole, own, other, third] = medians([wholePath, ours, wasm, jsts]) as [number, number, number, number];
 const path = wholePath();
 const checksum = path.reduce((sum, value, i) => sum + Math.abs(value) * ((i % 7) + 1), 0);
 
-console.log(`60 teeth, module 0.5, offset ${DISTANCE} mm to 0.1 um; medians of ${ROUNDS}, warm`);
+console.log(`60 teeth, module 0.5, offset ${DISTANCE} mm to 0.1 um; medians of ${BLOCKS * RUNS}, warm`);
 console.log(`whole outline   ours          ${whole.toFixed(3)} ms   ${path.length / 2} points (limit 1 ms)`);
 console.log(`one pitch       ours          ${own.toFixed(3)} ms   ${ours().length} exact pieces`);
 console.log(`                clipper2-wasm ${other.toFixed(3)} ms   ${wasm()} points from ${ring.length}`);
