@@ -1,0 +1,120 @@
+import { describe, expect, it } from 'vitest';
+import { sheetHtml } from '../../src/report/sheet.ts';
+import type { SheetFacts } from '../../src/report/facts.ts';
+import { attributeOf, elementOf, textsOf } from '../support/svg-read.ts';
+import { factsOf } from '../support/sheets.ts';
+
+const facts = factsOf('third-wheel');
+
+function wordsOf(html: string): string {
+  return html
+    .replace(/<[^>]*>/g, '')
+    .replaceAll('\u00a0', ' ')
+    .replaceAll('\u2212', '-')
+    .replace(/\s+/g, ' ');
+}
+
+function setUpOf(page: string): string {
+  return page.slice(page.indexOf('<h2>Set-up</h2>'), page.indexOf('<h2>Programs and passes</h2>'));
+}
+
+const page = sheetHtml(facts);
+const setUp = wordsOf(setUpOf(page));
+
+describe('the set-up', () => {
+  it.each([
+    ['the blank, its material and its hold', /Sheet 44 mm by 44 mm.*leaded brass.*Glued flat/],
+    ['zero, and how it is touched off', /X0 and Y0 are the axis.*Z0 is the top of the blank, touched off/],
+    ['where zero is found again', /edges of the sheet lie at X -22 mm and Y -22 mm/],
+    ['where to park', /Park at X -22\.000 mm \(-0\.8661 in\), Y 22\.000 mm \(0\.8661 in\), height/],
+    [
+      'the walk round first, spindle still',
+      /Walk round first: run third-wheel-walk\.nc with the spindle still/,
+    ],
+    [
+      'how high to raise zero for a run in the air',
+      /raise the zero of Z by 6\.600 mm \(0\.2598 in\) and run third-wheel-1\.nc/,
+    ],
+    ['each program in order', /Run third-wheel-1\.nc.*Run third-wheel-2\.nc.*Run third-wheel-3\.nc/],
+    ['touching off anew after a change of cutter', /touch off its height/i],
+  ])('says %s', (_, words) => {
+    expect(setUp).toMatch(words);
+  });
+
+  it('lists the cutters in the order they are used, with how far they stick out', () => {
+    const table = setUpOf(page).slice(setUpOf(page).indexOf('Cutters in the order'));
+    const order = [...table.matchAll(/<td>cutter (\d+)<\/td>/g)].map(([, number]) => Number(number));
+    expect(order).toEqual(facts.programs.flatMap(({ cutters }) => cutters));
+    expect(wordsOf(table)).toContain('14.000 mm(0.5512 in)');
+  });
+
+  it('draws the reaches, the place to park and the heights as the proof has them', () => {
+    const extents = facts.proof?.extents;
+    const scale = Number(/data-scale="([\d.]+)"/.exec(setUpOf(page))?.[1]);
+    const rect = elementOf(page, 'extents');
+    expect(Number(attributeOf(rect, 'x')) / scale).toBeCloseTo(extents?.x[0] ?? 0, 2);
+    expect(Number(attributeOf(rect, 'width')) / scale).toBeCloseTo(
+      (extents?.x[1] ?? 0) - (extents?.x[0] ?? 0),
+      2,
+    );
+    expect(-Number(attributeOf(rect, 'y')) / scale).toBeCloseTo(extents?.y[1] ?? 0, 2);
+    for (const [figure, z] of [
+      ['z-park', facts.park?.z],
+      ['z-clear', facts.job.setup.clearZ],
+      ['z-top', facts.job.setup.topZ],
+      ['z-plate', facts.job.setup.plateZ],
+      ['z-deepest', extents?.z[0]],
+    ] as const) {
+      const element = elementOf(page, figure);
+      expect(Number(attributeOf(element, 'data-value'))).toBeCloseTo(z ?? NaN, 5);
+      const said = (textsOf(element)[0] ?? '').replace('Z ', '').replace('\u2212', '-');
+      expect(Number(said)).toBeCloseTo(z ?? NaN, 3);
+    }
+  });
+});
+
+describe('a job in inches', () => {
+  const inches: SheetFacts = { ...facts, job: { ...facts.job, length: 'inch' } };
+  const text = sheetHtml(inches);
+
+  it('says inches first, millimetres beside them', () => {
+    const words = wordsOf(text);
+    expect(words).toContain('1.2390 in (31.471 mm)');
+    expect(words).toContain('Park at X -0.8661 in (-22.000 mm)');
+    expect(words).not.toMatch(/\d mm \([\d.-]+ in\)/);
+    expect(text).toContain('figures in inches');
+  });
+
+  it('keeps what is measured the same, whatever unit it is said in', () => {
+    const value = (page_: string, figure: string): string =>
+      attributeOf(elementOf(page_, figure), 'data-value');
+    for (const figure of ['tip', 'bore', 'chord', 'tip-diameter', 'rim']) {
+      expect(value(text, figure)).toBe(value(page, figure));
+    }
+  });
+});
+
+describe('what is measured', () => {
+  it('is what the form gives, in the table and on the plate', () => {
+    const value = (figure: string): number => Number(attributeOf(elementOf(page, figure), 'data-value'));
+    expect(value('tip')).toBeCloseTo(2 * facts.form.outsideRadius, 5);
+    expect(value('bore')).toBe(4);
+    const drawn = /data-figure="(span-\d+)-drawn" data-value="([\d.]+)"/.exec(page);
+    expect(value(drawn?.[1] ?? '')).toBe(Number(drawn?.[2]));
+  });
+
+  it('says the passes once each, in order, with the time the dial shows', () => {
+    const chapters = [...page.matchAll(/data-chapter="(\d+)" data-seconds="([\d.]+)"/g)];
+    expect(chapters.map(([, number]) => Number(number))).toEqual(facts.passes.map((_, i) => i + 1));
+    const total = chapters.reduce((sum, [, , seconds]) => sum + Number(seconds), 0);
+    expect(Number(attributeOf(elementOf(page, 'seconds'), 'data-value'))).toBeCloseTo(total, 1);
+  });
+
+  it('says each reason once, with the passes it holds for', () => {
+    const whys = page.slice(page.indexOf('class="whys"'), page.indexOf('</dl>'));
+    const sentences = [...whys.matchAll(/<dd>([^<]*)<\/dd>/g)].flatMap(([, text = '']) =>
+      text.toLowerCase().replace(/\.$/, '').split('; '),
+    );
+    expect(new Set(sentences).size).toBe(sentences.length);
+  });
+});
