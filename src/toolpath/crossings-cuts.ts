@@ -47,6 +47,7 @@ export function crossingsCuts(task: CutTask, crossings: Crossings): Outcome<read
     way,
     pass: 'crossing 1 finishing',
     radialDepth: wall,
+    open: held ? 'slot' : 'window',
   });
   if (finished === undefined) {
     return failure([tooWide(task, 'there is no room to join the wall on an arc')]);

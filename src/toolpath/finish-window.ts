@@ -23,7 +23,16 @@ export interface WallTask {
   readonly heights: Heights;
   readonly way: 1 | -1;
   readonly pass: string;
+  /** Metal left on the wall. */
   readonly radialDepth: number;
+  /** What is open: all of the window, or only the slot along its wall (a skin holds the slug). */
+  readonly open: 'window' | 'slot';
+}
+
+/** An arc in and out: its radius and how far it turns. */
+interface Lead {
+  readonly radius: number;
+  readonly sweep: number;
 }
 
 /** How far the loop runs past its start, mm. Judgement: no step shows where it was joined. */
@@ -40,21 +49,23 @@ export function finishWindow(task: WallTask): Run | undefined {
   const inward = way === 1 ? leftOf(heading) : leftOf({ x: -heading.x, y: -heading.y });
   const overlap = Math.min(OVERLAP, lengthOf(path[0] as Piece) / 2);
   const left = addScaled(join, heading, overlap);
-  const lead = leadRadius(task, [join, left], heading, inward);
+  const lead = task.open === 'slot' ? slotLead(task) : windowLead(task, [join, left], heading, inward);
   if (lead === undefined) {
     return undefined;
   }
   const depth = heights.top - heights.bottom;
   const levels = levelsFor(depth, settings.cutter.flute);
-  const begin = addScaled(addScaled(join, inward, lead), heading, -lead);
-  const end = addScaled(addScaled(left, inward, lead), heading, lead);
-  const quarter = (way * Math.PI) / 2;
+  const { radius, sweep } = lead;
+  const aside = radius * (1 - Math.cos(sweep));
+  const along = radius * Math.sin(sweep);
+  const begin = addScaled(addScaled(join, inward, aside), heading, -along);
+  const end = addScaled(addScaled(left, inward, aside), heading, along);
   const { feed } = settings.data;
   const legs = [
-    arcLeg(join, addScaled(join, inward, lead), quarter, feed),
+    arcLeg(join, addScaled(join, inward, radius), way * sweep, feed),
     ...path.map((piece) => wallLeg(task, piece)),
     lineLeg(left, feed),
-    arcLeg(end, addScaled(left, inward, lead), quarter, feed),
+    arcLeg(end, addScaled(left, inward, radius), way * sweep, feed),
     lineLeg(begin, feed),
   ];
   const steps: MoveStep[] = [];
@@ -103,23 +114,23 @@ function wallLeg({ settings, way, radialDepth }: WallTask, piece: Piece): Leg {
   return arcLeg(endOf(piece), piece.centre, piece.turn, feed);
 }
 
-/** The largest arc in and out that stays free of the wall. */
-function leadRadius(
-  task: WallTask,
-  ends: readonly Point[],
-  heading: Point,
-  inward: Point,
-): number | undefined {
-  let lead = task.settings.radius;
-  for (let i = 0; i < TRIES; i++, lead *= SMALLER) {
-    const radius = lead;
+/** From the middle of the slot, which lies as far aside as the metal left on the wall: a short arc of one diameter. */
+function slotLead({ settings, radialDepth }: WallTask): Lead {
+  const radius = 2 * settings.radius;
+  return { radius, sweep: Math.acos(1 - radialDepth / radius) };
+}
+
+/** The largest quarter circle in and out that stays free of the wall. */
+function windowLead(task: WallTask, ends: readonly Point[], heading: Point, inward: Point): Lead | undefined {
+  let radius = task.settings.radius;
+  for (let i = 0; i < TRIES; i++, radius *= SMALLER) {
+    const lead = radius;
     const free = ends.every((on, k) => {
-      const along = k === 0 ? -radius : radius;
-      const at = addScaled(addScaled(on, inward, radius), heading, along);
-      return (nearestOnChain(task.window, at)?.distance ?? 0) >= task.settings.radius + radius / 2;
+      const at = addScaled(addScaled(on, inward, lead), heading, k === 0 ? -lead : lead);
+      return (nearestOnChain(task.window, at)?.distance ?? 0) >= task.settings.radius + lead / 2;
     });
     if (free) {
-      return radius;
+      return { radius, sweep: Math.PI / 2 };
     }
   }
   return undefined;

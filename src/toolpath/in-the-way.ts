@@ -26,6 +26,21 @@ export function inTheWay(
   });
 }
 
+/** The same for a move across whose way between its ends is not known: anywhere in the box between them. */
+export function inTheBox(
+  from: Position,
+  to: Position,
+  obstacle: Obstacle,
+  cutter: Cutter,
+  machine: Machine,
+): boolean {
+  const wide = widthBelow(obstacle.toZ + AIR_ROUND - Math.min(from.z, to.z), cutter, machine);
+  const outside = (value: number, a: number, b: number): number =>
+    Math.max(Math.min(a, b) - value, 0, value - Math.max(a, b));
+  const off = Math.hypot(outside(obstacle.x, from.x, to.x), outside(obstacle.y, from.y, to.y));
+  return wide > 0 && off < obstacle.radius + wide / 2 + AIR_ROUND;
+}
+
 /** Widest diameter of what hangs within `height` above the tip; 0 where the tip is above. */
 export function widthBelow(height: number, cutter: Cutter, machine: Machine): number {
   if (height <= 0) {

@@ -9,7 +9,7 @@ import type { Job } from '../job/job.ts';
 import type { Machine } from '../machine/machine.ts';
 import type { Belongs, MoveStep, Position, Step } from '../motion/motion.ts';
 import type { Heights } from './heights.ts';
-import { inTheWay } from './in-the-way.ts';
+import { inTheBox, inTheWay } from './in-the-way.ts';
 import type { Run } from './leg.ts';
 import type { PassCuts } from './pass-cuts.ts';
 
@@ -25,7 +25,7 @@ export interface LayTask {
 
 export function layProgram(task: LayTask, passes: readonly PassCuts[]): readonly Step[] {
   const { park } = task;
-  const steps: Step[] = [...task.notes.map((text): Step => ({ kind: 'note', text }))];
+  const steps: Step[] = task.notes.map((text): Step => ({ kind: 'note', text }));
   let at: Position = park;
   passes.forEach((pass, i) => {
     const before = passes[i - 1];
@@ -88,10 +88,19 @@ function layRun(steps: Step[], task: LayTask, pass: PassCuts, run: Run, from: Po
   return run.steps.at(-1)?.to ?? at;
 }
 
-function acrossBlocked(task: LayTask, pass: PassCuts, from: Position, to: Position): boolean {
+/** A machine that crosses at its own angle may pass anywhere in the box between two places. */
+function acrossBlocked(
+  { job, machine }: LayTask,
+  { cutter }: PassCuts,
+  from: Position,
+  to: Position,
+): boolean {
   const start = { ...from, z: to.z };
-  return (
-    inTheWay(start, { kind: 'rapid', to }, task.job.setup.obstacles, pass.cutter, task.machine) !== undefined
+  const straight = machine.words.positions.rapidShape === 'straight';
+  return job.setup.obstacles.some((obstacle) =>
+    straight
+      ? inTheWay(start, { kind: 'rapid', to }, [obstacle], cutter, machine) !== undefined
+      : inTheBox(start, to, obstacle, cutter, machine),
   );
 }
 

@@ -7,6 +7,7 @@
  * A slot at distance d from the outline reaches d + r. The pillar is what lies farther than that from both teeth: on the
  * tip circle its half width is R sin(pi/N - g) - (d + r), g half the land's angle; its foot lies on the space's middle line.
  */
+import { FORM_ERROR } from '../base/tolerances.ts';
 import { nearestOnChain } from '../geometry/nearest-on-piece.ts';
 import { endOf } from '../geometry/on-piece.ts';
 import type { Chain } from '../geometry/piece.ts';
@@ -37,7 +38,6 @@ interface Dip {
 const AIR = 0.3;
 /** How far dips overlap pillar, slots and each other, over the cutter's radius. */
 const OVERLAP = 0.2;
-const HALVINGS = 40;
 
 export function mouthRuns(task: MouthTask): readonly Run[] {
   const dips = dipsFor(task);
@@ -55,14 +55,14 @@ export function dipsFor({ form, distance, settings }: Omit<MouthTask, 'heights'>
   }
   const walls = wallsOfSpace(form);
   const clearance = (x: number, y: number): number => nearestOnChain(walls, { x, y })?.distance ?? 0;
-  const foot = innermost(form, (x) => clearance(x, 0) >= band);
+  const foot = innermost(form, (x) => clearance(x, 0), band);
   const width = 2 * pillar + OVERLAP * r;
   // An odd number, so that one runs down the middle line to the foot.
   const more = 2 * Math.max(0, Math.ceil((width - 2 * r) / (2 * (2 - OVERLAP) * r)));
   return Array.from({ length: more + 1 }, (_, i) => {
     const across = more === 0 ? 0 : (width / 2 - r) * ((2 * i) / more - 1);
-    const deep = innermost(form, (x) => clearance(x, across) >= distance);
-    return { across, from: form.outsideRadius + r + AIR, to: Math.max(foot + (1 - OVERLAP) * r, deep) };
+    const deep = innermost(form, (x) => clearance(x, across), distance);
+    return { across, from: form.outsideRadius + r + AIR, to: Math.max(foot + PAST_FOOT * r, deep) };
   });
 }
 
@@ -80,20 +80,23 @@ function wallsOfSpace(form: WheelForm): Chain {
   return [...turnChain(pieces, half), ...turnChain(pieces, -half)];
 }
 
-/** The smallest radius down to which `holds` all the way from outside the tip circle. */
-function innermost(form: WheelForm, holds: (x: number) => boolean): number {
-  let good = form.outsideRadius;
-  let bad = form.rootRadius;
-  for (let i = 0; i < HALVINGS; i++) {
-    const middle = (good + bad) / 2;
-    if (holds(middle)) {
-      good = middle;
-    } else {
-      bad = middle;
-    }
+/**
+ * How far in a point may go from the tip circle along a line until only `keep` of clearance is left. Clearance can't shrink
+ * faster than the point moves, so a step as long as what is to spare never jumps across a wall.
+ */
+function innermost(form: WheelForm, clearance: (x: number) => number, keep: number): number {
+  let x = form.outsideRadius;
+  for (let spare = clearance(x) - keep; spare > NEAR && x > form.rootRadius; spare = clearance(x) - keep) {
+    x -= spare;
   }
-  return good;
+  return Math.max(x, form.rootRadius);
 }
+
+/** How far short of the pillar's foot a dip ends, over the cutter's radius: where neighbouring round ends still meet below it. */
+const PAST_FOOT = 0.35;
+
+/** The march inward ends this near to the wall it keeps clear of. A micrometre is nothing beside the allowance. */
+const NEAR = FORM_ERROR;
 
 function spaceRun({ form, settings, heights }: MouthTask, dips: readonly Dip[], k: number): Run {
   const { teeth } = form.proportions;

@@ -8,7 +8,7 @@
  */
 import { Bug } from '../base/bug.ts';
 import { success, type Outcome } from '../base/problem.ts';
-import { FIT_ERROR, FIT_ERROR_MOST, FORM_ERROR, SAME_POINT } from '../base/tolerances.ts';
+import { FIT_ERROR, FIT_ERROR_MOST, SAME_POINT } from '../base/tolerances.ts';
 import { reversePiece, turnPiece } from '../geometry/change-piece.ts';
 import { fitArcs } from '../geometry/fit-arcs.ts';
 import { fitLines } from '../geometry/fit-lines.ts';
@@ -33,6 +33,8 @@ export interface PitchPath {
   /** +1 counter-clockwise round the wheel. */
   readonly way: 1 | -1;
   readonly made: 'arcs' | 'lines';
+  /** How far lines stray from curves, always away from the wheel. */
+  readonly strays: number;
   /** The corner at which loops are joined, whole: the first piece. It stays an arc until it is cut where it is joined. */
   readonly corner: ArcPiece;
   /** What follows it, up to the next tooth's. */
@@ -46,6 +48,8 @@ export interface PathRequest {
   readonly distance: number;
   readonly way: 1 | -1;
   readonly made: 'arcs' | 'lines';
+  /** How far lines may stray from curves, away from the wheel; arcs keep to FIT_ERROR. */
+  readonly strays: number;
   /** 'clear': the lands are not cut (a disc turned to the tip circle). */
   readonly lands: 'cut' | 'clear';
 }
@@ -58,7 +62,7 @@ export interface OffsetPiece {
 }
 
 export function pitchPath(request: PathRequest): Outcome<PitchPath> {
-  const { form, distance, way, made, lands } = request;
+  const { form, distance, way, made, strays, lands } = request;
   const { teeth } = form.proportions;
   const outline = form.sector.map(({ piece }) => piece);
   const offset = offsetSector(outline, teeth, distance);
@@ -78,8 +82,9 @@ export function pitchPath(request: PathRequest): Outcome<PitchPath> {
     distance,
     way,
     made,
+    strays,
     corner,
-    rest: fewest(rest, made, way),
+    rest: fewest(rest, request),
     land: rest.at(-1)?.role === 'land',
   });
 }
@@ -131,10 +136,10 @@ function fromCorner(
 }
 
 /** Fitted as closely as a usual number of blocks allows. */
-function fewest(rest: readonly OffsetPiece[], made: 'arcs' | 'lines', way: 1 | -1): readonly PathPiece[] {
-  const close = joined(rest.flatMap((part) => plainly(part, made, way, FIT_ERROR)));
-  return made === 'arcs' && close.length > USUAL_BLOCKS
-    ? joined(rest.flatMap((part) => plainly(part, made, way, FIT_ERROR_MOST)))
+function fewest(rest: readonly OffsetPiece[], request: PathRequest): readonly PathPiece[] {
+  const close = joined(rest.flatMap((part) => plainly(part, request, FIT_ERROR)));
+  return request.made === 'arcs' && close.length > USUAL_BLOCKS
+    ? joined(rest.flatMap((part) => plainly(part, request, FIT_ERROR_MOST)))
     : close;
 }
 
@@ -142,10 +147,10 @@ function fewest(rest: readonly OffsetPiece[], made: 'arcs' | 'lines', way: 1 | -
 const USUAL_BLOCKS = 14;
 
 /** Lines and arcs only, or lines only. */
-function plainly(part: OffsetPiece, made: 'arcs' | 'lines', way: 1 | -1, fit: number): readonly PathPiece[] {
+function plainly(part: OffsetPiece, request: PathRequest, fit: number): readonly PathPiece[] {
   const { role, piece, next } = part;
-  if (made === 'lines') {
-    return chords(piece, way).map((line) => ({ role, piece: line, next }));
+  if (request.made === 'lines') {
+    return chords(piece, request).map((line) => ({ role, piece: line, next }));
   }
   return piece.kind === 'cycloid'
     ? fitArcs(piece, fit).map((arc) => ({ role, piece: arc, next }))
@@ -153,8 +158,11 @@ function plainly(part: OffsetPiece, made: 'arcs' | 'lines', way: 1 | -1, fit: nu
 }
 
 /** Lines in place of a piece, where the machine has no arcs; never on the wheel's side of it. */
-export function chords(piece: Piece, way: 1 | -1): readonly LinePiece[] {
-  return piece.kind === 'line' ? [piece] : fitLines([piece], FORM_ERROR, way === 1 ? 'right' : 'left');
+export function chords(
+  piece: Piece,
+  { way, strays }: Pick<PathRequest, 'way' | 'strays'>,
+): readonly LinePiece[] {
+  return piece.kind === 'line' ? [piece] : fitLines([piece], strays, way === 1 ? 'right' : 'left');
 }
 
 /** A line that goes on straight in the next is one line: the tangents at the ends of curves, and flanks before them. */

@@ -7,6 +7,7 @@
  * lies on the right where the cutter climbs: clockwise round the outside.
  */
 import { failure, success, type Outcome, type Problem } from '../base/problem.ts';
+import { FORM_ERROR } from '../base/tolerances.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import { bayFor, joinCorner, type Bay } from './bay.ts';
 import type { CutTask } from './cut-task.ts';
@@ -40,6 +41,8 @@ interface Teeth {
 const MUCH_PLAY = 0.03;
 /** Metal at the root, over the finishing cutter's diameter, above which it is no finishing any more. Judgement. */
 const THICK = 0.25;
+/** How far lines of the roughing path may stray outward, over the allowance: few blocks, and hardly more to finish. Judgement. */
+const ROUGH_STRAYS = 0.1;
 /** A disc at most this much over the tip circle is turned to it. */
 const TURNED = 0.05;
 
@@ -84,14 +87,28 @@ function pathsOf(
   const { shape } = job.setup;
   const turned = shape.kind === 'disc' && shape.diameter <= 2 * form.outsideRadius + TURNED;
   const made = task.machine.words.arcs.planes === 'none' ? 'lines' : 'arcs';
-  const roughPath = pitchPath({ form, distance: roughRadius + allowance, way, made, lands: 'cut' });
+  const roughPath = pitchPath({
+    form,
+    distance: roughRadius + allowance,
+    way,
+    made,
+    strays: Math.max(FORM_ERROR, ROUGH_STRAYS * allowance),
+    lands: 'cut',
+  });
   if (!roughPath.ok) {
     return roughPath;
   }
   const finePaths: PitchPath[] = [];
   for (let pass = 1; pass <= job.cuts.finishing.passes; pass++) {
     const left = allowance * (1 - pass / job.cuts.finishing.passes);
-    const path = pitchPath({ form, distance: fineRadius + left, way, made, lands: turned ? 'clear' : 'cut' });
+    const path = pitchPath({
+      form,
+      distance: fineRadius + left,
+      way,
+      made,
+      strays: FORM_ERROR,
+      lands: turned ? 'clear' : 'cut',
+    });
     if (!path.ok) {
       return path;
     }

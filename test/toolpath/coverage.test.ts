@@ -5,7 +5,7 @@ import { pointInLoop } from '../../src/geometry/point-in-loop.ts';
 import { repeatRound } from '../../src/geometry/change-piece.ts';
 import { norm } from '../../src/geometry/point.ts';
 import { pinion } from '../tooth/proportions.ts';
-import { cutter, disc, inPass, makeCase, movesOf, planOf, type Wanted } from './make-job.ts';
+import { cutter, disc, inPass, makeCase, movesOf, planOf, pointsAlong, type Wanted } from './make-job.ts';
 import { distanceTo, flatAt, planPiece, raster } from './swept.ts';
 
 describe.each<[string, Wanted]>([
@@ -110,6 +110,16 @@ describe.each<[string, Wanted]>([
       cuts: { roughing: { cutter: cutter(3, 0.4), allowance: 0.02 }, finishing: { cutter: cutter(3, 0.4) } },
     },
   ],
+  [
+    '35 teeth, module 1.44, cutter 0.53: many dips',
+    {
+      wheel: { teeth: 35, module: 1.44, mate: pinion(6) },
+      cuts: {
+        roughing: { cutter: cutter(2, 0.53), allowance: 0.03 },
+        finishing: { cutter: cutter(2, 0.53) },
+      },
+    },
+  ],
 ])('disc: %s', (_, wanted) => {
   const made = makeCase({ ...wanted, crossings: null, setup: disc(wanted.wheel) });
   const { form, job } = made;
@@ -156,6 +166,16 @@ describe.each<[string, Wanted]>([
       .filter((point) => !cut(point))
       .filter((point) => nearestOnChain(near, point)!.distance > 1.2 * r);
     expect(loose).toEqual([]);
+  });
+
+  it('keeps the allowance in the mouths', () => {
+    const kept = r + job.cuts.roughing.allowance;
+    const pass = inPass(moves, 'mouths').filter(({ belongs }) => belongs?.tooth === 1 && belongs.lap === 1);
+    const teeth = [...outline.slice(-2 * form.sector.length), ...near];
+    for (const point of pass.flatMap((move) => pointsAlong(move, 0.05))) {
+      expect(pointInLoop(outline, point)).toBe(false);
+      expect(nearestOnChain(teeth, point)!.distance).toBeGreaterThan(kept - 0.0003);
+    }
   });
 
   it('comes down beside the disc in air only', () => {

@@ -60,7 +60,7 @@ describe.each(FORMS)('%s', (_, wanted) => {
   const nearest = (pass: string): number =>
     Math.min(
       ...inPass(moves, pass)
-        .filter(({ belongs }) => (belongs?.tooth ?? 0) <= 3)
+        .filter(({ belongs }) => (belongs?.tooth ?? 0) <= 2 && belongs?.lap === 1)
         .flatMap((move) => pointsAlong(move, 0.01))
         .map((point) => fromOutline(form, outline, point)),
     );
