@@ -17,6 +17,11 @@ export const MACHINES: readonly string[] = readdirSync(join(ROOT, 'posts'))
   .map((name) => name.slice(0, -'.yaml'.length))
   .toSorted();
 
+/** The machine a job names. */
+export function machineOf(text: string): string {
+  return /^machine:\s*(\S+)/m.exec(text)?.[1] ?? '';
+}
+
 export function sampleText(name: string): string {
   return readFileSync(join(ROOT, 'samples', `${name}.yaml`), 'utf8');
 }
@@ -27,11 +32,11 @@ export function machineText(name: string): string | undefined {
 }
 
 /** A version that never changes, so that golden programs do not change with ours. */
-export function cutText(name: string, text: string): CutResult {
+export function cutText(name: string, text: string, version = 'golden'): CutResult {
   return cut({
     file: `${name}.yaml`,
     text,
-    version: 'golden',
+    version,
     findMachine: (machine) => {
       const found = machineText(machine);
       return found === undefined
@@ -55,9 +60,14 @@ export function cutText(name: string, text: string): CutResult {
           at: { kind: 'file', file: path },
         },
       ]),
-    hash: (content) => createHash('sha256').update(content, 'utf8').digest('hex'),
+    hash: sumOf,
     stage: () => undefined,
   });
+}
+
+/** SHA-256 of a text's UTF-8 bytes. */
+export function sumOf(content: string): string {
+  return createHash('sha256').update(content, 'utf8').digest('hex');
 }
 
 /** The same job for another machine. */
