@@ -125,7 +125,7 @@ function radii({ form, asCut, job }: SheetFacts, frame: PlateFrame, edge: number
     { figure: 'working-radius', name: 'working flank begins', radius: form.workingRadius },
     ...(asCut === undefined
       ? []
-      : [{ figure: 'foot-radius', name: 'foot: straight flank ends', radius: asCut.footRadius }]),
+      : [{ figure: 'foot-radius', name: 'foot: cut down to here', radius: asCut.footRadius }]),
     { figure: 'root-radius', name: 'root', radius: form.rootRadius },
   ].toSorted((a, b) => b.radius - a.radius);
   const heights = rows.map(

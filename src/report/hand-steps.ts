@@ -1,6 +1,7 @@
 /** What hands do while the programs run: which program next, and at each change of cutter what the program itself says there. */
+import { jobText } from './job-text.ts';
 import type { SheetFacts, SheetProgram } from './facts.ts';
-import { capitalised, duration, escapeText, numeral, numeralList } from './words.ts';
+import { duration, escapeText, numeral, numeralList, sentence } from './words.ts';
 import { sheetName } from './pass-paths.ts';
 
 export function handSteps(facts: SheetFacts): readonly string[] {
@@ -21,7 +22,7 @@ export function handSteps(facts: SheetFacts): readonly string[] {
         stops.push(`At the stop: ${step.say.map(sentence).join(' ')}`);
       }
     }
-    return `<b>Run</b> <span class="mark">${escapeText(program.file)}</span>, ${passWords(facts, program)}, ${duration(program.seconds)}. ${escapeText([...stops, ...notes].join(' '))}`;
+    return `<b>Run</b> <span class="mark">${escapeText(program.file)}</span>, ${passWords(facts, program)}, ${duration(program.seconds)}. ${escapeText(jobText([...stops, ...notes].join(' '), facts.job.length))}`;
   });
 }
 
@@ -36,11 +37,6 @@ function changed(facts: SheetFacts, number: number): string {
   return facts.machine.words.cutters.change === 'automatic'
     ? `Then it changes to cutter ${number} by itself; its length must be in the table of the controller.`
     : `It stops, parked high and aside with the spindle still: fit cutter ${number}.`;
-}
-
-function sentence(text: string): string {
-  const trimmed = capitalised(text.trim());
-  return /[.!?]$/.test(trimmed) ? trimmed : `${trimmed}.`;
 }
 
 /** The numerals of the passes it holds. */

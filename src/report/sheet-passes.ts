@@ -1,16 +1,18 @@
 /** The plate of the work, the programs, the passes with speed, feed, depth and time, and where the figures come from. */
 import { millimetresPer } from '../base/units.ts';
 import { drawWork } from './draw-work.ts';
+import { jobText } from './job-text.ts';
 import type { SheetFacts, SheetPass } from './facts.ts';
 import { bareLength, shortUnit, unitInWords } from './lengths.ts';
 import { scaleWords } from './plate.ts';
+import { plateFigure } from './plate-numbers.ts';
 import { head } from './sheet-set-up.ts';
 import { capitalised, duration, escapeText, fixed, numeral, numeralList, plain } from './words.ts';
 
 export function passesSection(facts: SheetFacts): string {
   return facts.passes.length === 0
     ? ''
-    : `<section>\n<h2>${facts.programs.length === 0 ? 'Passes that were planned' : 'Programs and passes'}</h2>\n${programsTable(facts)}${workPlate(facts)}${passesTable(facts)}${reasons(facts.passes)}</section>`;
+    : `<section>\n<h2>${facts.programs.length === 0 ? 'Passes that were planned' : 'Programs and passes'}</h2>\n${programsTable(facts)}${workPlate(facts)}${passesTable(facts)}${reasons(facts)}</section>`;
 }
 
 function programsTable(facts: SheetFacts): string {
@@ -35,9 +37,12 @@ function programsTable(facts: SheetFacts): string {
 
 function workPlate(facts: SheetFacts): string {
   const { svg, scale } = drawWork(facts, 'elsewhere');
-  return (
-    `<figure>\n${svg}\n<figcaption><b>Plate III.</b> The work, ${scaleWords(scale)} on A4: the wheel in its stock, the channels the cutters clear, and the paths of their centres in the last lap of each pass, ` +
-    `grey where they rough, blue where they finish. Round it the minutes, clockwise from twelve; each pass is a chapter, as long as it takes. Tooth 1 is marked; teeth are counted counter-clockwise.</figcaption>\n</figure>\n`
+  return plateFigure(
+    facts,
+    'work',
+    svg,
+    `The work, ${scaleWords(scale)} on A4: the wheel in its stock, the channels the cutters clear, and the paths of their centres in the last lap of each pass, ` +
+      'grey where they rough, blue where they finish. Round it the minutes, clockwise from twelve; each pass is a chapter, as long as it takes. Tooth 1 is marked; teeth are counted counter-clockwise.',
   );
 }
 
@@ -78,7 +83,7 @@ function passRow({ job }: SheetFacts, pass: SheetPass, i: number): string {
 }
 
 /** Each sentence once, with the passes it holds for; sentences of the same passes together. */
-function reasons(passes: readonly SheetPass[]): string {
+function reasons({ passes, job }: SheetFacts): string {
   const holds = new Map<string, number[]>();
   passes.forEach((pass, i) => {
     for (const why of pass.why) {
@@ -91,7 +96,8 @@ function reasons(passes: readonly SheetPass[]): string {
     together.set(key, [...(together.get(key) ?? []), why]);
   }
   const items = [...together].map(
-    ([numbers, whys]) => `<dt>${numbers}</dt><dd>${escapeText(capitalised(whys.join('; ')))}.</dd>`,
+    ([numbers, whys]) =>
+      `<dt>${numbers}</dt><dd>${escapeText(capitalised(jobText(whys.join('; '), job.length)))}.</dd>`,
   );
   return items.length === 0
     ? ''

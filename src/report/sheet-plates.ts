@@ -3,14 +3,12 @@ import { allowedError } from './allowed-error.ts';
 import { drawDeviation } from './draw-deviation.ts';
 import { drawSizes } from './draw-sizes.ts';
 import { drawSpace } from './draw-space.ts';
+import { jobText } from './job-text.ts';
 import type { SheetFacts } from './facts.ts';
 import { lengthOnly, sizeOnly, tinyLength, unitInWords } from './lengths.ts';
 import { scaleWords } from './plate.ts';
+import { plateFigure } from './plate-numbers.ts';
 import { escapeText, fixed } from './words.ts';
-
-function figure(svg: string, name: string, caption: string): string {
-  return `<figure>\n${svg}\n<figcaption><b>${name}</b> ${caption}</figcaption>\n</figure>`;
-}
 
 export function sizesPlate(facts: SheetFacts): string {
   const { form, job, crossings } = facts;
@@ -25,9 +23,10 @@ export function sizesPlate(facts: SheetFacts): string {
     },
     `The wheel with its sizes, in plan and cut through the axis`,
   );
-  return figure(
+  return plateFigure(
+    facts,
+    'sizes',
     svg,
-    'Plate I.',
     `The exact wheel, in plan and cut through its axis, ${scaleWords(scale)} on A4; figures in ${unitInWords(job.length)}.${windowWords(facts)}`,
   );
 }
@@ -60,9 +59,14 @@ export function spacePlate(facts: SheetFacts): string {
       : ` The largest cutter that would reach the root is ${lengthOnly(asCut.largestCutter, job.length)}.`;
   const remarks = (reach?.remarks ?? [])
     .filter((remark) => !SAID.test(remark))
-    .map((remark) => ` ${escapeText(capital(remark))}.`)
+    .map((remark) => ` ${escapeText(capital(jobText(remark, job.length)))}.`)
     .join('');
-  return figure(svg, 'Plate IV.', `One tooth space, ${scaleWords(scale)} on A4.${left}${largest}${remarks}`);
+  return plateFigure(
+    facts,
+    'space',
+    svg,
+    `One tooth space, ${scaleWords(scale)} on A4.${left}${largest}${remarks}`,
+  );
 }
 
 /** What the caption says itself, in the job's unit. */
@@ -86,9 +90,10 @@ export function deviationPlate(facts: SheetFacts): string {
     pitchRadius: facts.form.pitchRadius,
     unit: facts.job.length,
   });
-  return figure(
+  return plateFigure(
+    facts,
+    'deviation',
     svg,
-    'Plate V.',
     `The cut flank against the exact curve along tooth ${figures.worstTooth}, the worst of all, read back from the program. The band is what is allowed, ${tinyLength(allowed, facts.job.length, 1)} either way.`,
   );
 }

@@ -8,6 +8,7 @@ import type { SheetFacts } from './facts.ts';
 import { HOLDING_WORDS } from './holding-words.ts';
 import { lengthBoth, lengthOnly, sizeOnly } from './lengths.ts';
 import { scaleWords } from './plate.ts';
+import { plateFigure } from './plate-numbers.ts';
 import { handSteps } from './hand-steps.ts';
 import { capitalised, duration, escapeText, plain } from './words.ts';
 
@@ -143,8 +144,11 @@ function tablePlate(facts: SheetFacts): string {
     return '';
   }
   const seconds = facts.programs.reduce((sum, program) => sum + program.seconds, 0);
-  return (
-    `<figure>\n${plate.svg}\n<figcaption><b>Plate II.</b> The table from above, ${scaleWords(plate.scale)} on A4, and the heights from the side, to a scale of their own. ` +
-    `Dashed: as far as the centres of the cutters go, parking included, in ${duration(seconds)} of work. Hatched: what stands in the way.</figcaption>\n</figure>\n`
+  return plateFigure(
+    facts,
+    'table',
+    plate.svg,
+    `The table from above, ${scaleWords(plate.scale)} on A4, and the heights from the side, to a scale of their own. ` +
+      `Dashed: as far as the centres of the cutters go, parking included, in ${duration(seconds)} of work. Hatched: what stands in the way.`,
   );
 }

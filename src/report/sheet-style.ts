@@ -9,6 +9,7 @@ body{margin:0 auto;max-width:190mm;padding:14mm 10mm 20mm;font:11.5pt/1.5 ${FACE
 header{border-bottom:.3mm solid var(--ink);padding-bottom:4mm;margin-bottom:5mm}
 h1{font-size:25pt;line-height:1.15;font-weight:500;margin:0 0 3mm;text-wrap:balance}
 h2{font-size:14pt;font-weight:500;font-variant-caps:small-caps;letter-spacing:.05em;margin:11mm 0 3mm;border-top:.1mm solid var(--rule);padding-top:3mm;break-after:avoid}
+header+section h2:first-child{border-top:0;margin-top:0;padding-top:0}
 h3{font-size:11.5pt;font-weight:500;font-style:italic;margin:6mm 0 1.5mm;break-after:avoid}
 p{margin:0 0 2.5mm;max-width:160mm;text-wrap:pretty}
 b{font-weight:600}
@@ -44,6 +45,7 @@ li{margin-bottom:1.4mm;max-width:160mm;text-wrap:pretty;break-inside:avoid}
 .columns{columns:2;column-gap:9mm;font-size:10pt;line-height:1.4}
 .whys{margin:0 0 3mm;display:grid;grid-template-columns:max-content 1fr;gap:1mm 4mm;font-size:10pt;line-height:1.4}
 dt{white-space:nowrap;min-width:14mm}
+dt,dd{break-inside:avoid}
 dd{margin:0}
 footer{border-top:.1mm solid var(--rule);margin-top:11mm;padding-top:2mm;font-size:10pt}
 @media screen and (max-width:640px){body{padding:6mm 4mm 12mm}h1{font-size:20pt}.columns{columns:1}.plate text{font-size:1.3em}.plate .legend,.plate .minute{font-size:1em}}

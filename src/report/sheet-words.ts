@@ -1,23 +1,29 @@
 /** The sheet's parts that are mostly words: what was found, what was not checked, cautions, what was derived. */
 import { displayed } from './derived-words.ts';
+import type { LengthUnit } from '../base/units.ts';
+import { jobText } from './job-text.ts';
 import type { SheetFacts } from './facts.ts';
 import { head } from './sheet-set-up.ts';
-import { escapeText } from './words.ts';
+import { escapeText, sentence } from './words.ts';
 
 export function findingsSection(facts: SheetFacts): string {
   const found = [...warnings(facts), ...findings(facts, 'warning')];
   const unseen = facts.proof?.notChecked ?? ['No program was made, so nothing was proved.'];
   return (
     `<section>\n<h2>What was found</h2>\n${found.length === 0 ? `<p>${facts.verdict === 'pass' ? 'Nothing that needs a word.' : 'Nothing besides why it was refused.'}</p>` : list(found)}\n` +
-    `<h2>What was not checked</h2>\n<ul class="columns">${[...new Set(unseen)].map((line) => `<li>${escapeText(line)}</li>`).join('\n')}</ul>\n</section>`
+    `<h2>What was not checked</h2>\n<ul class="columns">${[...new Set(unseen)].map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ul>\n</section>`
   );
 }
 
 /** Of the job: reasons where nothing was made, and what the proof holds against the program. */
 export function refusalSection(facts: SheetFacts): string {
+  const unit = facts.job.length;
   const reasons = facts.problems
     .filter(({ severity }) => severity === 'error')
-    .map(({ message, hint }) => `<li><span class="danger">${escapeText(message)}</span>${after(hint)}</li>`);
+    .map(
+      ({ message, hint }) =>
+        `<li><span class="danger">${escapeText(sentence(jobText(message, unit)))}</span>${after(hint, unit)}</li>`,
+    );
   const found = findings(facts, 'error');
   if (reasons.length + found.length === 0) {
     return '';
@@ -32,23 +38,27 @@ export function refusalSection(facts: SheetFacts): string {
 
 const MOST_SHOWN = 20;
 
-function warnings({ problems }: SheetFacts): readonly string[] {
+function warnings({ problems, job }: SheetFacts): readonly string[] {
+  const unit = job.length;
   return problems
     .filter(({ severity }) => severity === 'warning')
-    .map(({ message, hint }) => `<li>${escapeText(message)}${after(hint)}</li>`);
+    .map(
+      ({ message, hint }) => `<li>${escapeText(sentence(jobText(message, unit)))}${after(hint, unit)}</li>`,
+    );
 }
 
-function findings({ proof }: SheetFacts, wanted: 'error' | 'warning'): readonly string[] {
+function findings({ proof, job }: SheetFacts, wanted: 'error' | 'warning'): readonly string[] {
+  const unit = job.length;
   return (proof?.findings ?? [])
     .filter(({ severity }) => severity === wanted)
     .map(
       ({ code, message, hint, file, line }) =>
-        `<li><span class="mark">${escapeText(file)}, line ${line}:</span> <span${wanted === 'error' ? ' class="danger"' : ''}>${escapeText(message)}</span>${after(hint)} <span class="soft mark">${code}</span></li>`,
+        `<li><span class="mark">${escapeText(file)}, line ${line}:</span> <span${wanted === 'error' ? ' class="danger"' : ''}>${escapeText(sentence(jobText(message, unit)))}</span>${after(hint, unit)} <span class="soft mark">${code}</span></li>`,
     );
 }
 
-function after(hint: string | undefined): string {
-  return hint === undefined ? '' : ` ${escapeText(hint)}`;
+function after(hint: string | undefined, unit: LengthUnit): string {
+  return hint === undefined ? '' : ` ${escapeText(sentence(jobText(hint, unit)))}`;
 }
 
 function list(items: readonly string[]): string {
@@ -58,7 +68,7 @@ function list(items: readonly string[]): string {
 export function cautionsSection({ cautions }: SheetFacts): string {
   return cautions.length === 0
     ? ''
-    : `<section>\n<h2>Cautions</h2>\n<ol class="columns">${cautions.map((line) => `<li>${escapeText(line)}.</li>`).join('\n')}</ol>\n</section>`;
+    : `<section>\n<h2>Cautions</h2>\n<ol class="columns">${cautions.map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ol>\n</section>`;
 }
 
 /** Values that share a reason share a row. */

@@ -83,3 +83,9 @@ export function numeralList(counts: readonly number[]): string {
 export function capitalised(text: string): string {
   return text.charAt(0).toUpperCase() + text.slice(1);
 }
+
+/** With a capital and a full stop, where it has neither. */
+export function sentence(text: string): string {
+  const trimmed = capitalised(text.trim());
+  return /[.!?]$/.test(trimmed) ? trimmed : `${trimmed}.`;
+}

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { jobText } from '../../src/report/job-text.ts';
 import { bareLength, lengthBoth, lengthOnly, sizeOnly, tinyLength } from '../../src/report/lengths.ts';
 import {
   coordinate,
@@ -84,4 +85,20 @@ describe('times and numerals', () => {
 
 it('lets no letter of a text become a tag or end an attribute', () => {
   expect(escapeText(`<b a="x" c='y'>&amp;`)).toBe('&lt;b a=&quot;x&quot; c=&#39;y&#39;&gt;&amp;amp;');
+});
+
+describe('sentences of other stages in an inch job', () => {
+  it('say inches first [1 inch = 25.4 mm]', () => {
+    expect(jobText('feed 254 mm/min, 2.54 mm a lap', 'inch')).toBe(
+      `feed 10.0${NB}in/min (254${NB}mm/min), 0.1000${NB}in (2.54${NB}mm) a lap`,
+    );
+    expect(jobText('down to -25.4 mm', 'inch')).toBe(`down to \u22121.0000${NB}in (\u221225.4${NB}mm)`);
+  });
+
+  it('leave alone what is no length, what has inches already, and every metric job', () => {
+    for (const text of ['0.0261 mm2 a space', '3.5 modules', '25.4 mm or 1 inch', '25.4 mm (1 in)']) {
+      expect(jobText(text, 'inch')).toBe(text);
+    }
+    expect(jobText('2.54 mm', 'mm')).toBe('2.54 mm');
+  });
 });
