@@ -20,12 +20,13 @@ export const LINE_FIT_ERROR = FORM_ERROR * 0.95;
 
 /** How far the clipped polygon and the exact offset may disagree.
  *  Why: the two sags of the clipping (its input's and its own arcs') and grid rounding, with a quarter to spare. */
-export const CLIP_AGREEMENT = FORM_ERROR * 2.5;
+export const CLIP_AGREEMENT = FORM_ERROR * 5;
 
 /** Largest sag of the chords that are handed to clipping, and of the arcs it makes.
  *  Why: the polygon only says which pieces remain; what is closer than this is told apart by exact distances, and where
- *  pieces meet is found exactly. Finer chords would cost time and move nothing. */
-export const CLIP_SAG = FORM_ERROR;
+ *  pieces meet is found exactly. A wrong piece is off by the cutter's size, not by micrometres; finer chords would cost
+ *  time and move nothing. */
+export const CLIP_SAG = FORM_ERROR * 2;
 
 /** Largest sag of the chords of a sampled curve where a polygon stands for it (drawing, reckoning areas).
  *  Why: a fifth of the form error is below what a picture or a table shows. */
@@ -36,7 +37,7 @@ export const CHORD_SAG = FORM_ERROR / 5;
 export const PROOF_RESOLUTION = FORM_ERROR / 10;
 
 /** One integer step handed to clipper-lib.
- *  Why: 20 steps per sag (100 of clipping's own) hide the rounding, and parts up to +-474 mm stay in its fast exact range (47,453,132 steps). */
+ *  Why: 20 steps per sag (200 of clipping's own) hide the rounding, and parts up to +-474 mm stay in its fast exact range (47,453,132 steps). */
 export const CLIPPER_STEP = CHORD_SAG / 20;
 
 /** Points closer than this are one point.

@@ -5,7 +5,7 @@
 import { nearestRoll } from './nearest-roll.ts';
 import { pointOn } from './on-piece.ts';
 import type { ArcPiece, Chain, LinePiece, Piece } from './piece.ts';
-import { wholeAngle, type Point } from './point.ts';
+import { distance, wholeAngle, type Point } from './point.ts';
 
 export interface Nearest {
   readonly u: number;
@@ -16,7 +16,7 @@ export interface Nearest {
 export function nearestOnPiece(piece: Piece, point: Point): Nearest {
   const u = nearestParameter(piece, point);
   const foot = pointOn(piece, u);
-  return { u, point: foot, distance: Math.hypot(foot.x - point.x, foot.y - point.y) };
+  return { u, point: foot, distance: distance(foot, point) };
 }
 
 /** The nearest of a chain, and which piece it lies on; the first where several are as near. */

@@ -62,7 +62,9 @@ export function offsetSector(sector: Chain, count: number, distance: number): Ou
   }
   const found = mergeParts(way, raw, false);
   const walls = parts.filter((part) => liesApart(part, way, knives, count));
-  const main = nearestRing(rings, way[0]?.from ?? ORIGIN);
+  const nearest = nearestRing(rings, way[0]?.from ?? ORIGIN);
+  // What stands on the far side of the outline, its rings run the other way along it.
+  const main = ground.growth > 0 === distance > 0 ? nearest : nearest.toReversed();
   const { worst, at } = disagreement({
     corners: cornersBetween(main, knives, far + 1.5 * Math.abs(distance)),
     rings: [main],

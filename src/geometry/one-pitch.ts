@@ -4,7 +4,7 @@ import { linkUntil, samePlace } from './link-offset.ts';
 import { nearestOnPiece } from './nearest-on-piece.ts';
 import { pointOn } from './on-piece.ts';
 import type { LinePiece } from './piece.ts';
-import { ORIGIN, polar, turnPoint, type Point } from './point.ts';
+import { norm, ORIGIN, polar, turnPoint, type Point } from './point.ts';
 import type { SectorGround } from './sector-ground.ts';
 import type { Remaining } from './trim-offset.ts';
 
@@ -34,7 +34,7 @@ export function linkPitch(
   const outward = Math.sign(distance);
   const starts = parts
     .filter((part) => startsPitch(part, rays))
-    .sort((a, b) => outward * (Math.hypot(b.from.x, b.from.y) - Math.hypot(a.from.x, a.from.y)));
+    .sort((a, b) => outward * (norm(b.from) - norm(a.from)));
   for (const first of starts) {
     const image = turnPoint(first.from, (2 * Math.PI) / count);
     const way = linkUntil(parts, first, (end) =>
@@ -66,7 +66,7 @@ export function liesApart(
 
 /** Signed distance to the ray's line, positive on its left. */
 function across(point: Point, { to }: LinePiece): number {
-  return (to.x * point.y - to.y * point.x) / Math.hypot(to.x, to.y);
+  return (to.x * point.y - to.y * point.x) / norm(to);
 }
 
 function touches(point: Point, ray: LinePiece): boolean {

@@ -61,10 +61,14 @@ function arcSteps(radius: number, turn: number, sag: number): number {
 /** Cut at cusps, where a chord across would leave out the tip of the fold. */
 function cycloidParameters(piece: CycloidPiece, sag: number): number[] {
   const bend = Math.abs(1 + piece.fixed / (2 * piece.rolling));
+  const cusps = cycloidCusps(piece);
+  if (cusps.length === 0) {
+    return bend === 0 ? [0, 1] : smoothParameters(piece, sag, bend);
+  }
   const span = piece.to - piece.from;
   const found = [0];
   let from = piece.from;
-  for (const to of [...cycloidCusps(piece), piece.to]) {
+  for (const to of [...cusps, piece.to]) {
     const part = { ...piece, from, to };
     const inside = bend === 0 ? [1] : smoothParameters(part, sag, bend).slice(1);
     found.push(

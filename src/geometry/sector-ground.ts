@@ -8,10 +8,10 @@
  * offset goes inward, round the outside; those edges bulge away from the wedge, never into it. mm.
  */
 import { CLIP_SAG, SAME_POINT } from '../base/tolerances.ts';
-import { mirrorPiece, turnChain, turnPiece } from './change-piece.ts';
-import { pointOn } from './on-piece.ts';
+import { mirrorPiece, partOf, turnChain, turnPiece } from './change-piece.ts';
+import { headingOn, pointOn } from './on-piece.ts';
 import type { Chain, Piece } from './piece.ts';
-import { distance as distanceOf, norm, ORIGIN, polar, type Point } from './point.ts';
+import { addScaled, distance as distanceOf, dot, norm, ORIGIN, polar, unit, type Point } from './point.ts';
 import type { Neighbours } from './raw-offset.ts';
 import { sampleChain, sampleLoop } from './sample-piece.ts';
 
@@ -20,7 +20,7 @@ export interface SectorGround {
   readonly outline: Chain;
   /** What joins the outline at its ends, where a corner there matters. */
   readonly neighbours: Neighbours;
-  /** What to clip, and the distance to grow it by: its size, but for a whole outline that shrinks. */
+  /** What to clip, and the distance to grow it by: negative where air, or a whole outline, shrinks. */
   readonly polygon: readonly Point[];
   readonly growth: number;
   /** Radius of the furthest point, mm. */
@@ -56,20 +56,52 @@ export function sectorGround(sector: Chain, count: number, distance: number): Se
 
 /** Up to the tooth's middle; a piece across it is taken whole, a corner on it is rounded. */
 function halfGround(sector: Chain, count: number, distance: number): SectorGround {
+  const odd = sector.length % 2 === 1;
   const outline = sector.slice(0, Math.ceil(sector.length / 2));
-  const line = sampleChain(outline, CLIP_SAG);
+  const middle = outline.at(-1) as Piece;
+  const half = odd ? [...outline.slice(0, -1), partOf(middle, 0, 0.5)] : outline;
+  const line = sampleChain(half, CLIP_SAG);
   const far = line.reduce((most, point) => Math.max(most, norm(point)), 0);
-  const end = line.at(-1) as Point;
-  const closing =
-    distance > 0
-      ? [ORIGIN]
-      : outside(-Math.PI / count, Math.atan2(end.y, end.x), far + 2 * Math.abs(distance));
   const last = sector.length - 1;
   const before = { piece: turnPiece(sector[last] as Piece, (-2 * Math.PI) / count), index: last };
   const after = { piece: sector[outline.length] as Piece, index: outline.length };
-  const neighbours = sector.length % 2 === 0 ? { before, after } : { before };
-  const polygon = [...line, ...closing];
-  return { kind: 'half', outline, neighbours, far, polygon, growth: Math.abs(distance) };
+  const neighbours = odd ? { before } : { before, after };
+  const polygon = distance > 0 ? airPolygon(half, line, far, distance) : undefined;
+  if (polygon !== undefined) {
+    return { kind: 'half', outline, neighbours, far, polygon, growth: -distance };
+  }
+  const closing = distance > 0 ? [ORIGIN] : outside(-Math.PI / count, 0, far - 2 * distance);
+  return {
+    kind: 'half',
+    outline,
+    neighbours,
+    far,
+    polygon: [...line, ...closing],
+    growth: Math.abs(distance),
+  };
+}
+
+/**
+ * The air outside a half pitch that crosses both rays squarely, to be shrunk: no corner of its far side is rounded then,
+ * which spares most of the clipping. Beyond the rays the outline goes straight on, where it is nearer to nothing between
+ * them than its own end is.
+ */
+function airPolygon(half: Chain, line: readonly Point[], far: number, distance: number): Point[] | undefined {
+  const [start, end] = [line[0] as Point, line.at(-1) as Point];
+  const arriving = headingOn(half[0] as Piece, 0);
+  const leaving = headingOn(half.at(-1) as Piece, 1);
+  if (!squareTo(arriving, start) || !squareTo(leaving, end)) {
+    return undefined;
+  }
+  const before = addScaled(start, arriving, -2 * distance);
+  const after = addScaled(end, leaving, 2 * distance);
+  const height = far - Math.min(norm(start), norm(end)) + 3 * distance;
+  const above = (point: Point, foot: Point): Point => addScaled(point, unit(foot), height);
+  return [before, ...line, after, above(after, end), above(before, start)];
+}
+
+function squareTo(heading: Point, spoke: Point): boolean {
+  return Math.abs(dot(heading, spoke)) <= SAME_POINT;
 }
 
 function turned(sector: Chain, count: number, first: number, end: number): Chain {

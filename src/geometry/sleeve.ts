@@ -6,7 +6,7 @@ import { SAME_POINT } from '../base/tolerances.ts';
 import { cycloidCusps, cycloidPoint } from './cycloid.ts';
 import { endOf, lengthOf, startOf, turnOf } from './on-piece.ts';
 import type { CycloidPiece, Piece } from './piece.ts';
-import { cross, norm, subtract, type Point } from './point.ts';
+import { cross, distance, norm, subtract, type Point } from './point.ts';
 
 export interface Sleeve {
   readonly from: Point;
@@ -49,6 +49,11 @@ function furthestFromChord(piece: CycloidPiece, from: Point, to: Point): number 
 /** Whether the pieces inside may come within SAME_POINT of each other. */
 export function sleevesTouch(a: Sleeve, b: Sleeve): boolean {
   const least = a.width + b.width + SAME_POINT;
+  const across = (distance(a.from, a.to) + distance(b.from, b.to)) / 2;
+  const apart = { x: a.from.x + a.to.x - b.from.x - b.to.x, y: a.from.y + a.to.y - b.from.y - b.to.y };
+  if (norm(apart) / 2 > across + least) {
+    return false;
+  }
   return (
     distanceToSegment(a.from, b.from, b.to) <= least ||
     distanceToSegment(a.to, b.from, b.to) <= least ||
