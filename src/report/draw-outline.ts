@@ -7,7 +7,7 @@ import { drawSizes } from './draw-sizes.ts';
 import type { OutlineShape } from './outline-shape.ts';
 import { scaleWords, type PlateFrame } from './plate.ts';
 import { standAlone } from './stand-alone.ts';
-import { escapeText, plain } from './words.ts';
+import { capitalised, escapeText, plain } from './words.ts';
 
 const LINE = 5;
 
@@ -17,7 +17,7 @@ export function outlineSvg(shape: OutlineShape): string {
   const { teeth, module } = form.proportions;
   const words = (frame: PlateFrame): readonly string[] => [
     title,
-    `${what}, ${scaleWords(frame.scale)}; figures in ${unitInWords(unit)}`,
+    `${capitalised(what)}, ${scaleWords(frame.scale)}; figures in ${unitInWords(unit)}`,
     `${teeth} teeth, module ${plain(module, 5)} mm`,
   ];
   const marks = (frame: PlateFrame): string =>

@@ -84,7 +84,7 @@ function rimSize({ form, unit }: SizesPlate, crossings: Crossings, frame: PlateF
 }
 
 /** From the middle of a window, in turns by arms. Why: a figure on the centre line is not read. */
-const OFF_AXIS = 1.1;
+const OFF_AXIS = 0.65;
 
 /** Middle of the window that lies most to the left. */
 function windowToTheLeft(count: number): number {

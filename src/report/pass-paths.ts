@@ -31,6 +31,7 @@ function lastLaps(motion: Motion): readonly PassPath[] {
   const found = new Map<string, Found>();
   let at: Position | undefined;
   let cutter = 0;
+  let known: Found | undefined;
   for (const step of motion.steps) {
     if (!isMove(step)) {
       cutter = step.kind === 'cutter' ? step.number : cutter;
@@ -38,16 +39,22 @@ function lastLaps(motion: Motion): readonly PassPath[] {
     }
     const from = at ?? step.to;
     at = step.to;
-    if (step.belongs !== undefined) {
-      const { pass, lap = 0 } = step.belongs;
-      const known = found.get(pass);
-      if (known === undefined) {
-        found.set(pass, { name: pass, cutter, lap, from, moves: [step] });
-      } else if (lap > known.lap) {
-        Object.assign(known, { lap, from, moves: [step] });
-      } else if (lap === known.lap) {
-        known.moves.push(step);
-      }
+    if (step.belongs === undefined) {
+      continue;
+    }
+    const { pass, lap = 0 } = step.belongs;
+    if (known?.name !== pass) {
+      known = found.get(pass);
+    }
+    if (known === undefined) {
+      known = { name: pass, cutter, lap, from, moves: [step] };
+      found.set(pass, known);
+    } else if (lap > known.lap) {
+      known.lap = lap;
+      known.from = from;
+      known.moves = [step];
+    } else if (lap === known.lap) {
+      known.moves.push(step);
     }
   }
   return gathered([...found.values()]);

@@ -16,11 +16,11 @@ export function measureSection(facts: SheetFacts): string {
   ].join('\n');
   const example = lengthBoth(0.01, facts.job.length);
   return (
-    '<section>\n<h2>Measure on the first-off</h2>\n<p>Take the burr off first, and measure while the wheel is still held if you can, spindle still. ' +
+    '<section class="whole">\n<h2>Measure on the first-off</h2>\n<p>Take the burr off first, and measure while the wheel is still held if you can, spindle still. ' +
     `The span over teeth tells what the cutter really cuts, whatever the form of the teeth: ${example} more than it should read is half of that left on every flank, and a cutter that cuts ${example} narrower than the job says.</p>\n` +
-    `<div class="whole"><div class="scroll"><table class="measures">\n<thead><tr>${head(['size', 'should read', 'read', 'how'], [1])}</tr></thead>\n` +
+    `<div class="scroll"><table class="measures">\n<thead><tr>${head(['size', 'should read', 'read', 'how'], [1])}</tr></thead>\n` +
     `<tbody>${rows}</tbody>\n</table></div>\n` +
-    '<p class="soft record">Cut on <span class="rule"></span> by <span class="rule"></span> in the plates it runs <span class="rule"></span></p></div>\n</section>'
+    '<p class="soft record">Cut on <span class="rule"></span> by <span class="rule"></span> in the plates it runs <span class="rule"></span></p>\n</section>'
   );
 }
 
