@@ -19,7 +19,7 @@ export interface Settings {
   readonly cutter: Cutter;
   readonly radius: number;
   readonly data: CutData;
-  /** Deepest level of a full slot. */
+  /** Deepest level: of a full slot as its load allows, of a wall what the flute covers. */
   readonly step: number;
   readonly why: readonly string[];
 }
@@ -50,6 +50,10 @@ export function settingsFor(
   const { cutter } = asked;
   const material = materialOf(job);
   const data = cutData({ material, cutter, radialDepth, limits: machine.limits, asked });
+  const settings: Settings = { cutter, radius: cutter.diameter / 2, data, step: cutter.flute, why: data.why };
+  if (radialDepth !== 'slot') {
+    return success(settings);
+  }
   const slot = slotDepth(
     { material, cutter, speed: data.speed, feed: data.feed, runout: cutter.runout },
     {
@@ -71,13 +75,8 @@ export function settingsFor(
       },
     ]);
   }
-  return success({
-    cutter,
-    radius: cutter.diameter / 2,
-    data,
-    step: slot.depth,
-    why: [...data.why, `at most ${slot.depth.toFixed(3)} mm a lap: ${slot.why}`],
-  });
+  const why = `at most ${slot.depth.toFixed(3)} mm a lap: ${slot.why}`;
+  return success({ ...settings, step: slot.depth, why: [...data.why, why] });
 }
 
 /** The same depth for every level, none deeper than `step`. */

@@ -197,7 +197,7 @@ function finishingLevels({
   rough,
   allowance,
 }: Teeth): Outcome<{ readonly count: number; readonly why: string }> {
-  const { job, heights, form } = task;
+  const { job, machine, heights, form } = task;
   const depth = heights.top - heights.bottom;
   const roughed = asCut(form, 2 * (rough.radius + allowance));
   const finished = asCut(form, fine.cutter.diameter);
@@ -206,10 +206,14 @@ function finishingLevels({
   }
   const thick = roughed.value.leftAtRoot - finished.value.leftAtRoot;
   if (thick > THICK * fine.cutter.diameter) {
-    const count = levelsFor(depth, Math.min(fine.step, fine.cutter.flute));
+    const slot = settingsFor(job, machine, 'finishing', 'slot', 0);
+    if (!slot.ok) {
+      return slot;
+    }
+    const count = levelsFor(depth, Math.min(slot.value.step, fine.cutter.flute));
     return success({
       count,
-      why: `in ${count} levels, as the roughing cutter leaves ${thick.toFixed(3)} mm at the root: ${fine.why.at(-1) ?? ''}`,
+      why: `in ${count} levels, as the roughing cutter leaves ${thick.toFixed(3)} mm at the root: ${slot.value.why.at(-1) ?? ''}`,
     });
   }
   if (fine.cutter.flute >= depth) {

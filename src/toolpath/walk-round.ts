@@ -45,16 +45,16 @@ export function walkRound({ job, heights }: CutTask, passes: readonly PassCuts[]
   return { steps };
 }
 
-/** Of all block ends, wide enough for arcs too: an arc's circle counts whole where it is small, as corners and leads are. */
+/** Of all ends of moves: arcs between them bulge by less than the cutter is wide. */
 function boxOf(passes: readonly PassCuts[]): Box {
   let [x0, x1, y0, y1] = [Infinity, -Infinity, Infinity, -Infinity];
   for (const { runs } of passes) {
     for (const { steps } of runs) {
       for (const { to } of steps) {
-        x0 = Math.min(x0, to.x);
-        x1 = Math.max(x1, to.x);
-        y0 = Math.min(y0, to.y);
-        y1 = Math.max(y1, to.y);
+        x0 = to.x < x0 ? to.x : x0;
+        x1 = to.x > x1 ? to.x : x1;
+        y0 = to.y < y0 ? to.y : y0;
+        y1 = to.y > y1 ? to.y : y1;
       }
     }
   }
