@@ -1,5 +1,5 @@
 /** The job file's `blank`: the piece, how it is held, and what stands beside it. Split off `job-schema.ts`. */
-import { z } from 'zod';
+import * as z from 'zod';
 import type { LengthUnit } from '../base/units.ts';
 import { MATERIAL_NAMES } from '../cutting/materials.ts';
 import {

@@ -2,7 +2,7 @@
  * What zod found wrong, as plain issues with a path: unions opened to the branch that was meant, unknown keys with the
  * nearest known one, or the group they belong to. Split off `job-schema.ts`.
  */
-import type { z } from 'zod';
+import type * as z from 'zod';
 import { nearestWord } from '../base/nearest-word.ts';
 import type { Problem } from '../base/problem.ts';
 import { showPath } from '../base/show-problem.ts';

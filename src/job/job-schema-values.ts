@@ -4,7 +4,7 @@
  * mm/min. Descriptions and examples go into the schema, for the starter job and for editors.
  * Split off `job-schema.ts`; with it the only file of job/ that knows zod.
  */
-import { z } from 'zod';
+import * as z from 'zod';
 import { millimetresPer, type LengthUnit } from '../base/units.ts';
 import { LENGTH_UNITS, readNumber, showValue, tidy } from './read-number.ts';
 import { figure, showRange } from './show-length.ts';

@@ -1,5 +1,5 @@
 /** The job file's `wheel`: proportions, mate and crossings. Split off `job-schema.ts`. */
-import { z } from 'zod';
+import * as z from 'zod';
 import type { LengthUnit } from '../base/units.ts';
 import { choiceOf, countOf, lengthOf, numberOf, type Range } from './job-schema-values.ts';
 

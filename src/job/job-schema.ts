@@ -4,7 +4,7 @@
  * Built for a unit of length, because plain numbers are in the job's own. Out: mm, mm/min, 1/min; modules where it says so.
  * With `job-schema-values.ts` the only file of job/ that knows zod.
  */
-import { z } from 'zod';
+import * as z from 'zod';
 import type { LengthUnit } from '../base/units.ts';
 import type { PassKind } from './job.ts';
 import { blankSchema } from './job-schema-blank.ts';

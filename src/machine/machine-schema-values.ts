@@ -2,7 +2,7 @@
  * The kinds of value a machine file holds, each with the phrase that says what would be right. That phrase is all a person
  * gets to read of a wrong value, so it names the range and the unit. Part of `machine-schema.ts`; knows zod with it.
  */
-import { z } from 'zod';
+import * as z from 'zod';
 
 export const GWORD = /^G\d{1,3}(\.\d)?$/;
 export const WORDS = /^[A-Z]\d+(\.\d+)?( [A-Z]\d+(\.\d+)?)*$/;

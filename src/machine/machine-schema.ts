@@ -6,7 +6,7 @@
  * The defaults are the most cautious values that the controller of NISTIR 6556 reads. Only this file
  * and the one with its values know zod.
  */
-import { z } from 'zod';
+import * as z from 'zod';
 import {
   GWORD,
   MODE,
