@@ -35,6 +35,8 @@ const DOORMEN: Readonly<Record<string, RegExp>> = {
   'node:crypto': /^cli\/[a-z-]+\.ts$/,
   'node:path': /^cli\/[a-z-]+\.ts$/,
   'node:url': /^cli\/[a-z-]+\.ts$/,
+  'node:module': /^cli\/load-part\.ts$/,
+  'node:vm': /^cli\/load-part\.ts$/,
 };
 
 const files = readdirSync(SRC, { recursive: true, encoding: 'utf8' })

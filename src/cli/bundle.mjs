@@ -1,45 +1,110 @@
 /**
- * Makes dist/: the command as one bundle with a chunk for each command, and the notices its libraries' licences ask for.
- * Run by `npm run build`.
+ * Makes dist/: the command, a part for each of its commands with its byte code beside it, and the notices its libraries'
+ * licences ask for. Run by `npm run build`.
+ *
+ * dist/ is CommonJS: that starts sooner than an ES module, and takes byte code.
  */
 import { build } from 'esbuild';
+import { spawnSync } from 'node:child_process';
+import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
-const root = resolve(dirname(fileURLToPath(import.meta.url)), '../..');
+const here = dirname(fileURLToPath(import.meta.url));
+const root = resolve(here, '../..');
 const dist = join(root, 'dist');
 const { version } = JSON.parse(readFileSync(join(root, 'package.json'), 'utf8'));
+/** As many letters as `load-part.ts` looks at. */
+const PART_MARK = 16;
+
+const parts = readdirSync(here)
+  .filter((file) => /^run-[a-z]+\.ts$/.test(file))
+  .map((file) => file.slice(0, -'.ts'.length));
+
 rmSync(dist, { recursive: true, force: true });
 mkdirSync(dist, { recursive: true });
+writeFileSync(join(dist, 'package.json'), '{ "type": "commonjs" }\n');
 
-const result = await build({
+const shared = {
   absWorkingDir: root,
-  entryPoints: { main: 'src/cli/main.ts' },
   outdir: 'dist',
   bundle: true,
-  splitting: true,
-  format: 'esm',
+  format: 'cjs',
   platform: 'node',
   target: 'node20',
   minify: true,
+  charset: 'ascii',
   legalComments: 'none',
   metafile: true,
   logLevel: 'warning',
-  define: { OGIVE_VERSION: JSON.stringify(version) },
-  banner: {
-    js: "import { createRequire as ogiveRequire } from 'node:module'; const require = ogiveRequire(import.meta.url);",
-  },
-});
+  define: { OGIVE_VERSION: JSON.stringify(version), 'import.meta.url': 'ogiveUrl' },
+  banner: { js: "const ogiveUrl=require('node:url').pathToFileURL(__filename).href;" },
+};
 
+/** In the command, a part is loaded by `load-part.ts` where it is asked for. */
+const partsByLoader = {
+  name: 'parts',
+  setup({ onResolve, onLoad }) {
+    onResolve({ filter: /^\.\/run-[a-z]+\.ts$/ }, ({ path, kind }) =>
+      kind === 'dynamic-import'
+        ? { path: path.slice('./'.length, -'.ts'.length), namespace: 'part' }
+        : undefined,
+    );
+    onLoad({ filter: /./, namespace: 'part' }, ({ path }) => ({
+      contents: `module.exports = require('./load-part.ts').loadPart(${JSON.stringify(path)});`,
+      resolveDir: here,
+    }));
+  },
+};
+
+const command = await build({
+  ...shared,
+  entryPoints: { main: 'src/cli/main.ts' },
+  plugins: [partsByLoader],
+});
+const commands = await build({
+  ...shared,
+  entryPoints: Object.fromEntries(parts.map((part) => [part, `src/cli/${part}.ts`])),
+});
+for (const part of parts) {
+  markPart(join(dist, `${part}.js`));
+}
+const inputs = [command, commands].flatMap(({ metafile }) => Object.keys(metafile.inputs));
 const packages = [
   ...new Set(
-    Object.keys(result.metafile.inputs)
+    inputs
       .map((input) => /node_modules\/((?:@[^/]+\/)?[^/]+)\//.exec(input)?.[1])
       .filter((name) => name !== undefined),
   ),
 ].sort();
 writeFileSync(join(dist, 'notices.txt'), packages.map(noticeOf).join('\n'));
+for (const part of parts) {
+  keepCode(part);
+}
+
+/** A part's text ends with the sum of all before, so that code of another build is not taken for its own. */
+function markPart(file) {
+  // esbuild writes ASCII but for patterns, where an escape means the same.
+  const text = readFileSync(file, 'utf8').replace(
+    /[^\0-\x7f]/g,
+    (letter) => `\\u${letter.charCodeAt(0).toString(16).padStart(4, '0')}`,
+  );
+  const mark = createHash('sha256').update(text).digest('hex').slice(0, PART_MARK);
+  writeFileSync(file, `${text}//${mark}`);
+}
+
+/** The part's functions as byte code, taken after it has worked once: a function is compiled when it is first called. */
+function keepCode(part) {
+  const { status, stderr } = spawnSync(
+    process.execPath,
+    [join(here, 'keep-code.mjs'), join(dist, `${part}.js`), root],
+    { encoding: 'utf8', stdio: ['ignore', 'ignore', 'pipe'] },
+  );
+  if (status !== 0) {
+    throw new Error(`no byte code for ${part}:\n${stderr}`);
+  }
+}
 
 /** Name, version and licence text of a bundled library; our own copy where its package has none. */
 function noticeOf(name) {

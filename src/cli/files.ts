@@ -147,6 +147,15 @@ export function readOwn(url: URL): string | undefined {
   }
 }
 
+/** The same as bytes, by its path. */
+export function readOwnBytes(path: string): Buffer | undefined {
+  try {
+    return readFileSync(path);
+  } catch {
+    return undefined;
+  }
+}
+
 export function namesInOwn(url: URL): readonly string[] {
   try {
     return readdirSync(url).toSorted();

@@ -4,9 +4,11 @@ import { runProgram } from './program.ts';
 /** Exit code for a fault of ours (sysexits.h, EX_SOFTWARE). */
 const OUR_FAULT = 70;
 
-try {
-  process.exitCode = await runProgram(process.argv.slice(2));
-} catch (error) {
+runProgram(process.argv.slice(2)).then((exit) => {
+  process.exitCode = exit;
+}, ourFault);
+
+function ourFault(error: unknown): void {
   const text = error instanceof Error ? (error.stack ?? error.message) : String(error);
   process.stderr.write(
     `This is a fault of Ogive, not of your job; nothing was written.\n${text}\nPlease keep the job file and this text for whoever mends it.\n`,

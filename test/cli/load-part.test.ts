@@ -1,0 +1,65 @@
+/** The byte code beside each part of the built command is a help and nothing more: damaged, foreign or gone, the command does the same. */
+import { spawnSync } from 'node:child_process';
+import { cpSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join, resolve } from 'node:path';
+import { afterAll, describe, expect, it } from 'vitest';
+
+const DIST = resolve(import.meta.dirname, '../../dist');
+const folder = mkdtempSync(join(tmpdir(), 'ogive-part-'));
+const code = join(folder, 'dist/run-new.js.code');
+
+cpSync(DIST, join(folder, 'dist'), { recursive: true });
+afterAll(() => rmSync(folder, { recursive: true, force: true }));
+
+function runNew(flags: readonly string[] = []): { readonly status: number | null; readonly text: string } {
+  const { status, stdout, stderr } = spawnSync(
+    process.execPath,
+    [...flags, join(folder, 'dist/main.js'), 'new'],
+    { encoding: 'utf8' },
+  );
+  return { status, text: stdout + stderr };
+}
+
+/** Whether V8 takes the kept code: asked of V8 itself, of the text and code as they lie in dist. */
+function isTaken(): boolean {
+  const program = `const { readFileSync } = require('node:fs'); const { Script } = require('node:vm');
+    const file = ${JSON.stringify(join(folder, 'dist/run-new.js'))};
+    const cachedData = readFileSync(file + '.code').subarray(16);
+    const script = new Script(require('node:module').wrap(readFileSync(file, 'latin1')), { cachedData });
+    process.exitCode = script.cachedDataRejected ? 1 : 0;`;
+  return spawnSync(process.execPath, ['-e', program]).status === 0;
+}
+
+describe('byte code of a part', () => {
+  const whole = readFileSync(code);
+  const expected = runNew();
+  const damages: readonly (readonly [string, Buffer])[] = [
+    ['cut short', whole.subarray(0, 400)],
+    ['empty', Buffer.alloc(0)],
+    ['of another build', Buffer.concat([Buffer.from('0123456789abcdef'), whole.subarray(16)])],
+    [
+      'with a digit turned',
+      Buffer.from(whole.map((byte, i) => (i === whole.length >> 1 ? byte ^ 0xff : byte))),
+    ],
+    ['of another version of V8', Buffer.from(whole.map((byte, i) => (i === 20 ? byte ^ 0xff : byte)))],
+  ];
+
+  it('is taken as the build left it', () => {
+    expect(isTaken()).toBe(true);
+    expect(expected).toMatchObject({ status: 0 });
+    expect(expected.text).toContain('teeth:');
+  });
+  it.each(damages)('%s: the same text comes out', (_, bytes) => {
+    writeFileSync(code, bytes);
+    expect(runNew()).toEqual(expected);
+  });
+  it('made under other flags: the same text comes out', () => {
+    writeFileSync(code, whole);
+    expect(runNew(['--no-opt', '--stack-size=500'])).toEqual(expected);
+  });
+  it('gone: the same text comes out', () => {
+    rmSync(code);
+    expect(runNew()).toEqual(expected);
+  });
+});
