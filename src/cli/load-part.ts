@@ -2,13 +2,15 @@
  * Loads one command's part of the bundle (`dist/run-cut.js` and the like) with the byte code the build kept beside it:
  * each command is a process of its own, and reading and compiling its text takes longer than a small job does.
  *
- * The code is a help, never needed: V8 itself refuses what another version or other flags have made, what belongs to
- * another build is seen by the mark both carry, and then the text is compiled as any script is. Only in the bundle.
+ * The code is a help, never needed: V8 itself refuses what another version or other flags have made, what is damaged or
+ * of another build does not add up with the text (V8 would take it and run wild), and then the text is compiled as any
+ * script is. Only in the bundle.
  */
 import { createRequire, Module } from 'node:module';
 import { dirname } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { Script } from 'node:vm';
+import { crc32 } from 'node:zlib';
 import { readOwnBytes } from './files.ts';
 
 type PartFunction = (
@@ -19,8 +21,8 @@ type PartFunction = (
   folder: string,
 ) => void;
 
-/** Letters of the mark: the last of a part's text, the first of its code. */
-export const PART_MARK = 16;
+/** Bytes at the head of the code: the CRC-32 of text and code, as `keep-code.mjs` puts it there. */
+const SUM_BYTES = 4;
 
 const HERE = import.meta.url;
 
@@ -43,8 +45,11 @@ export function loadPart(name: string): object {
   return module.exports;
 }
 
+/** Node before 20.15 has no crc32: then there is no code either. */
 function codeOf(text: Buffer, kept: Buffer | undefined): Buffer | undefined {
-  return kept?.subarray(0, PART_MARK).equals(text.subarray(-PART_MARK)) === true
-    ? kept.subarray(PART_MARK)
-    : undefined;
+  if (kept === undefined || kept.length < SUM_BYTES || typeof crc32 !== 'function') {
+    return undefined;
+  }
+  const code = kept.subarray(SUM_BYTES);
+  return crc32(code, crc32(text)) === kept.readUInt32LE(0) ? code : undefined;
 }
