@@ -36,6 +36,7 @@ const DOORMEN: Readonly<Record<string, RegExp>> = {
   'node:path': /^cli\/[a-z-]+\.ts$/,
   'node:url': /^cli\/[a-z-]+\.ts$/,
   'node:module': /^cli\/load-part\.ts$/,
+  'node:zlib': /^cli\/load-part\.ts$/,
   'node:vm': /^cli\/load-part\.ts$/,
 };
 

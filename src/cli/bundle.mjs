@@ -6,7 +6,6 @@
  */
 import { build } from 'esbuild';
 import { spawnSync } from 'node:child_process';
-import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -15,8 +14,6 @@ const here = dirname(fileURLToPath(import.meta.url));
 const root = resolve(here, '../..');
 const dist = join(root, 'dist');
 const { version } = JSON.parse(readFileSync(join(root, 'package.json'), 'utf8'));
-/** As many letters as `load-part.ts` looks at. */
-const PART_MARK = 16;
 
 const parts = readdirSync(here)
   .filter((file) => /^run-[a-z]+\.ts$/.test(file))
@@ -68,7 +65,7 @@ const commands = await build({
   entryPoints: Object.fromEntries(parts.map((part) => [part, `src/cli/${part}.ts`])),
 });
 for (const part of parts) {
-  markPart(join(dist, `${part}.js`));
+  escapeLetters(join(dist, `${part}.js`));
 }
 const inputs = [command, commands].flatMap(({ metafile }) => Object.keys(metafile.inputs));
 const packages = [
@@ -83,15 +80,13 @@ for (const part of parts) {
   keepCode(part);
 }
 
-/** A part's text ends with the sum of all before, so that code of another build is not taken for its own. */
-function markPart(file) {
-  // esbuild writes ASCII but for patterns, where an escape means the same.
+/** Pure ASCII, which needs no decoding. esbuild writes it but for patterns, where an escape means the same. */
+function escapeLetters(file) {
   const text = readFileSync(file, 'utf8').replace(
     /[^\0-\x7f]/g,
     (letter) => `\\u${letter.charCodeAt(0).toString(16).padStart(4, '0')}`,
   );
-  const mark = createHash('sha256').update(text).digest('hex').slice(0, PART_MARK);
-  writeFileSync(file, `${text}//${mark}`);
+  writeFileSync(file, text);
 }
 
 /** The part's functions as byte code, taken after it has worked once: a function is compiled when it is first called. */

@@ -7,9 +7,9 @@ import { createRequire, Module } from 'node:module';
 import { tmpdir } from 'node:os';
 import { basename, dirname, join } from 'node:path';
 import { Script } from 'node:vm';
+import { crc32 } from 'node:zlib';
 
 const [file, root] = process.argv.slice(2);
-const PART_MARK = 16;
 const sample = join(root, 'samples/third-wheel.yaml');
 const folder = mkdtempSync(join(tmpdir(), 'ogive-code-'));
 
@@ -45,7 +45,7 @@ const module = { exports: {} };
 script.runInThisContext()(module.exports, createRequire(file), module, file, dirname(file));
 WORK[basename(file, '.js')]?.(module.exports);
 rmSync(folder, { recursive: true, force: true });
-writeFileSync(
-  `${file}.code`,
-  Buffer.concat([Buffer.from(text.slice(-PART_MARK)), script.createCachedData()]),
-);
+const code = script.createCachedData();
+const sum = Buffer.alloc(4);
+sum.writeUInt32LE(crc32(code, crc32(text)));
+writeFileSync(`${file}.code`, Buffer.concat([sum, code]));

@@ -25,10 +25,14 @@ function runNew(flags: readonly string[] = []): { readonly status: number | null
 function isTaken(): boolean {
   const program = `const { readFileSync } = require('node:fs'); const { Script } = require('node:vm');
     const file = ${JSON.stringify(join(folder, 'dist/run-new.js'))};
-    const cachedData = readFileSync(file + '.code').subarray(16);
+    const cachedData = readFileSync(file + '.code').subarray(4);
     const script = new Script(require('node:module').wrap(readFileSync(file, 'latin1')), { cachedData });
     process.exitCode = script.cachedDataRejected ? 1 : 0;`;
   return spawnSync(process.execPath, ['-e', program]).status === 0;
+}
+
+function turned(bytes: Buffer, at: number): Buffer {
+  return Buffer.from(bytes.map((byte, i) => (i === at ? byte ^ 0xff : byte)));
 }
 
 describe('byte code of a part', () => {
@@ -37,12 +41,10 @@ describe('byte code of a part', () => {
   const damages: readonly (readonly [string, Buffer])[] = [
     ['cut short', whole.subarray(0, 400)],
     ['empty', Buffer.alloc(0)],
-    ['of another build', Buffer.concat([Buffer.from('0123456789abcdef'), whole.subarray(16)])],
-    [
-      'with a digit turned',
-      Buffer.from(whole.map((byte, i) => (i === whole.length >> 1 ? byte ^ 0xff : byte))),
-    ],
-    ['of another version of V8', Buffer.from(whole.map((byte, i) => (i === 20 ? byte ^ 0xff : byte)))],
+    ['of another build', readFileSync(join(DIST, 'run-draw.js.code'))],
+    ...[4, 9, 20, whole.length >> 2, whole.length >> 1, whole.length - 1].map(
+      (at) => [`with byte ${at} turned`, turned(whole, at)] as const,
+    ),
   ];
 
   it('is taken as the build left it', () => {
