@@ -91,8 +91,9 @@ interface Cutting {
 
 function takeBite(cutting: Cutting, { paths, solids }: Evidence, i: number, worst: Bite): void {
   const solid = solids[i]!;
-  // A fall is taken at its upper end: what is left is never said to be less than it is.
-  const z = Math.max(solid.z0, solid.z1);
+  // A fall is taken at its upper end, so that what is left is never said to be less than it is; straight down it all goes.
+  const straight = solid.x0 === solid.x1 && solid.y0 === solid.y1 && solid.move.turn === undefined;
+  const z = straight ? Math.min(solid.z0, solid.z1) : Math.max(solid.z0, solid.z1);
   const twin = paths.twin[i]!;
   const was = cutting.height[twin]!;
   let bite: number;
@@ -102,7 +103,13 @@ function takeBite(cutting: Cutting, { paths, solids }: Evidence, i: number, wors
     cutting.height[twin] = z;
   } else {
     bite = was - z;
-    waitFor(cutting, twin, Math.min(z, was));
+    if (bite / (2 * solid.radius) > worst.share) {
+      drawWaiting(cutting, paths);
+      bite = cutRaster(cutting.raster, paths, i, z);
+      cutting.height[twin] = z;
+    } else {
+      waitFor(cutting, twin, Math.min(z, was));
+    }
   }
   const share = bite / (2 * solid.radius);
   if (share > worst.share) {

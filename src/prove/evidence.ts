@@ -6,7 +6,7 @@ import { millimetresPer } from '../base/units.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
 import { extentsOf, type Extents } from './extents.ts';
-import { pathsBelow, solidMoves, type PathSet, type SolidMove } from './metal-paths.ts';
+import { solidMoves, wholePaths, type PathSet, type SolidMove } from './metal-paths.ts';
 import type { ProofInput } from './proof.ts';
 import type { Trace } from './trace-program.ts';
 import { wheelFigures, type WheelFigures } from './wheel-figures.ts';
@@ -39,11 +39,11 @@ export function gatherEvidence(input: ProofInput, traces: readonly Trace[]): Evi
   const { units, words } = input.machine;
   const lastDigit = millimetresPer(units) * 10 ** -words.numbers.lengthDecimals[units];
   const read = traces.every((trace) => trace.complete);
+  const paths = wholePaths(solids);
   const figures =
     input.target === undefined || !read
       ? undefined
-      : wheelFigures(input.target, input.setup, solids, lastDigit);
-  const paths = pathsBelow(solids, Infinity, Infinity);
+      : wheelFigures(input.target, input.setup, solids, paths, lastDigit);
   return {
     input,
     traces,

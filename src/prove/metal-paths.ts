@@ -68,28 +68,77 @@ export function solidMoves(
   return solids;
 }
 
-/** The parts of the moves at or below `upper`, cut in two where they cross `lower`. */
-export function pathsBelow(solids: readonly SolidMove[], lower: number, upper: number): PathSet {
+/** Whole moves, one path each, in their order; those that lie where an earlier one lies share its figures. */
+export function wholePaths(solids: readonly SolidMove[]): PathSet {
+  const twin = twinsOf(solids);
+  const set = emptySet(solids, new Uint8Array(solids.length).fill(1), twin);
+  for (let i = 0; i < set.count; i++) {
+    if (twin[i] === i) {
+      place(set, i, solids[i]!, 0, 1);
+    } else {
+      copyPath(set, twin[i]!, set, i);
+    }
+  }
+  return set;
+}
+
+/** The parts of the moves at or below `upper`, cut in two where they cross `lower`; each place once, at its first move. */
+export function pathsBelow(
+  solids: readonly SolidMove[],
+  lower: number,
+  upper: number,
+  whole: PathSet = wholePaths(solids),
+): PathSet {
   const parts: SolidMove[] = [];
   const deep: number[] = [];
-  for (const solid of solids) {
-    if (Math.min(solid.z0, solid.z1) <= lower) {
-      parts.push(solid);
-      deep.push(1);
+  const from: number[] = [];
+  // Which places are there already: 1 above the lower height, 2 below it.
+  const seen = new Uint8Array(solids.length);
+  const take = (i: number, isDeep: 0 | 1, cut: boolean): void => {
+    const mark = isDeep + 1;
+    const twin = whole.twin[i]!;
+    if (cut || (seen[twin]! & mark) === 0) {
+      seen[twin]! |= cut ? 0 : mark;
+      parts.push(solids[i]!);
+      deep.push(isDeep);
+      from.push(cut ? -1 : twin);
     }
-    if (Math.max(solid.z0, solid.z1) > lower && Math.min(solid.z0, solid.z1) <= upper && upper > lower) {
-      parts.push(solid);
-      deep.push(0);
+  };
+  for (let i = 0; i < solids.length; i++) {
+    const { z0, z1 } = solids[i]!;
+    const least = Math.min(z0, z1);
+    const most = Math.max(z0, z1);
+    if (least <= lower) {
+      take(i, 1, most > lower);
+    }
+    if (most > lower && least <= upper && upper > lower) {
+      take(i, 0, least < lower || most > upper);
     }
   }
-  const set = emptySet(parts, Uint8Array.from(deep));
-  for (let i = 0; i < set.count; i++) {
-    const { z0, z1 } = parts[i]!;
-    const low = deep[i] === 1 ? -Infinity : lower;
-    const high = deep[i] === 1 ? lower : upper;
-    place(set, i, parts[i]!, shareWithin(z0, z1, low, high), 1 - shareWithin(z1, z0, low, high));
+  const set = emptySet(
+    parts,
+    Uint8Array.from(deep),
+    Int32Array.from(parts, (_, k) => k),
+  );
+  for (let k = 0; k < set.count; k++) {
+    if (from[k]! >= 0) {
+      copyPath(whole, from[k]!, set, k);
+    } else {
+      const { z0, z1 } = parts[k]!;
+      const low = deep[k] === 1 ? -Infinity : lower;
+      const high = deep[k] === 1 ? lower : upper;
+      place(set, k, parts[k]!, shareWithin(z0, z1, low, high), 1 - shareWithin(z1, z0, low, high));
+    }
   }
-  return { ...set, twin: twinsOf(set) };
+  return set;
+}
+
+const FIELDS = ['x0', 'y0', 'x1', 'y1', 'cx', 'cy', 'arc', 'turn', 'mx', 'my', 'bound', 'radius'] as const;
+
+function copyPath(source: PathSet, i: number, target: PathSet, k: number): void {
+  for (const field of FIELDS) {
+    target[field][k] = source[field][i]!;
+  }
 }
 
 /** Share of the way from z0 to z1 after which the height is between low and high. */
@@ -100,9 +149,7 @@ function shareWithin(z0: number, z1: number, low: number, high: number): number 
   return z0 === z1 ? 0 : ((z0 < low ? low : high) - z0) / (z1 - z0);
 }
 
-type UntwinnedSet = Omit<PathSet, 'twin'>;
-
-function emptySet(solids: readonly SolidMove[], deep: Uint8Array): UntwinnedSet {
+function emptySet(solids: readonly SolidMove[], deep: Uint8Array, twin: Int32Array): PathSet {
   const field = (): Float64Array => new Float64Array(solids.length);
   return {
     count: solids.length,
@@ -119,12 +166,13 @@ function emptySet(solids: readonly SolidMove[], deep: Uint8Array): UntwinnedSet 
     bound: field(),
     radius: field(),
     deep,
+    twin,
     solids,
   };
 }
 
 /** The part of the move between u and v, as path i. */
-function place(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: number): void {
+function place(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
   set.radius[i] = solid.radius;
   if (solid.move.turn === undefined) {
     placeLine(set, i, solid, u, v);
@@ -133,7 +181,7 @@ function place(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: num
   }
 }
 
-function placeLine(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: number): void {
+function placeLine(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
   const { x0, y0, x1, y1 } = solid;
   const dx = x1 - x0;
   const dy = y1 - y0;
@@ -146,7 +194,7 @@ function placeLine(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v:
   set.bound[i] = (Math.sqrt(dx * dx + dy * dy) * (v - u)) / 2;
 }
 
-function placeArc(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: number): void {
+function placeArc(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
   const { x0, y0, x1, y1 } = solid;
   const turn = solid.move.turn ?? 0;
   const { x: cx, y: cy } = solid.move.centre ?? { x: 0, y: 0 };
@@ -176,7 +224,7 @@ function placeArc(set: UntwinnedSet, i: number, solid: SolidMove, u: number, v: 
 
 /** The spoke (x, y) of path i's arc, turned: where its end lies. */
 function turned(
-  set: UntwinnedSet,
+  set: PathSet,
   i: number,
   angle: number,
   x: number,

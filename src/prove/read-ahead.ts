@@ -1,6 +1,7 @@
 /**
  * Lines are split, and read a second time, some dozens ahead of being run: the second reader is quicker over many lines at
- * once, and no line is run before both have agreed about it.
+ * once, and no line is run before both have agreed about it. Both readers look at a line's text alone, so a text on which
+ * they have agreed once (the laps of a wheel repeat themselves) is agreed on for good.
  */
 import { emptyLineWords, type LineWords } from './line-words.ts';
 import { secondReading, secondReadingAgrees } from './second-reader.ts';
@@ -18,10 +19,18 @@ export interface Ahead {
   /** Which of the lines the readers differ about first, and how; -1 for none. */
   differs: number;
   how: string;
+  /** Texts of plain lines on which both readers have agreed. */
+  readonly agreed: Set<string>;
 }
 
 export function emptyAhead(): Ahead {
-  return { lines: Array.from({ length: AHEAD }, emptyLineWords), count: 0, differs: -1, how: '' };
+  return {
+    lines: Array.from({ length: AHEAD }, emptyLineWords),
+    count: 0,
+    differs: -1,
+    how: '',
+    agreed: new Set(),
+  };
 }
 
 /** Reads the next lines from `at`; answers where the ones after them begin. */
@@ -63,29 +72,37 @@ function afterLineEnd(text: string, end: number): number {
   return text.charCodeAt(end) === RETURN && text.charCodeAt(end + 1) === LINE_FEED ? end + 2 : end + 1;
 }
 
-/** Whole runs of plain lines at once; line by line where one of them must be found, or is not plain. */
+/** Plain lines at once, as far as they are new; line by line where one of them must be found, or is not plain. */
 function readAgain(text: string, ahead: Ahead): void {
-  let from = 0;
-  while (from < ahead.count && ahead.differs < 0) {
-    let to = from;
-    while (to < ahead.count && isPlain(ahead.lines[to])) {
-      to += 1;
+  const texts: string[] = [];
+  const lines: LineWords[] = [];
+  for (let i = 0; i < ahead.count; i++) {
+    const words = ahead.lines[i]!;
+    if (isPlain(words)) {
+      const line = text.slice(words.start, words.end);
+      if (!ahead.agreed.has(line)) {
+        texts.push(line);
+        lines.push(words);
+      }
     }
-    if (to === from || !secondReadingAgrees(text, ahead.lines, from, to)) {
-      to = Math.max(to, from + 1);
-      readSingly(text, ahead, from, to);
+  }
+  if (texts.length > 0 && !secondReadingAgrees(texts, lines)) {
+    readSingly(text, ahead, 0, ahead.count);
+    return;
+  }
+  for (const line of texts) {
+    ahead.agreed.add(line);
+  }
+  for (let i = 0; i < ahead.count && ahead.differs < 0; i++) {
+    if (!isPlain(ahead.lines[i]!)) {
+      readSingly(text, ahead, i, i + 1);
     }
-    from = to;
   }
 }
 
-function isPlain(words: LineWords | undefined): boolean {
+function isPlain(words: LineWords): boolean {
   return (
-    words !== undefined &&
-    words.fault === undefined &&
-    words.percent === undefined &&
-    !words.skipped &&
-    words.comments.length === 0
+    words.fault === undefined && words.percent === undefined && !words.skipped && words.comments.length === 0
   );
 }
 

@@ -39,26 +39,17 @@ export function secondReading(line: string, words: LineWords): string | undefine
 }
 
 /**
- * Whether the second reader finds, in lines that follow each other, the very words that ours found, in order. Every line
- * begins with a letter, so none can lend a digit to another; only lines without comments, / and % are read so.
+ * Whether the second reader finds, in these lines put one after the other, the very words that ours found, in order. Every
+ * line begins with a letter, so none can lend a digit to another; only lines without comments, / and % are read so.
  */
-export function secondReadingAgrees(
-  text: string,
-  lines: readonly LineWords[],
-  from: number,
-  to: number,
-): boolean {
-  const second = parseLine(text.slice(lines[from]?.start, lines[to - 1]?.end), COMPACT);
+export function secondReadingAgrees(texts: readonly string[], lines: readonly LineWords[]): boolean {
+  const second = parseLine(texts.join('\n'), COMPACT);
   if (!ONLY_WORDS.test(second.line) || second.cmds !== undefined || second.err !== undefined) {
     return false;
   }
   let at = 0;
   let numbered = false;
-  for (let i = from; i < to; i++) {
-    const words = lines[i];
-    if (words === undefined) {
-      return false;
-    }
+  for (const words of lines) {
     if (words.number >= 0) {
       // Of several line numbers the library keeps the first apart and hands out the others as words.
       if (numbered ? !isWord(second.words[at++], LETTER_N, words.number) : second.ln !== words.number) {

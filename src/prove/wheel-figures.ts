@@ -33,6 +33,7 @@ export function wheelFigures(
   target: Target,
   setup: Setup,
   solids: readonly SolidMove[],
+  whole: PathSet,
   lastDigit: number,
 ): WheelFigures {
   const { form, crossings, finishingDiameter } = target;
@@ -44,7 +45,7 @@ export function wheelFigures(
   const allowed = FORM_ERROR + lastDigit;
   const cutterRadius = finishingDiameter / 2;
   const farthest = (Math.PI * form.pitchRadius) / form.proportions.teeth;
-  const set = pathsBelow(solids, heights.bottom + heights.slack, heights.top - heights.slack);
+  const set = pathsBelow(solids, heights.bottom + heights.slack, heights.top - heights.slack, whole);
   const wall = (made: Wall): WallFigures => wallFigures(set, made, farthest);
   const isBored = setup.bored >= target.bore;
   return {

@@ -127,7 +127,7 @@ describe('lines read ahead', () => {
     const ahead = emptyAhead();
     expect(readAhead(text, 0, 'brackets', ahead)).toBeGreaterThanOrEqual(text.length);
     expect([ahead.count, ahead.differs]).toEqual([6, -1]);
-    expect(secondReadingAgrees(text, ahead.lines, 0, 6)).toBe(true);
+    expect(secondReadingAgrees(text.split('\n'), ahead.lines.slice(0, 6))).toBe(true);
   });
 
   it.each([
@@ -147,7 +147,21 @@ describe('lines read ahead', () => {
     if (last !== undefined) {
       last.end += other.length - text.length;
     }
-    expect(secondReadingAgrees(other, ahead.lines, 0, 6)).toBe(false);
+    expect(secondReadingAgrees(other.split('\n'), ahead.lines.slice(0, 6))).toBe(false);
+  });
+
+  it('name each line on which the readers differ, also where its text was met before', () => {
+    const ahead = emptyAhead();
+    const good = 'G1 X1\n'.repeat(40);
+    const bad = `G1 X${'9'.repeat(400)}\n`;
+    let at = 0;
+    let lines = 0;
+    while (ahead.differs < 0) {
+      lines += at === 0 ? 0 : ahead.count;
+      at = readAhead(good + bad + bad, at, 'brackets', ahead);
+    }
+    expect(lines + ahead.differs).toBe(40);
+    expect([...ahead.agreed]).toEqual(['G1 X1']);
   });
 
   it('say which line the readers differ about: a number beyond all numbers', () => {
