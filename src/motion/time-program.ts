@@ -1,9 +1,10 @@
 /**
- * How long a program takes, and each of its passes: the moves by `timeMoves`, spin-up and dwells as they are written.
+ * How long a program takes, and each of its passes: the moves by the time model, spin-up and dwells as they are written.
  * Stops for hands and cutter changes count nothing: nobody knows how long a person takes. s.
  */
 import { isMove, type Motion, type Position } from './motion.ts';
-import { timeMoves, type MotionLimits, type TimedMove } from './move-time.ts';
+import { openPlan, planMove, type MotionLimits } from './move-plan.ts';
+import { timePlan } from './move-time.ts';
 
 export interface ProgramTime {
   readonly seconds: number;
@@ -12,36 +13,38 @@ export interface ProgramTime {
 }
 
 export function timeProgram(motion: Motion, limits: MotionLimits, spinUpSeconds: number): ProgramTime {
-  const moves: TimedMove[] = [];
-  const passes: string[] = [];
+  const plan = openPlan(motion.steps.length, limits);
+  /** Where a pass begins: the number of its first move. */
+  const runs: { readonly pass: string; readonly first: number }[] = [];
   let waiting = 0;
   let stands = true;
+  let pass: string | undefined;
   let at: Position | undefined;
   for (const step of motion.steps) {
-    if (isMove(step)) {
-      const from = at ?? step.to;
-      moves.push({
-        kind: step.kind,
-        from,
-        to: step.to,
-        feed: step.kind === 'rapid' ? 0 : step.feed,
-        standsBefore: stands,
-        ...(step.kind === 'arc' ? { centre: step.centre, turn: step.turn } : {}),
-      });
-      passes.push(step.belongs?.pass ?? '');
-      at = step.to;
-      stands = false;
-    } else {
+    if (!isMove(step)) {
       waiting +=
         step.kind === 'dwell' ? step.seconds : step.kind === 'spindle' && step.speed > 0 ? spinUpSeconds : 0;
       stands = stands || step.kind !== 'note';
+      continue;
     }
+    const now = step.belongs?.pass ?? '';
+    if (now !== pass) {
+      runs.push({ pass: now, first: plan.count });
+      pass = now;
+    }
+    planMove(plan, at ?? step.to, step, stands);
+    at = step.to;
+    stands = false;
   }
-  const times = timeMoves(moves, limits);
+  const { seconds, total } = timePlan(plan);
   const byPass = new Map<string, number>();
-  for (const [i, seconds] of times.seconds.entries()) {
-    const pass = passes[i] ?? '';
-    byPass.set(pass, (byPass.get(pass) ?? 0) + seconds);
+  for (const [k, run] of runs.entries()) {
+    let sum = byPass.get(run.pass) ?? 0;
+    const end = runs[k + 1]?.first ?? plan.count;
+    for (let i = run.first; i < end; i++) {
+      sum += seconds[i] as number;
+    }
+    byPass.set(run.pass, sum);
   }
-  return { seconds: times.total + waiting, byPass };
+  return { seconds: total + waiting, byPass };
 }

@@ -9,7 +9,7 @@ import { FORM_ERROR, SAME_POINT } from '../../src/base/tolerances.ts';
 import { nearestOnChain } from '../../src/geometry/nearest-on-piece.ts';
 import { turnPoint } from '../../src/geometry/point.ts';
 import { isMove, type MoveStep, type Position } from '../../src/motion/motion.ts';
-import { shapeOf } from '../../src/motion/move-shape.ts';
+import { shapeOf } from '../support/move-shape.ts';
 import type { SheetFacts } from '../../src/report/facts.ts';
 import { cutText, MACHINES, onMachine, sampleText, SAMPLES } from '../support/cut-text.ts';
 

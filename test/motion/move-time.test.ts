@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { timeMoves, trapezoid, type MotionLimits, type TimedMove } from '../../src/motion/move-time.ts';
+import type { MotionLimits } from '../../src/motion/move-plan.ts';
+import { timeMoves, trapezoid, type TimedMove } from '../../src/motion/move-time.ts';
 
 const limits = (a: number, corner = 0.01): MotionLimits => ({
   acceleration: { x: a, y: a, z: a },

@@ -1,5 +1,5 @@
-/** Length, headings and bending radius of a move in space, as the time model needs them. mm; unit vectors in XYZ. */
-import type { Position } from './motion.ts';
+/** Length, headings and bending radius of a move in space, for the tests and figures: written apart from the time model. mm; unit vectors in XYZ. */
+import type { Position } from '../../src/motion/motion.ts';
 
 export interface Vector {
   readonly x: number;
