@@ -111,7 +111,7 @@ function codesOf(findings: readonly Finding[], severity: Finding['severity']): r
   ].toSorted();
 }
 
-describe('an undamaged program', () => {
+describe('an undamaged program', { timeout: 60_000 }, () => {
   const pairs = [...new Set(RECIPES.map(([, { job, machine }]) => `${job} on ${machine}`))].toSorted();
   it.each(pairs)('%s raises nothing', (pair) => {
     const [job = '', machine = ''] = pair.split(' on ');
@@ -123,7 +123,7 @@ describe('an undamaged program', () => {
   });
 });
 
-describe.each(RECIPES)('%s', (_, recipe) => {
+describe.each(RECIPES)('%s', { timeout: 60_000 }, (_, recipe) => {
   const { code, severity, also, what } = recipe;
   it(`${severity === 'error' ? 'is refused' : 'is warned of'} by ${code} alone: ${what}`, () => {
     const { input, file, ...done } = damaged(recipe);
@@ -161,7 +161,7 @@ it('has a damaged program for every code that a text can cause', () => {
   expect(missing).toEqual([]);
 });
 
-it('has a damaged program for every check', () => {
+it('has a damaged program for every check', { timeout: 60_000 }, () => {
   const said = new Map(CHECKS.map(({ name, run }) => [name, run]));
   for (const [, recipe] of RECIPES) {
     const { input } = damaged(recipe);

@@ -34,7 +34,7 @@ function programsOf({ files }: CutResult): CutResult['files'] {
   return files.filter(({ runnable }) => runnable);
 }
 
-describe.each(JOBS)('%s, whole', (job) => {
+describe.each(JOBS)('%s, whole', { timeout: 60_000 }, (job) => {
   const text = readFileSync(join(FOLDER, `${job}.yaml`), 'utf8');
   it.each(MACHINES)('as %s reads it', async (machine) => {
     const result = cutText(job, onMachine(text, machine));
@@ -46,7 +46,7 @@ describe.each(JOBS)('%s, whole', (job) => {
   });
 });
 
-describe('the samples', () => {
+describe('the samples', { timeout: 60_000 }, () => {
   it.each(SAMPLES)('%s: head, one tooth, end and sum of each program', async (sample) => {
     const text = sampleText(sample);
     const result = cutText(sample, text);

@@ -103,7 +103,7 @@ function studyLoop({ motions, form, job }: SheetFacts): Pick<Study, 'strange' | 
 
 const PAIRS = SAMPLES.flatMap((sample) => MACHINES.map((machine) => [sample, machine] as const));
 
-describe.each(PAIRS)('%s on %s', (sample, machine) => {
+describe.each(PAIRS)('%s on %s', { timeout: 60_000 }, (sample, machine) => {
   const reason = REFUSED[`${sample} ${machine}`];
   if (reason !== undefined) {
     it(`is refused: ${reason}`, () => {
