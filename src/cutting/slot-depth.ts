@@ -30,51 +30,67 @@ const MOST_STEPS = 24;
 export function slotDepth(cut: SlotCut, rules: SlotDepthRules): SlotDepth {
   const { cutter, material } = cut;
   const share = Math.min(QUARTER, material.slotShare);
-  const limits: { by: SlotDepth['limitedBy']; depth: number; why: string }[] = [
-    {
-      by: 'diameter',
-      depth: share * cutter.diameter,
-      why: `${share} of the cutter's diameter, so that chips find their way out`,
-    },
-    {
-      by: 'margin',
-      depth: deepest(cutter.diameter, (depth) => rules.margin / slotLoad(cut, depth).margin),
-      why: `a breakage margin of ${rules.margin} with a sharp cutter (forces are known to about 40 %)`,
-    },
-    {
-      by: 'bending',
-      depth: deepest(
-        cutter.diameter,
-        (depth) => slotLoad(cut, depth).bending / (BENDING_SHARE * rules.allowance),
-      ),
-      why: `bending of at most ${BENDING_SHARE} of the ${rules.allowance} mm allowance`,
-    },
-  ];
-  if (rules.asked !== undefined) {
-    limits.unshift({ by: 'asked', depth: rules.asked, why: 'the job asks for it' });
+  const most = share * cutter.diameter;
+  const asked = rules.asked !== undefined && rules.asked < most;
+  const cap = asked ? rules.asked : most;
+  const over = (load: SlotLoad): number => Math.max(overMargin(load, rules), overBending(load, rules));
+  const { depth, load } = deepest(cut, cap, over);
+  if (depth === cap) {
+    const why = asked
+      ? 'the job asks for it'
+      : `${share} of the cutter's diameter, so that chips find their way out`;
+    return { depth, limitedBy: asked ? 'asked' : 'diameter', load, why };
   }
-  const least = limits.reduce((a, b) => (b.depth < a.depth ? b : a));
-  return { depth: least.depth, limitedBy: least.by, load: slotLoad(cut, least.depth), why: least.why };
+  return overMargin(load, rules) >= overBending(load, rules)
+    ? {
+        depth,
+        limitedBy: 'margin',
+        load,
+        why: `a breakage margin of ${rules.margin} with a sharp cutter (forces are known to about 40 %)`,
+      }
+    : {
+        depth,
+        limitedBy: 'bending',
+        load,
+        why: `bending of at most ${BENDING_SHARE} of the ${rules.allowance} mm allowance`,
+      };
+}
+
+/** Above 1 the cutter is too near to breaking. */
+function overMargin(load: SlotLoad, { margin }: SlotDepthRules): number {
+  return margin / load.margin;
+}
+
+/** Above 1 it bends too much. */
+function overBending(load: SlotLoad, { allowance }: SlotDepthRules): number {
+  return load.bending / (BENDING_SHARE * allowance);
 }
 
 /**
- * The greatest depth up to one diameter at which `measure` stays at or below 1. It grows with the depth, nearly in
- * proportion, so a few steps of false position (Illinois rule) find it; the answer is always a depth that was measured good.
+ * The greatest depth up to `cap` at which `measure` stays at or below 1, and the load there. It grows with the depth, nearly
+ * in proportion, so a few steps of false position (Illinois rule) find it; the answer is always a depth that was measured good.
  */
-function deepest(diameter: number, measure: (depth: number) => number): number {
-  let good = 0;
-  let low = -1;
-  let bad = diameter;
-  let high = measure(diameter) - 1;
+function deepest(
+  cut: SlotCut,
+  cap: number,
+  measure: (load: SlotLoad) => number,
+): { readonly depth: number; readonly load: SlotLoad } {
+  const whole = slotLoad(cut, cap);
+  let high = measure(whole) - 1;
   if (high <= 0) {
-    return diameter;
+    return { depth: cap, load: whole };
   }
-  for (let i = 0; i < MOST_STEPS && bad - good > DEPTH_STEP * diameter; i++) {
-    const crossing = good + ((bad - good) * -low) / (high - low);
-    const depth = Math.min(Math.max(crossing, good + (bad - good) / 64), bad - (bad - good) / 64);
-    const over = measure(depth) - 1;
+  let good = { depth: 0, load: slotLoad(cut, 0) };
+  let low = -1;
+  let bad = cap;
+  for (let i = 0; i < MOST_STEPS && bad - good.depth > DEPTH_STEP * cut.cutter.diameter; i++) {
+    const gap = bad - good.depth;
+    const crossing = good.depth + (gap * -low) / (high - low);
+    const depth = Math.min(Math.max(crossing, good.depth + gap / 64), bad - gap / 64);
+    const load = slotLoad(cut, depth);
+    const over = measure(load) - 1;
     if (over <= 0) {
-      good = depth;
+      good = { depth, load };
       low = over === 0 ? -Number.EPSILON : over;
       high /= 2;
     } else {

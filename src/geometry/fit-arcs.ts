@@ -51,7 +51,7 @@ const MOST_ARCS = 400;
 function fitSpiral(spiral: CycloidPiece, tolerance: number): ArcPiece[] {
   const measure = spiralMeasure(spiral);
   const longest = Math.cbrt(LEVEL * tolerance);
-  const expected = Math.ceil(measure(1) / longest + ENDS_SHORT);
+  const expected = Math.ceil(measure.whole / longest + ENDS_SHORT);
   for (let count = Math.max(2, expected - 1); count <= MOST_ARCS; count++) {
     const best = balanced(spiral, measure, count, tolerance);
     if (best.worst <= tolerance || count === MOST_ARCS) {
@@ -78,15 +78,9 @@ const HOPELESS = 1.8;
 const STEPS = [0.16, 0.08, 0.04] as const;
 
 /** Shares changed one by one as long as the worst error falls, until the tolerance is kept. */
-function balanced(
-  spiral: CycloidPiece,
-  measure: (u: number) => number,
-  count: number,
-  tolerance: number,
-): Fit {
-  const whole = measure(1);
+function balanced(spiral: CycloidPiece, measure: Measure, count: number, tolerance: number): Fit {
   let shares = Array.from({ length: count }, (_, i) => (i === 0 || i === count - 1 ? Math.SQRT1_2 : 1));
-  let best = closed(spiral, jointsOf(shares, measure, whole));
+  let best = closed(spiral, jointsOf(shares, measure));
   if (count === 2 || best.worst > HOPELESS * tolerance) {
     return best;
   }
@@ -94,7 +88,7 @@ function balanced(
     for (let i = 0; i < 2 * count && best.worst > tolerance; i++) {
       const factor = i % 2 === 0 ? 1 + step : 1 / (1 + step);
       const tried = shares.map((share, at) => (at === i >> 1 ? share * factor : share));
-      const fit = closed(spiral, jointsOf(tried, measure, whole));
+      const fit = closed(spiral, jointsOf(tried, measure));
       if (fit.worst < best.worst) {
         best = fit;
         shares = tried;
@@ -105,12 +99,18 @@ function balanced(
 }
 
 /** Parameters of the joints, ends included, where the measure reaches the running total of the shares. */
-function jointsOf(shares: readonly number[], measure: (u: number) => number, whole: number): number[] {
+function jointsOf(shares: readonly number[], { table, whole }: Measure): number[] {
   const total = shares.reduce((sum, share) => sum + share, 0);
   let sum = 0;
+  let cell = 0;
   const inner = shares.slice(0, -1).map((share) => {
     sum += share;
-    return findRoot((u) => measure(u) - (whole * sum) / total, 0, 1);
+    const wanted = (whole * sum) / total;
+    while (cell + 1 < CELLS && (table[cell + 1] as number) < wanted) {
+      cell++;
+    }
+    const from = table[cell] as number;
+    return (cell + (wanted - from) / ((table[cell + 1] as number) - from)) / CELLS;
   });
   return [0, ...inner, 1];
 }
@@ -122,7 +122,7 @@ function closed(spiral: CycloidPiece, joints: readonly number[]): Fit {
   const miss = (amount: number): number => headingMiss(spiral, shifted(amount));
   const room = 0.49 * Math.min(...joints.slice(1).map((u, i) => u - (joints[i] as number)));
   const reach = bracket(miss, room);
-  const ends = shifted(reach === undefined ? 0 : findRoot(miss, -reach, reach));
+  const ends = shifted(reach === undefined ? 0 : findRoot(miss, -reach, reach, SAME_POINT));
   const arcs = arcsThrough(spiral, ends);
   const errors = arcs.map((arc, i) => arcDeviation(arc, spiral, ends[i] as number, ends[i + 1] as number));
   return { arcs, errors, worst: reach === undefined ? Infinity : Math.max(...errors) };
@@ -161,8 +161,14 @@ function arcsThrough(spiral: CycloidPiece, joints: readonly number[]): ArcPiece[
 /** Cells of the table by which the measure is summed (midpoint rule; only the first guess of the joints hangs on it). */
 const CELLS = 32;
 
-/** The integral of |cos(R t / 2r)|^(1/3) |2 (R + r) k (1 + k)|^(1/3) dt from the start to u, by a table. */
-function spiralMeasure(spiral: CycloidPiece): (u: number) => number {
+/** The measure from the start to each of CELLS + 1 evenly spaced parameters. */
+interface Measure {
+  readonly table: readonly number[];
+  readonly whole: number;
+}
+
+/** The integral of |cos(R t / 2r)|^(1/3) |2 (R + r) k (1 + k)|^(1/3) dt. */
+function spiralMeasure(spiral: CycloidPiece): Measure {
   const { fixed: R, rolling: r } = spiral;
   const k = R / (2 * r);
   const step = Math.abs(spiral.to - spiral.from) / CELLS;
@@ -172,9 +178,5 @@ function spiralMeasure(spiral: CycloidPiece): (u: number) => number {
     const t = spiral.from + ((i + 0.5) / CELLS) * (spiral.to - spiral.from);
     table.push((table[i] as number) + scale * Math.cbrt(Math.abs(Math.cos(k * t))) * step);
   }
-  return (u) => {
-    const cell = Math.min(Math.floor(u * CELLS), CELLS - 1);
-    const from = table[cell] as number;
-    return from + (u * CELLS - cell) * ((table[cell + 1] as number) - from);
-  };
+  return { table, whole: table[CELLS] as number };
 }

@@ -6,8 +6,8 @@
  */
 import { Bug } from '../base/bug.ts';
 
-/** x in [a, b] with f(x) = 0, to the last bits of x; f(a) and f(b) must not share a sign. */
-export function findRoot(f: (x: number) => number, a: number, b: number): number {
+/** x in [a, b] with |f(x)| <= `enough`, or to the last bits of x; f(a) and f(b) must not share a sign. */
+export function findRoot(f: (x: number) => number, a: number, b: number, enough = 0): number {
   let low = a;
   let high = b;
   let fLow = f(low);
@@ -26,7 +26,7 @@ export function findRoot(f: (x: number) => number, a: number, b: number): number
         ? (low + high) / 2
         : guess;
     const value = f(x);
-    if (value === 0 || x === low || x === high) {
+    if (Math.abs(value) <= enough || x === low || x === high) {
       return x;
     }
     if (value > 0 === fHigh > 0) {

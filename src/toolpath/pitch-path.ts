@@ -4,13 +4,13 @@
  * In  : the form's exact outline, the distance kept from it, the way round, whether the machine has arcs.
  * Out : pieces in travel order from the tip corner of tooth 1 at which loops are joined to the same corner of the next
  *       tooth, wheel frame, mm. Turned round by whole pitches they make the loop.
- * The pieces of the exact offset stay what they are; arcs stand for the addendum's offset within FIT_ERROR.
+ * The pieces of the exact offset stay what they are; arcs stand for the addendum's offset within the tolerance asked for.
  */
 import { Bug } from '../base/bug.ts';
 import { success, type Outcome } from '../base/problem.ts';
-import { FIT_ERROR, FIT_ERROR_MOST, SAME_POINT } from '../base/tolerances.ts';
+import { SAME_POINT } from '../base/tolerances.ts';
 import { reversePiece, turnPiece } from '../geometry/change-piece.ts';
-import { fitArcs } from '../geometry/fit-arcs.ts';
+import { fitAlike, type ArcFit } from '../geometry/fit-alike.ts';
 import { fitLines } from '../geometry/fit-lines.ts';
 import { offsetSector } from '../geometry/offset-chain.ts';
 import type { ArcPiece, LinePiece, Piece } from '../geometry/piece.ts';
@@ -48,8 +48,10 @@ export interface PathRequest {
   readonly distance: number;
   readonly way: 1 | -1;
   readonly made: 'arcs' | 'lines';
-  /** How far lines may stray from curves, away from the wheel; arcs keep to FIT_ERROR. */
+  /** How far lines may stray from curves, away from the wheel. */
   readonly strays: number;
+  /** How far arcs may lie from curves, to either side: closer, and where that takes too many blocks. */
+  readonly arcError: { readonly close: number; readonly most: number };
   /** 'clear': the lands are not cut (a disc turned to the tip circle). */
   readonly lands: 'cut' | 'clear';
 }
@@ -137,23 +139,26 @@ function fromCorner(
 
 /** Fitted as closely as a usual number of blocks allows. */
 function fewest(rest: readonly OffsetPiece[], request: PathRequest): readonly PathPiece[] {
-  const close = joined(rest.flatMap((part) => plainly(part, request, FIT_ERROR)));
-  return request.made === 'arcs' && close.length > USUAL_BLOCKS
-    ? joined(rest.flatMap((part) => plainly(part, request, FIT_ERROR_MOST)))
-    : close;
+  const { close, most } = request.arcError;
+  const fitted = (error: number): readonly PathPiece[] => {
+    const fit = fitAlike(error);
+    return joined(rest.flatMap((part) => plainly(part, request, fit)));
+  };
+  const closely = fitted(close);
+  return request.made === 'arcs' && most > close && closely.length > USUAL_BLOCKS ? fitted(most) : closely;
 }
 
 /** Blocks a pitch, besides the corner and the split before the root. Judgement: 16 a pitch is what slow controllers keep up with. */
 const USUAL_BLOCKS = 14;
 
 /** Lines and arcs only, or lines only. */
-function plainly(part: OffsetPiece, request: PathRequest, fit: number): readonly PathPiece[] {
+function plainly(part: OffsetPiece, request: PathRequest, fit: ArcFit): readonly PathPiece[] {
   const { role, piece, next } = part;
   if (request.made === 'lines') {
     return chords(piece, request).map((line) => ({ role, piece: line, next }));
   }
   return piece.kind === 'cycloid'
-    ? fitArcs(piece, fit).map((arc) => ({ role, piece: arc, next }))
+    ? fit(piece).map((arc) => ({ role, piece: arc, next }))
     : [{ role, piece, next }];
 }
 

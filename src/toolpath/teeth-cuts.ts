@@ -7,7 +7,7 @@
  * lies on the right where the cutter climbs: clockwise round the outside.
  */
 import { failure, success, type Outcome, type Problem } from '../base/problem.ts';
-import { FORM_ERROR } from '../base/tolerances.ts';
+import { FIT_ERROR, FIT_ERROR_MOST, FORM_ERROR } from '../base/tolerances.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import { bayFor, joinCorner, type Bay } from './bay.ts';
 import type { CutTask } from './cut-task.ts';
@@ -41,7 +41,7 @@ interface Teeth {
 const MUCH_PLAY = 0.03;
 /** Metal at the root, over the finishing cutter's diameter, above which it is no finishing any more. Judgement. */
 const THICK = 0.25;
-/** How far lines of the roughing path may stray outward, over the allowance: few blocks, and hardly more to finish. Judgement. */
+/** How far the roughing path may stray outward, over the allowance: few blocks, and hardly more to finish. Judgement. */
 const ROUGH_STRAYS = 0.1;
 /** A disc at most this much over the tip circle is turned to it. */
 const TURNED = 0.05;
@@ -87,12 +87,15 @@ function pathsOf(
   const { shape } = job.setup;
   const turned = shape.kind === 'disc' && shape.diameter <= 2 * form.outsideRadius + TURNED;
   const made = task.machine.words.arcs.planes === 'none' ? 'lines' : 'arcs';
+  const strays = Math.max(FORM_ERROR, ROUGH_STRAYS * allowance);
   const roughPath = pitchPath({
     form,
-    distance: roughRadius + allowance,
+    // Arcs lie to either side of the curve: so far out that none takes more of the allowance than a close fit would.
+    distance: roughRadius + allowance + (made === 'arcs' ? strays - FIT_ERROR / 2 : 0),
     way,
     made,
-    strays: Math.max(FORM_ERROR, ROUGH_STRAYS * allowance),
+    strays,
+    arcError: { close: strays, most: strays },
     lands: 'cut',
   });
   if (!roughPath.ok) {
@@ -107,6 +110,7 @@ function pathsOf(
       way,
       made,
       strays: FORM_ERROR,
+      arcError: { close: FIT_ERROR, most: FIT_ERROR_MOST },
       lands: turned ? 'clear' : 'cut',
     });
     if (!path.ok) {
