@@ -50,51 +50,36 @@ const NEVER = '()[]{};%/\\"\'#';
 /** First words that some controllers act on even inside brackets. */
 const ACTIVE_FIRST = /^(MSG|PRINT|DEBUG|LOG|PROBE)/i;
 
-const POINT = '.'.charCodeAt(0);
-const MINUS = '-'.charCodeAt(0);
-
 export type Cleaner = (text: string) => string;
 
 export function commentCleaner(file: FileWords): Cleaner {
-  const allowed = allowedLetters(file);
-  const has = (letter: string): boolean => allowed[letter.charCodeAt(0)] === 1;
+  const letters = allowedLetters(file);
+  const has = (letter: string): boolean => letters.includes(letter);
+  const notAllowed = noneOf(letters);
   // Points and signs stay until words that could be read are broken and figures are said in full.
-  const atFirst = allowed.slice();
-  atFirst[POINT] = 1;
-  atFirst[MINUS] = 1;
+  const notAtFirst = noneOf(`${letters}.-`);
   return (text) => {
     const plain = NEEDS_STAND_IN.test(text) ? standIns(text) : text;
     const cased = file.letterCase === 'upper' ? plain.toUpperCase() : plain;
-    const unread = breakWords(keepAllowed(cased, atFirst), has('='));
-    const kept = keepAllowed(signsInWords(unread, has), allowed);
+    const unread = breakWords(cased.replace(notAtFirst, ' '), has('='));
+    const kept = signsInWords(unread, has).replace(notAllowed, ' ');
     return kept.replace(/ +(?=[ .,:])/g, '').trim();
   };
 }
 
-/** By character code: 1 where a comment may hold it. */
-function allowedLetters(file: FileWords): Uint8Array {
+/** What a comment may hold. */
+function allowedLetters(file: FileWords): string {
   const lower = file.letterCase === 'any' ? 'abcdefghijklmnopqrstuvwxyz' : '';
-  const allowed = new Uint8Array(128);
-  for (const letter of `ABCDEFGHIJKLMNOPQRSTUVWXYZ${lower}0123456789 ${file.commentLetters}`) {
-    const code = letter.charCodeAt(0);
-    if (code >= 32 && code < 127 && !NEVER.includes(letter) && !file.bannedCharacters.includes(letter)) {
-      allowed[code] = 1;
-    }
-  }
-  return allowed;
+  return [...`ABCDEFGHIJKLMNOPQRSTUVWXYZ${lower}0123456789 ${file.commentLetters}`]
+    .filter(
+      (letter) =>
+        letter >= ' ' && letter <= '~' && !NEVER.includes(letter) && !file.bannedCharacters.includes(letter),
+    )
+    .join('');
 }
 
-/** Blanks for all that is not allowed; a text that needs none is returned as it is. */
-function keepAllowed(text: string, allowed: Uint8Array): string {
-  let kept = '';
-  let from = 0;
-  for (let i = 0; i < text.length; i++) {
-    if (allowed[text.charCodeAt(i)] !== 1) {
-      kept += `${text.slice(from, i)} `;
-      from = i + 1;
-    }
-  }
-  return from === 0 ? text : kept + text.slice(from);
+function noneOf(letters: string): RegExp {
+  return new RegExp(`[^${letters.replace(/[\\\]^-]/g, '\\$&')}]`, 'g');
 }
 
 /** Accents dropped, signs spelt; what has no stand-in is left for the filter. */
@@ -129,6 +114,9 @@ function breakWords(text: string, equalsAllowed: boolean): string {
  * in two, its rest could begin with anything.
  */
 export function foldText(text: string, width: number): readonly string[] {
+  if (text.length <= width && !ACTIVE_FIRST.test(text)) {
+    return text === '' ? [] : [text];
+  }
   const lines: string[] = [];
   let line = '';
   for (const word of text.split(' ')) {

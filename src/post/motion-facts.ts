@@ -17,25 +17,29 @@ export interface MotionFacts {
   readonly cutters: readonly number[];
 }
 
+/** Least and greatest so far. */
+interface Box {
+  x0: number;
+  x1: number;
+  y0: number;
+  y1: number;
+  z0: number;
+  z1: number;
+}
+
 export function motionFacts(motion: Motion): MotionFacts {
-  const low = [Infinity, Infinity, Infinity] as [number, number, number];
-  const high = [-Infinity, -Infinity, -Infinity] as [number, number, number];
-  const reach = (x: number, y: number, z: number): void => {
-    low[0] = Math.min(low[0], x);
-    low[1] = Math.min(low[1], y);
-    low[2] = Math.min(low[2], z);
-    high[0] = Math.max(high[0], x);
-    high[1] = Math.max(high[1], y);
-    high[2] = Math.max(high[2], z);
-  };
+  const box: Box = { x0: Infinity, x1: -Infinity, y0: Infinity, y1: -Infinity, z0: Infinity, z1: -Infinity };
   const speeds = new Set<number>();
   const cutters = new Set<number>();
   let from: Position | undefined;
   for (const step of motion.steps) {
     if (isMove(step)) {
-      reach(step.to.x, step.to.y, step.to.z);
+      reach(box, step.to.x, step.to.y);
+      const { z } = step.to;
+      box.z0 = z < box.z0 ? z : box.z0;
+      box.z1 = z > box.z1 ? z : box.z1;
       if (step.kind === 'arc' && from !== undefined) {
-        reachArc(step, from, reach);
+        reachArc(box, step, from);
       }
       from = step.to;
     } else if (step.kind === 'spindle' && step.speed > 0) {
@@ -45,24 +49,40 @@ export function motionFacts(motion: Motion): MotionFacts {
     }
   }
   return {
-    x: [low[0], high[0]],
-    y: [low[1], high[1]],
-    z: [low[2], high[2]],
+    x: [box.x0, box.x1],
+    y: [box.y0, box.y1],
+    z: [box.z0, box.z1],
     speeds: [...speeds].sort((a, b) => a - b),
     cutters: [...cutters],
   };
 }
 
-/** The arc's own extreme points, where it passes an axis of its circle. */
-function reachArc(step: ArcStep, from: Position, reach: (x: number, y: number, z: number) => void): void {
-  const { centre, turn, to } = step;
-  const radius = Math.hypot(from.x - centre.x, from.y - centre.y);
-  const start = Math.atan2(from.y - centre.y, from.x - centre.x);
+function reach(box: Box, x: number, y: number): void {
+  box.x0 = x < box.x0 ? x : box.x0;
+  box.x1 = x > box.x1 ? x : box.x1;
+  box.y0 = y < box.y0 ? y : box.y0;
+  box.y1 = y > box.y1 ? y : box.y1;
+}
+
+/** The arc's own extreme points, where it passes an axis of its circle; of most arcs the whole circle lies in the box already. */
+function reachArc(box: Box, { centre, turn }: ArcStep, from: Position): void {
+  const dx = from.x - centre.x;
+  const dy = from.y - centre.y;
+  const radius = Math.sqrt(dx * dx + dy * dy);
+  if (
+    centre.x - radius >= box.x0 &&
+    centre.x + radius <= box.x1 &&
+    centre.y - radius >= box.y0 &&
+    centre.y + radius <= box.y1
+  ) {
+    return;
+  }
+  const start = Math.atan2(dy, dx);
   for (let quarter = 0; quarter < 4; quarter++) {
     const angle = (quarter * Math.PI) / 2;
     const away = turn > 0 ? wholeAngle(angle - start) : wholeAngle(start - angle);
     if (away <= Math.abs(turn)) {
-      reach(centre.x + radius * Math.cos(angle), centre.y + radius * Math.sin(angle), to.z);
+      reach(box, centre.x + radius * Math.cos(angle), centre.y + radius * Math.sin(angle));
     }
   }
 }

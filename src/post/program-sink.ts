@@ -49,26 +49,25 @@ export function codeWords(sink: Sink, words: readonly string[]): string[] {
 
 /** A block of codes, S, T, H and the like, given as they are in trade and machine file. */
 export function writeCodes(sink: Sink, ...words: readonly string[]): void {
-  writeBlock(sink, codeWords(sink, words));
+  writeBlock(sink, codeWords(sink, words).join(sink.gap));
 }
 
 /**
- * One block of finished words, the last of which (`apart`) may stand in a block of its own before the others where the line
- * would be too long. The words are joined at once: a joined line is flat, a line of sums is a tree of strings that is
- * dragged along until the end.
+ * One block of finished words with their gaps, the last of which (`apart`) may stand in a block of its own before the others
+ * where the line would be too long.
  */
-export function writeBlock(sink: Sink, words: readonly string[], apart = ''): void {
+export function writeBlock(sink: Sink, body: string, apart = ''): void {
   if (apart === '') {
-    putBlock(sink, words.join(sink.gap));
+    putBlock(sink, body);
     return;
   }
-  const whole = [...words, apart].join(sink.gap);
+  const whole = body + sink.gap + apart;
   if (numberText(sink).length + whole.length <= sink.longest) {
     putBlock(sink, whole);
     return;
   }
   putBlock(sink, apart);
-  putBlock(sink, words.join(sink.gap));
+  putBlock(sink, body);
 }
 
 function putBlock(sink: Sink, body: string): void {

@@ -4,6 +4,7 @@
  */
 import type { Machine } from '../machine/machine.ts';
 import type { Belongs, Position } from '../motion/motion.ts';
+import { openArcMemory, type ArcMemory } from './arc-memory.ts';
 import { formatCode, formatCount, type NumberStyle } from './format-word.ts';
 import { programGrid, toGrid, type Grid } from './program-grid.ts';
 import { complain, type Sink } from './program-sink.ts';
@@ -26,6 +27,9 @@ export interface Writer {
   readonly everyAxis: boolean;
   readonly everyMotion: boolean;
   readonly numbers: NumberStyle;
+  readonly arcMemory: ArcMemory;
+  /** Texts of lengths by their count: laps come back to the same places. */
+  readonly lengthTexts: Map<number, string>;
   /** As written, in counts; NaN where not known. */
   x: number;
   y: number;
@@ -66,6 +70,8 @@ export function openWriter(machine: Machine, sink: Sink, highestZ: number): Writ
     everyAxis: machine.words.modes.axisRepeat === 'every-block',
     everyMotion: machine.words.modes.modeRepeat === 'every-block',
     numbers: machine.words.numbers,
+    arcMemory: openArcMemory(),
+    lengthTexts: new Map(),
     x: NaN,
     y: NaN,
     z: NaN,
@@ -98,11 +104,17 @@ export function forgetModes(writer: Writer): void {
 
 /** A length word's value. */
 export function lengthText(writer: Writer, count: number): string {
+  const known = writer.lengthTexts.get(count);
+  if (known !== undefined) {
+    return known;
+  }
   if (count > writer.largestCount || count < -writer.largestCount) {
     complain(writer.sink, 'post.cannot-say', 'value', {
       message: `a length of ${count / writer.grid.perUnit} ${writer.grid.unit} is beyond the largest value the machine file allows (${writer.machine.words.numbers.valueLargest})`,
       hint: 'check the job for a wrong unit, or value-largest in the machine file',
     });
   }
-  return formatCount(count, writer.decimals, writer.numbers);
+  const text = formatCount(count, writer.decimals, writer.numbers);
+  writer.lengthTexts.set(count, text);
+  return text;
 }
