@@ -14,9 +14,17 @@ export const FIT_ERROR_MOST = FORM_ERROR * 0.9;
  *  Why: 0.6 of the form error, so that rounding to a unit of the last digit and the proof's own step stay inside it. */
 export const FIT_ERROR = FORM_ERROR * 0.6;
 
-/** Largest distance between the path and the exact offset where straight lines stand for its curves (a machine without arcs).
- *  Why: all of it is metal left, none is gouge, so it may take nearly the whole form error; blocks grow as one over its root. */
+/** Largest distance outside the exact offset at which straight lines stand for its curves (a machine without arcs).
+ *  Why: it is metal left, so it may take nearly the whole form error; blocks grow as one over its root. */
 export const LINE_FIT_ERROR = FORM_ERROR * 0.95;
+
+/** The same round the corner of a tooth's tip, where the path turns about a point and touches nothing else.
+ *  Why: what is left there is a burr on the corner, smaller than the one every cutter raises; no flank and no land hangs on it. */
+export const LINE_TIP_ERROR = FORM_ERROR * 3;
+
+/** How far inside the exact offset such lines may run.
+ *  Why: half the form error into the flank, shared with what is left on it, saves a block in five; more would be felt first. */
+export const LINE_FIT_INSIDE = FORM_ERROR * 0.5;
 
 /** How far the clipped polygon and the exact offset may disagree.
  *  Why: the two sags of the clipping (its input's and its own arcs') and grid rounding, with a quarter to spare. */

@@ -80,12 +80,13 @@ function enter({ task, from, to, belongs }: Level, ring: Ring): Run {
   if (room >= LEAST_HELIX * r) {
     const at = { x: middle.x + room, y: middle.y };
     const legs = circleLegs(middle, at, way * 2 * Math.PI, slow);
+    const floor = legs.map((leg) => ({ ...leg, feed: arcFeed(settings, room) }));
     const turns = levelsFor(top - to, Math.min(2 * Math.PI * room * ramp, settings.step));
     const down = Array.from({ length: turns }, () => legs).flat();
     const steps = [
       vertical(at, top, settings.data.plunge, belongs),
       ...falling(at, down, top, to, belongs),
-      ...flat([...legs, lineLeg(middle, settings.data.feed), ...round], to, belongs),
+      ...flat([...floor, lineLeg(middle, settings.data.feed), ...round], to, belongs),
     ];
     return { at, fastTo, steps };
   }

@@ -67,6 +67,11 @@ export function crossingsCuts(task: CutTask, crossings: Crossings): Outcome<read
           held
             ? `a skin of ${job.setup.skin} mm holds the slugs: only their outline is cut`
             : 'every window is turned to chips, so that no slug comes loose',
+          ...(held || rings.length === 1
+            ? []
+            : [
+                `${rings.length} rings a level, as wide apart as leaves nothing between them: a level is as shallow as a full slot`,
+              ]),
         ],
       },
       everyWindow(crossings.count, cleared, ''),

@@ -62,15 +62,19 @@ export function finishingRun(task: FinishTask, pass: string, paths: readonly Pit
   return { at: bay.middle, fastTo: heights.approach, steps };
 }
 
-/** The last bit of a flank before the root is a piece of its own, so that it can have its own feed. */
+/**
+ * The last bit of a flank before the root is a piece of its own, so that it can have its own feed; all of the flank where
+ * one more arc or line would be more than a slow controller keeps up with.
+ */
 export function slowBeforeRoot(path: PitchPath, length: number): PitchPath {
+  const full = path.made === 'arcs' && path.rest.length + 1 >= MOST_BLOCKS;
   const rest = path.rest.flatMap((part, i): readonly PathPiece[] => {
     const into = path.rest[i + 1]?.role;
     const whole = lengthOf(part.piece);
     if (part.role !== 'flank' || part.piece.kind !== 'line' || (into !== 'root' && into !== 'flank')) {
       return [part];
     }
-    if (whole <= length) {
+    if (full || whole <= length) {
       return [{ ...part, role: 'root' }];
     }
     const cut = 1 - length / whole;
@@ -81,6 +85,9 @@ export function slowBeforeRoot(path: PitchPath, length: number): PitchPath {
   });
   return { ...path, rest };
 }
+
+/** Blocks a pitch that a slow controller keeps up with. Judgement. */
+const MOST_BLOCKS = 16;
 
 /** Full feed on flanks, addenda and tips; in fillets by their radius; slow at the root, whose corners hold the cutter most. */
 function feedsOf({ settings, radialDepth }: FinishTask): FeedOf {

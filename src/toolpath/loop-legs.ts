@@ -34,7 +34,7 @@ export function loopLegs(
 ): LoopLegs {
   const legs: LoopLeg[] = [];
   const step = (path.way * 2 * Math.PI) / teeth;
-  const corners = path.made === 'lines' ? chords(path.corner, path) : [path.corner];
+  const corners = path.made === 'lines' ? chords(path.corner, 'corner', path) : [path.corner];
   const pitch = [
     ...corners.map((piece) => template({ piece, role: 'corner', next: false }, feedOf('corner', piece))),
     ...path.rest.map((part) => template(part, feedOf(part.role, part.piece))),
@@ -46,7 +46,7 @@ export function loopLegs(
   const feed = feedOf('corner', corner);
   const cut = (from: number, to: number): LoopLeg[] => {
     const arc = partOf(corner, from, to);
-    const pieces = path.made === 'lines' ? chords(arc, path) : [arc];
+    const pieces = path.made === 'lines' ? chords(arc, 'corner', path) : [arc];
     return pieces.map((piece) => ({
       to: endOf(piece),
       centre: piece.kind === 'arc' ? piece.centre : undefined,

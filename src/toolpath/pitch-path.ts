@@ -8,7 +8,7 @@
  */
 import { Bug } from '../base/bug.ts';
 import { success, type Outcome } from '../base/problem.ts';
-import { SAME_POINT } from '../base/tolerances.ts';
+import { LINE_TIP_ERROR, SAME_POINT } from '../base/tolerances.ts';
 import { reversePiece, turnPiece } from '../geometry/change-piece.ts';
 import { fitAlike, type ArcFit } from '../geometry/fit-alike.ts';
 import { fitLines } from '../geometry/fit-lines.ts';
@@ -155,7 +155,7 @@ const USUAL_BLOCKS = 14;
 function plainly(part: OffsetPiece, request: PathRequest, fit: ArcFit): readonly PathPiece[] {
   const { role, piece, next } = part;
   if (request.made === 'lines') {
-    return chords(piece, request).map((line) => ({ role, piece: line, next }));
+    return chords(piece, role, request).map((line) => ({ role, piece: line, next }));
   }
   return piece.kind === 'cycloid'
     ? fit(piece).map((arc) => ({ role, piece: arc, next }))
@@ -165,9 +165,11 @@ function plainly(part: OffsetPiece, request: PathRequest, fit: ArcFit): readonly
 /** Lines in place of a piece, where the machine has no arcs; never on the wheel's side of it. */
 export function chords(
   piece: Piece,
+  role: PathRole,
   { way, strays }: Pick<PathRequest, 'way' | 'strays'>,
 ): readonly LinePiece[] {
-  return piece.kind === 'line' ? [piece] : fitLines([piece], strays, way === 1 ? 'right' : 'left');
+  const most = role === 'corner' ? Math.max(strays, LINE_TIP_ERROR) : strays;
+  return piece.kind === 'line' ? [piece] : fitLines([piece], most, way === 1 ? 'right' : 'left');
 }
 
 /** A line that goes on straight in the next is one line: the tangents at the ends of curves, and flanks before them. */

@@ -7,7 +7,13 @@
  * lies on the right where the cutter climbs: clockwise round the outside.
  */
 import { failure, success, type Outcome, type Problem } from '../base/problem.ts';
-import { FIT_ERROR, FIT_ERROR_MOST, FORM_ERROR } from '../base/tolerances.ts';
+import {
+  FIT_ERROR,
+  FIT_ERROR_MOST,
+  FORM_ERROR,
+  LINE_FIT_ERROR,
+  LINE_FIT_INSIDE,
+} from '../base/tolerances.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import { bayFor, joinCorner, type Bay } from './bay.ts';
 import type { CutTask } from './cut-task.ts';
@@ -106,10 +112,11 @@ function pathsOf(
     const left = allowance * (1 - pass / job.cuts.finishing.passes);
     const path = pitchPath({
       form,
-      distance: fineRadius + left,
+      // Lines stray outward only: from a path a little inside, the error is shared between both sides.
+      distance: fineRadius + left - (made === 'lines' ? LINE_FIT_INSIDE : 0),
       way,
       made,
-      strays: FORM_ERROR,
+      strays: LINE_FIT_INSIDE + LINE_FIT_ERROR,
       arcError: { close: FIT_ERROR, most: FIT_ERROR_MOST },
       lands: turned ? 'clear' : 'cut',
     });

@@ -1,17 +1,21 @@
 /**
- * The rings that clear a window: offsets of its wall inward, each less than a cutter's radius inside the one before.
+ * The rings that clear a window: offsets of its wall inward, from the outermost to where what is left inside is open.
  *
  * In  : the crossings, distance of the outermost ring from the wall, cutter radius, how many rings at most. mm.
- * Out : loops of window 1, outermost first, counter-clockwise, as far in as there is room.
+ * Out : loops of window 1, outermost first, counter-clockwise, evenly spaced.
  * Below the corners' radius a ring is the parallel of every piece. Beyond it, it lies between the circles hub + d and rim - d
- * and the two sides moved in by d; where the sides meet before the hub's circle it has three sides. Where two sides meet at an
- * angle a, rings a step s apart lie s / sin(a / 2) apart along the bisector; the cutter must span that too.
+ * and the two sides moved in by d; where the sides meet before the hub's circle it has three sides.
+ * Maths: two sides meet at 2a. A ring opens the bisector up to r / sin a from its corner, the next ring's corner, s / sin a
+ * inside, opens r before itself: nothing stands between them where s <= r (1 + sin a). The innermost ring opens all that is
+ * left where no place inside lies further than r from it.
  */
 import { mirrorPiece, offsetPiece, reversePiece, turnChain } from '../geometry/change-piece.ts';
+import { headingOn } from '../geometry/on-piece.ts';
 import type { LinePiece, Loop, Piece } from '../geometry/piece.ts';
 import {
   addScaled,
   angleOf,
+  cross,
   dot,
   leftOf,
   ORIGIN,
@@ -28,10 +32,15 @@ export interface Ring {
   readonly distance: number;
 }
 
-/** Step over the cutter's diameter: side milling of brass takes 0.2 to 0.4; a little more, as the depth is a slot's. Judgement. */
-const STEP = 0.45;
-/** Share of the cutter's diameter that ring may lie from ring along a bisector. */
-const BISECTOR = 0.9;
+/**
+ * Greatest step from ring to ring over the cutter's diameter. Levels are as deep as a full slot may be, so that load allows
+ * any; the rest is for a wall that bends away. Judgement.
+ */
+const STEP = 0.8;
+/** Share of what would just leave nothing standing. Judgement: the cutter is worn, and bends. */
+const OVERLAPPING = 0.94;
+/** Halvings by which the middle of a window is found: to a millionth of it. */
+const HALVINGS = 20;
 
 export function windowRings(
   crossings: Crossings,
@@ -40,19 +49,50 @@ export function windowRings(
   most: number,
 ): readonly Ring[] {
   const side = sideOf(crossings);
-  // The side is below the middle line, and its inclination to it is half the angle between the sides.
-  const half = Math.abs(angleOf(subtract(side.to, side.from)));
-  const step = 2 * cutterRadius * Math.min(STEP, BISECTOR * Math.sin(half));
-  const rings: Ring[] = [];
-  while (rings.length < most) {
-    const distance = outermost + rings.length * step;
+  const at = (distance: number): Ring | undefined => {
     const loop = ringAt(crossings, side, distance);
-    if (loop === undefined) {
-      break;
-    }
-    rings.push({ loop, distance });
+    return loop && { loop, distance };
+  };
+  const first = at(outermost);
+  if (first === undefined) {
+    return [];
   }
-  return rings;
+  const innermost = middleDistance(crossings, at, outermost) - OVERLAPPING * cutterRadius;
+  const last = at(Math.max(innermost, outermost)) ?? first;
+  const step = cutterRadius * Math.min(2 * STEP, OVERLAPPING * (1 + Math.sin(sharpestHalf(last.loop))));
+  const more = Math.max(0, Math.ceil((innermost - outermost) / step));
+  const inner = Array.from({ length: Math.min(more, most - 1) }, (_, i) =>
+    at(outermost + ((innermost - outermost) * (i + 1)) / more),
+  );
+  return [first, ...inner.filter((ring) => ring !== undefined)];
+}
+
+/** Half the sharpest angle of a ring: the corners at the rim grow sharper inward, so the innermost ring has it. */
+function sharpestHalf(loop: Loop): number {
+  return loop.reduce((least, piece, i) => {
+    const before = headingOn(loop.at(i - 1) as Piece, 1);
+    const after = headingOn(piece, 0);
+    return Math.min(least, (Math.PI - Math.atan2(cross(before, after), dot(before, after))) / 2);
+  }, Math.PI / 2);
+}
+
+/** How far the place furthest inside lies from the wall. */
+function middleDistance(
+  { hubRadius, windowOuter }: Crossings,
+  at: (distance: number) => Ring | undefined,
+  outermost: number,
+): number {
+  let inside = outermost;
+  let beyond = outermost + windowOuter - hubRadius;
+  for (let i = 0; i < HALVINGS; i++) {
+    const middle = (inside + beyond) / 2;
+    if (at(middle) === undefined) {
+      beyond = middle;
+    } else {
+      inside = middle;
+    }
+  }
+  return beyond;
 }
 
 /** Side of arm 1, turned so that the window's middle line is +X. */
