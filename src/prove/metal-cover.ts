@@ -49,10 +49,11 @@ export function isCleared(
 
 function cutsNear(paths: PathSet, before: number, at: Standing, slack: number): number[] {
   const near: number[] = [];
+  const { mx, my, bound, radius } = paths;
   for (let i = 0; i < before; i++) {
-    const dx = paths.mx[i]! - at.x;
-    const dy = paths.my[i]! - at.y;
-    const reach = paths.bound[i]! + paths.radius[i]! + at.radius;
+    const dx = mx[i]! - at.x;
+    const dy = my[i]! - at.y;
+    const reach = bound[i]! + radius[i]! + at.radius;
     if (dx * dx + dy * dy <= reach * reach) {
       const { z0, z1, move } = paths.solids[i]!;
       if (Math.max(z0, z1) <= at.z + slack && move.kind !== 'rapid') {

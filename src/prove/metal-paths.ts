@@ -133,12 +133,20 @@ export function pathsBelow(
   return set;
 }
 
-const FIELDS = ['x0', 'y0', 'x1', 'y1', 'cx', 'cy', 'arc', 'turn', 'mx', 'my', 'bound', 'radius'] as const;
-
+/** Field by field: this runs for every lap of every tooth. */
 function copyPath(source: PathSet, i: number, target: PathSet, k: number): void {
-  for (const field of FIELDS) {
-    target[field][k] = source[field][i]!;
-  }
+  target.x0[k] = source.x0[i]!;
+  target.y0[k] = source.y0[i]!;
+  target.x1[k] = source.x1[i]!;
+  target.y1[k] = source.y1[i]!;
+  target.cx[k] = source.cx[i]!;
+  target.cy[k] = source.cy[i]!;
+  target.arc[k] = source.arc[i]!;
+  target.turn[k] = source.turn[i]!;
+  target.mx[k] = source.mx[i]!;
+  target.my[k] = source.my[i]!;
+  target.bound[k] = source.bound[i]!;
+  target.radius[k] = source.radius[i]!;
 }
 
 /** Share of the way from z0 to z1 after which the height is between low and high. */
