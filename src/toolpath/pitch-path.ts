@@ -54,6 +54,8 @@ export interface PathRequest {
   readonly arcError: { readonly close: number; readonly most: number };
   /** 'clear': the lands are not cut (a disc turned to the tip circle). */
   readonly lands: 'cut' | 'clear';
+  /** Which corner of tooth 1, in travel order, begins the path; the other one where a path runs against another's way. */
+  readonly begins: 'after-land' | 'before-land';
 }
 
 /** A stretch of the exact offset. */
@@ -78,7 +80,7 @@ export function pitchPath(request: PathRequest): Outcome<PitchPath> {
   }));
   const travelled =
     way === 1 ? named : named.toReversed().map((part) => ({ ...part, piece: reversePiece(part.piece) }));
-  const exact = fromCorner(mergeRoot(travelled), teeth, way);
+  const exact = fromCorner(mergeRoot(travelled), request);
   const { corner, rest } = lands === 'clear' ? overLand(exact, teeth, way) : exact;
   return success({
     distance,
@@ -119,13 +121,14 @@ function mergeRoot(pieces: readonly OffsetPiece[]): readonly OffsetPiece[] {
   return [...pieces.slice(1, -1), { ...last, piece: { ...last.piece, turn: 2 * last.piece.turn } }];
 }
 
-/** Begins at the last tip corner of tooth 1 in travel order; what lies before it is the next tooth's. */
+/** Begins at a tip corner of tooth 1; what lies before it is the next tooth's. */
 function fromCorner(
   pieces: readonly OffsetPiece[],
-  teeth: number,
-  way: 1 | -1,
+  { form, way, begins }: PathRequest,
 ): { readonly corner: ArcPiece; readonly rest: readonly OffsetPiece[] } {
-  const at = pieces.findLastIndex(({ role }) => role === 'corner');
+  const { teeth } = form.proportions;
+  const isCorner = ({ role }: OffsetPiece): boolean => role === 'corner';
+  const at = begins === 'after-land' ? pieces.findLastIndex(isCorner) : pieces.findIndex(isCorner);
   const corner = pieces[at]?.piece;
   if (corner?.kind !== 'arc') {
     throw new Bug('an outline without a tip corner');

@@ -17,9 +17,11 @@ import {
 import { asCut } from '../tooth/as-cut.ts';
 import { bayFor, joinCorner, type Bay } from './bay.ts';
 import type { CutTask } from './cut-task.ts';
+import { directionWhy, roughsClimbing } from './direction.ts';
 import { finishingRun, type FinishTask } from './finishing.ts';
 import { loopLegs } from './loop-legs.ts';
 import { mouthRuns } from './mouths.ts';
+import { downTheMiddle } from './thin-fins.ts';
 import { passCuts, type PassCuts } from './pass-cuts.ts';
 import { pitchPath, type PitchPath } from './pitch-path.ts';
 import { roundHole } from './round-hole.ts';
@@ -41,10 +43,10 @@ interface Teeth {
   readonly finePaths: readonly PitchPath[];
   readonly bay: Bay;
   readonly turned: boolean;
+  /** Whether the roughing loop goes down the middle of every space as well. */
+  readonly fins: boolean;
 }
 
-/** Play of the slides above which climbing draws the work in. Judgement, from general practice. */
-const MUCH_PLAY = 0.03;
 /** Metal at the root, over the finishing cutter's diameter, above which it is no finishing any more. Judgement. */
 const THICK = 0.25;
 /** How far the roughing path may stray outward, over the allowance: few blocks, and hardly more to finish. Judgement. */
@@ -86,10 +88,11 @@ function pathsOf(
   task: CutTask,
   roughRadius: number,
   fineRadius: number,
-): Outcome<Pick<Teeth, 'roughPath' | 'finePaths' | 'turned'>> {
+): Outcome<Pick<Teeth, 'roughPath' | 'finePaths' | 'turned' | 'fins'>> {
   const { job, form } = task;
   const { allowance } = job.cuts.roughing;
   const way = job.cuts.climb ? -1 : 1;
+  const roughWay = roughsClimbing(job) ? -1 : 1;
   const { shape } = job.setup;
   const turned = shape.kind === 'disc' && shape.diameter <= 2 * form.outsideRadius + TURNED;
   const made = task.machine.words.arcs.planes === 'none' ? 'lines' : 'arcs';
@@ -98,15 +101,18 @@ function pathsOf(
     form,
     // Arcs lie to either side of the curve: so far out that none takes more of the allowance than a close fit would.
     distance: roughRadius + allowance + (made === 'arcs' ? strays - FIT_ERROR / 2 : 0),
-    way,
+    way: roughWay,
     made,
     strays,
     arcError: { close: strays, most: strays },
     lands: 'cut',
+    begins: roughWay === way ? 'after-land' : 'before-land',
   });
   if (!roughPath.ok) {
     return roughPath;
   }
+  // The mouths of a disc are opened anyway.
+  const spur = turned ? undefined : downTheMiddle(form, roughPath.value, roughRadius);
   const finePaths: PitchPath[] = [];
   for (let pass = 1; pass <= job.cuts.finishing.passes; pass++) {
     const left = allowance * (1 - pass / job.cuts.finishing.passes);
@@ -119,16 +125,17 @@ function pathsOf(
       strays: LINE_FIT_INSIDE + LINE_FIT_ERROR,
       arcError: { close: FIT_ERROR, most: FIT_ERROR_MOST },
       lands: turned ? 'clear' : 'cut',
+      begins: 'after-land',
     });
     if (!path.ok) {
       return path;
     }
     finePaths.push(path.value);
   }
-  return success({ roughPath: roughPath.value, finePaths, turned });
+  return success({ roughPath: spur ?? roughPath.value, finePaths, turned, fins: spur !== undefined });
 }
 
-function roughingCuts({ task, rough, roughPath, bay, turned, allowance }: Teeth): readonly PassCuts[] {
+function roughingCuts({ task, rough, roughPath, bay, turned, fins, allowance }: Teeth): readonly PassCuts[] {
   const { heights, form, job } = task;
   const depth = heights.top - heights.bottom;
   const join = joinCorner(roughPath, bay, rough.radius, rough.data.feed);
@@ -141,7 +148,12 @@ function roughingCuts({ task, rough, roughPath, bay, turned, allowance }: Teeth)
       ...figures,
       name: 'roughing',
       laps,
-      why: [why, `${allowance} mm left on the flanks`, directionWhy(task, rough)],
+      why: [
+        why,
+        `${allowance} mm left on the flanks`,
+        directionWhy(job),
+        ...(fins ? ['from every root out along the middle and back, so that no thin fin stands there'] : []),
+      ],
     },
     [run],
   );
@@ -158,7 +170,7 @@ function roughingCuts({ task, rough, roughPath, bay, turned, allowance }: Teeth)
     existing: 0,
     settings: rough,
     heights,
-    way: job.cuts.climb ? 1 : -1,
+    way: roughsClimbing(job) ? 1 : -1,
     pass: 'bay',
   } as const;
   const beside = 'a hole in the waste beside tooth 1, in which every loop is entered and left';
@@ -235,17 +247,6 @@ function finishingLevels({
     count,
     why: `in ${count} levels: the flute is ${fine.cutter.flute} mm long, the cut ${depth.toFixed(3)} mm deep`,
   });
-}
-
-function directionWhy({ job }: CutTask, settings: Settings): string {
-  const { play, climb } = job.cuts;
-  const most = Math.max(play.x, play.y);
-  if (!climb) {
-    return 'conventional: counter-clockwise round the wheel';
-  }
-  return most > MUCH_PLAY && settings.cutter.diameter < 1
-    ? `climbing, clockwise round the wheel; with ${most} mm of play the work may be drawn in: climb: no is safer`
-    : 'climbing: clockwise round the wheel';
 }
 
 function tooWideFor({ job }: CutTask): Problem | undefined {
