@@ -25,9 +25,12 @@ function stored(): readonly string[] {
     .toSorted();
 }
 
-async function expectGolden(name: string, text: string): Promise<void> {
-  written.add(name);
-  await expect(text).toMatchFileSnapshot(join(FOLDER, name));
+/** All names are noted first, so that a difference in one file does not make the next look forgotten. */
+async function expectGolden(files: Readonly<Record<string, string>>): Promise<void> {
+  Object.keys(files).forEach((name) => written.add(name));
+  for (const [name, text] of Object.entries(files)) {
+    await expect(text).toMatchFileSnapshot(join(FOLDER, name));
+  }
 }
 
 function programsOf({ files }: CutResult): CutResult['files'] {
@@ -40,9 +43,14 @@ describe.each(JOBS)('%s, whole', { timeout: 60_000 }, (job) => {
     const result = cutText(job, onMachine(text, machine));
     expect(result.problems.filter(({ severity }) => severity === 'error')).toEqual([]);
     expect(result.exit).toBe(0);
-    for (const file of programsOf(result)) {
-      await expectGolden(`${job}.${machine}${file.name.slice(job.length)}`, file.text);
-    }
+    await expectGolden(
+      Object.fromEntries(
+        programsOf(result).map(({ name, text: program }) => [
+          `${job}.${machine}${name.slice(job.length)}`,
+          program,
+        ]),
+      ),
+    );
   });
 });
 
@@ -53,7 +61,7 @@ describe('the samples', { timeout: 60_000 }, () => {
     expect(result.exit).toBe(0);
     const programs = programsOf(result).map((file) => excerpt(file.name, file.text, sumOf(file.text)));
     const verdict = `${sample} on ${machineOf(text)}: ${result.facts?.proof?.verdict ?? 'not proved'}`;
-    await expectGolden(`${sample}.txt`, [verdict, ...programs].join('\n\n'));
+    await expectGolden({ [`${sample}.txt`]: [verdict, ...programs].join('\n\n') });
   });
 
   it(`${SHOWN}: the sums of what \`npm start\` writes, as sha256sum checks them`, async () => {
@@ -63,13 +71,12 @@ describe('the samples', { timeout: 60_000 }, () => {
     const programs = programsOf(cutText(SHOWN, sampleText(SHOWN), about.version));
     expect(programs.length).toBeGreaterThan(1);
     const sums = programs.map(({ name, text }) => `${sumOf(text)}  ${name}\n`);
-    await expectGolden(`${SHOWN}.sha256`, sums.join(''));
+    await expectGolden({ [`${SHOWN}.sha256`]: sums.join('') });
   });
 
   it(`${SHOWN}: the picture of the sheet, and the drawing`, async () => {
     const { files, facts } = cutText(SHOWN, sampleText(SHOWN));
     const sheet = files.find(({ name }) => name === `${SHOWN}.svg`);
-    await expectGolden(`${SHOWN}.svg`, sheet?.text ?? '');
     if (facts === undefined) {
       throw new Error('the sample was not understood');
     }
@@ -84,7 +91,7 @@ describe('the samples', { timeout: 60_000 }, () => {
       unit: job.length,
       what: 'the exact outline',
     });
-    await expectGolden(`${SHOWN}-outline.svg`, drawing);
+    await expectGolden({ [`${SHOWN}.svg`]: sheet?.text ?? '', [`${SHOWN}-outline.svg`]: drawing });
   });
 });
 
