@@ -12,6 +12,7 @@ import type { ArcStep, Motion, MoveStep, Position } from '../motion/motion.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
 import type { Trace } from '../prove/trace-program.ts';
 import { compareEvents } from './compare-events.ts';
+import { arcLength, distanceTo, pointOf, radiusOf, shareOfArc, shareOfLine } from './meant-path.ts';
 
 type Maybe = TracedMove['to'];
 
@@ -42,9 +43,8 @@ const NOISE = 1e-4;
 
 export function compareMotion(motion: Motion, trace: Trace, machine: Machine): readonly string[] {
   const unit = millimetresPer(machine.units) * 10 ** -machine.words.numbers.lengthDecimals[machine.units];
-  const tops = new Set(
-    trace.events.filter(({ kind }) => kind === 'machine-place').map(({ before }) => before - 1),
-  );
+  const lines = new Set(trace.events.filter(({ kind }) => kind === 'machine-place').map(({ line }) => line));
+  const tops = new Set(trace.moves.flatMap(({ line }, i) => (lines.has(line) ? [i] : [])));
   const walk: Walk = { machine, unit, moves: trace.moves, tops, differences: [], next: 0, place: NOWHERE };
   for (const meant of meantMoves(motion, machine)) {
     if (walk.differences.length > 5) {
@@ -190,10 +190,6 @@ function followTiny(walk: Walk, meant: Meant, step: ArcStep, radius: number): vo
   }
 }
 
-function radiusOf(step: ArcStep, from: Position): number {
-  return Math.hypot(from.x - step.centre.x, from.y - step.centre.y);
-}
-
 /** Rounded to the last digit, the machine stands at the end of the step. */
 function isAt(walk: Walk, to: Position): boolean {
   const near = (a: number | null, b: number): boolean =>
@@ -215,7 +211,7 @@ function settingsDiffer(walk: Walk, meant: Meant, move: TracedMove): string | un
   if (step.kind !== 'rapid') {
     const last = millimetresPer(walk.machine.units) * 10 ** -walk.machine.words.numbers.feedDecimals;
     const wrong = Math.abs((move.feed ?? 0) - step.feed);
-    if (wrong > last * (0.5 + NOISE) * steepness(meant)) {
+    if (wrong > last * (0.5 + NOISE) * steepness(meant) + roundedSlope(walk, meant)) {
       return `feed ${String(move.feed)} where ${String(step.feed)} was meant`;
     }
   }
@@ -231,15 +227,15 @@ function steepness({ step, from }: Meant): number {
   return Math.hypot(circle, step.to.z - from.z) / circle;
 }
 
-function cannotSayCutter(machine: Machine): boolean {
-  return machine.words.cutters.words === 'none' && machine.words.file.commentForm === 'none';
+/** Where F counts along the circle, the rounding of a short helix changes its slope, and the feed along it by as much. */
+function roundedSlope(walk: Walk, { step, from }: Meant): number {
+  return step.kind === 'arc' && from !== undefined && step.to.z !== from.z
+    ? (3 * walk.unit * step.feed) / arcLength(step, from)
+    : 0;
 }
 
-function arcLength(step: ArcStep, from: Position): number {
-  return Math.hypot(
-    Math.hypot(from.x - step.centre.x, from.y - step.centre.y) * step.turn,
-    step.to.z - from.z,
-  );
+function cannotSayCutter(machine: Machine): boolean {
+  return machine.words.cutters.words === 'none' && machine.words.file.commentForm === 'none';
 }
 
 /** How far along the meant move the traced one ends (0 to 1), or how it strays. */
@@ -252,9 +248,7 @@ function alongPath(walk: Walk, meant: Meant, move: TracedMove, share: number): n
     return 'a cutting move from an unknown place';
   }
   const samples = move.kind === 'arc' ? Math.max(8, Math.ceil(Math.abs(move.turn ?? 0) / 0.2)) : 4;
-  const allowed =
-    walk.unit * (1 + NOISE) +
-    (move.kind === 'line' && step.kind === 'arc' ? walk.machine.words.arcs.chordTolerance : 0);
+  const allowed = allowedOff(walk, step, move);
   let at = share;
   for (let i = 0; i <= samples; i++) {
     const point = pointOf(move, i / samples);
@@ -275,6 +269,20 @@ function alongPath(walk: Walk, meant: Meant, move: TracedMove, share: number): n
   return at;
 }
 
+/**
+ * Beyond half a turn the far side of an arc, written with start and centre rounded to the nearest, lies off by twice the
+ * centre's rounding less the start's: at worst 1.5 units in X and in Y at once. In radius form the ends' and the radius'
+ * rounding together shift the centre along the bisector.
+ */
+const LONG_ARC_UNITS = 1.5 * Math.SQRT2;
+
+function allowedOff(walk: Walk, step: MoveStep, move: TracedMove): number {
+  const isRadius = walk.machine.words.arcs.centre === 'radius';
+  const isLong = move.kind === 'arc' && (isRadius || Math.abs(move.turn ?? 0) > Math.PI);
+  const chord = move.kind === 'line' && step.kind === 'arc' ? walk.machine.words.arcs.chordTolerance : 0;
+  return walk.unit * ((isLong ? LONG_ARC_UNITS : 1) + NOISE) + chord;
+}
+
 /** Each axis at its old place, its new one, or unknown; straight where nothing says otherwise. */
 function rapidStrays(walk: Walk, { step, from }: Meant, move: TracedMove): string | undefined {
   for (const axis of ['x', 'y', 'z'] as const) {
@@ -286,69 +294,4 @@ function rapidStrays(walk: Walk, { step, from }: Meant, move: TracedMove): strin
     }
   }
   return undefined;
-}
-
-function pointOf(move: TracedMove, u: number): Position {
-  const a = { x: move.from.x ?? 0, y: move.from.y ?? 0, z: move.from.z ?? 0 };
-  const b = { x: move.to.x ?? 0, y: move.to.y ?? 0, z: move.to.z ?? 0 };
-  const z = a.z + u * (b.z - a.z);
-  if (move.kind !== 'arc' || move.centre === undefined) {
-    return { x: a.x + u * (b.x - a.x), y: a.y + u * (b.y - a.y), z };
-  }
-  const r0 = Math.hypot(a.x - move.centre.x, a.y - move.centre.y);
-  const r1 = Math.hypot(b.x - move.centre.x, b.y - move.centre.y);
-  const angle = Math.atan2(a.y - move.centre.y, a.x - move.centre.x) + u * (move.turn ?? 0);
-  const radius = r0 + u * (r1 - r0);
-  return { x: move.centre.x + radius * Math.cos(angle), y: move.centre.y + radius * Math.sin(angle), z };
-}
-
-function shareOfLine(from: Position, to: Position, p: Position): number {
-  const d = { x: to.x - from.x, y: to.y - from.y, z: to.z - from.z };
-  const length = d.x * d.x + d.y * d.y + d.z * d.z;
-  return length === 0 ? 1 : ((p.x - from.x) * d.x + (p.y - from.y) * d.y + (p.z - from.z) * d.z) / length;
-}
-
-/** The share at which the helix is nearest to the point: from its angle, by steps along the heading there. */
-function shareOfArc(step: ArcStep, from: Position, p: Position, near: number): number {
-  let share = shareByAngle(step, from, p, near);
-  const radius = radiusOf(step, from);
-  const start = Math.atan2(from.y - step.centre.y, from.x - step.centre.x);
-  const rise = step.to.z - from.z;
-  for (let i = 0; i < 4 && rise !== 0; i++) {
-    const angle = start + share * step.turn;
-    const [c, s] = [Math.cos(angle), Math.sin(angle)];
-    const away = {
-      x: p.x - step.centre.x - radius * c,
-      y: p.y - step.centre.y - radius * s,
-      z: p.z - from.z - share * rise,
-    };
-    const speed = radius * step.turn;
-    share += (speed * (c * away.y - s * away.x) + rise * away.z) / (speed * speed + rise * rise);
-  }
-  return share;
-}
-
-/** The share of the turn whose angle is the point's, the nearest to where the path was. */
-function shareByAngle(step: ArcStep, from: Position, p: Position, near: number): number {
-  const start = Math.atan2(from.y - step.centre.y, from.x - step.centre.x);
-  const angle = Math.atan2(p.y - step.centre.y, p.x - step.centre.x);
-  const whole = (2 * Math.PI) / Math.abs(step.turn);
-  const share = (angle - start) / step.turn;
-  return share + whole * Math.round((near - share) / whole);
-}
-
-function distanceTo(step: MoveStep, from: Position, p: Position, share: number): number {
-  const z = from.z + share * (step.to.z - from.z);
-  if (step.kind !== 'arc') {
-    const x = from.x + share * (step.to.x - from.x);
-    const y = from.y + share * (step.to.y - from.y);
-    return Math.hypot(p.x - x, p.y - y, p.z - z);
-  }
-  const angle = Math.atan2(from.y - step.centre.y, from.x - step.centre.x) + share * step.turn;
-  const radius = Math.hypot(from.x - step.centre.x, from.y - step.centre.y);
-  return Math.hypot(
-    p.x - step.centre.x - radius * Math.cos(angle),
-    p.y - step.centre.y - radius * Math.sin(angle),
-    p.z - z,
-  );
 }

@@ -9,7 +9,7 @@ import { writeProgram } from '../../src/post/write-program.ts';
 import { traceProgram, type Trace } from '../../src/prove/trace-program.ts';
 import { POSTS } from '../machine/read-posts.ts';
 import { post } from '../support/bench-program.ts';
-import { compareMotion } from '../support/compare-motion.ts';
+import { compareMotion } from '../../src/flow/compare-motion.ts';
 import { randomMotion } from '../support/random-motion.ts';
 
 const SEED = 66025;

@@ -1,6 +1,6 @@
 /** Points of traced moves, and where along a meant line, arc or helix a point lies, and how far from it. mm, radians. */
-import type { ArcStep, MoveStep, Position } from '../../src/motion/motion.ts';
-import type { TracedMove } from '../../src/motion/traced-move.ts';
+import type { ArcStep, MoveStep, Position } from '../motion/motion.ts';
+import type { TracedMove } from '../motion/traced-move.ts';
 
 export function radiusOf(step: ArcStep, from: Position): number {
   return Math.hypot(from.x - step.centre.x, from.y - step.centre.y);
