@@ -15,6 +15,8 @@ export function checkOrder(evidence: Evidence): Finding[] {
   }
   const cuts = firstAndLast(evidence);
   const holds = setup.holding.filter((holding) => holding !== 'screw');
+  // An arbor or a screw holds in the middle: there the stiffness of the rim decides, and either order may be right.
+  const heldInTheMiddle = setup.holding.includes('arbor') || setup.holding.includes('screw');
   const bore = cuts.get('bore');
   const teeth = cuts.get('teeth');
   const crossing = cuts.get('crossing');
@@ -26,7 +28,7 @@ export function checkOrder(evidence: Evidence): Finding[] {
     ...(bore !== undefined && crossing !== undefined && crossing.at < bore.end
       ? [late(bore.last, crossing.first, 'bore', 'crossings', 'error')]
       : []),
-    ...(teeth !== undefined && crossing !== undefined && crossing.at < teeth.end && !holds.includes('arbor')
+    ...(teeth !== undefined && crossing !== undefined && crossing.at < teeth.end && !heldInTheMiddle
       ? [late(teeth.last, crossing.first, 'teeth', 'crossings', 'warning')]
       : []),
   ];

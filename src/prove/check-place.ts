@@ -9,7 +9,7 @@ export function checkPlace({ moves }: Evidence): Finding[] {
     moves.filter(isLost).map((move) =>
       findingAt(move, {
         code: 'prove.unknown-place',
-        message: `a cutting move while ${missing(move)} has not been named since the start`,
+        message: `a cutting move before ${missing(move)} was named`,
         hint: 'Go to X, Y and Z by name, high above the blank, before the first cut.',
       }),
     ),

@@ -139,9 +139,14 @@ export function checkEnd(run: Run, state: FileState, rest: string): void {
     remark(run, 'prove.end', 'error', 'the program begins with % and has no closing % line');
   }
   if (percentLines === 'both' && state.percents === 0) {
-    remark(run, 'prove.file', 'error', 'this machine wants the program between two % lines', 'percent');
+    lacksAtTheTop(run, 'this machine wants the program between two % lines');
   }
   if (programLabel === 'o-number' && !state.labelled) {
-    remark(run, 'prove.file', 'error', 'this machine wants a program number (O)', 'label');
+    lacksAtTheTop(run, 'this machine wants a program number (O)');
   }
+}
+
+/** What should have stood at the head of the file. */
+function lacksAtTheTop(run: Run, message: string): void {
+  run.findings.push({ code: 'prove.file', severity: 'error', message, file: run.file, line: 1 });
 }
