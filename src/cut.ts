@@ -11,6 +11,7 @@ import { headerFacts, type HeaderKind } from './flow/header-facts.ts';
 import { refusedText } from './flow/refused-text.ts';
 import { sheetFacts, type Made, type Shapes, type Understood } from './flow/sheet-facts.ts';
 import { checkJobOnMachine } from './job/check-job.ts';
+import { placeInJob } from './job/place-problems.ts';
 import { readJob } from './job/read-job.ts';
 import { readMachine } from './machine/read-machine.ts';
 import { writeProgram, type ProgramText } from './post/write-program.ts';
@@ -100,7 +101,7 @@ function make(input: CutInput, understood: Understood, before: readonly Problem[
   }
   input.stage('planning the cuts');
   const plan = planCuts({ job, machine, ...shapes });
-  problems.push(...plan.problems);
+  problems.push(...plan.problems.map((problem) => placeInJob(problem, job)));
   if (!plan.ok) {
     return refuse(input, understood, shapes, problems);
   }

@@ -1,5 +1,6 @@
 /** The words of the command line. Each command is loaded only when it is asked for, so that help comes at once. */
 import { Command, CommanderError } from 'commander';
+import { nearestWord } from '../base/nearest-word.ts';
 
 declare const OGIVE_VERSION: string;
 
@@ -19,6 +20,11 @@ export async function runProgram(args: readonly string[]): Promise<Exit> {
     program.outputHelp();
     return 0;
   }
+  const stranger = unknownCommand(program, args[0] ?? '');
+  if (stranger !== undefined) {
+    process.stderr.write(`${stranger}\n`);
+    return 2;
+  }
   try {
     await program.parseAsync(args, { from: 'user' });
   } catch (error) {
@@ -28,6 +34,16 @@ export async function runProgram(args: readonly string[]): Promise<Exit> {
     throw error;
   }
   return exit;
+}
+
+/** What to say where the first word is no command. */
+function unknownCommand(program: Command, word: string): string | undefined {
+  const names = [...program.commands.map((command) => command.name()), 'help'];
+  if (word.startsWith('-') || names.includes(word)) {
+    return undefined;
+  }
+  const near = nearestWord(word, names);
+  return `there is no command '${word}'${near === undefined ? '' : `; did you mean '${near}'?`} (ogive --help tells more)`;
 }
 
 type Done = (code: Exit) => void;
