@@ -3,16 +3,18 @@
  *
  * In  : the exact loop (counter-clockwise), cutter, metal left on the wall. Wheel frame, mm.
  * Out : one run, or nothing where no free place for the arcs was found. All pieces of the wall have their parallel as the
- *       corners are not smaller than the cutter. Feed on inside arcs as `insideArcFeed`.
+ *       corners are not smaller than the cutter. Feed on inside arcs as `insideArcFeed`; where a corner is hardly wider than
+ *       the cutter, its engagement grows before the corner is reached, and the cutter slows there already.
  */
-import { SAME_POINT } from '../base/tolerances.ts';
+import { SAME_POINT, TANGENT } from '../base/tolerances.ts';
 import { insideArcFeed } from '../cutting/arc-feed.ts';
 import { offsetPiece, partOf, reversePiece } from '../geometry/change-piece.ts';
 import { nearestOnChain } from '../geometry/nearest-on-piece.ts';
 import { endOf, headingOn, lengthOf, startOf } from '../geometry/on-piece.ts';
 import type { Loop, Piece } from '../geometry/piece.ts';
-import { addScaled, leftOf, type Point } from '../geometry/point.ts';
+import { addScaled, cross, leftOf, type Point } from '../geometry/point.ts';
 import type { Belongs, MoveStep } from '../motion/motion.ts';
+import { cornerFeed } from './finishing.ts';
 import type { Heights } from './heights.ts';
 import { arcLeg, flat, lineLeg, vertical, type Leg, type Run } from './leg.ts';
 import { levelsFor, type Settings } from './settings.ts';
@@ -35,6 +37,10 @@ interface Lead {
   readonly sweep: number;
 }
 
+/** The cutter slows this far before a tight corner, over its diameter. */
+const SLOW_BEFORE = 0.25;
+/** Radius of the path over the cutter's below which a corner is tight. Judgement. */
+const TIGHT = 0.3;
 /** How far the loop runs past its start, mm. Judgement: no step shows where it was joined. */
 const OVERLAP = 0.2;
 /** The arcs in and out are tried from this share of the cutter's radius, each try this much smaller. */
@@ -63,7 +69,7 @@ export function finishWindow(task: WallTask): Run | undefined {
   const { feed } = settings.data;
   const legs = [
     arcLeg(join, addScaled(join, inward, radius), way * sweep, feed),
-    ...path.map((piece) => wallLeg(task, piece)),
+    ...slowBeforeCorners(task, path),
     lineLeg(left, feed),
     arcLeg(end, addScaled(left, inward, radius), way * sweep, feed),
     lineLeg(begin, feed),
@@ -93,6 +99,30 @@ function wallPath({ window, settings, way }: WallTask): Loop {
     ...travelled.slice(0, index),
     partOf(first, 0, 0.5),
   ];
+}
+
+function slowBeforeCorners(task: WallTask, path: Loop): Leg[] {
+  const { settings, radialDepth } = task;
+  const slow = cornerFeed(settings, radialDepth);
+  return path.flatMap((piece, i) => {
+    const leg = wallLeg(task, piece);
+    const next = path[(i + 1) % path.length] as Piece;
+    if (!isTight(task, piece, next) || slow >= leg.feed) {
+      return [leg];
+    }
+    const cut = 1 - (SLOW_BEFORE * settings.cutter.diameter) / lengthOf(piece);
+    return cut > 0
+      ? [wallLeg(task, partOf(piece, 0, cut)), { ...wallLeg(task, partOf(piece, cut, 1)), feed: slow }]
+      : [{ ...leg, feed: slow }];
+  });
+}
+
+/** Whether the path turns inward between two pieces, or on an arc much smaller than the cutter. */
+function isTight({ settings, way }: WallTask, piece: Piece, next: Piece): boolean {
+  if (next.kind === 'arc' && way * next.turn > 0 && next.radius < TIGHT * settings.radius) {
+    return true;
+  }
+  return way * cross(headingOn(piece, 1), headingOn(next, 0)) > TANGENT;
 }
 
 function wallLeg({ settings, way, radialDepth }: WallTask, piece: Piece): Leg {

@@ -67,7 +67,7 @@ function passesInOrder(task: CutTask): Outcome<readonly PassCuts[]> {
   if (wanted('crossings') && task.crossings !== undefined) {
     cuts.crossings = take(crossingsCuts(task, task.crossings)) ?? [];
   }
-  const teeth = take(teethCuts(task));
+  const teeth = wanted('roughing') || wanted('finishing') ? take(teethCuts(task)) : undefined;
   if (teeth !== undefined) {
     cuts.roughing = teeth.roughing;
     cuts.finishing = teeth.finishing;

@@ -1,7 +1,9 @@
 /** What the plan decides: reach, refusals, depth a lap, programs by the machine's way with cutters, keep-outs. */
 import { describe, expect, it } from 'vitest';
+import { turnPoint } from '../../src/geometry/point.ts';
 import { pinion } from '../tooth/proportions.ts';
 import { cutter, disc, inPass, makeCase, movesOf, planOf, problemsOf, type Wanted } from './make-job.ts';
+import { distanceTo, planPiece, raster } from './swept.ts';
 
 const stepOf = (wanted: Wanted): number =>
   planOf(wanted).passes.find(({ name }) => name === 'roughing')!.step;
@@ -199,6 +201,27 @@ describe('blanks and holdings', () => {
     expect(Math.min(...movesOf(held).map(({ step }) => step.to.z))).toBeCloseTo(-1.42, 9);
   });
 
+  it('roughs conventionally where play would draw a slender cutter in, finishes climbing, and says why', () => {
+    const round = (wanted: Wanted, pass: string): number =>
+      inPass(movesOf(planOf(wanted)), pass)
+        .filter(({ belongs }) => belongs?.tooth !== undefined)
+        .reduce((sum, { from, step }) => sum + Math.sign(from.x * step.to.y - from.y * step.to.x), 0);
+    const loose: Wanted = { cuts: { play: { x: 0.01, y: 0.05 } } };
+    expect(round(loose, 'roughing')).toBeGreaterThan(0);
+    expect(round(loose, 'finishing')).toBeLessThan(0);
+    const why = planOf(loose)
+      .passes.find(({ name }) => name === 'roughing')!
+      .why.join(' ');
+    expect(why).toMatch(/conventional.*0\.05 mm of play/);
+    const stout = { cutter: cutter(1, 1), allowance: 0.03 };
+    const wide: Wanted = {
+      wheel: { teeth: 30, module: 1, mate: pinion(10) },
+      cuts: { play: { x: 0.05, y: 0.05 }, roughing: stout, finishing: { cutter: cutter(1, 1) } },
+    };
+    expect(round(wide, 'roughing')).toBeLessThan(0);
+    expect(round({ cuts: { play: { x: 0.02, y: 0.03 } } }, 'roughing')).toBeLessThan(0);
+  });
+
   it('climbs clockwise round the wheel and counter-clockwise in the bore', () => {
     const turns = (climb: boolean, pass: string): number =>
       inPass(movesOf(planOf({ cuts: { climb } })), pass)
@@ -208,5 +231,67 @@ describe('blanks and holdings', () => {
     expect(turns(true, 'bore')).toBeGreaterThan(0);
     expect(turns(false, 'roughing')).toBeGreaterThan(0);
     expect(turns(false, 'bore')).toBeLessThan(0);
+  });
+});
+
+describe('a thin fin left standing between the two slots of a space', () => {
+  const wheel: Wanted['wheel'] = { teeth: 189, module: 0.84, mate: pinion(12) };
+  const slender = cutter(1, 0.59);
+  const fin: Wanted = {
+    wheel,
+    crossings: null,
+    setup: { shape: { kind: 'sheet', width: 180, height: 180 } },
+    cuts: { roughing: { cutter: slender, allowance: 0.03 }, finishing: { cutter: slender } },
+  };
+
+  it.each<[string, Wanted]>([
+    ['189 teeth, module 0.84, cutter 0.59', fin],
+    ['on a machine without arcs', { ...fin, machine: 'lines-only' }],
+    ['conventional', { ...fin, cuts: { ...fin.cuts, climb: false } }],
+  ])('is cut away in sheet: %s', (_, wanted) => {
+    const made = makeCase(wanted);
+    const { form } = made;
+    const lap = inPass(movesOf(planOf(made)), 'roughing').filter(
+      ({ belongs, from, step }) =>
+        belongs?.lap === belongs?.laps && (belongs?.tooth ?? 9) <= 3 && from.z === step.to.z,
+    );
+    const half = Math.PI / form.proportions.teeth;
+    const pieces = lap.map(planPiece);
+    // Across the space at each radius: nothing stands there, or what stands is thick.
+    const thick = [];
+    for (let x = form.rootRadius + 0.1; x < form.outsideRadius; x += 0.05) {
+      const across = raster({ x: [x, x], y: [-0.5, 0.5] }, 0.02).map((point) => turnPoint(point, half));
+      const standing = across.filter((point) => distanceTo(pieces, point) > slender.diameter / 2);
+      thick.push(0.02 * standing.length);
+    }
+    expect(thick.slice(0, 20).every((width) => width === 0)).toBe(true);
+    // The end of what stands may be pointed, but bluntly.
+    const thin = thick.filter((width) => width > 0 && width < 0.3 * slender.diameter);
+    expect(thin.length * 0.05).toBeLessThanOrEqual(0.1);
+  });
+
+  it('does not cost blocks where the slots meet anyway, or where what stands is stout', () => {
+    const says = (wanted: Wanted): string =>
+      planOf(wanted)
+        .passes.find(({ name }) => name === 'roughing')!
+        .why.join(' ');
+    expect(says(fin)).toContain('thin fin');
+    expect(says({})).not.toContain('thin fin');
+    const small = cutter(2, 0.4);
+    const stout = { roughing: { cutter: small, allowance: 0.03 }, finishing: { cutter: small } };
+    expect(says({ ...fin, cuts: stout })).not.toContain('thin fin');
+  });
+});
+
+describe('windows with corners as sharp as the cutter', () => {
+  const windows = { arms: 5, armAtHub: 2.4, armAtRim: 2.4, rim: 1.8, hub: 9, corner: 0.5 };
+  const feeds = (corner: number): number[] =>
+    inPass(movesOf(planOf({ crossings: { ...windows, corner } })), 'crossing 1 finishing').flatMap(
+      ({ step }) => (step.kind === 'line' && step.to.z < 0 ? [step.feed] : []),
+    );
+
+  it('are finished slower before the corner; wide corners are not', () => {
+    expect(new Set(feeds(0.5)).size).toBe(2);
+    expect(new Set(feeds(1.2)).size).toBe(1);
   });
 });
