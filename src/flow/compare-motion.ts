@@ -248,7 +248,8 @@ function alongPath(walk: Walk, meant: Meant, move: TracedMove, share: number): n
     return 'a cutting move from an unknown place';
   }
   const samples = move.kind === 'arc' ? Math.max(8, Math.ceil(Math.abs(move.turn ?? 0) / 0.2)) : 4;
-  const allowed = allowedOff(walk, step, move);
+  const chord = move.kind === 'line' && step.kind === 'arc' ? walk.machine.words.arcs.chordTolerance : 0;
+  const allowed = walk.unit * (1 + NOISE) + chord;
   let at = share;
   for (let i = 0; i <= samples; i++) {
     const point = pointOf(move, i / samples);
@@ -267,20 +268,6 @@ function alongPath(walk: Walk, meant: Meant, move: TracedMove, share: number): n
     at = Math.max(at, next);
   }
   return at;
-}
-
-/**
- * Beyond half a turn the far side of an arc, written with start and centre rounded to the nearest, lies off by twice the
- * centre's rounding less the start's: at worst 1.5 units in X and in Y at once. In radius form the ends' and the radius'
- * rounding together shift the centre along the bisector.
- */
-const LONG_ARC_UNITS = 1.5 * Math.SQRT2;
-
-function allowedOff(walk: Walk, step: MoveStep, move: TracedMove): number {
-  const isRadius = walk.machine.words.arcs.centre === 'radius';
-  const isLong = move.kind === 'arc' && (isRadius || Math.abs(move.turn ?? 0) > Math.PI);
-  const chord = move.kind === 'line' && step.kind === 'arc' ? walk.machine.words.arcs.chordTolerance : 0;
-  return walk.unit * ((isLong ? LONG_ARC_UNITS : 1) + NOISE) + chord;
 }
 
 /** Each axis at its old place, its new one, or unknown; straight where nothing says otherwise. */

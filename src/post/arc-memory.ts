@@ -5,7 +5,7 @@
  * In  : the arc meant, where it starts (exact, and in counts as written). Out: its block as it was written, if it was.
  */
 import type { ArcStep, Position } from '../motion/motion.ts';
-import type { GridArc } from './arc-on-grid.ts';
+import type { GridArc } from './grid-move.ts';
 
 export interface KnownArc {
   readonly from: Position;

@@ -3,46 +3,18 @@
  * as the controller will judge it.
  *
  * In  : the exact start, the start as written (counts), the arc step. Out: lines and arcs on the grid, in order.
+ *       An arc that rounding would carry off by more than a count is halved.
  * Kept: start and end radius differ by less than the machine file's mismatch; ends that round together, chords too short
  *       and turns that rounding reverses become lines; chords lie within `chord-tolerance` inside the arc's circle.
  * Source of the mismatch rule: NISTIR 6556 section 3.5.3.2, and the two-part rule (absolute, or share of the radius).
  */
-import { millimetresPer } from '../base/units.ts';
+import { radians } from '../base/units.ts';
 import type { ArcWords } from '../machine/machine.ts';
 import type { ArcStep, Position } from '../motion/motion.ts';
 import { arcCuts, isWholeTurn } from './arc-cuts.ts';
+import { bestArc, strays } from './grid-arc.ts';
+import { distance, type GridArc, type GridMove, type GridPlace, type Sweep } from './grid-move.ts';
 import { toGrid, type Grid } from './program-grid.ts';
-
-export interface GridPlace {
-  readonly x: number;
-  readonly y: number;
-  readonly z: number;
-}
-
-export interface GridLine extends GridPlace {
-  readonly kind: 'line';
-}
-
-/** `cx`, `cy` in counts from zero. */
-export interface GridArc extends GridPlace {
-  readonly kind: 'arc';
-  readonly cx: number;
-  readonly cy: number;
-  /** In counts: as the word of the radius form, or from the written centre to the written start. */
-  readonly radius: number;
-  readonly counterClockwise: boolean;
-  /** Difference of start and end radius as written, in counts. */
-  readonly miss: number;
-}
-
-/** An arc that no centre on the grid makes acceptable. */
-export interface GridMiss {
-  readonly kind: 'miss';
-  readonly radius: number;
-  readonly miss: number;
-}
-
-export type GridMove = GridLine | GridArc | GridMiss;
 
 /** Chords under this many counts can round to nothing, and an arc whose ends meet is a full circle: from 1.5 counts none
  *  do, three leave room for both ends. */
@@ -51,19 +23,8 @@ const SAFE_CHORD_COUNTS = 3;
 /** Counts along the arc beyond which rounding of both ends and the centre (under three counts) cannot turn it round. */
 const FAR_FROM_ROUNDING = 16;
 
-/** The whole arc, exact; `a0` its start angle. */
-interface Sweep {
-  readonly grid: Grid;
-  readonly words: ArcWords;
-  readonly centre: { readonly x: number; readonly y: number };
-  readonly radius: number;
-  readonly a0: number;
-  readonly turn: number;
-  readonly from: Position;
-  readonly to: Position;
-  /** The smallest chord written as an arc, in counts. */
-  readonly shortest: number;
-}
+/** Radians; arcs that turn less are not halved for straying: no rounding shows in their middle that does not at their ends. */
+const LEAST_HALVED = radians(20);
 
 export function arcOnGrid(
   grid: Grid,
@@ -143,15 +104,22 @@ function writePart(
   const end = gridPlaceAt(sweep, share1);
   if (isWholeTurn(turn)) {
     // Both ends are one place: a unit apart, a controller might run the unit instead of the circle.
-    moves.push(bestCentre(sweep, start, { x: start.x, y: start.y, z: end.z }));
-    return end;
+    const circle = bestArc(sweep, start, { x: start.x, y: start.y, z: end.z }, turn);
+    if (circle.kind === 'miss' || !strays(sweep, start, circle, turn)) {
+      moves.push(circle);
+      return end;
+    }
+    return writeHalves(sweep, start, share0, share1, moves);
   }
   const chord = distance(end.x, end.y, start.x, start.y);
   if (chord < sweep.shortest || isFlat(sweep, turn, chord)) {
     chords(sweep, start, share0, share1, moves);
     return end;
   }
-  const arc = bestCentre(sweep, start, end);
+  const arc = bestArc(sweep, start, end, turn);
+  if (arc.kind === 'arc' && strays(sweep, start, arc, turn) && Math.abs(turn) > LEAST_HALVED) {
+    return writeHalves(sweep, start, share0, share1, moves);
+  }
   const centred = arc.kind === 'arc' && sweep.words.centre !== 'radius';
   if (centred && isReversed(arc, start, turn, sweep.radius * sweep.grid.perMm)) {
     chords(sweep, start, share0, share1, moves);
@@ -159,6 +127,18 @@ function writePart(
     moves.push(arc);
   }
   return end;
+}
+
+/** The less an arc turns, the less the rounding of its centre shows. */
+function writeHalves(
+  sweep: Sweep,
+  start: GridPlace,
+  share0: number,
+  share1: number,
+  moves: GridMove[],
+): GridPlace {
+  const middle = (share0 + share1) / 2;
+  return writePart(sweep, writePart(sweep, start, share0, middle, moves), middle, share1, moves);
 }
 
 /** The arc stands above its chord by less than a count (sag s, chord c: c^2 = 8 r s - 4 s^2): no controller could tell. */
@@ -176,72 +156,6 @@ function isReversed(arc: GridArc, start: GridPlace, turn: number, radius: number
   const b = Math.atan2(arc.y - arc.cy, arc.x - arc.cx);
   const swept = arc.counterClockwise ? (b - a + whole) % whole : (a - b + whole) % whole;
   return Math.abs(swept - Math.abs(turn)) > Math.PI;
-}
-
-/** The rounded centre, or the best of its eight neighbours where the controller would refuse it. */
-function bestCentre(sweep: Sweep, start: GridPlace, end: GridPlace): GridArc | GridMiss {
-  const { grid, words } = sweep;
-  const cx = toGrid(grid, sweep.centre.x);
-  const cy = toGrid(grid, sweep.centre.y);
-  const first = arcAbout(sweep, start, end, cx, cy);
-  if (words.centre === 'radius' || mayMiss(words, grid, first)) {
-    return first;
-  }
-  let best = first;
-  for (let dx = -1; dx <= 1; dx++) {
-    for (let dy = -1; dy <= 1; dy++) {
-      const other = arcAbout(sweep, start, end, cx + dx, cy + dy);
-      best = other.miss < best.miss ? other : best;
-    }
-  }
-  return mayMiss(words, grid, best)
-    ? best
-    : { kind: 'miss', radius: sweep.radius, miss: best.miss / grid.perMm };
-}
-
-function arcAbout(sweep: Sweep, start: GridPlace, end: GridPlace, cx: number, cy: number): GridArc {
-  const { x, y, z } = end;
-  const counterClockwise = sweep.turn > 0;
-  if (sweep.words.centre === 'radius') {
-    return { kind: 'arc', x, y, z, cx, cy, radius: meanRadius(sweep, start, end), counterClockwise, miss: 0 };
-  }
-  const r1 = distance(start.x, start.y, cx, cy);
-  return {
-    kind: 'arc',
-    x,
-    y,
-    z,
-    cx,
-    cy,
-    radius: r1,
-    counterClockwise,
-    miss: Math.abs(r1 - distance(x, y, cx, cy)),
-  };
-}
-
-/** The mean distance of the written ends from the exact centre keeps the radius form's own centre nearest to it. */
-function meanRadius(sweep: Sweep, start: GridPlace, end: GridPlace): number {
-  const x = sweep.centre.x * sweep.grid.perMm;
-  const y = sweep.centre.y * sweep.grid.perMm;
-  return Math.round((distance(start.x, start.y, x, y) + distance(end.x, end.y, x, y)) / 2);
-}
-
-/** Twice as quick as Math.hypot, whose care for huge and tiny numbers nothing on the grid needs. */
-function distance(x0: number, y0: number, x1: number, y1: number): number {
-  return Math.sqrt((x0 - x1) * (x0 - x1) + (y0 - y1) * (y0 - y1));
-}
-
-/** The controller's own test: below the absolute limit, or below both the outer limit and the share of the radius. */
-function mayMiss(words: ArcWords, grid: Grid, arc: GridArc): boolean {
-  const miss = arc.miss / grid.perUnit;
-  if (miss < words.missAbsolute[grid.unit]) {
-    return true;
-  }
-  if (words.missShare === null) {
-    return false;
-  }
-  const outer = words.missAtMost === null ? Infinity : words.missAtMost / millimetresPer(grid.unit);
-  return miss < outer && miss < words.missShare * (arc.radius / grid.perUnit);
 }
 
 /** Chords of equal turn from the part's start to its end, none longer than the chord tolerance allows. */

@@ -5,7 +5,8 @@
  */
 import type { ArcStep } from '../motion/motion.ts';
 import { keepArc, recallArc } from './arc-memory.ts';
-import { arcOnGrid, type GridArc, type GridMove } from './arc-on-grid.ts';
+import { arcOnGrid } from './arc-on-grid.ts';
+import type { GridArc, GridMove } from './grid-move.ts';
 import { feedWord, motionWord, takeFeed } from './modal-words.ts';
 import { complain, writeBlock } from './program-sink.ts';
 import { straight } from './write-straight.ts';

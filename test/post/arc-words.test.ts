@@ -34,6 +34,36 @@ function arc(
   };
 }
 
+/** Of arcs by their centre from the start: how far a controller that goes from radius to radius gets off a circle. */
+function farthestOff(
+  blocks: readonly string[],
+  at: { readonly x: number; readonly y: number },
+  centre: { readonly x: number; readonly y: number },
+  radius: number,
+): number {
+  let { x, y } = at;
+  let worst = 0;
+  for (const block of blocks) {
+    const word = (letter: string, other: number): number =>
+      Number(new RegExp(`${letter}(-?[\\d.]+)`).exec(block)?.[1] ?? other);
+    const about = { x: x + word('I', 0), y: y + word('J', 0) };
+    const end = { x: word('X', x), y: word('Y', y) };
+    const [r0, r1] = [Math.hypot(x - about.x, y - about.y), Math.hypot(end.x - about.x, end.y - about.y)];
+    const a0 = Math.atan2(y - about.y, x - about.x);
+    const a1 = Math.atan2(end.y - about.y, end.x - about.x);
+    const way = /G2/.test(blocks[0] ?? '') ? -1 : 1;
+    const whole = 2 * Math.PI;
+    const swept = (way * (a1 - a0) + 2 * whole) % whole || whole;
+    for (let u = 0; u <= 1; u += 1 / 256) {
+      const [r, angle] = [r0 + u * (r1 - r0), a0 + way * u * swept];
+      const place = { x: about.x + r * Math.cos(angle), y: about.y + r * Math.sin(angle) };
+      worst = Math.max(worst, Math.abs(Math.hypot(place.x - centre.x, place.y - centre.y) - radius));
+    }
+    ({ x, y } = end);
+  }
+  return worst;
+}
+
 const start: Position = { x: 3, y: 0, z: -1 };
 const about = { x: 0, y: 0 };
 
@@ -156,6 +186,24 @@ describe('arcs after rounding', () => {
     expect(miss).toBeLessThan(plainMiss * 0.9);
     expect(Math.hypot(cx - centre.x, cy - centre.y)).toBeLessThan(0.002);
   });
+
+  it.each([180, 200, 270, 355, 360, -270])(
+    '%d degrees stay within a unit of the last digit, start and centre rounded apart as far as can be',
+    (degrees) => {
+      const centre = { x: 0.000499, y: 0.000499 };
+      const from: Position = { x: 2.000501, y: 2.000501, z: 0 };
+      const step = arc(from, centre, degrees, degrees === 360 ? from : {});
+      const rounded = { x: 2.001, y: 2.001 };
+      // About the plainly rounded centre the far side would lie off by twice its rounding and that of the start: 2.1 units.
+      const plain = Math.hypot(rounded.x, rounded.y) + Math.hypot(centre.x, centre.y);
+      expect(plain - Math.hypot(from.x - centre.x, from.y - centre.y)).toBeGreaterThan(0.0019);
+      const blocks = blocksOf(three, from, [step]);
+      expect(blocks.every((block) => !block.startsWith('G1'))).toBe(true);
+      expect(
+        farthestOff(blocks, rounded, centre, Math.hypot(from.x - centre.x, from.y - centre.y)),
+      ).toBeLessThan(0.001);
+    },
+  );
 
   it('says so where no centre on the grid will do', () => {
     const machine = changedMachine(bench, {
