@@ -80,7 +80,7 @@ function deepest(
   if (high <= 0) {
     return { depth: cap, load: whole };
   }
-  let good = { depth: 0, load: slotLoad(cut, 0) };
+  let good: { readonly depth: number; readonly load?: SlotLoad } = { depth: 0 };
   let low = -1;
   let bad = cap;
   for (let i = 0; i < MOST_STEPS && bad - good.depth > DEPTH_STEP * cut.cutter.diameter; i++) {
@@ -99,5 +99,5 @@ function deepest(
       low /= 2;
     }
   }
-  return good;
+  return { depth: good.depth, load: good.load ?? slotLoad(cut, good.depth) };
 }

@@ -37,16 +37,20 @@ export function slotLoad(cut: SlotCut, depth: number): SlotLoad {
   const { material, cutter } = cut;
   const chips = chipsWithRunout(cut.feed / (cut.speed * cutter.flutes), cutter.flutes, cut.runout);
   const lag = Math.tan(((cutter.helix ?? UNKNOWN_HELIX) * Math.PI) / 180) / (cutter.diameter / 2);
-  const unit = material.kc11 * (depth / HEIGHT_STEPS);
+  // Straight flutes load every height alike.
+  const heights = lag === 0 ? 1 : HEIGHT_STEPS;
+  const unit = material.kc11 * (depth / heights);
+  // The tooth with the thickest chip is in the cut at worst: from where its tip enters to where its top leaves.
+  const steps = Math.min(TURN_STEPS, Math.ceil(TURN_STEPS * (0.5 + (depth * lag) / (2 * Math.PI))));
   let force = 0;
   let moment = 0;
-  for (let i = 0; i < TURN_STEPS; i++) {
+  for (let i = 0; i < steps; i++) {
     let sum = 0;
     let lever = 0;
     for (let tooth = 0; tooth < cutter.flutes; tooth++) {
       const chip = tooth === 0 ? chips.most : chips.least;
-      for (let k = 0; k < HEIGHT_STEPS; k++) {
-        const z = (depth * (k + 0.5)) / HEIGHT_STEPS;
+      for (let k = 0; k < heights; k++) {
+        const z = (depth * (k + 0.5)) / heights;
         const sine = Math.sin(
           (2 * Math.PI * i) / TURN_STEPS + (2 * Math.PI * tooth) / cutter.flutes - z * lag,
         );

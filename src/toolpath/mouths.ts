@@ -74,7 +74,7 @@ function mouthAngle(form: WheelForm): number {
 }
 
 /** The outline on both sides of the space whose middle line is +X. */
-export function wallsOfSpace(form: WheelForm): Chain {
+function wallsOfSpace(form: WheelForm): Chain {
   const half = Math.PI / form.proportions.teeth;
   const pieces = form.sector.map(({ piece }) => piece);
   return [...turnChain(pieces, half), ...turnChain(pieces, -half)];

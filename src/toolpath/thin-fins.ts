@@ -5,20 +5,19 @@
  * In  : the form, the roughing path, cutter radius. Out: the path with that stretch in it, nothing where no thin fin stands.
  * On the middle line, at radius x, the fin is 2 (clearance(x) - distance - r) thick. Wheel frame, mm.
  */
-import { partOf } from '../geometry/change-piece.ts';
+import { partOf, turnChain } from '../geometry/change-piece.ts';
 import { nearestOnChain } from '../geometry/nearest-on-piece.ts';
 import { endOf, startOf } from '../geometry/on-piece.ts';
 import type { ArcPiece, LinePiece } from '../geometry/piece.ts';
 import { norm, scale, type Point } from '../geometry/point.ts';
 import type { WheelForm } from '../tooth/wheel.ts';
-import { wallsOfSpace } from './mouths.ts';
 import type { PathPiece, PitchPath } from './pitch-path.ts';
 
 /** Thinner than this share of the cutter's diameter a fin bends and sings; longer than so many times that it is no stump. Judgement. */
 const THIN = 0.5;
 const SLENDER = 2;
 /** The middle line is looked at in steps of this share of the cutter's radius. */
-const LOOK = 0.05;
+const LOOK = 0.2;
 
 export function downTheMiddle(form: WheelForm, path: PitchPath, radius: number): PitchPath | undefined {
   const out = endOfFin(form, path.distance, radius);
@@ -53,12 +52,16 @@ function line(from: Point, to: Point, next: boolean): PathPiece {
 
 /** The radius at which the fin is thick enough to stand, or the tip circle; nothing where it is a stump, or none. */
 function endOfFin(form: WheelForm, distance: number, radius: number): number | undefined {
-  const walls = wallsOfSpace(form);
+  // Both sides of a space are alike: the tooth after it will do.
+  const wall = turnChain(
+    form.sector.slice(0, Math.ceil(form.sector.length / 2)).map(({ piece }) => piece),
+    Math.PI / form.proportions.teeth,
+  );
   const thin = THIN * 2 * radius;
   let begins: number | undefined;
   let x = form.rootRadius + distance;
   for (; x < form.outsideRadius; x += LOOK * radius) {
-    const thick = 2 * ((nearestOnChain(walls, { x, y: 0 })?.distance ?? 0) - distance - radius);
+    const thick = 2 * ((nearestOnChain(wall, { x, y: 0 })?.distance ?? 0) - distance - radius);
     begins ??= thick > 0 ? x : undefined;
     if (thick >= thin) {
       break;
