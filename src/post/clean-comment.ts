@@ -47,6 +47,9 @@ const NEEDS_STAND_IN = /[^ -~]|[%&'";]/;
 /** Never in a comment, whatever the machine file allows: these open, close or delimit. */
 const NEVER = '()[]{};%/\\"\'#';
 
+/** What stands for done once a person has been at the machine, where no word says it: a title or a note must not. */
+const ORDER = /^(cutter \d+$|set the spindle to|switch the spindle off)/i;
+
 /** First words that some controllers act on even inside brackets. */
 const ACTIVE_FIRST = /^(MSG|PRINT|DEBUG|LOG|PROBE)/i;
 
@@ -58,13 +61,28 @@ export function commentCleaner(file: FileWords): Cleaner {
   const notAllowed = noneOf(letters);
   // Points and signs stay until words that could be read are broken and figures are said in full.
   const notAtFirst = noneOf(`${letters}.-`);
+  const colons = colonsAs(has);
   return (text) => {
-    const plain = NEEDS_STAND_IN.test(text) ? standIns(text) : text;
+    const plain = colons(NEEDS_STAND_IN.test(text) ? standIns(text) : text);
     const cased = file.letterCase === 'upper' ? plain.toUpperCase() : plain;
     const unread = breakWords(cased.replace(notAtFirst, ' '), has('='));
     const kept = signsInWords(unread, has).replace(notAllowed, ' ');
     return kept.replace(/ +(?=[ .,:])/g, '').trim();
   };
+}
+
+/** A colon that the letters lack still parts what it parted: "do what it says" must not run into what stands before it. */
+function colonsAs(has: (letter: string) => boolean): (text: string) => string {
+  if (has(':')) {
+    return (text) => text;
+  }
+  const instead = [' - ', ', ', '. '].find((sign) => has(sign.trim())) ?? ' ';
+  // A dash before a figure would read as its sign.
+  const beforeFigure = [', ', '. '].find((sign) => has(sign.trim())) ?? ' ';
+  return (text) =>
+    text.replace(/:(?: +|(?=\D)|$)(?=([-+.\d])?)/g, (_, figure?: string) =>
+      figure === undefined ? instead : beforeFigure,
+    );
 }
 
 /** What a comment may hold. */
@@ -132,4 +150,9 @@ export function foldText(text: string, width: number): readonly string[] {
   return lines
     .filter((each) => each !== '')
     .map((each) => (ACTIVE_FIRST.test(each) ? `NOTE ${each}`.slice(0, width) : each));
+}
+
+/** A line that would read as an order to whoever changes cutters and sets speeds by hand is made a note. */
+export function withoutOrders(line: string, width: number): string {
+  return ORDER.test(line) ? `NOTE ${line}`.slice(0, width) : line;
 }

@@ -6,7 +6,7 @@
 import type { Place, Problem } from '../base/problem.ts';
 import type { ProblemCode } from '../base/problem-codes.ts';
 import type { BlockWords, Machine } from '../machine/machine.ts';
-import { commentCleaner, foldText, type Cleaner } from './clean-comment.ts';
+import { commentCleaner, foldText, withoutOrders, type Cleaner } from './clean-comment.ts';
 import { formatCode } from './format-word.ts';
 
 export interface Sink {
@@ -97,28 +97,32 @@ function countOn(sink: Sink): void {
   sink.cutterBegins = false;
 }
 
+/** Whose a comment is: only the writer's own may say what a reader takes for done (`Cutter 5`). */
+export type Whose = 'own' | "anyone's";
+
 /** Texts as comments, each on lines of its own; nothing where the machine reads none. */
-export function writeComments(sink: Sink, texts: readonly string[]): void {
+export function writeComments(sink: Sink, texts: readonly string[], whose: Whose = "anyone's"): void {
   for (const text of texts) {
-    putComment(sink, text, '');
+    putComment(sink, text, '', whose);
   }
 }
 
 /** A comment the operator is shown, where the machine can. */
-export function writeOperatorNotes(sink: Sink, texts: readonly string[]): void {
+export function writeOperatorNotes(sink: Sink, texts: readonly string[], whose: Whose = "anyone's"): void {
   for (const text of texts) {
-    putComment(sink, text, sink.machine.words.file.operatorNote ?? '');
+    putComment(sink, text, sink.machine.words.file.operatorNote ?? '', whose);
   }
 }
 
-function putComment(sink: Sink, text: string, before: string): void {
+function putComment(sink: Sink, text: string, before: string, whose: Whose): void {
   const { commentForm, lineLongest } = sink.machine.words.file;
   if (commentForm === 'none') {
     return;
   }
   const [open, close] = commentForm === 'brackets' ? [`(${before}`, ')'] : [`;${before}`, ''];
-  for (const line of foldText(sink.clean(text), lineLongest - open.length - close.length)) {
-    sink.lines.push(open + line + close);
+  const width = lineLongest - open.length - close.length;
+  for (const line of foldText(sink.clean(text), width)) {
+    sink.lines.push(open + (whose === 'own' ? line : withoutOrders(line, width)) + close);
   }
 }
 

@@ -29,7 +29,7 @@ export function writeEvent(writer: Writer, event: EventStep): void {
       writeDwell(writer, event.seconds);
       break;
     case 'stop':
-      waitForHands(writer, [...spindleDown(writer), ...event.say]);
+      waitForHands(writer, spindleDown(writer), event.say);
       break;
     case 'note':
       writeComments(writer.sink, [event.text]);
@@ -43,7 +43,8 @@ function writeCutter(writer: Writer, number: number, say: readonly string[]): vo
   if (change === 'one-program') {
     oneCutterOnly(writer, number);
     writer.cutter = number;
-    writeComments(sink, [`Cutter ${number}`, ...say]);
+    writeComments(sink, [`Cutter ${number}`], 'own');
+    writeComments(sink, say);
     return;
   }
   const first = spindleDown(writer);
@@ -55,15 +56,15 @@ function writeCutter(writer: Writer, number: number, say: readonly string[]): vo
       hint: 'renumber the cutter in the job',
     });
   }
-  writeComments(sink, [`Cutter ${number}`]);
+  writeComments(sink, [`Cutter ${number}`], 'own');
   writer.cutter = number;
   if (change === 'by-hand') {
     cutterWords(writer, number);
-    waitForHands(writer, [...first, ...say]);
+    waitForHands(writer, first, say);
     return;
   }
   if (first.length > 0) {
-    waitForHands(writer, first);
+    waitForHands(writer, first, []);
   }
   writeComments(sink, say);
   automaticChange(writer);
@@ -126,9 +127,15 @@ function cutterWords(writer: Writer, number: number): void {
  * M0, with what to do said before it. What the person leaves behind is not known: where the machine has a top it goes
  * there before the spindle turns; elsewhere the person is asked to raise the cutter.
  */
-function waitForHands(writer: Writer, say: readonly string[]): void {
+function waitForHands(writer: Writer, orders: readonly string[], say: readonly string[]): void {
   const { sink, machine, grid } = writer;
+  writeOperatorNotes(sink, orders, 'own');
   writeOperatorNotes(sink, say);
+  if (writer.step > writer.lastMove) {
+    // Nothing moves after the last stop: there is nothing to make ready for.
+    writeCodes(sink, 'M0');
+    return;
+  }
   if (machine.words.positions.top === 'none') {
     const height = lengthInWords(writer.highestZ / grid.perMm, grid.unit);
     writeComments(sink, [`Before going on raise the cutter to height ${height} or above, over a free place`]);
@@ -144,13 +151,19 @@ function writeSpindle(writer: Writer, speed: number): void {
   const { sink, machine } = writer;
   const { run, forward, speedWord, spinUpSeconds } = machine.words.spindle;
   if (speed === 0) {
-    stopSpindle(writer);
+    if (run === 'by-hand') {
+      // A change of cutter that follows stops for both.
+      writer.offWanted = writer.spindle > 0;
+    } else {
+      stopSpindle(writer);
+    }
     return;
   }
+  writer.offWanted = false;
   writer.spindle = speed;
   const text = speedText(writer, speed);
   if (run === 'by-hand') {
-    waitForHands(writer, [`Set the spindle to ${text} turns a minute`, 'Let it reach that speed']);
+    waitForHands(writer, [`Set the spindle to ${text} turns a minute`], ['Let it reach that speed']);
     return;
   }
   if (speedWord === 'together') {
@@ -172,7 +185,7 @@ function speedText(writer: Writer, speed: number): string {
 export function stopSpindle(writer: Writer): void {
   const first = spindleDown(writer);
   if (first.length > 0) {
-    waitForHands(writer, first);
+    waitForHands(writer, first, []);
   }
 }
 
@@ -182,6 +195,7 @@ function spindleDown(writer: Writer): readonly string[] {
     return [];
   }
   writer.spindle = 0;
+  writer.offWanted = false;
   if (writer.machine.words.spindle.run === 'by-hand') {
     return ['Switch the spindle off'];
   }

@@ -15,7 +15,7 @@ import { headerLines } from './header.ts';
 import { writePathFor } from './path-words.ts';
 import { writeBeginning, writeEnding, writeLabel } from './program-ends.ts';
 import { complain, openSink, writeComments, type Sink } from './program-sink.ts';
-import { writeEvent } from './write-event.ts';
+import { stopSpindle, writeEvent } from './write-event.ts';
 import { writeMove } from './write-move.ts';
 import { openWriter, type Writer } from './writer.ts';
 
@@ -53,7 +53,7 @@ export function writeProgram(input: ProgramInput): Outcome<ProgramText> {
   const header = headerLines(input.header, machine);
   writeLabel(sink, input.label);
   writeComments(sink, header);
-  const writer = openWriter(machine, sink, highestOf(motion));
+  const writer = openWriter(machine, sink, highestOf(motion), motion.steps.findLastIndex(isMove));
   writeBeginning(writer);
   writeSteps(writer, motion);
   writeEnding(writer);
@@ -73,8 +73,12 @@ export function writeProgram(input: ProgramInput): Outcome<ProgramText> {
 }
 
 function writeSteps(writer: Writer, motion: Motion): void {
-  for (const step of motion.steps) {
+  for (const [i, step] of motion.steps.entries()) {
+    writer.step = i;
     if (isMove(step)) {
+      if (writer.offWanted) {
+        stopSpindle(writer);
+      }
       if (step.belongs !== undefined && step.belongs !== writer.belongs) {
         divide(writer, step.belongs);
       }

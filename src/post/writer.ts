@@ -45,13 +45,18 @@ export interface Writer {
   /** The feed last turned into a word: most moves share one. */
   lastFeed: { readonly value: number; readonly text: string };
   spindle: number;
+  /** Hands are to switch the spindle off, at the next stop there is a reason for, or before anything moves. */
+  offWanted: boolean;
+  /** Number of the last step that moves, and of the step being written. */
+  readonly lastMove: number;
+  step: number;
   cutter: number | null;
   path: string | null;
   belongs: Belongs | undefined;
   readonly arcs: { written: number; lined: number; worstMiss: number; worstLine: number };
 }
 
-export function openWriter(machine: Machine, sink: Sink, highestZ: number): Writer {
+export function openWriter(machine: Machine, sink: Sink, highestZ: number, lastMove: number): Writer {
   const grid = programGrid(machine);
   const width = machine.words.numbers.codeWidth;
   return {
@@ -81,6 +86,9 @@ export function openWriter(machine: Machine, sink: Sink, highestZ: number): Writ
     feedText: '',
     lastFeed: { value: NaN, text: '' },
     spindle: 0,
+    offWanted: false,
+    lastMove,
+    step: 0,
     cutter: null,
     path: null,
     belongs: undefined,

@@ -63,6 +63,29 @@ describe('text from anywhere never becomes a word', () => {
     }
   });
 
+  it.each(['Cutter 5', 'cutter 07', 'Set the spindle to 99 turns a minute', 'Switch the spindle off'])(
+    'a text reading %s is no order to whoever changes cutters and speeds by hand',
+    (text) => {
+      const byHand = { run: 'by-hand' } as const;
+      for (const change of ['by-hand', 'one-program'] as const) {
+        const cutters = { change, words: 'none' } as const;
+        const machine = changedMachine(desk, { cutters, spindle: byHand });
+        // A long title is folded, and a line of it may begin anywhere.
+        const title = `${'wheel '.repeat(200)}${text}`;
+        const traced = (said: string): unknown => {
+          const facts = { title: said === 'plain' ? said : title, part: [said], again: said };
+          const { steps } = motion(said);
+          const notes = [...steps.slice(0, 4), { kind: 'note', text: said } as const, ...steps.slice(4)];
+          const program = writeOne(machine, { steps: notes }, facts);
+          const { moves } = traceProgram('hands', program.text, machine);
+          return moves.map(({ kind, to, cutter, spindle }) => ({ kind, to, cutter, spindle }));
+        };
+        expect(traced(text)).toEqual(traced('plain'));
+        expect(traced('plain')).toContainEqual(expect.objectContaining({ cutter: 1, spindle: 12000 }));
+      }
+    },
+  );
+
   it('even with the comment marks gone, no letter stands alone before a number', () => {
     const files = MACHINE_NAMES.map((name) => postMachine(name).words.file);
     fc.assert(
