@@ -50,5 +50,5 @@ it.each(pairs)('%s and %s, figures of moves left out', (one, other) => {
   const [a, b] = [codes(one), codes(other)];
   const differing =
     [...a].filter((word) => !b.has(word)).length + [...b].filter((word) => !a.has(word)).length;
-  expect(differing).toBeGreaterThanOrEqual(one === 'bench-mill' && other === 'inch-bench-mill' ? 2 : LEAST);
+  expect(differing).toBeGreaterThanOrEqual(LEAST);
 });
