@@ -79,17 +79,18 @@ function spindleDangers(machine: Machine): readonly Danger[] {
   return those(
     byProgram &&
       spindle.spinUpSeconds === 0 &&
-      danger(
+      caution(
         'words.spindle.spin-up-seconds',
-        'Without a wait the cutter goes into the metal before the spindle is at speed, and breaks.',
-        'Give the seconds from standstill to full speed, by the watch, and one more.',
+        'No wait for the spindle is written: unless the controller itself waits until it is at speed, the cutter goes into the metal before, and breaks.',
+        'Watch it start with a move after M3. If it moves at once, give the seconds from standstill to full speed, and one more.',
       ),
     byProgram &&
+      spindle.spinUpSeconds > 0 &&
       dwell.letter === 'none' &&
       danger(
         'words.dwell.letter',
         'Without a dwell word the program cannot wait for the spindle: the cutter goes into the metal before it is at speed.',
-        'Look up the word after G4, or say run: by-hand in the spindle group.',
+        'Look up the word after G4; or say spin-up-seconds: 0 if the controller waits by itself, or run: by-hand.',
       ),
     spindle.forward === 'M4' &&
       caution(

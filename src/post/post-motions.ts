@@ -21,9 +21,16 @@ export function postMotions(machine: Machine): readonly NamedMotion[] {
   const { spindleLowest, spindleHighest, feedLowest, feedHighest } = machine.limits;
   const speed = Math.round((spindleLowest + spindleHighest) / 2);
   const feed = Math.min(Math.max(120, feedLowest), feedHighest);
+  // Where nothing waits, a machine file may go without a word for it.
+  const waits: readonly Step[] =
+    machine.words.dwell.letter === 'none' ? [] : [{ kind: 'dwell', seconds: 0.25 }];
   const changes = machine.words.cutters.change === 'one-program' ? [] : changeSteps(speed, feed);
   return [
-    { name: 'lines', what: 'rapids, lines, ramps, dwell, note', motion: program(speed, lineSteps(feed)) },
+    {
+      name: 'lines',
+      what: `rapids, lines, ramps,${waits.length > 0 ? ' a wait,' : ''} a note`,
+      motion: program(speed, lineSteps(feed, waits)),
+    },
     { name: 'arcs', what: 'arcs of every size and turn, circles', motion: program(speed, arcSteps(feed)) },
     { name: 'helix', what: 'helices and ramps on arcs', motion: program(speed, helixSteps(feed)) },
     { name: 'tiny', what: 'arcs near the last digit', motion: program(speed, tinySteps(feed)) },
@@ -55,7 +62,7 @@ function program(speed: number, steps: readonly Step[]): Motion {
 const ROUGHING: Belongs = { pass: 'roughing', lap: 1, laps: 2, depth: DEPTH };
 const FINISHING: Belongs = { pass: 'finishing', tooth: 1, depth: DEPTH };
 
-function lineSteps(feed: number): readonly Step[] {
+function lineSteps(feed: number, waits: readonly Step[]): readonly Step[] {
   return [
     { kind: 'note', text: 'a square with a ramp' },
     { kind: 'rapid', to: at(-4, -5, CLEAR + 2), belongs: ROUGHING },
@@ -63,7 +70,7 @@ function lineSteps(feed: number): readonly Step[] {
     { kind: 'line', to: at(-5, -5, 0.1), feed: feed / 2, belongs: ROUGHING },
     { kind: 'line', to: at(5, -5, DEPTH), feed, belongs: ROUGHING },
     { kind: 'line', to: at(5, 5, DEPTH), feed, belongs: FINISHING },
-    { kind: 'dwell', seconds: 0.25 },
+    ...waits,
     { kind: 'line', to: at(-4.99995, 5.00005, DEPTH), feed: feed / 3, belongs: FINISHING },
     { kind: 'line', to: at(-5, -5, DEPTH), feed, belongs: FINISHING },
     { kind: 'rapid', to: at(-5, -5, CLEAR) },

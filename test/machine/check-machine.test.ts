@@ -64,7 +64,7 @@ const CASES: readonly Case[] = [
   ['lengths with a T that is never written', 'din-66025', { 'words.cutters.length-offset': 'with-T' }, 'words.cutters.length-offset', 'error'],
   ['a length left to the next job', 'bench-mill', { 'words.cutters.length-cancel': 'none' }, 'words.cutters.length-cancel', 'error'],
   ['G49 without G43', 'din-66025', { 'words.cutters.length-cancel': 'G49-at-end' }, 'words.cutters.length-cancel', 'error'],
-  ['no wait for the spindle', 'desk-three-axis', { 'words.spindle.spin-up-seconds': 0 }, 'words.spindle.spin-up-seconds', 'error'],
+  ['no wait for the spindle', 'desk-three-axis', { 'words.spindle.spin-up-seconds': 0 }, 'words.spindle.spin-up-seconds', 'warning'],
   ['no word to wait with', 'desk-three-axis', { 'words.dwell.letter': 'none' }, 'words.dwell.letter', 'error'],
   ['a spindle that may turn backwards', 'desk-three-axis', { 'words.spindle.forward': 'M4' }, 'words.spindle.forward', 'warning'],
   ['a wait that is a move', 'desk-three-axis', { 'words.dwell.letter': 'X' }, 'words.dwell.letter', 'error'],

@@ -1,0 +1,31 @@
+/** What `machines check` writes and reads back: every machine file that is safe comes through, one that is not as it says does not. */
+import { describe, expect, it } from 'vitest';
+import { tryMachine } from '../../src/flow/try-machine.ts';
+import { changedMachine, MACHINE_NAMES, postMachine } from '../support/post-machines.ts';
+
+describe('the trial of a machine file', () => {
+  it.each(MACHINE_NAMES)('%s comes back as it was meant', (name) => {
+    const trial = tryMachine(postMachine(name), '0');
+    expect([trial.problems, trial.differences]).toEqual([[], []]);
+    expect(trial.words.split('\n').length).toBeGreaterThanOrEqual(4);
+  });
+
+  it.each([
+    ['the spindle is switched on by hand', { spindle: { run: 'by-hand' }, cutters: { change: 'by-hand' } }],
+    ['the controller waits for the spindle by itself', { spindle: { spinUpSeconds: 0 } }],
+  ] as const)('a machine without a word for a wait comes through where %s', (_, words) => {
+    const machine = changedMachine(postMachine('lines-only'), { ...words, dwell: { letter: 'none' } });
+    const trial = tryMachine(machine, '0');
+    expect([trial.problems, trial.differences]).toEqual([[], []]);
+    expect(trial.words).not.toContain('wait');
+  });
+
+  it('and does not where the spindle needs a wait', () => {
+    const machine = changedMachine(postMachine('lines-only'), {
+      dwell: { letter: 'none' },
+      spindle: { run: 'program', spinUpSeconds: 5 },
+    });
+    const { problems } = tryMachine(machine, '0');
+    expect(problems.map(({ code }) => code)).toContain('post.cannot-say');
+  });
+});
