@@ -9,6 +9,7 @@ import { markOf } from './base/mark.ts';
 import type { Outcome, Problem } from './base/problem.ts';
 import { headerFacts, type HeaderKind } from './flow/header-facts.ts';
 import { refusedText } from './flow/refused-text.ts';
+import { withRunoutOfMachine } from './flow/runout-of-machine.ts';
 import { sheetFacts, type Made, type Shapes, type Understood } from './flow/sheet-facts.ts';
 import { checkJobOnMachine } from './job/check-job.ts';
 import { placeInJob } from './job/place-problems.ts';
@@ -66,6 +67,8 @@ export interface CutResult {
 export function cut(input: CutInput): CutResult {
   input.stage('reading the job');
   const job = readJob(input.file, input.text, input.readCutters);
+  // Values that contradict each other, proportions of which no tooth follows and crossings that do not fit among them,
+  // are wrong in the job itself, whatever it is cut on: 2, as for a value that breaks its own rule.
   if (!job.ok) {
     return { exit: 2, problems: job.problems, files: [] };
   }
@@ -79,7 +82,8 @@ export function cut(input: CutInput): CutResult {
   }
   const problems = [...job.problems, ...machine.problems];
   const mark = markOf([input.version, input.text, found.value.text]);
-  return make(input, { job: job.value, machine: machine.value, mark }, problems);
+  const onMachine = withRunoutOfMachine(job.value, machine.value);
+  return make(input, { job: onMachine, machine: machine.value, mark }, problems);
 }
 
 /** From a job and a machine that are understood on. */
