@@ -22,6 +22,16 @@ export interface HeaderSources {
   readonly plan: CutPlan;
 }
 
+const PROVED = {
+  cut: 'read back from this text: the flanks against the exact curve at every depth, bore and crossings, travel, fast moves, keep-outs, feeds and spindle, loose metal',
+  walk: 'read back from this text: travel, keep-outs, nothing below the clear height, spindle still',
+} as const;
+
+const NOT_PROVED = {
+  cut: 'bending, wear and true running of the cutter, play of the slides, the holding, and whether zero is set where it says',
+  walk: 'whether zero is set where it says, and what stands on the table without being named in the job',
+} as const;
+
 /** Of the i-th program, or of all of them together for the sheet. */
 export function headerFacts(kind: HeaderKind, i: number | 'all', sources: HeaderSources): HeaderFacts {
   const { job, mark, version, form, plan } = sources;
@@ -38,7 +48,7 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
     version,
     part: partLines(sources, unit),
     program: { number: kind === 'walk' || i === 'all' ? 0 : i + 1, of: plan.programs.length },
-    blank: blankWords(job, unit),
+    blank: blankWords(job, unit, i === 'all'),
     holding: job.setup.holding.join(' and '),
     material: job.setup.material,
     cutters: job.setup.cutters.filter(({ number }) => numbers.includes(number)).map(headerCutter),
@@ -51,12 +61,8 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
     zero: job.zero,
     again: againWords(job, unit),
     check: { what: 'the diameter over the tips', size: overTips(form).most },
-    proved: [
-      'read back from this text: the flanks against the exact curve at every depth, bore and crossings, travel, fast moves, keep-outs, feeds and spindle, loose metal',
-    ],
-    notProved: [
-      'bending, wear and true running of the cutter, play of the slides, the holding, and whether zero is set where it says',
-    ],
+    proved: [PROVED[kind]],
+    notProved: [NOT_PROVED[kind]],
   };
 }
 
@@ -102,7 +108,8 @@ function partLines({ job, form, crossings }: HeaderSources, unit: LengthUnit): r
   ];
 }
 
-function blankWords(job: Job, unit: LengthUnit): string {
+/** Alloys with their numbers for the sheet only: in a program C353 would read as a word that moves. */
+function blankWords(job: Job, unit: LengthUnit, alloys: boolean): string {
   const { shape, topZ, plateZ } = job.setup;
   const thick = `${size(topZ - plateZ, unit)} thick`;
   const words =
@@ -110,13 +117,16 @@ function blankWords(job: Job, unit: LengthUnit): string {
       ? `sheet ${size(shape.width, unit)} by ${size(shape.height, unit)}, ${thick}, its middle at zero`
       : `disc ${size(shape.diameter, unit)} across, ${thick}, its axis at zero`;
   const material = materialNamed(job.setup.material)?.words;
-  return material === undefined ? words : `${words}, ${material}`;
+  return material === undefined || !alloys ? words : `${words}, ${material}`;
 }
 
 /** Zero may be bored away: a place that stays. */
 function againWords(job: Job, unit: LengthUnit): string {
-  const { shape, bored } = job.setup;
+  const { shape, bored, holding } = job.setup;
   if (shape.kind === 'disc') {
+    if (holding.includes('arbor')) {
+      return 'run a dial gauge round the arbor where it shows, or round the rim of the disc before the teeth are cut';
+    }
     return bored > 0
       ? 'run a dial gauge round the hole, which is the axis'
       : 'run a dial gauge round the rim of the disc before the teeth are cut, and mark two edges of the plate';

@@ -10,7 +10,7 @@ export function refusedText(programs: readonly ProgramText[], proof: Proof): str
     .filter(({ severity }) => severity === 'error')
     .map(
       ({ code, file, line, message, hint }) =>
-        `${file}:${line}: ${message}${hint === undefined ? '' : ` ${hint}`} [${code}]`,
+        `${file}:${line}: ${message}${hint === undefined ? '' : `. ${hint}`} [${code}]`,
     );
   const lines = [
     'REFUSED. This program failed its own proof. Do not run it, nor any part of it.',

@@ -33,3 +33,8 @@ export function lengthInWords(mm: number, unit: LengthUnit): string {
   const text = (mm / millimetresPer(unit)).toFixed(decimals);
   return `${Number(text) === 0 ? (0).toFixed(decimals) : text} ${unit}`;
 }
+
+/** A size that tells a wrong unit: in the program's unit first, then in the other. */
+export function bothUnits(mm: number, unit: LengthUnit): string {
+  return `${lengthInWords(mm, unit)} or ${lengthInWords(mm, unit === 'mm' ? 'inch' : 'mm')}`;
+}

@@ -7,14 +7,14 @@
  * ISO 13850 (emergency stop), NISTIR 6556 App. A (a controller checks neither travel nor collisions). Wording is our own.
  */
 import type { Machine } from '../machine/machine.ts';
-import { lengthInWords } from './belongs-text.ts';
+import { bothUnits, lengthInWords } from './belongs-text.ts';
 import type { HeaderFacts } from './header-facts.ts';
 import { materialCautions } from './material-cautions.ts';
 
 export function cautions(facts: HeaderFacts, machine: Machine): readonly string[] {
   return [
     ...whoAnswers(machine),
-    ...(facts.kind === 'cut' ? [] : stillSpindle(facts)),
+    ...(facts.kind === 'cut' ? [] : stillSpindle(facts, machine)),
     ...beforeTheStart(facts, machine),
     ...(facts.kind === 'cut' ? [...atTheCutter(facts, machine), ...materialCautions(facts.material)] : []),
     ...whenItStops(facts, machine),
@@ -34,10 +34,11 @@ function whoAnswers(machine: Machine): readonly string[] {
   ];
 }
 
-function stillSpindle(facts: HeaderFacts): readonly string[] {
+function stillSpindle(facts: HeaderFacts, machine: Machine): readonly string[] {
+  const lowest = lengthInWords(facts.extents.z[0], machine.units);
   return facts.kind === 'walk'
     ? [
-        'This program turns no spindle and stays at the clear height: watch that the cutter passes over or round everything that stands on the table',
+        `This program turns no spindle and goes round at height ${lowest}, never below it: watch that the cutter passes over or round everything that stands on the table`,
       ]
     : ['This program is for the air: no blank, no cutter near anything'];
 }
@@ -51,7 +52,7 @@ function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[]
     `Set zero with care, then move by hand to X 0, Y 0 and the clear height ${length(clear)} and look whether the place is right. Take off shifts, turns, scales and mirrors left by earlier work`,
     ...(facts.kind === 'cut' ? [airRun(facts, length)] : []),
     `The lowest point is height ${length(deepest)}${underTheBlank(facts, length)}. Compare all the reaches above with clamps, screws, vice, table edges and the ends of travel`,
-    `The words are in ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. A part that measures anything but ${lengthInWords(facts.check.size, 'mm')} at ${facts.check.what} is in the wrong unit or badly set: stop`,
+    `The words are in ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. A part that measures anything but ${bothUnits(facts.check.size, machine.units)} at ${facts.check.what} is in the wrong unit or badly set: stop`,
     ...facts.cutters.map(
       (cutter) =>
         `Cutter ${cutter.number} must be the one of ${length(cutter.diameter)}, clean in its collet, sticking out ${length(cutter.stickOut)} and no more, its length measured again after fitting`,

@@ -5,7 +5,7 @@
  *       into the machine's comment letters and line length. Lengths are printed in the program's unit, by its name.
  */
 import type { Machine } from '../machine/machine.ts';
-import { lengthInWords } from './belongs-text.ts';
+import { bothUnits, lengthInWords } from './belongs-text.ts';
 import { cautions } from './cautions.ts';
 import type { HeaderFacts } from './header-facts.ts';
 import type { Span } from './motion-facts.ts';
@@ -31,7 +31,7 @@ export function setUpLines(facts: HeaderFacts, machine: Machine): readonly strin
     KINDS[facts.kind] + placeInOrder(facts),
     ...facts.part.map((line) => `Part: ${line}`),
     `Machine file ${machine.name}, ${machine.proved === 'unproved' ? 'not yet proved on a machine' : `proved: ${machine.proved}`}`,
-    `Units: ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. To check: ${check.what} is ${bothUnits(check.size)}`,
+    `Units: ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. To check: ${check.what} is ${bothUnits(check.size, machine.units)}`,
     `Blank: ${facts.blank}. Material: ${facts.material}. Held by ${facts.holding}`,
     ...facts.cutters.map(
       (cutter) =>
@@ -58,8 +58,4 @@ function spindleLine(facts: HeaderFacts, machine: Machine): string {
   const way = machine.words.spindle.forward === 'M3' ? 'clockwise' : 'counter-clockwise';
   const hand = machine.words.spindle.run === 'by-hand' ? ', switched by hand at the stops' : '';
   return `Spindle: ${way} seen from above the work, ${facts.speeds.map((speed) => Math.round(speed)).join(' and ')} turns a minute${hand}`;
-}
-
-function bothUnits(mm: number): string {
-  return `${lengthInWords(mm, 'mm')} or ${lengthInWords(mm, 'inch')}`;
 }

@@ -14,9 +14,10 @@ import { heightsOf } from './heights.ts';
 import { layProgram, type LayTask } from './lay-program.ts';
 import { obstacleProblems } from './obstacle-problems.ts';
 import type { PassCuts } from './pass-cuts.ts';
-import { parkPlace, touchPlace } from './places.ts';
+import { parkPlace } from './places.ts';
 import type { CutPlan, ProgramPlan } from './plan.ts';
 import { reach } from './reach.ts';
+import { axisWords, sayAtCutter, touchWords } from './say-cutter.ts';
 import { teethCuts } from './teeth-cuts.ts';
 import { walkRound } from './walk-round.ts';
 
@@ -123,23 +124,15 @@ function byCutter(passes: readonly PassCuts[]): readonly (readonly PassCuts[])[]
 
 function layTask(task: CutTask, index: number): LayTask {
   const { job, machine, heights } = task;
-  const touch = touchPlace(task);
-  const place = `${touch.x.toFixed(2)} mm right of and ${touch.y.toFixed(2)} mm behind the axis`;
-  const again = `touch off its height on the wheel, ${place}: there the top is at height ${heights.top.toFixed(3)} mm`;
-  const { bored } = job.setup;
   return {
     job,
     machine,
     heights,
     park: parkPlace(task),
-    sayAtChange: [again],
+    sayAtChange: (cutter) => sayAtCutter(task, cutter),
     notes: [
-      ...(bored > 0
-        ? [
-            `the axis of the hole of ${bored} mm that is there is X and Y zero: find it with a dial gauge or pin`,
-          ]
-        : []),
-      ...(index > 0 ? [`a new cutter: ${again}; X and Y stay as they were`] : []),
+      ...(job.setup.bored > 0 ? [axisWords(task)] : []),
+      ...(index > 0 ? [`a new cutter: ${touchWords(task)}; X and Y stay as they were`] : []),
     ],
   };
 }

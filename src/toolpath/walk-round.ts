@@ -6,14 +6,16 @@
 import type { Motion, MoveStep, Position, Step } from '../motion/motion.ts';
 import type { CutTask } from './cut-task.ts';
 import type { PassCuts } from './pass-cuts.ts';
+import { sayAtCutter } from './say-cutter.ts';
 
 interface Box {
   readonly x: readonly [number, number];
   readonly y: readonly [number, number];
 }
 
-export function walkRound({ job, heights }: CutTask, passes: readonly PassCuts[], park: Position): Motion {
-  const first = passes[0];
+export function walkRound(task: CutTask, passes: readonly PassCuts[], park: Position): Motion {
+  const { job, heights } = task;
+  const first = passes[0]?.cutter;
   const z = heights.over;
   const { x, y } = boxOf(passes);
   const corners: readonly (readonly [number, number])[] = [
@@ -24,11 +26,17 @@ export function walkRound({ job, heights }: CutTask, passes: readonly PassCuts[]
     [x[0], y[0]],
   ];
   const over = job.setup.obstacles.map((o): readonly [number, number] => [o.x, o.y]);
+  const from = corners[0] as readonly [number, number];
+  const last = over.at(-1) ?? from;
   const steps: Step[] = [
     { kind: 'note', text: 'walk-round: the spindle stays still; watch the cutter, the clamps and the nut' },
     { kind: 'top' },
-    ...(first === undefined ? [] : [{ kind: 'cutter', number: first.cutter.number, say: [] } as const]),
+    ...(first === undefined
+      ? []
+      : [{ kind: 'cutter', number: first.number, say: sayAtCutter(task, first) } as const]),
     { kind: 'rapid', to: park },
+    // Height and the rest never change together: who watches sees one thing at a time.
+    { kind: 'rapid', to: { x: from[0], y: from[1], z: park.z }, belongs: { pass: 'round the extents' } },
     ...corners.map(([px, py]): MoveStep => ({
       kind: 'rapid',
       to: { x: px, y: py, z },
@@ -39,8 +47,9 @@ export function walkRound({ job, heights }: CutTask, passes: readonly PassCuts[]
       to: { x: px, y: py, z },
       belongs: { pass: 'over what stands in the way' },
     })),
-    { kind: 'top' },
+    { kind: 'rapid', to: { x: last[0], y: last[1], z: park.z } },
     { kind: 'rapid', to: park },
+    { kind: 'top' },
   ];
   return { steps };
 }

@@ -11,7 +11,7 @@ it('lists every field that the file gives, by its path there', () => {
 
 it('writes values as a file would', () => {
   const text = listFields(postMachine('desk-four-axis')).join('\n');
-  expect(text).toMatch(/^words\.arcs\.quadrants +yes$/m);
+  expect(text).toMatch(/^words\.arcs\.quadrants +no$/m);
   expect(text).toMatch(/^words\.positions\.top-machine-z +none$/m);
   expect(text).toMatch(/^limits\.travel\.x +\[0, 180\]$/m);
 });

@@ -72,7 +72,8 @@ describe('head of a program [29 CFR 1910.212; ISO 12100; what a set-up needs to 
     const lines = joined(headerLines(facts, postMachine('inch-bench-mill')));
     expect(lines).toContain('INCHES');
     expect(lines).toContain('-0.0630 inch');
-    expect(lines).toContain('31.471 mm or 1.2390 inch');
+    expect(lines).toContain('diameter is 1.2390 inch or 31.471 mm');
+    expect(lines).toContain('measures anything but 1.2390 inch or 31.471 mm');
     expect(lines).not.toContain('-1.600 mm');
   });
 

@@ -27,7 +27,7 @@ const cases: readonly Case[] = [
   ['letter case', { file: { letterCase: 'upper' } }, /^\(A SQUARE WITH A RAMP\)/m, /^\(a square/m],
   ['comment form', { file: { commentForm: 'semicolon' } }, /^;a square with a ramp$/m, /^\(/m],
   ['no comments', { file: { commentForm: 'none' } }, null, /^\(/m],
-  ['comment letters', { file: { commentLetters: '.' } }, /^\(Title Third/m, /^\(Title: Third/m],
+  ['comment letters', { file: { commentLetters: '.' } }, /^\(Title\. Third/m, /^\(Title: Third/m],
   [
     'operator note',
     { file: { operatorNote: null } },

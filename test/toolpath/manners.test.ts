@@ -1,5 +1,6 @@
 /** The manners of every program (a rapid moves no metal, nothing plunges, loops are joined on tips), over several jobs. */
 import { describe, expect, it } from 'vitest';
+import { isMove } from '../../src/motion/motion.ts';
 import { distance } from '../../src/geometry/point.ts';
 import { pinion } from '../tooth/proportions.ts';
 import { cutter, disc, inPass, makeCase, movesOf, planOf, type Case, type Wanted } from './make-job.ts';
@@ -83,7 +84,7 @@ describe.each(JOBS)('%s', (_, wanted) => {
         }
       }
       expect(speed).toBe(0);
-      expect(motion.steps.at(-1)).toMatchObject({ kind: 'rapid', to: plan.park });
+      expect(motion.steps.findLast(isMove)).toMatchObject({ kind: 'rapid', to: plan.park });
       expect(plan.park.z).toBeGreaterThanOrEqual(setup.clearZ);
     }
   });
