@@ -15,7 +15,7 @@ import {
   rmSync,
   writeFileSync,
 } from 'node:fs';
-import { basename, join } from 'node:path';
+import { basename, dirname, join, resolve } from 'node:path';
 import type { Outcome } from '../base/problem.ts';
 import { failure, success } from '../base/problem.ts';
 
@@ -81,7 +81,7 @@ export function changeFolder(folder: string, change: Change): Outcome<null> {
   const written: string[] = [];
   const renamed: { from: string; to: string }[] = [];
   try {
-    mkdirSync(folder, { recursive: true });
+    makeFolder(folder);
     for (const file of change.write) {
       const path = temporary(file.name);
       written.push(path);
@@ -109,13 +109,29 @@ export function changeFolder(folder: string, change: Change): Outcome<null> {
   }
 }
 
+/** With the folders above it. Not by Node's own `recursive`: where a folder is there and takes none (/proc), that never ends. */
+function makeFolder(folder: string): void {
+  if (existsSync(folder)) {
+    return;
+  }
+  const above = dirname(resolve(folder));
+  if (above !== resolve(folder)) {
+    makeFolder(above);
+  }
+  mkdirSync(folder);
+}
+
 function undo(
   folder: string,
   written: readonly string[],
   renamed: readonly { from: string; to: string }[],
 ): void {
   for (const path of written) {
-    rmSync(path, { force: true });
+    try {
+      rmSync(path, { force: true });
+    } catch {
+      // It never came to be: what stands in place of the folder takes no file.
+    }
   }
   for (const { from, to } of renamed.toReversed()) {
     if (!existsSync(join(folder, from))) {

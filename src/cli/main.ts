@@ -4,6 +4,14 @@ import { runProgram } from './program.ts';
 /** Exit code for a fault of ours (sysexits.h, EX_SOFTWARE). */
 const OUR_FAULT = 70;
 
+// Who reads what is printed may stop reading (`ogive machines | head`): that is no fault.
+process.on('uncaughtException', (error: NodeJS.ErrnoException) => {
+  if (error.code !== 'EPIPE') {
+    ourFault(error);
+  }
+  process.exit();
+});
+
 runProgram(process.argv.slice(2)).then((exit) => {
   process.exitCode = exit;
 }, ourFault);

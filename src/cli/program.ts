@@ -20,7 +20,7 @@ export async function runProgram(args: readonly string[]): Promise<Exit> {
     program.outputHelp();
     return 0;
   }
-  const stranger = unknownCommand(program, args[0] ?? '');
+  const stranger = unknownCommand(program, args);
   if (stranger !== undefined) {
     process.stderr.write(`${stranger}\n`);
     return 2;
@@ -36,14 +36,19 @@ export async function runProgram(args: readonly string[]): Promise<Exit> {
   return exit;
 }
 
-/** What to say where the first word is no command. */
-function unknownCommand(program: Command, word: string): string | undefined {
-  const names = [...program.commands.map((command) => command.name()), 'help'];
-  if (word.startsWith('-') || names.includes(word)) {
+/** What to say where a word that should name a command names none. */
+function unknownCommand(command: Command, [word = '-', ...rest]: readonly string[]): string | undefined {
+  const names = [...command.commands.map((one) => one.name()), 'help'];
+  if (names.length === 1 || word.startsWith('-')) {
     return undefined;
   }
+  const known = command.commands.find((one) => one.name() === word);
+  if (known !== undefined || word === 'help') {
+    return known && unknownCommand(known, rest);
+  }
   const near = nearestWord(word, names);
-  return `there is no command '${word}'${near === undefined ? '' : `; did you mean '${near}'?`} (ogive --help tells more)`;
+  const group = command.parent === null ? '' : `${command.name()} `;
+  return `there is no command '${group}${word}'${near === undefined ? '' : `; did you mean '${group}${near}'?`} (ogive ${group}--help tells more)`;
 }
 
 type Done = (code: Exit) => void;
@@ -55,6 +60,7 @@ function describe(done: Done): Command {
     .option('--notices', 'print the notices of the libraries inside')
     .showHelpAfterError('(ogive --help tells more)')
     .exitOverride()
+    .helpCommand('help [command]', 'the help of a command')
     .addHelpText('after', EXAMPLES);
   program.action(async (options: { notices?: boolean }) => {
     if (options.notices === true) {

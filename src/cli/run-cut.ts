@@ -107,20 +107,22 @@ function doneWords(result: CutResult, folder: string): string {
     return '';
   }
   const um = (mm: number): string => `${(mm * 1000).toFixed(2)} um`;
-  const time = (seconds: number): string => `${Math.max(1, Math.round(seconds / 60))} min`;
-  const place = (name: string): string => join(folder, name);
-  const names = [facts.walkFile ?? '', ...facts.programs.map(({ file }) => file)];
-  const width = Math.max(...names.map((name) => place(name).length), place(`${facts.job.name}.html`).length);
-  const rows = [
-    `${place(facts.walkFile ?? '').padEnd(width)}  run first: round the work at clear height, spindle still`,
-    ...facts.programs.map(
-      ({ file, cutters, seconds, blocks }) =>
-        `${place(file).padEnd(width)}  cutter ${cutters.join(', ')}; ${time(seconds)}; ${blocks} blocks`,
-    ),
-    `${place(`${facts.job.name}.html`).padEnd(width)}  the sheet to read beside the machine`,
-    `${place(`${facts.job.name}.svg`).padEnd(width)}  the drawing`,
-    `${place(`${facts.job.name}.json`).padEnd(width)}  the summary`,
-  ];
+  const minutes = facts.programs.map(({ seconds }) => String(Math.max(1, Math.round(seconds / 60))));
+  const counts = facts.programs.map(({ blocks }) => String(blocks));
+  const column = (texts: readonly string[], i: number): string =>
+    (texts[i] ?? '').padStart(Math.max(...texts.map((text) => text.length)));
+  const files = [
+    [facts.walkFile ?? '', 'run first: round the work at clear height, spindle still'],
+    ...facts.programs.map(({ file, cutters }, i) => [
+      file,
+      `cutter ${cutters.join(', ')}, ${column(minutes, i)} min, ${column(counts, i)} blocks`,
+    ]),
+    [`${facts.job.name}.html`, 'the sheet to read beside the machine'],
+    [`${facts.job.name}.svg`, 'the drawing'],
+    [`${facts.job.name}.json`, 'the summary'],
+  ].map(([name = '', words = '']) => [join(folder, name), words] as const);
+  const width = Math.max(...files.map(([path]) => path.length));
+  const rows = files.map(([path, words]) => `${path.padEnd(width)}  ${words}`);
   return [
     `Proved. The cut flank lies ${um(figures.flankGouge)} inside and ${um(figures.flankLeft)} outside the exact curve at worst; ${um(figures.leftAtRoot)} stay at the root.`,
     ...rows,

@@ -27,7 +27,7 @@ export function runNew(file: string | undefined, options: { readonly schema?: bo
   const done = changeFolder(dirname(file), { write: [{ name: basename(file), text }], rename: [] });
   terminal.problems(done.problems);
   if (done.ok && options.schema !== true) {
-    terminal.say(`${file} is written. It runs as it is: ogive cut ${file}`);
+    terminal.say(`${file} is written. It runs as it is: ogive cut ${/\s/.test(file) ? `'${file}'` : file}`);
   }
   return done.ok ? 0 : 2;
 }
