@@ -19,6 +19,13 @@ export interface Belongs {
   readonly laps?: number;
   /** Z at the end of that lap. */
   readonly depth?: number;
+  /** 1-based helix of a hole cleared ring by ring, inner first, of how many. */
+  readonly ring?: number;
+  readonly rings?: number;
+  /** All laps at this tooth follow each other: they are one place to whoever looks for it. */
+  readonly together?: true;
+  /** The tooth a lap began at, come back to where it closes. */
+  readonly again?: true;
 }
 
 export interface RapidStep {

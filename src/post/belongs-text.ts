@@ -9,6 +9,16 @@ import type { Belongs } from '../motion/motion.ts';
 
 export function belongsText(belongs: Belongs, unit: LengthUnit): string {
   const parts = [belongs.pass.charAt(0).toUpperCase() + belongs.pass.slice(1)];
+  if (belongs.ring !== undefined) {
+    parts.push(`ring ${belongs.ring}${belongs.rings === undefined ? '' : ` of ${belongs.rings}`}`);
+  }
+  if (belongs.together === true) {
+    parts.push(
+      `tooth ${belongs.tooth ?? 1}`,
+      belongs.laps === 1 ? 'in one level' : `in ${belongs.laps ?? 1} levels`,
+    );
+    return parts.join(', ');
+  }
   if (belongs.lap !== undefined) {
     parts.push(`lap ${belongs.lap}${belongs.laps === undefined ? '' : ` of ${belongs.laps}`}`);
   }
@@ -16,14 +26,19 @@ export function belongsText(belongs: Belongs, unit: LengthUnit): string {
     parts.push(`down to height ${lengthInWords(belongs.depth, unit)}`);
   }
   if (belongs.tooth !== undefined) {
-    parts.push(`tooth ${belongs.tooth}`);
+    parts.push(`tooth ${belongs.tooth}${belongs.again === true ? ' again' : ''}`);
   }
   return parts.join(', ');
 }
 
 export function belongsElsewhere(a: Belongs | undefined, b: Belongs): boolean {
   return (
-    a === undefined || a.pass !== b.pass || a.lap !== b.lap || a.tooth !== b.tooth || a.depth !== b.depth
+    a === undefined ||
+    a.pass !== b.pass ||
+    a.tooth !== b.tooth ||
+    (b.together !== true && (a.lap !== b.lap || a.depth !== b.depth)) ||
+    a.ring !== b.ring ||
+    a.again !== b.again
   );
 }
 

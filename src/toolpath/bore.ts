@@ -5,7 +5,7 @@
  * Out : the passes 'bore' and 'bore finishing', or why the cutter does not do. Centre X0 Y0, mm.
  */
 import { failure, success, type Outcome } from '../base/problem.ts';
-import { insideArcFeed } from '../cutting/arc-feed.ts';
+import { steppedArcFeed } from '../cutting/arc-feed.ts';
 import { ORIGIN, polar } from '../geometry/point.ts';
 import type { Belongs, MoveStep } from '../motion/motion.ts';
 import type { CutTask } from './cut-task.ts';
@@ -85,7 +85,7 @@ function finishing(task: CutTask, settings: Settings, radius: number, wall: numb
       ? settings.cutter.flute
       : Math.min(settings.cutter.flute, Math.max(job.cuts.bore.step, settings.radius)),
   );
-  const feed = insideArcFeed({
+  const feed = steppedArcFeed({
     feed: settings.data.feed,
     pathRadius: rho,
     cutterDiameter: settings.cutter.diameter,

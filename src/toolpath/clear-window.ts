@@ -8,12 +8,12 @@
  */
 import { SAME_POINT } from '../base/tolerances.ts';
 import { radians } from '../base/units.ts';
-import { insideArcFeed } from '../cutting/arc-feed.ts';
+import { steppedArcFeed } from '../cutting/arc-feed.ts';
 import { partOf } from '../geometry/change-piece.ts';
 import { nearestOnChain } from '../geometry/nearest-on-piece.ts';
 import { endOf, lengthOf, lengthOfChain, startOf } from '../geometry/on-piece.ts';
 import type { Loop, Piece } from '../geometry/piece.ts';
-import type { Point } from '../geometry/point.ts';
+import { addScaled, leftOf, scale, subtract, unit, type Point } from '../geometry/point.ts';
 import type { Belongs, MoveStep } from '../motion/motion.ts';
 import type { Heights } from './heights.ts';
 import { arcLeg, circleLegs, falling, flat, lineLeg, vertical, type Leg, type Run } from './leg.ts';
@@ -78,7 +78,10 @@ function enter({ task, from, to, belongs }: Level, ring: Ring): Run {
   const room = Math.min(FIRST_HELIX * r, ring.distance - outer);
   const slow = Math.min(settings.data.plunge, settings.data.feed);
   if (room >= LEAST_HELIX * r) {
-    const at = { x: middle.x + room, y: middle.y };
+    // From behind: the way from the helix to the ring goes on along the ring, and needs no turn back.
+    const heading = headingOf(middle, round[0]);
+    const at = addScaled(middle, heading, -room);
+    const straightOn = round[0]?.centre === undefined;
     const legs = circleLegs(middle, at, way * 2 * Math.PI, slow);
     const floor = legs.map((leg) => ({ ...leg, feed: arcFeed(settings, room) }));
     const turns = levelsFor(top - to, Math.min(2 * Math.PI * room * ramp, settings.step));
@@ -86,7 +89,11 @@ function enter({ task, from, to, belongs }: Level, ring: Ring): Run {
     const steps = [
       vertical(at, top, settings.data.plunge, belongs),
       ...falling(at, down, top, to, belongs),
-      ...flat([...floor, lineLeg(middle, settings.data.feed), ...round], to, belongs),
+      ...flat(
+        [...floor, ...(straightOn ? [] : [lineLeg(middle, settings.data.feed)]), ...round],
+        to,
+        belongs,
+      ),
     ];
     return { at, fastTo, steps };
   }
@@ -99,6 +106,14 @@ function enter({ task, from, to, belongs }: Level, ring: Ring): Run {
     ...flat(round, to, belongs),
   ];
   return { at: middle, fastTo, steps };
+}
+
+/** The way a leg sets out. */
+function headingOf(from: Point, leg: Leg | undefined): Point {
+  if (leg?.centre === undefined) {
+    return unit(subtract(leg?.to ?? from, from));
+  }
+  return scale(leftOf(unit(subtract(from, leg.centre))), Math.sign(leg.turn));
 }
 
 /** Once round a ring from its point nearest to `at`, the way of the pass. */
@@ -137,7 +152,7 @@ function ringFrom(
 }
 
 function arcFeed({ data, cutter }: Settings, pathRadius: number): number {
-  return insideArcFeed({
+  return steppedArcFeed({
     feed: data.feed,
     pathRadius,
     cutterDiameter: cutter.diameter,

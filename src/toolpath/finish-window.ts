@@ -3,11 +3,11 @@
  *
  * In  : the exact loop (counter-clockwise), cutter, metal left on the wall. Wheel frame, mm.
  * Out : one run, or nothing where no free place for the arcs was found. All pieces of the wall have their parallel as the
- *       corners are not smaller than the cutter. Feed on inside arcs as `insideArcFeed`; where a corner is hardly wider than
+ *       corners are not smaller than the cutter. Feed on inside arcs as `steppedArcFeed`; where a corner is hardly wider than
  *       the cutter, its engagement grows before the corner is reached, and the cutter slows there already.
  */
 import { SAME_POINT, TANGENT } from '../base/tolerances.ts';
-import { insideArcFeed } from '../cutting/arc-feed.ts';
+import { steppedArcFeed } from '../cutting/arc-feed.ts';
 import { offsetPiece, partOf, reversePiece } from '../geometry/change-piece.ts';
 import { nearestOnChain } from '../geometry/nearest-on-piece.ts';
 import { endOf, headingOn, lengthOf, startOf } from '../geometry/on-piece.ts';
@@ -69,8 +69,7 @@ export function finishWindow(task: WallTask): Run | undefined {
   const { feed } = settings.data;
   const legs = [
     arcLeg(join, addScaled(join, inward, radius), way * sweep, feed),
-    ...slowBeforeCorners(task, path),
-    lineLeg(left, feed),
+    ...runPast(slowBeforeCorners(task, path), left, feed),
     arcLeg(end, addScaled(left, inward, radius), way * sweep, feed),
     lineLeg(begin, feed),
   ];
@@ -81,6 +80,13 @@ export function finishWindow(task: WallTask): Run | undefined {
     steps.push(vertical(begin, z, feed, belongs), ...flat(legs, z, belongs));
   }
   return { at: begin, fastTo: heights.approach, steps };
+}
+
+/** Past the start on the straight that the loop ends on: one line where both have one feed. */
+function runPast(round: readonly Leg[], left: Point, feed: number): readonly Leg[] {
+  const last = round.at(-1);
+  const straight = last?.centre === undefined && last?.feed === feed;
+  return [...(straight ? round.slice(0, -1) : round), lineLeg(left, feed)];
 }
 
 /** The wall's parallel in travel order, from the middle of its longest straight side. */
@@ -132,7 +138,7 @@ function wallLeg({ settings, way, radialDepth }: WallTask, piece: Piece): Leg {
   }
   const feed =
     way * piece.turn > 0
-      ? insideArcFeed({
+      ? steppedArcFeed({
           feed: data.feed,
           pathRadius: piece.radius,
           cutterDiameter: cutter.diameter,

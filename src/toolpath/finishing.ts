@@ -6,7 +6,7 @@
  */
 import { rubbingFeed } from '../cutting/edge.ts';
 import { engagementAngle } from '../cutting/engagement.ts';
-import { insideArcFeed } from '../cutting/arc-feed.ts';
+import { steppedArcFeed } from '../cutting/arc-feed.ts';
 import { partOf } from '../geometry/change-piece.ts';
 import { lengthOf } from '../geometry/on-piece.ts';
 import type { LinePiece } from '../geometry/piece.ts';
@@ -95,7 +95,7 @@ function feedsOf({ settings, radialDepth }: FinishTask): FeedOf {
   const slow = cornerFeed(settings, radialDepth);
   return (role, piece) => {
     if (role === 'fillet' && piece.kind === 'arc') {
-      return insideArcFeed({
+      return steppedArcFeed({
         feed: data.feed,
         pathRadius: piece.radius,
         cutterDiameter: cutter.diameter,

@@ -108,7 +108,7 @@ function spaceRun({ form, settings, heights }: MouthTask, dips: readonly Dip[], 
   const steps: MoveStep[] = [];
   for (let lap = 1; lap <= laps; lap++) {
     const z = lap === laps ? heights.bottom : heights.top - ((heights.top - heights.bottom) * lap) / laps;
-    const belongs: Belongs = { pass: 'mouths', tooth: k + 1, lap, laps, depth: z };
+    const belongs: Belongs = { pass: 'mouths', tooth: k + 1, lap, laps, depth: z, together: true };
     steps.push(
       vertical(
         lap % 2 === 1 ? begin : at((dips.at(-1) as Dip).from, (dips.at(-1) as Dip).across),

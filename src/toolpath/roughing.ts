@@ -92,13 +92,15 @@ export function pushLap(
   let gone = 0;
   let z = heightAt(0);
   let belongs: Belongs = lap;
+  const first = round[0]?.tooth;
   for (const leg of round) {
     if (leg.falls) {
       gone += 1;
       z = heightAt(gone);
     }
     if (belongs.tooth !== leg.tooth) {
-      belongs = { ...lap, tooth: leg.tooth };
+      const again = belongs.tooth !== undefined && leg.tooth === first;
+      belongs = again ? { ...lap, tooth: leg.tooth, again } : { ...lap, tooth: leg.tooth };
     }
     steps.push(legStep(leg, z, belongs));
   }

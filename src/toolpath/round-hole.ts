@@ -8,7 +8,7 @@
  */
 import { SAME_POINT } from '../base/tolerances.ts';
 import { radians } from '../base/units.ts';
-import { insideArcFeed } from '../cutting/arc-feed.ts';
+import { steppedArcFeed } from '../cutting/arc-feed.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Belongs, MoveStep } from '../motion/motion.ts';
 import type { Heights } from './heights.ts';
@@ -44,12 +44,18 @@ export function roundHole(hole: RoundHole): Run {
     const inner = radii[i - 1];
     const start = { x: centre.x + radius, y: centre.y };
     const last = steps.at(-1)?.to;
+    const laps = lapsOf(
+      hole,
+      radius,
+      radii.length > 1 ? { pass, ring: i + 1, rings: radii.length } : { pass },
+    );
+    const first = laps[0] as Belongs;
     if (last !== undefined) {
-      steps.push({ kind: 'rapid', to: { ...last, z: heights.approach }, belongs: { pass } });
-      steps.push(vertical(start, heights.approach, settings.data.feed, { pass }));
+      steps.push({ kind: 'rapid', to: { ...last, z: heights.approach }, belongs: first });
+      steps.push(vertical(start, heights.approach, settings.data.feed, first));
     }
     const open = inner ?? hole.existing - r;
-    steps.push(...helix(hole, start, radius, open > 0 ? radius - open : 2 * r));
+    steps.push(...helix(hole, laps, start, radius, open > 0 ? radius - open : 2 * r));
   });
   return {
     at: { x: centre.x + (radii[0] ?? 0), y: centre.y },
@@ -70,13 +76,28 @@ export function helixRadii(hole: Pick<RoundHole, 'radius' | 'existing' | 'settin
   );
 }
 
-function helix(hole: RoundHole, start: Point, radius: number, radialDepth: number): MoveStep[] {
-  const { centre, settings, heights, way, pass } = hole;
+/** The turns of a helix, each with the height it ends at. */
+function lapsOf({ settings, heights }: RoundHole, radius: number, ring: Belongs): readonly Belongs[] {
+  const top = heights.top + HELIX_ABOVE;
+  const pitch = Math.min(settings.step, 2 * Math.PI * radius * Math.tan(radians(settings.data.ramp)));
+  const laps = levelsFor(top - heights.bottom, pitch);
+  return Array.from({ length: laps }, (_, i) => {
+    const depth = i + 1 === laps ? heights.bottom : top + ((heights.bottom - top) * (i + 1)) / laps;
+    return { ...ring, lap: i + 1, laps, depth };
+  });
+}
+
+function helix(
+  hole: RoundHole,
+  laps: readonly Belongs[],
+  start: Point,
+  radius: number,
+  radialDepth: number,
+): MoveStep[] {
+  const { centre, settings, heights, way } = hole;
   const { data } = settings;
   const top = heights.top + HELIX_ABOVE;
-  const pitch = Math.min(settings.step, 2 * Math.PI * radius * Math.tan(radians(data.ramp)));
-  const turns = levelsFor(top - heights.bottom, pitch);
-  const beside = insideArcFeed({
+  const beside = steppedArcFeed({
     feed: data.feed,
     pathRadius: radius,
     cutterDiameter: 2 * settings.radius,
@@ -85,14 +106,14 @@ function helix(hole: RoundHole, start: Point, radius: number, radialDepth: numbe
     speed: data.speed,
   });
   const feed = radialDepth < 2 * settings.radius ? beside : Math.min(beside, data.plunge);
-  const zAt = (turn: number): number =>
-    turn === turns ? heights.bottom : top + ((heights.bottom - top) * turn) / turns;
   const round = (at: number): Leg[] => circleLegs(centre, start, way * 2 * Math.PI, at);
-  const steps: MoveStep[] = [vertical(start, top, data.plunge, { pass, depth: heights.bottom })];
-  for (let turn = 1; turn <= turns; turn++) {
-    const belongs: Belongs = { pass, lap: turn, laps: turns, depth: zAt(turn) };
-    steps.push(...falling(start, round(feed), zAt(turn - 1), zAt(turn), belongs));
+  const steps: MoveStep[] = [vertical(start, top, data.plunge, laps[0] as Belongs)];
+  let z = top;
+  for (const belongs of laps) {
+    const { depth = heights.bottom } = belongs;
+    steps.push(...falling(start, round(feed), z, depth, belongs));
+    z = depth;
   }
-  steps.push(...flat(round(beside), heights.bottom, { pass, depth: heights.bottom }));
+  steps.push(...flat(round(beside), heights.bottom, laps.at(-1) as Belongs));
   return steps;
 }

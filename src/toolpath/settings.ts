@@ -49,7 +49,13 @@ export function settingsFor(
   const asked: CutSettings = job.cuts[kind];
   const { cutter } = asked;
   const material = materialOf(job);
-  const data = cutData({ material, cutter, radialDepth, limits: machine.limits, asked });
+  const request = { material, cutter, radialDepth, limits: machine.limits };
+  const chosen = cutData({ ...request, asked });
+  const dial = dialSpeed(machine, chosen.speed);
+  const data =
+    dial === chosen.speed
+      ? chosen
+      : onTheDial(cutData({ ...request, asked: { ...asked, speed: dial } }), chosen);
   const settings: Settings = { cutter, radius: cutter.diameter / 2, data, step: cutter.flute, why: data.why };
   if (radialDepth !== 'slot') {
     return success(settings);
@@ -77,6 +83,23 @@ export function settingsFor(
   }
   const why = `at most ${slot.depth.toFixed(3)} mm a lap: ${slot.why}`;
   return success({ ...settings, step: slot.depth, why: [...data.why, why] });
+}
+
+/** What a dial set by hand can be set to. Judgement: its marks stand a thousand apart and are read to a tenth. */
+const DIAL = 100;
+
+/** The speed a person is asked to set: rounded down to what a dial shows, where hands set it. */
+function dialSpeed({ words, limits }: Machine, speed: number): number {
+  return words.spindle.run === 'by-hand'
+    ? Math.max(Math.floor(speed / DIAL) * DIAL, Math.min(limits.spindleLowest, speed))
+    : speed;
+}
+
+/** The reason for the speed is that of the speed chosen first. */
+function onTheDial(data: CutData, chosen: CutData): CutData {
+  const [first, ...rest] = data.why;
+  const why = `${chosen.why[0] ?? first ?? ''}, set to ${data.speed} on the dial`;
+  return { ...data, why: [why, ...rest] };
 }
 
 /** The same depth for every level, none deeper than `step`. */

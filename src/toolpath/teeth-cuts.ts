@@ -47,7 +47,7 @@ interface Teeth {
   readonly fins: boolean;
 }
 
-/** Metal at the root, over the finishing cutter's diameter, above which it is no finishing any more. Judgement. */
+/** Metal in the root's corner, over the finishing cutter's diameter, above which its middle cuts too: a slot, no finishing. */
 const THICK = 0.25;
 /** How far the roughing path may stray outward, over the allowance: few blocks, and hardly more to finish. Judgement. */
 const ROUGH_STRAYS = 0.1;
@@ -228,7 +228,7 @@ function finishingLevels({
     return failure([...roughed.problems, ...finished.problems]);
   }
   const thick = roughed.value.leftAtRoot - finished.value.leftAtRoot;
-  if (thick > THICK * fine.cutter.diameter) {
+  if (thick + allowance > THICK * fine.cutter.diameter) {
     const slot = settingsFor(job, machine, 'finishing', 'slot', 0);
     if (!slot.ok) {
       return slot;

@@ -6,12 +6,8 @@
 import type { Motion, MoveStep, Position, Step } from '../motion/motion.ts';
 import type { CutTask } from './cut-task.ts';
 import type { PassCuts } from './pass-cuts.ts';
+import { nearestIn, withinTravel, type Box } from './places.ts';
 import { sayAtCutter } from './say-cutter.ts';
-
-interface Box {
-  readonly x: readonly [number, number];
-  readonly y: readonly [number, number];
-}
 
 export function walkRound(task: CutTask, passes: readonly PassCuts[], park: Position): Motion {
   const { job, heights } = task;
@@ -25,7 +21,12 @@ export function walkRound(task: CutTask, passes: readonly PassCuts[], park: Posi
     [x[0], y[1]],
     [x[0], y[0]],
   ];
-  const over = job.setup.obstacles.map((o): readonly [number, number] => [o.x, o.y]);
+  // A clamp beyond the travel is looked at from the nearest place.
+  const reach = withinTravel(task);
+  const over = job.setup.obstacles.map((obstacle): readonly [number, number] => {
+    const at = nearestIn(reach, obstacle);
+    return [at.x, at.y];
+  });
   const from = corners[0] as readonly [number, number];
   const last = over.at(-1) ?? from;
   const steps: Step[] = [

@@ -1,6 +1,6 @@
 /** Worked values of cutting force, engagement, bending and feed, typed from where each test names. */
 import { describe, expect, it } from 'vitest';
-import { insideArcFeed } from '../../src/cutting/arc-feed.ts';
+import { insideArcFeed, steppedArcFeed } from '../../src/cutting/arc-feed.ts';
 import { cutData } from '../../src/cutting/cut-data.ts';
 import {
   engagementAngle,
@@ -213,6 +213,15 @@ describe('feed on inside arcs [Fc = F (hole - d) / hole]', () => {
     });
     expect(slow).toBeCloseTo(centre, 2);
   });
+  it.each([3, 3.2, 5, 9, 40, 900])(
+    'in steps a path of radius %d is no faster, and hardly slower',
+    (pathRadius) => {
+      const arc = { feed: 384, pathRadius, cutterDiameter: 1, radialDepth: 0.5, flutes: 2, speed: 24_000 };
+      const [exact, steps] = [insideArcFeed(arc), steppedArcFeed(arc)];
+      expect(steps).toBeLessThanOrEqual(exact);
+      expect(steps).toBeGreaterThan(exact / 1.0201);
+    },
+  );
   it('never goes below the feed at which the edge rubs', () => {
     const slow = insideArcFeed({
       feed: 150,

@@ -17,6 +17,7 @@ interface Written {
   readonly lines: readonly string[];
 }
 
+const THIRD: Written[] = [];
 const KNOWN = new Map<string, readonly Written[]>();
 
 function programs(machine: string): readonly Written[] {
@@ -155,6 +156,91 @@ describe('needless moves', () => {
         expect(both && !cut && move.from.z !== move.to.z && before.from.z !== before.to.z).toBe(false);
       });
     }
+  });
+});
+
+describe('comments by which a person finds their place', () => {
+  const third = (): readonly Written[] => (
+    THIRD.length === 0 ? THIRD.push(...written('third-wheel', sampleText('third-wheel'))) : 0,
+    THIRD
+  );
+  const comments = ({ lines }: Written): string[] => lines.filter((line) => line.startsWith('('));
+
+  it('rings of a hole: none of two comments is the same, and none is bare', () => {
+    for (const program of third()) {
+      const rings = comments(program).filter(
+        (line) => /^\((BORE|BAY)\b/.test(line) && !/FINISHING/.test(line),
+      );
+      expect(new Set(rings).size).toBe(rings.length);
+      expect(
+        rings.filter((line) => !/LAP \d+ OF \d+, DOWN TO HEIGHT/.test(line) && !/^\(BORE \d/.test(line)),
+      ).toEqual([]);
+    }
+    expect(third().some(({ said }) => said.includes('BORE, RING 2 OF'))).toBe(true);
+  });
+
+  it('tooth 1 is announced once a lap, and once more where the lap closes', () => {
+    for (const program of third()) {
+      const teeth = comments(program).filter((line) =>
+        /^\((ROUGHING|FINISHING).*TOOTH 1( AGAIN)?\)$/.test(line),
+      );
+      expect(new Set(teeth).size).toBe(teeth.length);
+    }
+    expect(third().some(({ said }) => said.includes('TOOTH 1 AGAIN'))).toBe(true);
+  });
+
+  it('mouths of a disc: one comment a tooth, with its levels', () => {
+    const [program] = written('disc-wheel', sampleText('disc-wheel'));
+    const mouths = comments(program as Written).filter((line) => line.startsWith('(MOUTHS'));
+    expect(mouths).toHaveLength(72);
+    expect(mouths[4]).toMatch(/^\(MOUTHS, TOOTH 5, IN \d+ LEVELS\)$/);
+  });
+
+  it('a level of a crossing: no way to the middle of the helix and straight back', () => {
+    for (const { name, text } of third()) {
+      const lines = traceProgram(name, text, postMachine('desk-three-axis'), { cutter: 1 }).moves;
+      const back = lines.filter((move, i) => {
+        const before = lines[i - 1];
+        if (move.kind !== 'line' || before?.kind !== 'line') {
+          return false;
+        }
+        const [a, b] = [before, move].map(({ from, to }) => ({
+          x: (to.x ?? 0) - (from.x ?? 0),
+          y: (to.y ?? 0) - (from.y ?? 0),
+        })) as [{ x: number; y: number }, { x: number; y: number }];
+        const long = Math.hypot(a.x, a.y) * Math.hypot(b.x, b.y);
+        return long > 0 && (a.x * b.x + a.y * b.y) / long < -0.999;
+      });
+      expect(back).toEqual([]);
+    }
+  });
+});
+
+describe('figures nobody can set or tell apart', () => {
+  // Where F counts along the circle under a helix, it has to follow the slope.
+  const alongHelix = MACHINES.filter((name) => postMachine(name).words.path.helixFeedAlong === 'helix');
+  it.each(alongHelix)('%s: no feed follows another that lies within a hundredth of it', (name) => {
+    for (const { text, lines } of cutting(name)) {
+      expect(text).toMatch(/F\d/);
+      const feeds = lines
+        .filter((line) => !/^[(;]/.test(line))
+        .flatMap((line) => /F([\d.]+)/.exec(line)?.[1] ?? []);
+      const close = feeds.map(Number).filter((feed, i, all) => {
+        const before = all[i - 1] ?? 0;
+        return feed !== before && Math.abs(feed - before) < 0.01 * feed;
+      });
+      expect(close).toEqual([]);
+    }
+  });
+
+  it('a spindle run by hand is set to whole hundreds, and the head says the same', () => {
+    const job = onMachine(SMALL, 'lines-only').replace(
+      'bore: { cutter: 1 }',
+      'bore: { cutter: 1, speed: 20050 }',
+    );
+    const [program] = written('small-wheel', job).filter(({ name }) => !name.includes('-walk'));
+    expect(program?.said).toMatch(/SET THE SPINDLE TO 20000 TURNS A MINUTE/);
+    expect(program?.said).not.toMatch(/20050/);
   });
 });
 
