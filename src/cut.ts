@@ -163,7 +163,7 @@ function proved(
     target: {
       ...shapes,
       thickness: job.wheel.thickness,
-      bore: Math.max(job.wheel.bore - 2 * job.cuts.bore.leave, 0),
+      bore: Math.max(job.wheel.bore - job.cuts.bore.leave, 0),
       finishingDiameter: job.cuts.finishing.cutter.diameter,
       slugsHeld: job.setup.holding.includes('skin'),
     },
