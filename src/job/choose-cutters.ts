@@ -6,6 +6,7 @@
  * Widths and rules of roughing: the root of a space is as wide as D + 2 allowance + room for the chips. mm.
  */
 import { Bug } from '../base/bug.ts';
+import { SAME_POINT } from '../base/tolerances.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import type { ToothSide } from '../tooth/tooth-side.ts';
 import { largestCutter } from '../tooth/largest-cutter.ts';
@@ -45,7 +46,7 @@ export function chooseRoughing(
 ): Choice {
   const width = rootWidth(side);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth &&
+    cutter.reach >= depth - SAME_POINT &&
     width >= cutter.diameter + 2 * (allowance ?? usualAllowance(cutter.diameter)) + CHIP_ROOM &&
     (finishing === undefined ||
       finishing.diameter <= cutter.diameter + (allowance ?? usualAllowance(cutter.diameter)));
@@ -55,14 +56,15 @@ export function chooseRoughing(
 export function chooseFinishing({ cutters, depth, side }: Choosing, slot: number): Choice {
   const reaches = 2 * largestCutter(side);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth && cutter.diameter <= Math.min(reaches, slot);
+    cutter.reach >= depth - SAME_POINT && cutter.diameter <= Math.min(reaches, slot);
   const why = `the largest that gets to the root, where ${reaches.toFixed(3)} mm would fit, in the slot that was roughed`;
-  const full = cutters.filter((cutter) => cutter.flute >= depth);
+  const full = cutters.filter((cutter) => cutter.flute >= depth - SAME_POINT);
   return full.some(fits) ? largest(full, fits, why) : largest(cutters, fits, why);
 }
 
 export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {
-  const fits = (cutter: Cutter): boolean => cutter.reach >= depth && cutter.diameter <= HOLE_SHARE * bore;
+  const fits = (cutter: Cutter): boolean =>
+    cutter.reach >= depth - SAME_POINT && cutter.diameter <= HOLE_SHARE * bore;
   return largest(cutters, fits, `the largest that has room to go round in a bore of ${bore} mm`);
 }
 
@@ -70,7 +72,7 @@ export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings
   const { corner } = windows.proportions;
   const room = HOLE_SHARE * (windows.windowOuter - windows.windowInner);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth && cutter.diameter < 2 * corner && cutter.diameter <= room;
+    cutter.reach >= depth - SAME_POINT && cutter.diameter < 2 * corner && cutter.diameter <= room;
   return largest(cutters, fits, `the largest that goes round corners of ${corner} mm radius`);
 }
 
