@@ -22,9 +22,13 @@ export const CHIP_ROOM = 0.05;
 /** Largest cutter over the hole it clears, so that there is a ring to go round. */
 const HOLE_SHARE = 0.8;
 
-/** Metal left for finishing: a twentieth of the cutter, at least what covers bending, at most what is cut in one pass. */
+/**
+ * Metal left for finishing: a twentieth of the cutter, at least what covers bending, at most what is cut in one pass; of the
+ * finest cutters no more than a tenth, lest their finishing become a slot in the corners of the root.
+ */
 export function usualAllowance(diameter: number): number {
-  return Math.min(0.1, Math.max(0.02, Number((0.05 * diameter).toFixed(3))));
+  const least = Math.max(0.05 * diameter, Math.min(0.02, 0.1 * diameter));
+  return Math.min(0.1, Number(least.toFixed(3)));
 }
 
 /** Width of a tooth space at the root circle. */

@@ -100,12 +100,14 @@ it('crossings: smaller than twice the corner', () => {
 });
 
 it.each([
+  [0.05, 0.005],
+  [0.1, 0.01],
   [0.3, 0.02],
   [0.5, 0.025],
   [1, 0.05],
   [3, 0.1],
 ])(
-  'allowance for a cutter of %f mm is %f mm (judgement: 0.02 to 0.03 at 0.3 to 0.5, 0.05 at 1, 0.1 at 3)',
+  'allowance for a cutter of %f mm is %f mm (judgement: a tenth up to 0.2, 0.02 to 0.03 at 0.3 to 0.5, 0.05 at 1, 0.1 at 3)',
   (d, a) => {
     expect(usualAllowance(d)).toBe(a);
   },
