@@ -1,0 +1,70 @@
+/** Jobs that random ones found refused, or written wrong, without a reason: each cut to the smallest that shows it. */
+import { expect, it } from 'vitest';
+import { cutText } from '../support/cut-text.ts';
+
+interface Small {
+  readonly wheel?: string;
+  readonly blank?: string;
+  readonly more?: readonly string[];
+  readonly machine?: string;
+  readonly cutters?: readonly string[];
+  readonly cuts?: readonly string[];
+}
+
+/** A wheel of twelve teeth: as few blocks as a wheel can have. */
+function small({ wheel, blank, more = [], machine = 'bench-mill', cutters, cuts = [] }: Small): string {
+  return [
+    `wheel: ${wheel ?? '{ teeth: 12, mate: { leaves: 8 }, module: 0.5, thickness: 0.3 }'}`,
+    `blank: ${blank ?? '{ material: leaded-brass, shape: sheet, size: [12, 12], holding: glue }'}`,
+    ...more,
+    `machine: ${machine}`,
+    'cutters:',
+    ...(cutters ?? ['{ diameter: 0.4, reach: 1.2, flute: 1.2, helix: 30 }']).map(
+      (cutter, i) => `  ${i + 1}: ${cutter}`,
+    ),
+    ...(cuts.length > 0 ? ['cuts:', ...cuts.map((cut) => `  ${cut}`)] : []),
+    '',
+  ].join('\n');
+}
+
+function complaints(text: string): readonly string[] {
+  const { problems, facts } = cutText('small', text);
+  return [...problems, ...(facts?.proof?.findings ?? [])]
+    .filter(({ severity }) => severity === 'error')
+    .map(({ code, message }) => `${code}: ${message}`);
+}
+
+it('metal left in the bore for broaching is on the diameter, for the proof too', () => {
+  const wheel = '{ teeth: 12, mate: { leaves: 8 }, module: 0.5, thickness: 0.3, bore: 1.2 }';
+  expect(complaints(small({ wheel, cuts: ['bore: { leave: 0.1 }'] }))).toEqual([]);
+});
+
+it('a cutter that reaches 0.3 goes through 0.2 and 0.1 below, whatever binary fractions make of their sum', () => {
+  const wheel = '{ teeth: 12, mate: { leaves: 8 }, module: 0.5, thickness: 0.2 }';
+  const cutters = ['{ diameter: 0.4, reach: 0.3, flute: 0.3, helix: 30 }'];
+  expect(complaints(small({ wheel, cutters }))).toEqual([]);
+});
+
+it('a clamp beyond the travel is walked to no further than the travel goes', () => {
+  const blank =
+    '{ material: leaded-brass, shape: sheet, size: [12, 12], holding: glue, keep-out: [{ x: 90, y: 100, radius: 5, height: 3 }, { x: -90, y: -100, radius: 5, height: 3 }] }';
+  expect(complaints(small({ blank }))).toEqual([]);
+});
+
+it('the cutter is parked within the travel, beside a wheel that nearly fills it', () => {
+  const wheel = '{ teeth: 56, mate: { leaves: 8 }, module: 2, thickness: 0.5 }';
+  const blank = '{ material: leaded-brass, shape: sheet, size: [160, 160], holding: glue }';
+  const cutters = ['{ diameter: 1.2, reach: 3, flute: 3, helix: 30 }'];
+  expect(complaints(small({ wheel, blank, cutters, machine: 'desk-four-axis' }))).toEqual([]);
+});
+
+it.each([undefined, 0.02])(
+  'a cutter of 0.1 cuts no slot while it finishes, with an allowance of %s',
+  (allowance) => {
+    const wheel = '{ teeth: 12, mate: { leaves: 8 }, module: 0.15, thickness: 0.25 }';
+    const cutters = ['{ diameter: 0.1, reach: 0.4, flute: 0.4, helix: 30 }'];
+    const blank = '{ material: leaded-brass, shape: sheet, size: [6, 6], holding: glue }';
+    const cuts = allowance === undefined ? [] : [`roughing: { allowance: ${allowance} }`];
+    expect(complaints(small({ wheel, blank, cutters, cuts }))).toEqual([]);
+  },
+);
