@@ -59,10 +59,10 @@ it('the cutter is parked within the travel, beside a wheel that nearly fills it'
 });
 
 it.each([undefined, 0.02])(
-  'a cutter of 0.1 cuts no slot while it finishes, with an allowance of %s',
+  'a cutter of 0.08 cuts no slot while it finishes, with an allowance of %s',
   (allowance) => {
-    const wheel = '{ teeth: 12, mate: { leaves: 8 }, module: 0.15, thickness: 0.25 }';
-    const cutters = ['{ diameter: 0.1, reach: 0.4, flute: 0.4, helix: 30 }'];
+    const wheel = '{ teeth: 12, mate: { leaves: 8 }, module: 0.15, thickness: 0.3 }';
+    const cutters = ['{ diameter: 0.08, reach: 0.6, flute: 0.6, helix: 30, stick-out: 10 }'];
     const blank = '{ material: leaded-brass, shape: sheet, size: [6, 6], holding: glue }';
     const cuts = allowance === undefined ? [] : [`roughing: { allowance: ${allowance} }`];
     expect(complaints(small({ wheel, blank, cutters, cuts }))).toEqual([]);
