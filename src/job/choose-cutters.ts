@@ -8,8 +8,10 @@
 import { Bug } from '../base/bug.ts';
 import { SAME_POINT } from '../base/tolerances.ts';
 import type { Cutter } from '../cutting/setup.ts';
-import type { ToothSide } from '../tooth/tooth-side.ts';
+import { norm } from '../geometry/point.ts';
 import { largestCutter } from '../tooth/largest-cutter.ts';
+import { restingDisc } from '../tooth/resting-disc.ts';
+import type { ToothSide } from '../tooth/tooth-side.ts';
 import type { Crossings } from '../tooth/wheel.ts';
 
 export interface Choice {
@@ -41,6 +43,8 @@ export interface Choosing {
   /** From the top of the blank to the deepest cut. */
   readonly depth: number;
   readonly side: ToothSide;
+  /** Radius from which the mate's tip works: a finishing cutter must leave the flank whole from there out. */
+  readonly workingRadius: number;
 }
 
 export function chooseRoughing(
@@ -57,13 +61,21 @@ export function chooseRoughing(
   return largest(cutters, fits, `the largest that roughs a space ${width.toFixed(3)} mm wide at the root`);
 }
 
-export function chooseFinishing({ cutters, depth, side }: Choosing, slot: number): Choice {
+export function chooseFinishing({ cutters, depth, side, workingRadius }: Choosing, slot: number): Choice {
   const reaches = 2 * largestCutter(side);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - SAME_POINT && cutter.diameter <= Math.min(reaches, slot);
+    cutter.reach >= depth - SAME_POINT &&
+    cutter.diameter <= Math.min(reaches, slot) &&
+    footOf(side, cutter) <= workingRadius;
   const why = `the largest that gets to the root, where ${reaches.toFixed(3)} mm would fit, in the slot that was roughed`;
   const full = cutters.filter((cutter) => cutter.flute >= depth - SAME_POINT);
   return full.some(fits) ? largest(full, fits, why) : largest(cutters, fits, why);
+}
+
+/** Where the flank begins that a cutter makes. */
+function footOf(side: ToothSide, { diameter }: Cutter): number {
+  const disc = restingDisc(side, diameter / 2);
+  return disc === undefined ? Infinity : norm(disc.foot.point);
 }
 
 export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {

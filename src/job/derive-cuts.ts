@@ -4,7 +4,7 @@
  */
 import type { Cutter } from '../cutting/setup.ts';
 import type { ToothSide } from '../tooth/tooth-side.ts';
-import type { Crossings } from '../tooth/wheel.ts';
+import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 import {
   chooseBore,
   chooseCrossings,
@@ -22,6 +22,7 @@ import type { Notes } from './notes.ts';
 export interface CutsGround {
   readonly text: JobText;
   readonly wheel: WheelJob;
+  readonly form: WheelForm;
   readonly side: ToothSide;
   readonly windows: Crossings | undefined;
   readonly cutters: readonly Cutter[];
@@ -31,7 +32,8 @@ export interface CutsGround {
 export function deriveCuts(ground: CutsGround, notes: Notes): Cuts {
   const { text, wheel, cutters, below } = ground;
   const cuts: CutsText = text.cuts ?? {};
-  const choosing = { cutters, depth: wheel.thickness + below, side: ground.side };
+  const { side, form } = ground;
+  const choosing = { cutters, depth: wheel.thickness + below, side, workingRadius: form.workingRadius };
   const leave = cuts.bore?.leave ?? 0;
   const teeth = toothCutters(ground, choosing, notes);
   const bore = pick(cuts.bore?.cutter, 'bore', () => chooseBore(choosing, wheel.bore - leave), {

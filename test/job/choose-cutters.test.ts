@@ -48,7 +48,7 @@ function cutters(...sizes: readonly [diameter: number, reach: number, flute?: nu
 }
 
 function choosing(...sizes: readonly [number, number, number?][]) {
-  return { cutters: cutters(...sizes), depth: 1.6, side: sideOf() };
+  return { cutters: cutters(...sizes), depth: 1.6, side: sideOf(), workingRadius: 14.7 };
 }
 
 it('the root is 0.7442 mm wide (2 x 14.2146 x 0.0261769 by hand)', () => {

@@ -1,6 +1,8 @@
 /** Jobs that random ones found refused, or written wrong, without a reason: each cut to the smallest that shows it. */
-import { expect, it } from 'vitest';
+import { expect, it, vi } from 'vitest';
 import { cutText } from '../support/cut-text.ts';
+
+vi.setConfig({ testTimeout: 60_000 });
 
 interface Small {
   readonly wheel?: string;
@@ -68,3 +70,13 @@ it.each([undefined, 0.02])(
     expect(complaints(small({ wheel, blank, cutters, cuts }))).toEqual([]);
   },
 );
+
+it('finishes with the cutter that leaves the working flank whole, though a larger one gets to the root', () => {
+  const wheel = '{ teeth: 30, mate: { leaves: 19, tip: { height: 1.1, radius: 1 } }, module: 1, thickness: 0.5 }';
+  const blank = '{ material: leaded-brass, shape: sheet, size: [46, 46], holding: glue }';
+  const cutters = [
+    '{ diameter: 1.2, reach: 3, flute: 3, helix: 30 }',
+    '{ diameter: 0.8, reach: 3, flute: 3, helix: 30 }',
+  ];
+  expect(complaints(small({ wheel, blank, cutters }))).toEqual([]);
+});
