@@ -72,7 +72,8 @@ it.each([undefined, 0.02])(
 );
 
 it('finishes with the cutter that leaves the working flank whole, though a larger one gets to the root', () => {
-  const wheel = '{ teeth: 30, mate: { leaves: 19, tip: { height: 1.1, radius: 1 } }, module: 1, thickness: 0.5 }';
+  const wheel =
+    '{ teeth: 30, mate: { leaves: 19, tip: { height: 1.1, radius: 1 } }, module: 1, thickness: 0.5 }';
   const blank = '{ material: leaded-brass, shape: sheet, size: [46, 46], holding: glue }';
   const cutters = [
     '{ diameter: 1.2, reach: 3, flute: 3, helix: 30 }',
