@@ -44,6 +44,10 @@ export const CHORD_SAG = FORM_ERROR / 5;
  *  Why: a tenth of the form error, and the last figure that is printed. */
 export const PROOF_RESOLUTION = FORM_ERROR / 10;
 
+/** Lengths that a person wrote (a reach, a thickness and what goes below it) are told apart to this.
+ *  Why: 0.4 mm in inches with seven decimals is a millionth off; nobody measures a tenth of a micrometre. */
+export const WRITTEN_LENGTH = FORM_ERROR / 10;
+
 /** One integer step handed to clipper-lib.
  *  Why: 20 steps per sag (200 of clipping's own) hide the rounding, and parts up to +-474 mm stay in its fast exact range (47,453,132 steps). */
 export const CLIPPER_STEP = CHORD_SAG / 20;

@@ -3,7 +3,7 @@
  * here gets its sheet, but no program.
  */
 import type { Problem } from '../base/problem.ts';
-import { SAME_POINT } from '../base/tolerances.ts';
+import { WRITTEN_LENGTH } from '../base/tolerances.ts';
 import type { Cutter, Setup } from '../cutting/setup.ts';
 import type { WheelForm } from '../tooth/wheel.ts';
 import { jobProblem, type JobProblem } from './job-problem.ts';
@@ -69,7 +69,7 @@ function blank({ form, setup, cuts }: FitGround, show: Show): JobProblem[] {
 /** From the top of the blank to the deepest cut: no cutter rubs above its reach. */
 function reach({ wheel, cuts }: FitGround, show: Show): JobProblem[] {
   const deep = wheel.thickness + cuts.below;
-  const short = cuts.order.filter((pass) => cuts[pass].cutter.reach < deep - SAME_POINT);
+  const short = cuts.order.filter((pass) => cuts[pass].cutter.reach < deep - WRITTEN_LENGTH);
   const numbers = [...new Set(short.map((pass) => cuts[pass].cutter.number))];
   return numbers.map((number) => {
     const passes = short.filter((pass) => cuts[pass].cutter.number === number);
@@ -89,7 +89,7 @@ function deepOf({ wheel, cuts }: Pick<FitGround, 'wheel' | 'cuts'>, show: Show):
 
 function flute(pass: PassKind, { wheel, cuts }: FitGround, show: Show): JobProblem[] {
   const { cutter, step }: CutSettings = cuts[pass];
-  const deep = wheel.thickness + cuts.below - SAME_POINT;
+  const deep = wheel.thickness + cuts.below - WRITTEN_LENGTH;
   if (step !== undefined && step > cutter.flute) {
     const message = `a step of ${show(step)} is more than the flute of cutter ${cutter.number}, ${show(cutter.flute)}.`;
     return [{ path: ['cuts', pass, 'step'], message, hint: `Give a step of at most ${show(cutter.flute)}.` }];

@@ -1,6 +1,6 @@
 /** What holds the blank: does it hold, does it go with zero, thickness and the holes that are there? Needs no tooth form. */
 import type { Problem } from '../base/problem.ts';
-import { SAME_POINT } from '../base/tolerances.ts';
+import { WRITTEN_LENGTH } from '../base/tolerances.ts';
 import { holdingOf, skinOf } from './derive-setup.ts';
 import { jobProblem, type JobProblem } from './job-problem.ts';
 import type { JobText, WheelText } from './job-schema.ts';
@@ -125,7 +125,7 @@ function thickness(text: JobText, wheel: WheelText): JobProblem[] {
   const unit = text.length ?? 'mm';
   const kept = skinOf(text);
   const wanted = wheel.thickness + kept;
-  if (given === undefined || Math.abs(given - wanted) < SAME_POINT) {
+  if (given === undefined || Math.abs(given - wanted) < WRITTEN_LENGTH) {
     return [];
   }
   const sum = kept > 0 ? ` and its skin of ${showLength(kept, unit)}` : '';

@@ -6,7 +6,7 @@
  * Widths and rules of roughing: the root of a space is as wide as D + 2 allowance + room for the chips. mm.
  */
 import { Bug } from '../base/bug.ts';
-import { SAME_POINT } from '../base/tolerances.ts';
+import { WRITTEN_LENGTH } from '../base/tolerances.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import { norm } from '../geometry/point.ts';
 import { largestCutter } from '../tooth/largest-cutter.ts';
@@ -54,7 +54,7 @@ export function chooseRoughing(
 ): Choice {
   const width = rootWidth(side);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - SAME_POINT &&
+    cutter.reach >= depth - WRITTEN_LENGTH &&
     width >= cutter.diameter + 2 * (allowance ?? usualAllowance(cutter.diameter)) + CHIP_ROOM &&
     (finishing === undefined ||
       finishing.diameter <= cutter.diameter + (allowance ?? usualAllowance(cutter.diameter)));
@@ -64,11 +64,11 @@ export function chooseRoughing(
 export function chooseFinishing({ cutters, depth, side, workingRadius }: Choosing, slot: number): Choice {
   const reaches = 2 * largestCutter(side);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - SAME_POINT &&
+    cutter.reach >= depth - WRITTEN_LENGTH &&
     cutter.diameter <= Math.min(reaches, slot) &&
     footOf(side, cutter) <= workingRadius;
   const why = `the largest that gets to the root, where ${reaches.toFixed(3)} mm would fit, in the slot that was roughed`;
-  const full = cutters.filter((cutter) => cutter.flute >= depth - SAME_POINT);
+  const full = cutters.filter((cutter) => cutter.flute >= depth - WRITTEN_LENGTH);
   return full.some(fits) ? largest(full, fits, why) : largest(cutters, fits, why);
 }
 
@@ -80,7 +80,7 @@ function footOf(side: ToothSide, { diameter }: Cutter): number {
 
 export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - SAME_POINT && cutter.diameter <= HOLE_SHARE * bore;
+    cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter <= HOLE_SHARE * bore;
   return largest(cutters, fits, `the largest that has room to go round in a bore of ${bore} mm`);
 }
 
@@ -88,7 +88,7 @@ export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings
   const { corner } = windows.proportions;
   const room = HOLE_SHARE * (windows.windowOuter - windows.windowInner);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - SAME_POINT && cutter.diameter < 2 * corner && cutter.diameter <= room;
+    cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter < 2 * corner && cutter.diameter <= room;
   return largest(cutters, fits, `the largest that goes round corners of ${corner} mm radius`);
 }
 

@@ -7,6 +7,7 @@
  * lies on the right where the cutter climbs: clockwise round the outside.
  */
 import { failure, success, type Outcome, type Problem } from '../base/problem.ts';
+import { WRITTEN_LENGTH } from '../base/tolerances.ts';
 import {
   FIT_ERROR,
   FIT_ERROR_MOST,
@@ -239,7 +240,7 @@ function finishingLevels({
       why: `in ${count} levels, as the roughing cutter leaves ${thick.toFixed(3)} mm at the root: ${slot.value.why.at(-1) ?? ''}`,
     });
   }
-  if (fine.cutter.flute >= depth) {
+  if (fine.cutter.flute >= depth - WRITTEN_LENGTH) {
     return success({ count: 1, why: `at full depth: the flute of ${fine.cutter.flute} mm is long enough` });
   }
   const count = levelsFor(depth, Math.min(fine.cutter.flute, job.cuts.finishing.step ?? fine.cutter.flute));
