@@ -91,7 +91,7 @@ function blank(job: RandomJob, tip: number): Reason[] {
 
 /** Long enough for the plate, and the flute for finishing in one go where no step is given. */
 function lengths(job: RandomJob): Reason[] {
-  const need = deep(job) - 1e-9;
+  const need = deep(job) - 1e-5;
   const passes: RandomPass[] = ['roughing', 'finishing'];
   if (job.bore > job.bored) {
     passes.push('bore');
@@ -280,6 +280,10 @@ function smallest(job: RandomJob, _tip: number): Reason[] {
   const reasons: Reason[] = [];
   if (job.says.includes('centres') && job.centres < 1) {
     reasons.push({ bears: ['wheel.centres'], why: 'pivots less than 1 mm apart' });
+  }
+  // A tooth is some three modules deep and works over less than two of them.
+  if (Math.abs(job.centres - (job.module * (job.teeth + job.leaves)) / 2) > 0.99 * job.module) {
+    reasons.push({ bears: ['wheel.centres'], why: 'the pivots are a module off: the teeth jam or let go' });
   }
   if (
     job.cutters.some(({ diameter, reach, flute }) => diameter < 0.051 || reach < 0.1 || (flute ?? 1) < 0.1)

@@ -100,15 +100,15 @@ const TABLES: Readonly<Record<string, number>> = {
   'machining-centre': 200,
 };
 
-/** A stream of choices, shrunk by fast-check as one list of numbers from 0 to 1. */
-export function randomJob(): fc.Arbitrary<RandomJob> {
+/** A stream of choices (fewer teeth where there is less time), shrunk by fast-check as one list of numbers from 0 to 1. */
+export function randomJob(mostTeeth = 400): fc.Arbitrary<RandomJob> {
   return fc
     .array(fc.noBias(fc.integer({ min: 0, max: FINE - 1 })), {
       minLength: CHOICES,
       maxLength: CHOICES,
       size: 'max',
     })
-    .map((stream) => writeJob(chooser(stream.map((choice) => choice / FINE))));
+    .map((stream) => writeJob(chooser(stream.map((choice) => choice / FINE)), mostTeeth));
 }
 
 const CHOICES = 120;
@@ -137,11 +137,18 @@ function round(value: number, decimals: number): number {
 }
 
 /** The kind of wheel, then what the machine can hold of it. */
-function writeJob(c: Chooser): RandomJob {
+function writeJob(c: Chooser, mostTeeth: number): RandomJob {
   const machine = c.one(MACHINES);
   const inch = machine === 'inch-bench-mill' ? c.chance(0.8) : c.chance(0.15);
+  const most = (high: number): number => Math.min(high, mostTeeth);
   const teeth = Math.round(
-    c.one([c.between(30, 96), c.between(30, 96), c.between(6, 30), c.between(96, 180), c.between(180, 400)]),
+    c.one([
+      c.between(30, most(96)),
+      c.between(30, most(96)),
+      c.between(6, most(30)),
+      c.between(most(96), most(180)),
+      c.between(most(180), mostTeeth),
+    ]),
   );
   const leaves = Math.round(c.between(6, 20));
   const table = TABLES[machine] ?? 150;
@@ -172,7 +179,7 @@ function writeJob(c: Chooser): RandomJob {
           ? (2 * round(nominal, 3)) / (teeth + leaves)
           : module,
     says,
-    centres: says === 'module-and-centres' ? round(nominal * c.between(0.998, 1.006, 4), 3) : nominal,
+    centres: says === 'module-and-centres' ? round(nominal + module * c.between(-0.1, 0.3), 3) : nominal,
     form,
     height: c.chance(0.25) ? c.between(0.75, 1, 2) : 0.95,
     tooth,
@@ -209,8 +216,12 @@ function withPlate(c: Chooser, shape: Shape): RandomJob {
     : 0;
   const small = smallCutter(c, module, thickness);
   const cutters = [small, ...largeCutters(c, thickness, bore)];
+  // Nobody clears large windows with the cutter that goes into the spaces.
+  const stout = Math.max(...cutters.map(({ diameter }) => diameter)) > 0.02 * rootDiameter;
   const crossings =
-    rootDiameter > 14 && c.chance(0.45) ? windows(c, shape, rootDiameter, bore, cutters) : undefined;
+    rootDiameter > 14 && c.chance(stout ? 0.5 : 0.1)
+      ? windows(c, shape, rootDiameter, bore, cutters)
+      : undefined;
   return {
     ...shape,
     thickness,
@@ -268,7 +279,9 @@ function windows(
   const arm = round(rootDiameter * c.between(0.05, 0.1), 2);
   const hub = round(Math.max(2 * bore, rootDiameter * c.between(0.22, 0.4)), 1);
   const rim = round(Math.max(2 * module, rootDiameter * 0.05) * c.between(0.9, 1.5), 2);
-  const biggest = c.one(cutters).diameter;
+  const biggest = c.chance(0.85)
+    ? Math.max(...cutters.map(({ diameter }) => diameter))
+    : c.one(cutters).diameter;
   return {
     arms,
     atHub: c.chance(0.4) ? round(arm * 1.3, 2) : arm,
