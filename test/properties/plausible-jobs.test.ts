@@ -53,13 +53,6 @@ it('a cutter that reaches 0.4 mm in inches goes through 0.3 mm and 0.1 mm in inc
   expect(complaints(small({ wheel, cutters, cuts: ['below: 0.00393701 inch'] }))).toEqual([]);
 });
 
-it('a cutter that reaches 0.6 mm, said in seven decimals of an inch, goes through 0.5 mm and 0.1 mm below', () => {
-  const wheel = '{ teeth: 12, mate: { leaves: 8 }, diametral-pitch: 50.8, thickness: 0.0196850 }';
-  const blank = '{ material: leaded-brass, shape: sheet, size: [0.5, 0.5], holding: glue }';
-  const cutters = ['{ diameter: 0.4 mm, reach: 0.0236220, flute: 0.0236220, helix: 30 }'];
-  expect(complaints(small({ wheel, blank, cutters, more: ['length: inch'] }))).toEqual([]);
-});
-
 it('a clamp beyond the travel is walked to no further than the travel goes', () => {
   const blank =
     '{ material: leaded-brass, shape: sheet, size: [12, 12], holding: glue, keep-out: [{ x: 90, y: 100, radius: 5, height: 3 }, { x: -90, y: -100, radius: 5, height: 3 }] }';
