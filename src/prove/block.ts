@@ -1,31 +1,40 @@
 /**
  * One line's words sorted: at most one code of each modal group, at most one value of each other letter
- * (NISTIR 6556 §3.3.5). Used again for every line.
+ * (NISTIR 6556 §3.3.5). Made once of every text that stands in the program, however often it stands there; plain arrays,
+ * because thousands of them are made and a typed array takes longer to make than to fill.
  */
 import { WHOLE_NUMBER } from '../base/tolerances.ts';
-import { G_GROUPS, M_GROUPS, type Codes } from './modes-codes.ts';
+import { G_GROUP, G_GROUPS, M_GROUPS, type Codes } from './modes-codes.ts';
 import type { LineWords } from './line-words.ts';
+import type { ArcMemo } from './trace-arc.ts';
 
 export interface Block {
   /** By group: ten times the G code, or -1. */
-  readonly g: Int16Array;
+  readonly g: number[];
   /** By group: the M code, or -1. */
-  readonly m: Int16Array;
+  readonly m: number[];
   /** Bits of the letters that are given, A = 1; G, M and N not among them. */
   given: number;
-  /** By letter, A = 0. */
-  readonly values: Float64Array;
-  /** Any code or word at all. */
-  words: number;
+  /** By letter, A = 0; NaN where it is not given. */
+  readonly values: number[];
+  /** Nothing but a word of motion and words of places. */
+  onlyMoves: boolean;
+  /** The arc that it made last, and from where. */
+  arc: ArcMemo | undefined;
 }
 
-export function emptyBlock(): Block {
+const NO_G: readonly number[] = Array.from({ length: G_GROUPS }, () => -1);
+const NO_M: readonly number[] = Array.from({ length: M_GROUPS }, () => -1);
+const NO_VALUES: readonly number[] = Array.from({ length: 26 }, () => Number.NaN);
+
+function emptyBlock(): Block {
   return {
-    g: new Int16Array(G_GROUPS),
-    m: new Int16Array(M_GROUPS),
+    g: NO_G.slice(),
+    m: NO_M.slice(),
     given: 0,
-    values: new Float64Array(26),
-    words: 0,
+    values: NO_VALUES.slice(),
+    onlyMoves: true,
+    arc: undefined,
   };
 }
 
@@ -47,8 +56,9 @@ const LENGTHS = BIT.X | BIT.Y | BIT.Z | BIT.I | BIT.J | BIT.K | BIT.R;
 
 export const AXES = BIT.X | BIT.Y | BIT.Z;
 
+/** Of a letter that is given. */
 export function valueOf(block: Block, letter: Letter): number {
-  return block.values[letter.charCodeAt(0) - 65] ?? 0;
+  return block.values[letter.charCodeAt(0) - 65]!;
 }
 
 export function has(block: Block, bit: number): boolean {
@@ -69,12 +79,9 @@ export function wholeOf(value: number): number | undefined {
   return Math.abs(value - whole) <= WHOLE_NUMBER ? whole : undefined;
 }
 
-/** Sorts the words; answers what is wrong with them, if anything. */
-export function sortWords(words: LineWords, codes: Codes, block: Block): string | undefined {
-  block.g.fill(-1);
-  block.m.fill(-1);
-  block.given = 0;
-  block.words = words.count;
+/** The words sorted, or what is wrong with them. */
+export function sortWords(words: LineWords, codes: Codes): Block | string {
+  const block = emptyBlock();
   let mCount = 0;
   for (let i = 0; i < words.count; i++) {
     const letter = words.letters[i] ?? 0;
@@ -92,7 +99,8 @@ export function sortWords(words: LineWords, codes: Codes, block: Block): string 
       return `column ${String(words.columns[i])}: ${wrong}`;
     }
   }
-  return undefined;
+  block.onlyMoves &&= (block.given & ~LENGTHS) === 0 && mCount === 0;
+  return block;
 }
 
 function sortValue(
@@ -103,16 +111,15 @@ function sortValue(
   block: Block,
 ): string | undefined {
   const bit = 1 << (letter - 65);
-  const name = String.fromCharCode(letter);
   if (block.given & bit) {
-    return `${name} is given twice on one line`;
+    return `${String.fromCharCode(letter)} is given twice on one line`;
   }
   const isLength = (LENGTHS & bit) !== 0;
   if (!Number.isFinite(value) || (isLength && Math.abs(value) > codes.valueLargest)) {
-    return `${name}${String(value)} is more than the ${String(codes.valueLargest)} this machine reads`;
+    return `${String.fromCharCode(letter)}${String(value)} is more than the ${String(codes.valueLargest)} this machine reads`;
   }
   if (codes.pointAlways && !pointed && value !== 0 && isLength) {
-    return `${name}${String(value)} has no decimal point; this machine would count it in thousandths`;
+    return `${String.fromCharCode(letter)}${String(value)} has no decimal point; this machine would count it in thousandths`;
   }
   block.given |= bit;
   block.values[letter - 65] = value;
@@ -129,6 +136,7 @@ function sortG(value: number, codes: Codes, block: Block): string | undefined {
     return `G${String(value)} and G${String((block.g[group] ?? 0) / 10)} exclude each other on one line`;
   }
   block.g[group] = code;
+  block.onlyMoves &&= group === G_GROUP.motion;
   return undefined;
 }
 

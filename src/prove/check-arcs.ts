@@ -8,24 +8,25 @@ import { findingAt, gathered, type Said } from './finding-at.ts';
 import type { Finding } from './proof.ts';
 
 export function checkArcs(evidence: Evidence): Finding[] {
-  return gathered(
-    evidence.moves.flatMap((move) => {
-      const fault = move.turn === undefined ? undefined : outOfSize(evidence, move, move.turn);
-      return fault === undefined ? [] : [findingAt(move, fault)];
-    }),
-  );
+  const findings: Finding[] = [];
+  for (const move of evidence.moves) {
+    const fault = move.kind === 'arc' ? outOfSize(evidence, move) : undefined;
+    if (fault !== undefined) {
+      findings.push(findingAt(move, fault));
+    }
+  }
+  return gathered(findings);
 }
 
-function outOfSize({ input, lastDigit }: Evidence, move: TracedMove, turn: number): Said | undefined {
-  const { from, centre } = move;
-  if (centre === undefined || from.x === null || from.y === null) {
+function outOfSize({ input, lastDigit }: Evidence, move: TracedMove): Said | undefined {
+  const { from, centre, turn } = move;
+  if (centre === undefined || turn === undefined || from.x === null || from.y === null) {
     return undefined;
   }
   const { smallestRadius, largestRadius, shortestChord } = input.machine.words.arcs;
   const dx = from.x - centre.x;
   const dy = from.y - centre.y;
   const radius = Math.sqrt(dx * dx + dy * dy);
-  const chord = 2 * radius * Math.abs(Math.sin(turn / 2));
   // Both ends and the centre are rounded.
   const slack = 2 * lastDigit;
   if (radius < smallestRadius - slack || radius > largestRadius + slack) {
@@ -33,8 +34,13 @@ function outOfSize({ input, lastDigit }: Evidence, move: TracedMove, turn: numbe
       `an arc of radius ${text(radius)}; this machine runs ${text(smallestRadius)} to ${text(largestRadius)}`,
     );
   }
-  const whole = Math.abs(turn) > Math.PI;
-  return !whole && chord < shortestChord - slack
+  const size = Math.abs(turn);
+  // The sine of a quarter turn or less is at least its share of one: few arcs need the sine itself.
+  if (size > Math.PI || (2 * radius * size) / Math.PI >= shortestChord - slack) {
+    return undefined;
+  }
+  const chord = 2 * radius * Math.sin(size / 2);
+  return chord < shortestChord - slack
     ? said(`an arc whose ends lie ${text(chord)} apart; this machine wants ${text(shortestChord)} at least`)
     : undefined;
 }

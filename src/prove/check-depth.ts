@@ -5,119 +5,118 @@
 import type { Evidence } from './evidence.ts';
 import { findingAt, lengthText } from './finding-at.ts';
 import { isCleared, isInBlank } from './metal-cover.ts';
-import type { SolidMove } from './metal-paths.ts';
+import { lowOf } from './metal-solids.ts';
 import type { Finding } from './proof.ts';
 
 export function checkDepth(evidence: Evidence): Finding[] {
-  const { setup } = evidence.input;
-  const { solids, lastDigit } = evidence;
-  const deepest = solids.reduce<SolidMove | undefined>(
-    (low, solid) => (low === undefined || lowOf(solid) < lowOf(low) ? solid : low),
-    undefined,
-  );
-  if (deepest === undefined) {
+  const { input, solids, lastDigit } = evidence;
+  const { setup } = input;
+  if (solids.count === 0) {
     return [];
   }
-  const z = lowOf(deepest);
+  let deepest = 0;
+  let wide = -1;
+  let rubs = -1;
+  for (let i = 0; i < solids.count; i++) {
+    const low = lowOf(solids, i);
+    deepest = low < lowOf(solids, deepest) ? i : deepest;
+    // What follows is for cutters that work below the top.
+    if (low < setup.topZ) {
+      wide = wide < 0 && shankRubs(evidence, i, low) ? i : wide;
+      rubs = rubs < 0 && nutRubs(evidence, i, low) ? i : rubs;
+    }
+  }
+  const z = lowOf(solids, deepest);
   const floor = setup.plateZ - setup.intoPlate;
   const skinZ = setup.plateZ + setup.skin;
-  const wide = solids.findIndex((_, i) => shankRubs(evidence, i));
   return [
-    ...(z < floor - lastDigit ? [tooDeep(deepest, z, floor)] : []),
-    ...(setup.skin > 0 && z < skinZ - lastDigit ? [throughSkin(deepest, z, skinZ)] : []),
+    ...(z < floor - lastDigit ? [tooDeep(evidence, deepest, floor)] : []),
+    ...(setup.skin > 0 && z < skinZ - lastDigit ? [throughSkin(evidence, deepest, skinZ)] : []),
     ...(wide < 0 ? [] : [shank(evidence, wide)]),
-    ...nutRubs(evidence),
+    ...(rubs < 0 ? [] : [nut(evidence, rubs)]),
   ];
 }
 
-function lowOf(solid: SolidMove): number {
-  return Math.min(solid.z0, solid.z1);
+/** Where move i ends. */
+function endOf({ solids }: Evidence, i: number): { readonly x: number; readonly y: number } {
+  return { x: solids.x1[i]!, y: solids.y1[i]! };
 }
 
-function tooDeep(solid: SolidMove, z: number, floor: number): Finding {
-  return findingAt(solid.move, {
+function tooDeep(evidence: Evidence, i: number, floor: number): Finding {
+  const { solids } = evidence;
+  return findingAt(solids.moves[i], {
     code: 'prove.plate',
-    message: `the cutter goes down to Z ${lengthText(z)}; the plate may be cut to Z ${lengthText(floor)}`,
+    message: `the cutter goes down to Z ${lengthText(lowOf(solids, i))}; the plate may be cut to Z ${lengthText(floor)}`,
     hint: 'Check Z of this block, or allow more under the wheel (cuts: below).',
-    x: solid.x1,
-    y: solid.y1,
+    ...endOf(evidence, i),
   });
 }
 
-function throughSkin(solid: SolidMove, z: number, skinZ: number): Finding {
-  return findingAt(solid.move, {
+function throughSkin(evidence: Evidence, i: number, skinZ: number): Finding {
+  const { solids } = evidence;
+  return findingAt(solids.moves[i], {
     code: 'prove.skin',
-    message: `the cutter goes down to Z ${lengthText(z)}, through the skin that holds the wheel and reaches up to Z ${lengthText(skinZ)}`,
+    message: `the cutter goes down to Z ${lengthText(lowOf(solids, i))}, through the skin that holds the wheel and reaches up to Z ${lengthText(skinZ)}`,
     hint: 'Stop every cut above the skin.',
-    x: solid.x1,
-    y: solid.y1,
+    ...endOf(evidence, i),
   });
 }
 
 /** Whether the shank would touch metal that nothing has cut: asked only where it dips under the top of the blank. */
-function shankRubs({ input, solids, paths, lastDigit, cutterOf }: Evidence, i: number): boolean {
+function shankRubs(evidence: Evidence, i: number, low: number): boolean {
+  const { input, solids, lastDigit } = evidence;
   const { setup } = input;
-  const solid = solids[i]!;
-  const cutter = cutterOf(solid.move);
+  const cutter = evidence.cutterOf(solids.moves[i]!);
   if (cutter === undefined || cutter.shank <= cutter.diameter) {
     return false;
   }
-  const z = lowOf(solid) + cutter.reach;
+  const z = low + cutter.reach;
   if (z >= setup.topZ - lastDigit) {
     return false;
   }
-  const stands = { x: solid.x1, y: solid.y1, z, radius: cutter.shank / 2 };
-  return !isCleared(paths, solids.length, setup, stands, lastDigit);
+  const stands = { ...endOf(evidence, i), z, radius: cutter.shank / 2 };
+  return !isCleared(evidence, solids.count, setup, stands, lastDigit);
 }
 
-function shank({ input, solids, cutterOf }: Evidence, i: number): Finding {
-  const solid = solids[i]!;
-  const cutter = cutterOf(solid.move)!;
+function shank(evidence: Evidence, i: number): Finding {
+  const { input, solids } = evidence;
+  const cutter = evidence.cutterOf(solids.moves[i]!)!;
   const { topZ } = input.setup;
-  return findingAt(solid.move, {
+  return findingAt(solids.moves[i], {
     code: 'prove.shank',
     message:
-      `cutter ${String(cutter.number)} works ${lengthText(topZ - lowOf(solid))} below the top; its reach is ` +
+      `cutter ${String(cutter.number)} works ${lengthText(topZ - lowOf(solids, i))} below the top; its reach is ` +
       `${lengthText(cutter.reach)}, and its shank (${lengthText(cutter.shank)}) rubs on the walls above`,
     hint: 'Use a cutter that reaches deeper, or one whose shank is no wider than what it cuts.',
-    x: solid.x1,
-    y: solid.y1,
+    ...endOf(evidence, i),
   });
 }
 
-function nutRubs({ input, solids, cutterOf, lastDigit }: Evidence): Finding[] {
+function nutRubs(evidence: Evidence, i: number, low: number): boolean {
+  const { input, solids, lastDigit } = evidence;
   const { setup, machine } = input;
-  const radius = machine.limits.nut.diameter / 2;
-  const solid = solids.find((each) => {
-    const cutter = cutterOf(each.move);
-    return (
-      cutter !== undefined &&
-      lowOf(each) + cutter.stickOut < setup.topZ - lastDigit &&
-      nearBlank(setup, each, radius)
-    );
+  const cutter = evidence.cutterOf(solids.moves[i]!);
+  return (
+    cutter !== undefined &&
+    low + cutter.stickOut < setup.topZ - lastDigit &&
+    nearBlank(setup, solids.x1[i]!, solids.y1[i]!, machine.limits.nut.diameter / 2)
+  );
+}
+
+function nut(evidence: Evidence, i: number): Finding {
+  const { input, solids } = evidence;
+  const cutter = evidence.cutterOf(solids.moves[i]!)!;
+  return findingAt(solids.moves[i], {
+    code: 'prove.nut',
+    message: `the collet nut comes down to Z ${lengthText(lowOf(solids, i) + cutter.stickOut)}, below the top of the blank at Z ${lengthText(input.setup.topZ)}`,
+    hint: `Let cutter ${String(cutter.number)} stick out further than ${lengthText(cutter.stickOut)}.`,
+    ...endOf(evidence, i),
   });
-  if (solid === undefined) {
-    return [];
-  }
-  const cutter = cutterOf(solid.move)!;
-  return [
-    findingAt(solid.move, {
-      code: 'prove.nut',
-      message: `the collet nut comes down to Z ${lengthText(lowOf(solid) + cutter.stickOut)}, below the top of the blank at Z ${lengthText(setup.topZ)}`,
-      hint: `Let cutter ${String(cutter.number)} stick out further than ${lengthText(cutter.stickOut)}.`,
-      x: solid.x1,
-      y: solid.y1,
-    }),
-  ];
 }
 
 /** Whether any of eight points of the nut's rim, or its middle, stands over the blank. */
-function nearBlank(setup: Evidence['input']['setup'], solid: SolidMove, radius: number): boolean {
+function nearBlank(setup: Evidence['input']['setup'], x: number, y: number, radius: number): boolean {
   return Array.from({ length: 9 }, (_, k) => (k === 8 ? 0 : radius)).some((rho, k) =>
-    isInBlank(
-      setup,
-      solid.x1 + rho * Math.cos((k * Math.PI) / 4),
-      solid.y1 + rho * Math.sin((k * Math.PI) / 4),
-    ),
+    isInBlank(setup, x + rho * Math.cos((k * Math.PI) / 4), y + rho * Math.sin((k * Math.PI) / 4)),
   );
 }

@@ -14,37 +14,37 @@ import type { Finding } from './proof.ts';
 const GENTLEST = 1;
 
 export function checkEntry(evidence: Evidence): Finding[] {
-  const { solids, input, lastDigit } = evidence;
+  const { solids, input, lastDigit, paths } = evidence;
+  const { z0, z1, rapid } = solids;
+  const top = input.setup.topZ - lastDigit;
+  const ramp = materialNamed(input.setup.material)?.ramp ?? GENTLEST;
+  const steepest = Math.tan(radians(ramp));
   const findings: Finding[] = [];
-  for (let i = 0; i < solids.length; i++) {
-    const { z0, z1, move } = solids[i]!;
-    if (z1 < z0 && z1 < input.setup.topZ - lastDigit && move.kind !== 'rapid') {
-      findings.push(...entryFinding(evidence, i));
+  for (let i = 0; i < solids.count; i++) {
+    if (z1[i]! >= z0[i]! || z1[i]! >= top || rapid[i] === 1) {
+      continue;
+    }
+    const flat = solids.turn[i] === 0 ? 2 * paths.bound[i]! : paths.arc[i]! * Math.abs(solids.turn[i]!);
+    if (z0[i]! - z1[i]! > flat * steepest + 2 * lastDigit) {
+      findings.push(...entryFinding(evidence, i, flat, ramp));
     }
   }
   return gathered(findings);
 }
 
-/** Of move i, that goes down below the top. */
-function entryFinding(evidence: Evidence, i: number): Finding[] {
-  const { setup } = evidence.input;
-  const { move, x0, y0, z0, x1, y1, z1, radius } = evidence.solids[i]!;
-  const fall = z0 - z1;
-  const flat = move.turn === undefined ? Math.hypot(x1 - x0, y1 - y0) : arcLength(evidence, i);
-  const ramp = materialNamed(setup.material)?.ramp ?? GENTLEST;
-  const allowed = flat * Math.tan(radians(ramp)) + 2 * evidence.lastDigit;
-  if (fall <= allowed || (flat === 0 && evidence.cutterOf(move)?.plunges === true)) {
+/** Of move i, that goes down below the top more steeply than its material allows. */
+function entryFinding(evidence: Evidence, i: number, flat: number, ramp: number): Finding[] {
+  const { solids, input, lastDigit } = evidence;
+  const move = solids.moves[i]!;
+  if (flat === 0 && evidence.cutterOf(move)?.plunges === true) {
     return [];
   }
-  const stands = { x: x1, y: y1, z: z1, radius };
-  if (isCleared(evidence.paths, i, setup, stands, evidence.lastDigit)) {
+  const z = solids.z1[i]!;
+  const stands = { x: solids.x1[i]!, y: solids.y1[i]!, z, radius: solids.radius[i]! };
+  if (isCleared(evidence, i, input.setup, stands, lastDigit)) {
     return [];
   }
-  return [flat === 0 ? plunge(evidence, move, z1) : steep(move, fall, flat, ramp)];
-}
-
-function arcLength({ paths }: Evidence, i: number): number {
-  return paths.arc[i]! * Math.abs(paths.turn[i]!);
+  return [flat === 0 ? plunge(evidence, move, z) : steep(move, solids.z0[i]! - z, flat, ramp)];
 }
 
 function plunge(evidence: Evidence, move: TracedMove, z: number): Finding {

@@ -59,9 +59,13 @@ function downwards(evidence: Evidence, { move, before, path }: FastMove): string
       ? undefined
       : `a fast move down to Z ${lengthText(to.z)} from a place that is not known`;
   }
-  const { x1: x, y1: y, radius } = solids[path]!;
-  const stands = { x, y, z: to.z - GAP, radius };
-  if (to.z >= setup.topZ + GAP - lastDigit || isCleared(evidence.paths, before, setup, stands, lastDigit)) {
+  const stands = {
+    x: solids.x1[path]!,
+    y: solids.y1[path]!,
+    z: to.z - GAP,
+    radius: solids.radius[path]!,
+  };
+  if (to.z >= setup.topZ + GAP - lastDigit || isCleared(evidence, before, setup, stands, lastDigit)) {
     return undefined;
   }
   return `a fast move down to Z ${lengthText(to.z)}, where metal may stand up to Z ${lengthText(setup.topZ)}`;

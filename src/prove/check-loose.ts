@@ -3,13 +3,14 @@
  * metal as the moves take it away in order. A piece is loose when it is cut round to the plate and is part of neither the
  * wheel nor the sheet's edge. Looked at each time the cutter leaves the metal after cutting through.
  */
+import type { TracedMove } from '../motion/traced-move.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, lengthText } from './finding-at.ts';
 import { loosePiece, type Piece } from './loose-piece.ts';
-import { wheelBody } from './metal-inside.ts';
 import { blankRaster, cutRaster, type Raster } from './metal-raster.ts';
 import type { Finding } from './proof.ts';
-import type { PathSet, SolidMove } from './metal-paths.ts';
+import type { PathSet } from './metal-paths.ts';
+import { lowOf, type SolidMoves } from './metal-solids.ts';
 
 /** Squares from the axis to the edge of what is looked at: what a wheel needs so that its spaces are seen. */
 const SQUARES = 150;
@@ -21,39 +22,37 @@ const ACROSS = 3;
 const DEEPEST_BITE = 1.05;
 
 export function checkLoose(evidence: Evidence): Finding[] {
-  const { input, solids, lastDigit } = evidence;
-  const { target, setup } = input;
-  if (target === undefined) {
+  const { input, solids, lastDigit, body } = evidence;
+  const { setup } = input;
+  if (body === undefined) {
     return [];
   }
-  const reach = cutReach(evidence, target.form.outsideRadius);
+  const reach = cutReach(evidence, body.form.outsideRadius);
   const raster = blankRaster(setup, reach, squareSize(evidence, reach));
   const cutting: Cutting = {
     raster,
-    height: new Float64Array(solids.length).fill(Number.NaN),
+    height: new Float64Array(solids.count).fill(Number.NaN),
     waiting: [],
-    waits: new Uint8Array(solids.length),
+    waits: new Uint8Array(solids.count),
   };
-  const body = wheelBody(target.form, target.bore, target.crossings);
   const through = setup.plateZ + lastDigit;
   const worst: Bite = { bite: 0, share: DEEPEST_BITE };
   const loose: Finding[] = [];
   let cutThrough = false;
-  for (let i = 0; i < solids.length && loose.length === 0; i++) {
-    const solid = solids[i]!;
-    if (solid.move.kind !== 'rapid') {
+  for (let i = 0; i < solids.count && loose.length === 0; i++) {
+    const z1 = solids.z1[i]!;
+    if (solids.rapid[i] === 0) {
       takeBite(cutting, evidence, i, worst);
-      cutThrough ||= Math.min(solid.z0, solid.z1) <= through;
+      cutThrough ||= z1 <= through || solids.z0[i]! <= through;
     }
-    const lifts = solid.z1 > setup.topZ || i === solids.length - 1;
-    if (cutThrough && lifts) {
+    if (cutThrough && (z1 > setup.topZ || i === solids.count - 1)) {
       cutThrough = false;
       drawWaiting(cutting, evidence.paths);
       const piece = loosePiece(raster, body, through, setup.shape.kind === 'sheet');
-      loose.push(...(piece === undefined ? [] : [cameLoose(solid, piece)]));
+      loose.push(...(piece === undefined ? [] : [cameLoose(solids.moves[i]!, piece)]));
     }
   }
-  return [...loose, ...(worst.solid === undefined ? [] : [tooDeep(worst.solid, worst.bite)])];
+  return [...loose, ...(worst.path === undefined ? [] : [tooDeep(solids, worst.path, worst.bite)])];
 }
 
 function squareSize({ input }: Evidence, reach: number): number {
@@ -63,20 +62,24 @@ function squareSize({ input }: Evidence, reach: number): number {
 
 /** How far from the axis anything is cut, and a little more, so that the sheet's edge is seen round it. */
 function cutReach({ input, solids, paths, lastDigit }: Evidence, wheel: number): number {
+  const { mx, my, bound } = paths;
+  const top = input.setup.topZ - lastDigit;
   let reach = wheel;
-  solids.forEach((solid, i) => {
-    if (Math.min(solid.z0, solid.z1) < input.setup.topZ - lastDigit) {
-      const away = Math.hypot(paths.mx[i]!, paths.my[i]!) + paths.bound[i]! + 2 * solid.radius;
-      reach = Math.max(reach, away);
+  for (let i = 0; i < solids.count; i++) {
+    const wide = bound[i]! + 2 * solids.radius[i]!;
+    const room = reach - wide;
+    const away = mx[i]! * mx[i]! + my[i]! * my[i]!;
+    if ((room < 0 || away > room * room) && lowOf(solids, i) < top) {
+      reach = Math.max(reach, Math.sqrt(away) + wide);
     }
-  });
+  }
   return reach;
 }
 
 interface Bite {
   bite: number;
   share: number;
-  solid?: SolidMove;
+  path?: number;
 }
 
 /** What has been run, so that a lap that repeats another need not be drawn again at once. */
@@ -90,32 +93,28 @@ interface Cutting {
 }
 
 function takeBite(cutting: Cutting, { paths, solids }: Evidence, i: number, worst: Bite): void {
-  const solid = solids[i]!;
+  const z0 = solids.z0[i]!;
+  const z1 = solids.z1[i]!;
   // A fall is taken at its upper end, so that what is left is never said to be less than it is; straight down it all goes.
-  const straight = solid.x0 === solid.x1 && solid.y0 === solid.y1 && solid.move.turn === undefined;
-  const z = straight ? Math.min(solid.z0, solid.z1) : Math.max(solid.z0, solid.z1);
-  const twin = paths.twin[i]!;
+  const z = paths.bound[i] === 0 ? Math.min(z0, z1) : Math.max(z0, z1);
+  const width = 2 * solids.radius[i]!;
+  const twin = solids.twin[i]!;
   const was = cutting.height[twin]!;
-  let bite: number;
-  if (Number.isNaN(was)) {
-    drawWaiting(cutting, paths);
-    bite = cutRaster(cutting.raster, paths, i, z);
-    cutting.height[twin] = z;
-  } else {
-    bite = was - z;
-    if (bite / (2 * solid.radius) > worst.share) {
-      drawWaiting(cutting, paths);
-      bite = cutRaster(cutting.raster, paths, i, z);
-      cutting.height[twin] = z;
-    } else {
-      waitFor(cutting, twin, Math.min(z, was));
+  const bite = was - z;
+  if (bite <= worst.share * width) {
+    // Cut here before, and not too deep in one go: nothing to look at until something may have come loose.
+    if (bite > 0) {
+      waitFor(cutting, twin, z);
     }
+    return;
   }
-  const share = bite / (2 * solid.radius);
-  if (share > worst.share) {
-    worst.bite = bite;
-    worst.share = share;
-    worst.solid = solid;
+  drawWaiting(cutting, paths);
+  const bites = cutRaster(cutting.raster, paths, i, z);
+  cutting.height[twin] = z;
+  if (bites > worst.share * width) {
+    worst.bite = bites;
+    worst.share = bites / width;
+    worst.path = i;
   }
 }
 
@@ -135,8 +134,8 @@ function drawWaiting({ raster, height, waiting, waits }: Cutting, paths: PathSet
   waiting.length = 0;
 }
 
-function cameLoose(solid: SolidMove, { x, y, area }: Piece): Finding {
-  return findingAt(solid.move, {
+function cameLoose(move: TracedMove, { x, y, area }: Piece): Finding {
+  return findingAt(move, {
     code: 'prove.loose',
     message: `a piece of ${String(Number(area.toFixed(2)))} mm2 at X ${lengthText(x)} Y ${lengthText(y)} is cut free of wheel and blank under the turning cutter; none may be`,
     hint: 'Turn all of it to chips before its last joint is cut, or leave a skin under it.',
@@ -145,12 +144,12 @@ function cameLoose(solid: SolidMove, { x, y, area }: Piece): Finding {
   });
 }
 
-function tooDeep(solid: SolidMove, bite: number): Finding {
-  return findingAt(solid.move, {
+function tooDeep({ moves, radius, x1, y1 }: SolidMoves, i: number, bite: number): Finding {
+  return findingAt(moves[i], {
     code: 'prove.load',
-    message: `the cutter goes through solid metal ${lengthText(bite)} deep; a cutter of ${lengthText(2 * solid.radius)} bears no slot deeper than its diameter`,
+    message: `the cutter goes through solid metal ${lengthText(bite)} deep; a cutter of ${lengthText(2 * radius[i]!)} bears no slot deeper than its diameter`,
     hint: 'Rough this place in steps first, or run the programs in their order.',
-    x: solid.x1,
-    y: solid.y1,
+    x: x1[i]!,
+    y: y1[i]!,
   });
 }

@@ -6,7 +6,7 @@ import type { Cutter, Obstacle } from '../cutting/setup.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, lengthText } from './finding-at.ts';
 import { pathDistance } from './metal-distance.ts';
-import type { SolidMove } from './metal-paths.ts';
+import { lowOf } from './metal-solids.ts';
 import type { Finding } from './proof.ts';
 
 interface SpindlePart {
@@ -19,7 +19,7 @@ interface SpindlePart {
 export function checkObstacles(evidence: Evidence): Finding[] {
   return evidence.input.setup.obstacles.flatMap((obstacle) => {
     let worst: { readonly found: Finding; readonly depth: number } | undefined;
-    for (let i = 0; i < evidence.solids.length; i++) {
+    for (let i = 0; i < evidence.solids.count; i++) {
       const met = meet(evidence, i, obstacle);
       worst = met !== undefined && met.depth > (worst?.depth ?? 0) ? met : worst;
     }
@@ -38,40 +38,43 @@ export function spindleParts(evidence: Evidence, cutter: Cutter): readonly Spind
 
 /** How far the spindle and what it holds go into an obstacle on one move. */
 function meet(evidence: Evidence, i: number, obstacle: Obstacle) {
-  const solid = evidence.solids[i]!;
-  const low = Math.min(solid.z0, solid.z1);
-  const cutter = evidence.cutterOf(solid.move);
-  if (cutter === undefined || low >= obstacle.toZ) {
+  const low = lowOf(evidence.solids, i);
+  if (low >= obstacle.toZ) {
     return undefined;
   }
-  const away = distanceTo(evidence, i, solid, obstacle) - obstacle.radius;
+  const cutter = evidence.cutterOf(evidence.solids.moves[i]!);
+  if (cutter === undefined) {
+    return undefined;
+  }
+  const away = distanceTo(evidence, i, obstacle) - obstacle.radius;
   let worst: { readonly found: Finding; readonly depth: number } | undefined;
   for (const part of spindleParts(evidence, cutter)) {
     const depth = part.radius - away;
     if (low + part.from < obstacle.toZ && depth > evidence.lastDigit && depth > (worst?.depth ?? 0)) {
-      worst = { found: hit(solid, part, obstacle, away), depth };
+      worst = { found: hit(evidence, i, part, obstacle, away), depth };
     }
   }
   return worst;
 }
 
-function hit(solid: SolidMove, part: SpindlePart, obstacle: Obstacle, away: number): Finding {
+function hit({ solids }: Evidence, i: number, part: SpindlePart, obstacle: Obstacle, away: number): Finding {
   const { name, toZ, x, y } = obstacle;
-  return findingAt(solid.move, {
+  return findingAt(solids.moves[i], {
     code: 'prove.obstacle',
     message:
       `the ${part.name} (radius ${lengthText(part.radius)}) passes ${lengthText(Math.max(0, away))} from the ${name} at ` +
       `X ${lengthText(x)} Y ${lengthText(y)}, which stands up to Z ${lengthText(toZ)}`,
     hint: `Move the ${name}, or go round or over it.`,
-    x: solid.x1,
-    y: solid.y1,
+    x: solids.x1[i]!,
+    y: solids.y1[i]!,
   });
 }
 
-function distanceTo(evidence: Evidence, i: number, solid: SolidMove, { x, y }: Obstacle): number {
-  if (solid.move.kind === 'rapid' && evidence.input.machine.words.positions.rapidShape === 'dog-leg') {
-    const dx = Math.max(Math.min(solid.x0, solid.x1) - x, 0, x - Math.max(solid.x0, solid.x1));
-    const dy = Math.max(Math.min(solid.y0, solid.y1) - y, 0, y - Math.max(solid.y0, solid.y1));
+function distanceTo(evidence: Evidence, i: number, { x, y }: Obstacle): number {
+  const { x0, y0, x1, y1, rapid } = evidence.solids;
+  if (rapid[i] === 1 && evidence.input.machine.words.positions.rapidShape === 'dog-leg') {
+    const dx = Math.max(Math.min(x0[i]!, x1[i]!) - x, 0, x - Math.max(x0[i]!, x1[i]!));
+    const dy = Math.max(Math.min(y0[i]!, y1[i]!) - y, 0, y - Math.max(y0[i]!, y1[i]!));
     return Math.hypot(dx, dy);
   }
   return pathDistance(evidence.paths, i, x, y);

@@ -44,19 +44,20 @@ interface Span {
 function firstAndLast(evidence: Evidence): Map<CutPlace, Span> {
   const spans = new Map<CutPlace, Span>();
   const judge = whatIsCut(evidence);
-  evidence.solids.forEach((solid, i) => {
-    const place = judge(solid);
+  const { count, moves } = evidence.solids;
+  for (let i = 0; i < count; i++) {
+    const place = judge(i);
     if (place === undefined) {
-      return;
+      continue;
     }
     const span = spans.get(place);
     if (span === undefined) {
-      spans.set(place, { at: i, first: solid.move, end: i, last: solid.move });
+      spans.set(place, { at: i, first: moves[i]!, end: i, last: moves[i]! });
     } else {
       span.end = i;
-      span.last = solid.move;
+      span.last = moves[i]!;
     }
-  });
+  }
   return spans;
 }
 

@@ -13,13 +13,9 @@ function axisFindings({ input, moves, extents, lastDigit }: Evidence, axis: 'x' 
   const [first, last] = input.machine.limits.travel[axis];
   const zero = input.setup.zeroAt?.[axis];
   const name = axis.toUpperCase();
-  const worst = furthest(
-    moves,
-    axis,
-    zero === undefined ? undefined : zero + high > last + lastDigit ? 1 : -1,
-  );
+  const way = zero === undefined ? undefined : zero + high > last + lastDigit ? 1 : -1;
   const said = (message: string, hint: string): Finding[] => [
-    findingAt(worst, { code: 'prove.travel', message, hint }),
+    findingAt(furthest(moves, axis, way), { code: 'prove.travel', message, hint }),
   ];
   if (zero === undefined) {
     return high - low > last - first + lastDigit

@@ -189,6 +189,6 @@ function worstAt({ field, stations, copy, height }: Copy, piece: number, u: numb
     copy,
     x: place.x * field.cos - place.y * field.sin,
     y: place.x * field.sin + place.y * field.cos,
-    move: path < 0 ? undefined : field.set.solids[path]!.move,
+    move: path < 0 ? undefined : field.set.moves[path],
   };
 }

@@ -12,7 +12,8 @@ import type { Field, Readings } from './deviation-measure.ts';
 import { worseTooth, type WorstTooth } from './deviation-plot.ts';
 import { REGION } from './deviation-stations.ts';
 import { rootFactor, toothRing, toothStations } from './deviation-tooth.ts';
-import { pathsBelow, type PathSet, type SolidMove } from './metal-paths.ts';
+import { pathsBelow, type PathSet } from './metal-paths.ts';
+import type { SolidMoves } from './metal-solids.ts';
 import type { DepthFigures } from './proof.ts';
 import { NO_ROLLING, readRollingLaw, rollingLaw, type RollingReading } from './rolling-law.ts';
 
@@ -39,7 +40,7 @@ export interface ToothFigures {
 const LEVELS = 4;
 
 export function toothFigures(
-  solids: readonly SolidMove[],
+  solids: SolidMoves,
   /** Their paths below the wheel's top and bottom. */
   set: PathSet,
   form: WheelForm,
@@ -95,11 +96,12 @@ function agree(a: DepthFigures, b: DepthFigures): boolean {
 }
 
 /** A few of the heights at which the cutter ran level, spread over the wheel. */
-function levelsBetween(solids: readonly SolidMove[], bottom: number, top: number): number[] {
+function levelsBetween({ count, z0, z1 }: SolidMoves, bottom: number, top: number): number[] {
   const levels = new Set<number>();
-  for (const { z0, z1 } of solids) {
-    if (z0 === z1 && z0 > bottom && z0 < top) {
-      levels.add(z0);
+  for (let i = 0; i < count; i++) {
+    const z = z1[i]!;
+    if (z0[i] === z && z > bottom && z < top) {
+      levels.add(z);
     }
   }
   const sorted = [...levels].toSorted((a, b) => a - b);

@@ -9,49 +9,93 @@ export interface Extents {
   readonly z: Range;
 }
 
-export function extentsOf(moves: Iterable<TracedMove>): Extents {
-  const low = [Infinity, Infinity, Infinity];
-  const high = [-Infinity, -Infinity, -Infinity];
-  const take = (axis: number, value: number | null): void => {
-    if (value !== null) {
-      low[axis] = Math.min(low[axis]!, value);
-      high[axis] = Math.max(high[axis]!, value);
-    }
+/** So far. */
+interface Reach {
+  left: number;
+  right: number;
+  front: number;
+  back: number;
+  low: number;
+  high: number;
+}
+
+export function extentsOf(moves: readonly TracedMove[]): Extents {
+  const reach: Reach = {
+    left: Infinity,
+    right: -Infinity,
+    front: Infinity,
+    back: -Infinity,
+    low: Infinity,
+    high: -Infinity,
   };
-  const isWithin = (left: number, right: number, front: number, back: number): boolean =>
-    left >= low[0]! && right <= high[0]! && front >= low[1]! && back <= high[1]!;
+  let stood: TracedMove['to'] | undefined;
   for (const move of moves) {
-    for (const { x, y, z } of [move.from, move.to]) {
-      take(0, x);
-      take(1, y);
-      take(2, z);
+    if (move.from !== stood) {
+      takePlace(reach, move.from);
     }
-    if (move.turn !== undefined) {
-      takeArc(move, take, isWithin);
+    takePlace(reach, move.to);
+    if (move.kind === 'arc') {
+      takeArc(reach, move);
     }
+    stood = move.to;
   }
-  const range = (axis: number): Range => (low[axis]! > high[axis]! ? [0, 0] : [low[axis]!, high[axis]!]);
-  return { x: range(0), y: range(1), z: range(2) };
+  const range = (low: number, high: number): Range => (low > high ? [0, 0] : [low, high]);
+  return {
+    x: range(reach.left, reach.right),
+    y: range(reach.front, reach.back),
+    z: range(reach.low, reach.high),
+  };
+}
+
+function takePlace(reach: Reach, { x, y, z }: TracedMove['to']): void {
+  if (x !== null) {
+    takeX(reach, x);
+  }
+  if (y !== null) {
+    takeY(reach, y);
+  }
+  if (z !== null) {
+    reach.low = z < reach.low ? z : reach.low;
+    reach.high = z > reach.high ? z : reach.high;
+  }
+}
+
+function takeX(reach: Reach, x: number): void {
+  reach.left = x < reach.left ? x : reach.left;
+  reach.right = x > reach.right ? x : reach.right;
+}
+
+function takeY(reach: Reach, y: number): void {
+  reach.front = y < reach.front ? y : reach.front;
+  reach.back = y > reach.back ? y : reach.back;
 }
 
 /** The quarters that an arc passes: there it reaches furthest. */
-function takeArc(
-  { from, centre, turn }: TracedMove,
-  take: (axis: number, value: number) => void,
-  isWithin: (left: number, right: number, low: number, high: number) => boolean,
-): void {
+function takeArc(reach: Reach, { from, centre, turn }: TracedMove): void {
   if (centre === undefined || turn === undefined || from.x === null || from.y === null) {
     return;
   }
-  const radius = Math.sqrt((from.x - centre.x) ** 2 + (from.y - centre.y) ** 2);
-  if (isWithin(centre.x - radius, centre.x + radius, centre.y - radius, centre.y + radius)) {
+  const { x, y } = centre;
+  const radius = Math.sqrt((from.x - x) ** 2 + (from.y - y) ** 2);
+  if (
+    x - radius >= reach.left &&
+    x + radius <= reach.right &&
+    y - radius >= reach.front &&
+    y + radius <= reach.back
+  ) {
     return;
   }
-  const start = Math.atan2(from.y - centre.y, from.x - centre.x);
-  const [low, high] = turn < 0 ? [start + turn, start] : [start, start + turn];
+  const start = Math.atan2(from.y - y, from.x - x);
+  const low = turn < 0 ? start + turn : start;
+  const high = turn < 0 ? start : start + turn;
   const quarter = Math.PI / 2;
   for (let k = Math.ceil(low / quarter); k * quarter <= high; k++) {
     const across = ((k % 4) + 4) % 4;
-    take(across % 2, (across % 2 === 0 ? centre.x : centre.y) + (across < 2 ? radius : -radius));
+    const out = across < 2 ? radius : -radius;
+    if (across % 2 === 0) {
+      takeX(reach, x + out);
+    } else {
+      takeY(reach, y + out);
+    }
   }
 }

@@ -3,7 +3,7 @@
  * before it, and whether the spindle stood at the machine's top when its Z is not known.
  */
 import type { TracedMove } from '../motion/traced-move.ts';
-import type { SolidMove } from './metal-paths.ts';
+import type { SolidMoves } from './metal-solids.ts';
 import type { Trace } from './trace-program.ts';
 
 export interface FastMove {
@@ -16,24 +16,25 @@ export interface FastMove {
   readonly atTop: boolean;
 }
 
-export function fastMoves(traces: readonly Trace[], solids: readonly SolidMove[]): FastMove[] {
+export function fastMoves(traces: readonly Trace[], { moves: solids }: SolidMoves): FastMove[] {
   const moves: FastMove[] = [];
   let before = 0;
   for (const { moves: own, events } of traces) {
     let atTop = false;
     let next = 0;
-    own.forEach((move, k) => {
+    for (let k = 0; k < own.length; k++) {
+      const move = own[k]!;
       for (; next < events.length && events[next]!.before <= k; next++) {
         const event = events[next]!;
         atTop = event.kind === 'machine-place' && event.axes.includes('z') ? true : atTop;
       }
-      const path = solids[before]?.move === move ? before : -1;
+      const path = solids[before] === move ? before : -1;
       if (move.kind === 'rapid') {
         moves.push({ move, before, path, atTop: atTop && move.from.z === null });
       }
       before += path < 0 ? 0 : 1;
       atTop = atTop && move.to.z === null;
-    });
+    }
   }
   return moves;
 }

@@ -9,10 +9,8 @@ import { pointOn } from '../geometry/on-piece.ts';
 import type { Loop } from '../geometry/piece.ts';
 import { add, angleOf, norm, ORIGIN, turnPoint, type Point } from '../geometry/point.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
-import type { TracedMove } from '../motion/traced-move.ts';
 import type { Worst } from './deviation-contour.ts';
-import type { SolidMove } from './metal-paths.ts';
-import type { Target } from './proof.ts';
+import type { SolidMoves } from './metal-solids.ts';
 
 export interface WheelBody {
   readonly form: WheelForm;
@@ -122,28 +120,36 @@ export function isInPolygon(polygon: readonly Point[], x: number, y: number): bo
 
 /**
  * The deepest cut whose axis is inside the wheel, if there is one. Moves are asked at both ends: one that crosses an
- * outline on its way is already found there.
+ * outline on its way is already found there. Places are asked once, however often a cutter comes by below `top`.
  */
-export function deepestInside(target: Target, solids: readonly SolidMove[], top: number): Worst | undefined {
-  const body = wheelBody(target.form, target.bore, target.crossings);
+export function deepestInside(body: WheelBody, solids: SolidMoves, top: number): Worst | undefined {
+  const { count, x0, y0, z0, x1, y1, z1, radius, twin } = solids;
+  // By place: 1 asked at its start, 2 at its end.
+  const asked = new Uint8Array(count);
   let worst: Worst | undefined;
-  const take = (move: TracedMove, radius: number, x: number, y: number): void => {
+  const ask = (i: number, x: number, y: number): void => {
     if (isInsideWheel(body, x, y)) {
-      const value = radius + depthInside(body, x, y);
-      worst = worst === undefined || value > worst.value ? { value, copy: 0, x, y, move } : worst;
+      const value = radius[i]! + depthInside(body, x, y);
+      worst =
+        worst === undefined || value > worst.value ? { value, copy: 0, x, y, move: solids.moves[i] } : worst;
     }
   };
-  let last: SolidMove | undefined;
-  for (const solid of solids) {
-    const { move, x0, y0, z0, x1, y1, z1, radius } = solid;
+  for (let i = 0; i < count; i++) {
+    const k = twin[i]!;
+    const was = asked[k]!;
+    if (was === 3) {
+      continue;
+    }
     // The end of the move before is the start of this one, and has been asked already.
-    if (z0 < top && (last === undefined || last.x1 !== x0 || last.y1 !== y0 || last.z1 >= top)) {
-      take(move, radius, x0, y0);
+    const follows = i > 0 && x1[i - 1] === x0[i] && y1[i - 1] === y0[i] && z1[i - 1]! < top;
+    if (z0[i]! < top && !follows && (was & 1) === 0) {
+      asked[k] = was | 1;
+      ask(i, x0[i]!, y0[i]!);
     }
-    if (z1 < top) {
-      take(move, radius, x1, y1);
+    if (z1[i]! < top && (was & 2) === 0) {
+      asked[k] = asked[k]! | 2;
+      ask(i, x1[i]!, y1[i]!);
     }
-    last = solid;
   }
   return worst;
 }

@@ -5,23 +5,10 @@
  * A cutter takes everything above its bottom, so the paths at a greater height contain those at a lower one: metal cut
  * away (gouge) is worst at the top of the wheel, metal left is worst at its bottom, and two heights with equal figures
  * have the same figures everywhere between. Typed arrays, because every flank point is held against them.
- * In: traced moves with the radius of their cutter. Out: lines and arcs of the cutter's axis; mm, the program's frame.
+ * In: moves with the radius of their cutter. Out: lines and arcs of the cutter's axis; mm, the program's frame.
  */
 import type { TracedMove } from '../motion/traced-move.ts';
-import { twinsOf } from './metal-twins.ts';
-
-/** A move whose two ends and cutter are known. */
-export interface SolidMove {
-  readonly move: TracedMove;
-  readonly x0: number;
-  readonly y0: number;
-  readonly z0: number;
-  readonly x1: number;
-  readonly y1: number;
-  readonly z1: number;
-  /** Of the cutter. */
-  readonly radius: number;
-}
+import type { SolidMoves } from './metal-solids.ts';
 
 export interface PathSet {
   readonly count: number;
@@ -42,98 +29,109 @@ export interface PathSet {
   readonly radius: Float64Array;
   /** 1 where the whole path lies at or below the lower height. */
   readonly deep: Uint8Array;
-  /** For each path the first one in the same place: itself, where there was none. */
-  readonly twin: Int32Array;
   /** The move each path is part of. */
-  readonly solids: readonly SolidMove[];
-}
-
-/** The moves whose ends are known, with the cutter that makes them. */
-export function solidMoves(
-  moves: readonly TracedMove[],
-  radiusOf: (move: TracedMove) => number | undefined,
-): SolidMove[] {
-  const solids: SolidMove[] = [];
-  for (const move of moves) {
-    const { from, to } = move;
-    const radius = radiusOf(move);
-    if (radius === undefined || from.x === null || from.y === null || from.z === null) {
-      continue;
-    }
-    if (to.x === null || to.y === null || to.z === null) {
-      continue;
-    }
-    solids.push({ move, x0: from.x, y0: from.y, z0: from.z, x1: to.x, y1: to.y, z1: to.z, radius });
-  }
-  return solids;
+  readonly moves: readonly TracedMove[];
 }
 
 /** Whole moves, one path each, in their order; those that lie where an earlier one lies share its figures. */
-export function wholePaths(solids: readonly SolidMove[]): PathSet {
-  const twin = twinsOf(solids);
-  const set = emptySet(solids, new Uint8Array(solids.length).fill(1), twin);
-  for (let i = 0; i < set.count; i++) {
-    if (twin[i] === i) {
-      place(set, i, solids[i]!, 0, 1);
+export function wholePaths(solids: SolidMoves): PathSet {
+  const { count, moves, x0, y0, x1, y1, cx, cy, turn, radius, twin } = solids;
+  const [arc, mx, my, bound] = [room(count), room(count), room(count), room(count)];
+  const deep = new Uint8Array(count).fill(1);
+  const set = { count, moves, x0, y0, x1, y1, cx, cy, turn, radius, arc, mx, my, bound, deep };
+  for (let i = 0; i < count; i++) {
+    const k = twin[i]!;
+    if (k === i) {
+      place(set, i, solids, i, 0, 1);
     } else {
-      copyPath(set, twin[i]!, set, i);
+      arc[i] = arc[k]!;
+      mx[i] = mx[k]!;
+      my[i] = my[k]!;
+      bound[i] = bound[k]!;
     }
   }
   return set;
+}
+
+function room(size: number): Float64Array {
+  return new Float64Array(size);
+}
+
+/** A part of a move to be taken, and whether all of it: then its figures are there already. */
+interface Parts {
+  readonly solid: number[];
+  readonly deep: (0 | 1)[];
+  readonly whole: boolean[];
 }
 
 /** The parts of the moves at or below `upper`, cut in two where they cross `lower`; each place once, at its first move. */
 export function pathsBelow(
-  solids: readonly SolidMove[],
+  solids: SolidMoves,
   lower: number,
   upper: number,
   whole: PathSet = wholePaths(solids),
 ): PathSet {
-  const parts: SolidMove[] = [];
-  const deep: number[] = [];
-  const from: number[] = [];
-  // Which places are there already: 1 above the lower height, 2 below it.
-  const seen = new Uint8Array(solids.length);
-  const take = (i: number, isDeep: 0 | 1, cut: boolean): void => {
-    const mark = isDeep + 1;
-    const twin = whole.twin[i]!;
-    if (cut || (seen[twin]! & mark) === 0) {
-      seen[twin]! |= cut ? 0 : mark;
-      parts.push(solids[i]!);
-      deep.push(isDeep);
-      from.push(cut ? -1 : twin);
-    }
-  };
-  for (let i = 0; i < solids.length; i++) {
-    const { z0, z1 } = solids[i]!;
-    const least = Math.min(z0, z1);
-    const most = Math.max(z0, z1);
-    if (least <= lower) {
-      take(i, 1, most > lower);
-    }
-    if (most > lower && least <= upper && upper > lower) {
-      take(i, 0, least < lower || most > upper);
-    }
-  }
+  const parts = partsBelow(solids, lower, upper);
+  const count = parts.solid.length;
   const set = emptySet(
-    parts,
-    Uint8Array.from(deep),
-    Int32Array.from(parts, (_, k) => k),
+    parts.solid.map((i) => solids.moves[i]!),
+    Uint8Array.from(parts.deep),
   );
-  for (let k = 0; k < set.count; k++) {
-    if (from[k]! >= 0) {
-      copyPath(whole, from[k]!, set, k);
+  for (let k = 0; k < count; k++) {
+    const i = parts.solid[k]!;
+    if (parts.whole[k]!) {
+      copyPath(whole, i, set, k);
     } else {
-      const { z0, z1 } = parts[k]!;
-      const low = deep[k] === 1 ? -Infinity : lower;
-      const high = deep[k] === 1 ? lower : upper;
-      place(set, k, parts[k]!, shareWithin(z0, z1, low, high), 1 - shareWithin(z1, z0, low, high));
+      const [z0, z1] = [solids.z0[i]!, solids.z1[i]!];
+      const low = parts.deep[k] === 1 ? -Infinity : lower;
+      const high = parts.deep[k] === 1 ? lower : upper;
+      place(set, k, solids, i, shareWithin(z0, z1, low, high), 1 - shareWithin(z1, z0, low, high));
     }
   }
   return set;
 }
 
-/** Field by field: this runs for every lap of every tooth. */
+function partsBelow({ count, z0, z1, twin }: SolidMoves, lower: number, upper: number): Parts {
+  const parts: Parts = { solid: [], deep: [], whole: [] };
+  // Which places are there already: 1 above the lower height, 2 below it.
+  const seen = new Uint8Array(count);
+  for (let i = 0; i < count; i++) {
+    const a = z0[i]!;
+    const b = z1[i]!;
+    const least = a < b ? a : b;
+    if (least > upper) {
+      continue;
+    }
+    const most = a < b ? b : a;
+    if (least <= lower) {
+      takePart(parts, seen, i, twin[i]!, 1, most <= lower);
+    }
+    if (most > lower && upper > lower) {
+      takePart(parts, seen, i, twin[i]!, 0, least >= lower && most <= upper);
+    }
+  }
+  return parts;
+}
+
+function takePart(
+  { solid, deep, whole }: Parts,
+  seen: Uint8Array,
+  i: number,
+  twin: number,
+  isDeep: 0 | 1,
+  isWhole: boolean,
+): void {
+  const mark = isDeep + 1;
+  if (isWhole && (seen[twin]! & mark) !== 0) {
+    return;
+  }
+  seen[twin]! |= isWhole ? mark : 0;
+  solid.push(i);
+  deep.push(isDeep);
+  whole.push(isWhole);
+}
+
+/** Field by field: this runs for every place of every tooth. */
 function copyPath(source: PathSet, i: number, target: PathSet, k: number): void {
   target.x0[k] = source.x0[i]!;
   target.y0[k] = source.y0[i]!;
@@ -157,10 +155,10 @@ function shareWithin(z0: number, z1: number, low: number, high: number): number 
   return z0 === z1 ? 0 : ((z0 < low ? low : high) - z0) / (z1 - z0);
 }
 
-function emptySet(solids: readonly SolidMove[], deep: Uint8Array, twin: Int32Array): PathSet {
-  const field = (): Float64Array => new Float64Array(solids.length);
+function emptySet(moves: readonly TracedMove[], deep: Uint8Array): PathSet {
+  const field = (): Float64Array => new Float64Array(moves.length);
   return {
-    count: solids.length,
+    count: moves.length,
     x0: field(),
     y0: field(),
     x1: field(),
@@ -174,59 +172,65 @@ function emptySet(solids: readonly SolidMove[], deep: Uint8Array, twin: Int32Arr
     bound: field(),
     radius: field(),
     deep,
-    twin,
-    solids,
+    moves,
   };
 }
 
-/** The part of the move between u and v, as path i. */
-function place(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
-  set.radius[i] = solid.radius;
-  if (solid.move.turn === undefined) {
-    placeLine(set, i, solid, u, v);
+/** The part of move i between u and v, as path k. */
+function place(set: PathSet, k: number, solids: SolidMoves, i: number, u: number, v: number): void {
+  set.radius[k] = solids.radius[i]!;
+  if (solids.turn[i] === 0) {
+    placeLine(set, k, solids, i, u, v);
   } else {
-    placeArc(set, i, solid, u, v);
+    placeArc(set, k, solids, i, u, v);
   }
 }
 
-function placeLine(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
-  const { x0, y0, x1, y1 } = solid;
+function placeLine(set: PathSet, k: number, solids: SolidMoves, i: number, u: number, v: number): void {
+  const x0 = solids.x0[i]!;
+  const y0 = solids.y0[i]!;
+  const x1 = solids.x1[i]!;
+  const y1 = solids.y1[i]!;
   const dx = x1 - x0;
   const dy = y1 - y0;
-  set.x0[i] = u === 0 ? x0 : x0 + u * dx;
-  set.y0[i] = u === 0 ? y0 : y0 + u * dy;
-  set.x1[i] = v === 1 ? x1 : x0 + v * dx;
-  set.y1[i] = v === 1 ? y1 : y0 + v * dy;
-  set.mx[i] = x0 + ((u + v) / 2) * dx;
-  set.my[i] = y0 + ((u + v) / 2) * dy;
-  set.bound[i] = (Math.sqrt(dx * dx + dy * dy) * (v - u)) / 2;
+  set.x0[k] = u === 0 ? x0 : x0 + u * dx;
+  set.y0[k] = u === 0 ? y0 : y0 + u * dy;
+  set.x1[k] = v === 1 ? x1 : x0 + v * dx;
+  set.y1[k] = v === 1 ? y1 : y0 + v * dy;
+  set.mx[k] = x0 + ((u + v) / 2) * dx;
+  set.my[k] = y0 + ((u + v) / 2) * dy;
+  set.bound[k] = (Math.sqrt(dx * dx + dy * dy) * (v - u)) / 2;
 }
 
-function placeArc(set: PathSet, i: number, solid: SolidMove, u: number, v: number): void {
-  const { x0, y0, x1, y1 } = solid;
-  const turn = solid.move.turn ?? 0;
-  const { x: cx, y: cy } = solid.move.centre ?? { x: 0, y: 0 };
+function placeArc(set: PathSet, k: number, solids: SolidMoves, i: number, u: number, v: number): void {
+  const x0 = solids.x0[i]!;
+  const y0 = solids.y0[i]!;
+  const x1 = solids.x1[i]!;
+  const y1 = solids.y1[i]!;
+  const cx = solids.cx[i]!;
+  const cy = solids.cy[i]!;
+  const turn = solids.turn[i]!;
   const sx = x0 - cx;
   const sy = y0 - cy;
   // The ends were rounded apart; the middle of the two radii is never further off than half the rounding.
   const first = Math.sqrt(sx * sx + sy * sy);
   const arc = (first + Math.sqrt((x1 - cx) * (x1 - cx) + (y1 - cy) * (y1 - cy))) / 2;
   const even = first === 0 ? 0 : arc / first;
-  set.x0[i] = x0;
-  set.y0[i] = y0;
-  set.x1[i] = x1;
-  set.y1[i] = y1;
-  set.cx[i] = cx;
-  set.cy[i] = cy;
-  set.arc[i] = arc;
-  set.turn[i] = turn * (v - u);
-  set.bound[i] = Math.min(2 * arc, (arc * Math.abs(turn) * (v - u)) / 2);
-  turned(set, i, ((u + v) / 2) * turn, sx * even, sy * even, set.mx, set.my);
+  set.x0[k] = x0;
+  set.y0[k] = y0;
+  set.x1[k] = x1;
+  set.y1[k] = y1;
+  set.cx[k] = cx;
+  set.cy[k] = cy;
+  set.arc[k] = arc;
+  set.turn[k] = turn * (v - u);
+  set.bound[k] = Math.min(2 * arc, (arc * Math.abs(turn) * (v - u)) / 2);
+  turned(set, k, ((u + v) / 2) * turn, sx * even, sy * even, set.mx, set.my);
   if (u !== 0) {
-    turned(set, i, u * turn, sx * even, sy * even, set.x0, set.y0);
+    turned(set, k, u * turn, sx * even, sy * even, set.x0, set.y0);
   }
   if (v !== 1) {
-    turned(set, i, v * turn, sx * even, sy * even, set.x1, set.y1);
+    turned(set, k, v * turn, sx * even, sy * even, set.x1, set.y1);
   }
 }
 

@@ -100,7 +100,7 @@ export function readRollingLaw(
               copy,
               x,
               y,
-              move: set.solids[path]!.move,
+              move: set.moves[path],
             }
           : worst),
         angle: Math.max(angle, worst.angle),

@@ -8,7 +8,7 @@
 import { SAME_POINT } from '../base/tolerances.ts';
 import { wholeAngle, type Point } from '../geometry/point.ts';
 import { BIT, has, valueOf, type Block } from './block.ts';
-import type { Here } from './modes.ts';
+import type { Here, ModalState } from './modes.ts';
 import { arcMissAllowed, arcOutOfLimits } from './trace-arc-limits.ts';
 import { lengthOf } from './trace-place.ts';
 import { badArc, remark, unread, type Refusal, type Run } from './trace-run.ts';
@@ -18,8 +18,48 @@ export interface ReadArc {
   readonly turn: number;
 }
 
-/** The arc from where the machine stands to `to`, or why it can't be run. */
+/** An arc, and everything it follows from beside its own words. */
+export interface ArcMemo {
+  readonly from: Here;
+  readonly to: Here;
+  readonly sense: 1 | -1;
+  readonly plane: ModalState['plane'];
+  readonly mode: ModalState['centre'];
+  readonly unit: ModalState['unit'];
+  readonly arc: ReadArc;
+}
+
+/**
+ * The arc from where the machine stands to `to`, or why it can't be run. Laps repeat each other: the same words between
+ * the same places, with the same modes, are the same arc.
+ */
 export function readArc(run: Run, block: Block, to: Here, sense: 1 | -1): ReadArc | Refusal {
+  const { here, modes } = run;
+  const { plane, centre: mode, unit } = modes;
+  const was = block.arc;
+  if (
+    was !== undefined &&
+    was.from.x === here.x &&
+    was.from.y === here.y &&
+    was.to.x === to.x &&
+    was.to.y === to.y &&
+    (was.from.z === was.to.z) === (here.z === to.z) &&
+    was.sense === sense &&
+    was.plane === plane &&
+    was.mode === mode &&
+    was.unit === unit
+  ) {
+    return was.arc;
+  }
+  const arc = workOut(run, block, to, sense);
+  // Where arcs have been remarked on, each is looked at anew: it may have to be counted.
+  if (!('code' in arc) && !run.remarks.has(HALF)) {
+    block.arc = { from: here, to, sense, plane, mode, unit, arc };
+  }
+  return arc;
+}
+
+function workOut(run: Run, block: Block, to: Here, sense: 1 | -1): ReadArc | Refusal {
   const { here, modes } = run;
   if (modes.plane !== 'XY') {
     return unread(
@@ -49,6 +89,9 @@ export function readArc(run: Run, block: Block, to: Here, sense: 1 | -1): ReadAr
   const arc = { centre, turn };
   return arcOutOfLimits(run.machine, modes.unit ?? 'mm', here, to, arc) ?? arc;
 }
+
+/** Kind of the remark that has to be made, and counted, of every such arc. */
+const HALF = 'half by R';
 
 function centreByWords(run: Run, block: Block, from: Point): Point | Refusal {
   const mode = run.modes.centre;
@@ -87,7 +130,7 @@ function centreByRadius(run: Run, block: Block, from: Point, end: Point, sense: 
       'prove.ambiguous',
       'warning',
       'half a circle by R: the last digit decides where its centre lies',
-      'half by R',
+      HALF,
     );
   }
   const left = (sense * Math.sign(radius) * height) / chord;

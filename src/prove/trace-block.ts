@@ -31,15 +31,28 @@ export function runBlock(run: Run, block: Block): Refusal | undefined {
   }
   return (
     leftOver(run, block, motion, axes, dwellBit, isHome) ??
+    (block.onlyMoves ? undefined : settings(run, block, motion, dwellBit, other === DWELL)) ??
+    moveAs(run, block, motion, axes, other) ??
+    stop(run, block)
+  );
+}
+
+/** What comes before the move. */
+function settings(
+  run: Run,
+  block: Block,
+  motion: MotionMode | undefined,
+  dwellBit: number,
+  isDwell: boolean,
+): Refusal | undefined {
+  return (
     setFeed(run, block, dwellBit) ??
     setSpeed(run, block, dwellBit) ??
     selectCutter(run, block) ??
     changeCutter(run, block) ??
     turnSpindle(run, block, motion !== undefined) ??
-    runDwell(run, block, other === DWELL, dwellBit, motion !== undefined) ??
-    changeModes(run, block) ??
-    moveAs(run, block, motion, axes, other) ??
-    stop(run, block)
+    runDwell(run, block, isDwell, dwellBit, motion !== undefined) ??
+    changeModes(run, block)
   );
 }
 

@@ -5,7 +5,7 @@
  * What the controller would not load is an error that doesn't stop the reader; what changes the meaning does.
  */
 import { BIT, valueOf, wholeOf, type Block } from './block.ts';
-import type { LineWords } from './line-words.ts';
+import type { ReadLine } from './read-lines.ts';
 import { happen, remark, unread, type Refusal, type Run } from './trace-run.ts';
 
 export interface FileState {
@@ -26,25 +26,25 @@ export interface FileState {
 const LAST_NUMBER = 99999;
 
 /** What the controller could not load of this line as it is written. */
-export function checkLine(run: Run, text: string, words: LineWords): void {
-  const { start, end } = words;
+export function checkLine(run: Run, line: ReadLine): void {
+  const { length } = line.text;
   const { file } = run.machine.words;
-  if (end - start > file.lineLongest) {
-    const message = `a line of ${String(end - start)} characters; this machine holds ${String(file.lineLongest)}`;
+  if (length > file.lineLongest) {
+    const message = `a line of ${String(length)} characters; this machine holds ${String(file.lineLongest)}`;
     remark(run, 'prove.file', 'error', message, 'long line');
   }
-  if (words.small && file.letterCase === 'upper') {
+  if (line.small && file.letterCase === 'upper') {
     remark(run, 'prove.file', 'error', 'small letters in words; this machine reads capitals only', 'small');
   }
-  if (words.comments.length > 0) {
-    checkComments(run, text, words);
+  if (line.comments.length > 0) {
+    checkComments(run, line);
   }
 }
 
-function checkComments(run: Run, text: string, words: LineWords): void {
-  const { start, end } = words;
+function checkComments(run: Run, line: ReadLine): void {
+  const { text } = line;
   const { file } = run.machine.words;
-  if (file.commentOwnLine && (words.count > 0 || words.number >= 0)) {
+  if (file.commentOwnLine && (line.count > 0 || line.number >= 0)) {
     remark(
       run,
       'prove.file',
@@ -53,7 +53,7 @@ function checkComments(run: Run, text: string, words: LineWords): void {
       'beside',
     );
   }
-  for (let i = start; i < end; i++) {
+  for (let i = 0; i < text.length; i++) {
     const code = text.charCodeAt(i);
     if (code > 126 || (code < 32 && code !== 9) || file.bannedCharacters.includes(text.charAt(i))) {
       const shown = code > 32 && code < 127 ? `"${text.charAt(i)}"` : `character ${String(code)}`;
@@ -70,12 +70,12 @@ function checkComments(run: Run, text: string, words: LineWords): void {
 }
 
 /** A number of the line that this controller can't hold. */
-export function checkNumber(run: Run, words: LineWords): Refusal | undefined {
+export function checkNumber(run: Run, line: ReadLine): Refusal | undefined {
   const { numbers, last } = run.machine.words.blocks;
   const highest = numbers === 'none' ? LAST_NUMBER : last;
-  if (words.number > highest || words.numberDigits > String(highest).length) {
+  if (line.number > highest || line.numberDigits > String(highest).length) {
     return unread(
-      `line number ${String(words.number)} in ${String(words.numberDigits)} digits; this machine counts to ${String(highest)}`,
+      `line number ${String(line.number)} in ${String(line.numberDigits)} digits; this machine counts to ${String(highest)}`,
     );
   }
   return undefined;
@@ -105,7 +105,7 @@ export function readPercent(run: Run, name: string, state: FileState): Refusal |
 }
 
 /** Whether the line is a program number, alone and before everything else; a wrong one is refused. */
-export function readLabel(run: Run, words: LineWords, block: Block, state: FileState): Refusal | boolean {
+export function readLabel(run: Run, line: ReadLine, block: Block, state: FileState): Refusal | boolean {
   if ((block.given & BIT.O) === 0) {
     return false;
   }
@@ -114,7 +114,7 @@ export function readLabel(run: Run, words: LineWords, block: Block, state: FileS
     return unread('O: this machine reads no program number');
   }
   const number = wholeOf(valueOf(block, 'O'));
-  if (words.count > 1 || state.blocks > 0 || state.labelled) {
+  if (line.count > 1 || state.blocks > 0 || state.labelled) {
     return unread('O: a program number stands alone, once, before all blocks');
   }
   if (number === undefined || number < labelLowest || number > labelHighest) {
@@ -124,8 +124,8 @@ export function readLabel(run: Run, words: LineWords, block: Block, state: FileS
   return true;
 }
 
-/** What is missing at the end. `rest` is the text after the line that ended the program. */
-export function checkEnd(run: Run, state: FileState, rest: string): void {
+/** What is missing at the end. */
+export function checkEnd(run: Run, state: FileState, lines: readonly ReadLine[]): void {
   const { percentLines, programLabel } = run.machine.words.file;
   const last = run.events.at(-1);
   if (!state.ended) {
@@ -134,7 +134,7 @@ export function checkEnd(run: Run, state: FileState, rest: string): void {
     last?.kind === 'end' &&
     last.word !== '%' &&
     state.percents === 1 &&
-    !/^[ \t]*%[ \t]*$/m.test(rest)
+    !lines.slice(run.line).some(({ text }) => /^[ \t]*%[ \t]*$/.test(text))
   ) {
     remark(run, 'prove.end', 'error', 'the program begins with % and has no closing % line');
   }

@@ -6,7 +6,7 @@
  * and a circle that closes on paper closes here.
  */
 import { millimetresPer } from '../base/units.ts';
-import { has, valueOf, type Block, type Letter } from './block.ts';
+import { BIT, valueOf, type Block } from './block.ts';
 import type { Here } from './modes.ts';
 import { isLengthKnown, unread, type Refusal, type Run } from './trace-run.ts';
 
@@ -31,23 +31,20 @@ export function lengthOf(run: Run, value: number): number {
 
 /** Where the axis words lead; axes that are not given stay. `placeRefused` has been asked. */
 export function placeOf(run: Run, block: Block, axes: number): Here {
-  const { here } = run;
-  const z = axisPlace(run, block, axes, 'Z', here.z);
+  const { here, modes } = run;
+  const given = axes & block.given;
+  const unit = millimetresPer(modes.unit ?? 'mm');
+  const isAbsolute = modes.distance === 'absolute';
+  const { x, y, z } = here;
   return {
-    x: axisPlace(run, block, axes, 'X', here.x),
-    y: axisPlace(run, block, axes, 'Y', here.y),
-    z: isLengthKnown(run) ? z : null,
+    x: given & BIT.X ? axisPlace(x, valueOf(block, 'X'), unit, isAbsolute) : x,
+    y: given & BIT.Y ? axisPlace(y, valueOf(block, 'Y'), unit, isAbsolute) : y,
+    z: !isLengthKnown(run) ? null : given & BIT.Z ? axisPlace(z, valueOf(block, 'Z'), unit, isAbsolute) : z,
   };
 }
 
-function axisPlace(run: Run, block: Block, axes: number, letter: Letter, from: number | null): number | null {
-  const bit = 1 << (letter.charCodeAt(0) - 65);
-  if ((axes & bit) === 0 || !has(block, bit)) {
-    return from;
-  }
-  const value = valueOf(block, letter);
-  const unit = millimetresPer(run.modes.unit ?? 'mm');
-  if (run.modes.distance === 'absolute') {
+function axisPlace(from: number | null, value: number, unit: number, isAbsolute: boolean): number | null {
+  if (isAbsolute) {
     return value * unit;
   }
   return from === null

@@ -8,12 +8,11 @@
  */
 import type { Machine } from '../machine/machine.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
-import { emptyBlock, sortWords, type Block } from './block.ts';
-import type { LineWords } from './line-words.ts';
+import type { Block } from './block.ts';
 import { codesOf, M_GROUP } from './modes-codes.ts';
 import { NOWHERE, powerOn, type FinalModes } from './modes.ts';
 import type { Finding } from './proof.ts';
-import { emptyAhead, readAhead } from './read-ahead.ts';
+import { readLines, type ReadLine } from './read-lines.ts';
 import { runBlock } from './trace-block.ts';
 import { handsDone, readComments, type ByHand } from './trace-comments.ts';
 import { checkEnd, checkLine, checkNumber, readLabel, readPercent, type FileState } from './trace-file.ts';
@@ -44,7 +43,7 @@ export interface TraceStart {
 export function traceProgram(file: string, text: string, machine: Machine, start: TraceStart = {}): Trace {
   const run = openRun(file, machine, start);
   const state: FileState = { blocks: 0, percents: 0, labelled: false, ended: false, alone: 0, passedOver: 0 };
-  const complete = readLines(run, text, start, state);
+  const complete = runLines(run, readLines(text, machine, run.codes), start, state);
   countRemarks(run);
   const { moves, events, findings, modes } = run;
   const notChecked = notCheckedOf(run, state, complete);
@@ -78,91 +77,75 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
   };
 }
 
-/** Reads until the program ends or a line is refused; says whether it came to the end. */
-function readLines(run: Run, text: string, start: TraceStart, state: FileState): boolean {
-  const ahead = emptyAhead();
-  const block = emptyBlock();
+/** Runs line after line until the program ends or a line is refused; says whether it came to the end. */
+function runLines(run: Run, lines: readonly ReadLine[], start: TraceStart, state: FileState): boolean {
   const byHand: ByHand = { cutter: undefined, speed: undefined };
-  const { commentForm } = run.machine.words.file;
-  let at = 0;
-  let rest = 0;
-  while (at < text.length && !state.ended) {
-    at = readAhead(text, at, commentForm, ahead);
-    for (let i = 0; i < ahead.count && !state.ended; i++) {
-      const words = ahead.lines[i];
-      if (words === undefined) {
-        break;
-      }
-      run.line += 1;
-      rest = words.end;
-      const refused =
-        checkWords(run, text, words, state, ahead.differs === i ? ahead.how : undefined) ??
-        readLine(run, words, block, start, state, byHand);
-      if (refused !== undefined) {
-        run.findings.push({ ...refused, severity: 'error', file: run.file, line: run.line });
-        return false;
-      }
+  for (let k = 0; k < lines.length && !state.ended; k++) {
+    const line = lines[k]!;
+    run.line = k + 1;
+    const refused = line.onlyMoves
+      ? runMoves(run, line, state, byHand)
+      : (checkWords(run, line, state) ?? runLine(run, line, start, state, byHand));
+    if (refused !== undefined) {
+      run.findings.push({ ...refused, severity: 'error', file: run.file, line: run.line });
+      return false;
     }
   }
-  checkEnd(run, state, text.slice(rest));
+  checkEnd(run, state, lines);
   return true;
 }
 
 /** Whether the line's words are certain: ours could split it, the file may hold it, and a second reader agrees. */
-function checkWords(
-  run: Run,
-  text: string,
-  words: LineWords,
-  state: FileState,
-  differs: string | undefined,
-): Refusal | undefined {
-  if (words.fault !== undefined) {
-    return unread(`column ${String(words.faultColumn)}: ${words.fault}`);
+function checkWords(run: Run, line: ReadLine, state: FileState): Refusal | undefined {
+  if (line.fault !== undefined) {
+    return unread(line.fault);
   }
-  if (words.percent !== undefined) {
+  if (line.percent !== undefined) {
     state.alone += 1;
     return undefined;
   }
-  checkLine(run, text, words);
-  if (words.number >= 0) {
-    const refused = checkNumber(run, words);
-    if (refused !== undefined) {
-      return refused;
-    }
-  }
+  checkLine(run, line);
+  return (line.number >= 0 ? checkNumber(run, line) : undefined) ?? disagreement(line);
+}
+
+function disagreement({ differs }: ReadLine): Refusal | undefined {
   return differs === undefined ? undefined : { code: 'prove.readers-disagree', message: differs };
 }
 
+/** A line that holds a move and nothing else: most of any program. */
+function runMoves(run: Run, line: ReadLine, state: FileState, byHand: ByHand): Refusal | undefined {
+  state.blocks += 1;
+  byHand.cutter = undefined;
+  byHand.speed = undefined;
+  return disagreement(line) ?? runBlock(run, line.block as Block);
+}
+
 /** Runs a line whose words are certain. */
-function readLine(
+function runLine(
   run: Run,
-  words: LineWords,
-  block: Block,
+  line: ReadLine,
   start: TraceStart,
   state: FileState,
   byHand: ByHand,
 ): Refusal | undefined {
-  if (words.percent !== undefined) {
-    return readPercent(run, words.percent, state);
+  if (line.percent !== undefined) {
+    return readPercent(run, line.percent, state);
   }
-  if (words.skipped) {
+  if (line.skipped) {
     const passes = passesOver(run, start);
     if (passes !== false) {
       state.passedOver += 1;
       return passes === true ? undefined : passes;
     }
   }
-  if (words.comments.length > 0) {
-    readComments(run, words.comments, byHand);
+  if (line.comments.length > 0) {
+    readComments(run, line.comments, byHand);
   }
-  if (words.count === 0) {
-    return undefined;
+  const { block } = line;
+  if (typeof block !== 'object') {
+    return block === undefined ? undefined : unread(block);
   }
-  const wrong = sortWords(words, run.codes, block);
-  if (wrong !== undefined) {
-    return unread(wrong);
-  }
-  const label = readLabel(run, words, block, state);
+  const label = readLabel(run, line, block, state);
   if (label !== false) {
     return label === true ? undefined : label;
   }

@@ -1,27 +1,34 @@
 /** What a cutting move below the top works on, judged by where it is: bore, crossing or teeth. */
-import { wheelBody, isInWindowAt } from './metal-inside.ts';
+import { isInWindowAt } from './metal-inside.ts';
 import type { Evidence } from './evidence.ts';
-import type { SolidMove } from './metal-paths.ts';
+import { lowOf } from './metal-solids.ts';
 
 export type CutPlace = 'bore' | 'crossing' | 'teeth';
 
-export function whatIsCut({ input, lastDigit }: Evidence): (solid: SolidMove) => CutPlace | undefined {
-  const { target, setup } = input;
-  if (target === undefined) {
+/** Of each move by its number. Places are judged once, however often the cutter comes by. */
+export function whatIsCut({ input, lastDigit, body, solids }: Evidence): (i: number) => CutPlace | undefined {
+  if (body === undefined) {
     return () => undefined;
   }
-  const body = wheelBody(target.form, target.bore, target.crossings);
-  return ({ move, x1, y1, z0, z1 }) => {
-    if (move.kind === 'rapid' || Math.min(z0, z1) >= setup.topZ - lastDigit) {
-      return undefined;
-    }
-    const rho = Math.hypot(x1, y1);
+  const top = input.setup.topZ - lastDigit;
+  const judged: (CutPlace | 'nothing' | undefined)[] = [];
+  const judge = (i: number): CutPlace | 'nothing' => {
+    const x = solids.x1[i]!;
+    const y = solids.y1[i]!;
+    const rho = Math.sqrt(x * x + y * y);
     if (rho < body.boreRadius) {
       return 'bore';
     }
-    if (rho > target.form.rootRadius) {
+    if (rho > body.form.rootRadius) {
       return 'teeth';
     }
-    return isInWindowAt(body, x1, y1) ? 'crossing' : undefined;
+    return isInWindowAt(body, x, y) ? 'crossing' : 'nothing';
+  };
+  return (i) => {
+    if (solids.rapid[i] === 1 || lowOf(solids, i) >= top) {
+      return undefined;
+    }
+    const place = (judged[solids.twin[i]!] ??= judge(i));
+    return place === 'nothing' ? undefined : place;
   };
 }

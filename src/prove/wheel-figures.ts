@@ -9,8 +9,9 @@ import type { Setup } from '../cutting/setup.ts';
 import { measureContour, NOWHERE, type ContourFigures, type Worst } from './deviation-contour.ts';
 import { toothFigures, type Heights, type ToothFigures } from './deviation-depths.ts';
 import { boreWall, windowWall, type Wall } from './deviation-walls.ts';
-import { deepestInside } from './metal-inside.ts';
-import { pathsBelow, type PathSet, type SolidMove } from './metal-paths.ts';
+import { deepestInside, type WheelBody } from './metal-inside.ts';
+import { pathsBelow, type PathSet } from './metal-paths.ts';
+import type { SolidMoves } from './metal-solids.ts';
 import type { Target } from './proof.ts';
 
 export interface WheelFigures {
@@ -31,8 +32,9 @@ export interface WallFigures {
 
 export function wheelFigures(
   target: Target,
+  body: WheelBody,
   setup: Setup,
-  solids: readonly SolidMove[],
+  solids: SolidMoves,
   whole: PathSet,
   lastDigit: number,
 ): WheelFigures {
@@ -54,7 +56,7 @@ export function wheelFigures(
     teeth: toothFigures(solids, set, form, finishingDiameter, heights, allowed),
     bore: isBored ? undefined : wall(boreWall(target.bore, cutterRadius)),
     window: crossings === undefined ? undefined : wall(windowWall(crossings, cutterRadius)),
-    inside: deepestInside(target, solids, heights.top - heights.slack) ?? NOWHERE,
+    inside: deepestInside(body, solids, heights.top - heights.slack) ?? NOWHERE,
   };
 }
 

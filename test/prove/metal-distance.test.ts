@@ -4,7 +4,8 @@ import { describe, expect, it } from 'vitest';
 import type { TracedMove } from '../../src/motion/traced-move.ts';
 import { extentsOf } from '../../src/prove/extents.ts';
 import { pathDistance } from '../../src/prove/metal-distance.ts';
-import { pathsBelow, solidMoves } from '../../src/prove/metal-paths.ts';
+import { pathsBelow } from '../../src/prove/metal-paths.ts';
+import { solidMoves } from '../../src/prove/metal-solids.ts';
 
 const real = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const at = fc.record({ x: real(-3, 3), y: real(-3, 3) });

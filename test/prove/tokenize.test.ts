@@ -2,9 +2,12 @@
 import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { emptyLineWords } from '../../src/prove/line-words.ts';
-import { emptyAhead, readAhead } from '../../src/prove/read-ahead.ts';
+import { codesOf } from '../../src/prove/modes-codes.ts';
+import { readLines, type ReadLine } from '../../src/prove/read-lines.ts';
 import { secondReading, secondReadingAgrees } from '../../src/prove/second-reader.ts';
 import { tokenizeLine } from '../../src/prove/tokenize.ts';
+import { traceProgram } from '../../src/prove/trace-program.ts';
+import { post } from '../support/bench-program.ts';
 
 const words = emptyLineWords();
 
@@ -120,14 +123,22 @@ describe('the second reader', () => {
   });
 });
 
-describe('lines read ahead', () => {
+describe('lines', () => {
+  const bench = post('bench-mill');
+  const codes = codesOf(bench);
+  const read = (text: string): readonly ReadLine[] => readLines(text, bench, codes);
   const text = ['N10 G1 X1', 'Y2 X-0.5', '', 'N30G2 X4I5', 'N40', '  Z 1. 5 '].join('\n');
+  const theirs = text.split('\n').map((line) => {
+    const into = emptyLineWords();
+    tokenizeLine(line, 0, line.length, 'brackets', into);
+    return into;
+  });
 
-  it('are split one by one and agreed about together', () => {
-    const ahead = emptyAhead();
-    expect(readAhead(text, 0, 'brackets', ahead)).toBeGreaterThanOrEqual(text.length);
-    expect([ahead.count, ahead.differs]).toEqual([6, -1]);
-    expect(secondReadingAgrees(text.split('\n'), ahead.lines.slice(0, 6))).toBe(true);
+  it('are theirs one by one and agreed about together', () => {
+    expect(read(text).map(({ differs, fault }) => [differs, fault])).toEqual(
+      theirs.map(() => [undefined, undefined]),
+    );
+    expect(secondReadingAgrees(text.split('\n'), theirs)).toBe(true);
   });
 
   it.each([
@@ -139,47 +150,65 @@ describe('lines read ahead', () => {
     ['a word less', 'X4', '  '],
     ['what is no word', 'X4', '[4'],
   ])('%s read otherwise is seen', (_, ours, theirs) => {
-    const ahead = emptyAhead();
-    const end = readAhead(text, 0, 'brackets', ahead);
-    expect(end).toBeGreaterThan(0);
-    const other = text.replace(ours, theirs);
-    const last = ahead.lines[5];
-    if (last !== undefined) {
-      last.end += other.length - text.length;
-    }
-    expect(secondReadingAgrees(other.split('\n'), ahead.lines.slice(0, 6))).toBe(false);
+    expect(secondReadingAgrees(text.replace(ours, theirs).split('\n'), theirs)).toBe(false);
   });
+
+  /** Beyond all numbers: ours reads Infinity, which the second reader's check does not take. */
+  const DOUBTFUL = `G1 X${'9'.repeat(400)}`;
 
   it('name each line on which the readers differ, also where its text was met before', () => {
-    const ahead = emptyAhead();
-    const good = 'G1 X1\n'.repeat(40);
-    const bad = `G1 X${'9'.repeat(400)}\n`;
-    let at = 0;
-    let lines = 0;
-    while (ahead.differs < 0) {
-      lines += at === 0 ? 0 : ahead.count;
-      at = readAhead(good + bad + bad, at, 'brackets', ahead);
-    }
-    expect(lines + ahead.differs).toBe(40);
-    expect([...ahead.agreed]).toEqual(['G1 X1']);
+    const lines = read(`${'G1 X1\n'.repeat(40)}${DOUBTFUL}\n${DOUBTFUL}\nG1 X3`);
+    expect(lines.flatMap(({ differs }, i) => (differs === undefined ? [] : [i]))).toEqual([40, 41]);
+    expect(lines[40]?.differs).toMatch(/Infinity/);
+    expect(lines[41]).toBe(lines[40]);
   });
 
-  it('say which line the readers differ about: a number beyond all numbers', () => {
-    const ahead = emptyAhead();
-    readAhead(`G1 X1\nG1 X${'9'.repeat(400)}\nG1 X3`, 0, 'brackets', ahead);
-    expect(ahead.differs).toBe(1);
-    expect(ahead.how).toMatch(/Infinity/);
+  it('are reported with the number of every line on which a text stands, though it is read once', () => {
+    const long = `G1 X1 Y1 Z1 (${'A'.repeat(bench.words.file.lineLongest)})`;
+    const head = ['%', 'G21 G17 G90 G94 G54', 'T1 M6', 'G43 H1', 'F100'];
+    const repeated = [...head, 'G1 X1 Y1 Z1', long, 'X2', long, 'X2', long, 'M2', '%'];
+    const trace = traceProgram('a', repeated.join('\n'), bench);
+    const said = trace.findings.filter(({ code }) => code === 'prove.file');
+    expect(said.map(({ line, message }) => [line, / \(and on (.*)\)/.exec(message)?.[1]])).toEqual([
+      [7, '2 more lines'],
+    ]);
+    const moves = traceProgram('a', [...head, 'G1 X1', 'X2', 'X2', 'X1', 'X2', 'B1', 'X2'].join('\n'), bench);
+    expect(moves.moves.map(({ line, to }) => [line, to.x])).toEqual([
+      [6, 1],
+      [7, 2],
+      [8, 2],
+      [9, 1],
+      [10, 2],
+    ]);
+    expect(moves.findings.at(-1)).toMatchObject({ code: 'prove.unread', line: 11 });
   });
 
-  it('are all there, however many', () => {
-    const lines = Array.from({ length: 100 }, (_, i) => `X${String(i)}`).join('\r\n');
-    const ahead = emptyAhead();
-    let at = 0;
-    const values: number[] = [];
-    while (at < lines.length) {
-      at = readAhead(lines, at, 'brackets', ahead);
-      values.push(...ahead.lines.slice(0, ahead.count).map((line) => line.values[0] ?? NaN));
+  it('make the same arc where they repeat from the same place, and another from another', () => {
+    const head = ['%', 'G21 G17 G90 G94 G54', 'T1 M6', 'G43 H1', 'F100', 'G0 X0 Y0', 'Z0'];
+    const arc = 'G2 X10 Y0 I5 J0';
+    const trace = traceProgram(
+      'a',
+      [...head, arc, 'G1 X0', arc, 'G3 X0 Y0 I-5 J0', arc, 'G91', arc, 'G90 G1 Y0.5', 'X0', arc].join('\n'),
+      bench,
+    );
+    const arcs = trace.moves.filter(({ kind }) => kind === 'arc');
+    expect(arcs.map(({ line, centre, turn }) => [line, centre?.x, Math.round((turn ?? 0) * 1000)])).toEqual([
+      [8, 5, -3142],
+      [10, 5, -3142],
+      [11, 5, 3142],
+      [12, 5, -3142],
+      [14, 15, -3142],
+    ]);
+    expect(trace.findings.at(-1)).toMatchObject({ code: 'prove.arc', line: 17 });
+  });
+
+  it('are all there, however many and however they end', () => {
+    const lines = Array.from({ length: 100 }, (_, i) => `X${String(i)}`);
+    for (const end of ['\n', '\r\n', '\r']) {
+      for (const last of ['', end]) {
+        const found = read(lines.join(end) + last);
+        expect(found.map(({ text: one }) => one)).toEqual(lines);
+      }
     }
-    expect(values).toEqual(Array.from({ length: 100 }, (_, i) => i));
   });
 });
