@@ -6,7 +6,7 @@
  */
 import { build } from 'esbuild';
 import { spawnSync } from 'node:child_process';
-import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { chmodSync, existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
@@ -55,10 +55,21 @@ const partsByLoader = {
   },
 };
 
+/** commander can start other programs as its commands; ours has none such, and loading what it would need takes time. */
+const noOtherPrograms = {
+  name: 'no other programs',
+  setup({ onResolve, onLoad }) {
+    onResolve({ filter: /^node:child_process$/ }, () => ({ path: 'none', namespace: 'none' }));
+    onLoad({ filter: /./, namespace: 'none' }, () => ({ contents: 'module.exports = {};' }));
+  },
+};
+
 const command = await build({
   ...shared,
   entryPoints: { main: 'src/cli/main.ts' },
-  plugins: [partsByLoader],
+  // So that the shell knows what runs it: `npx ogive`.
+  banner: { js: `#!/usr/bin/env node\n${shared.banner.js}` },
+  plugins: [partsByLoader, noOtherPrograms],
 });
 const commands = await build({
   ...shared,
@@ -67,6 +78,7 @@ const commands = await build({
 for (const part of parts) {
   escapeLetters(join(dist, `${part}.js`));
 }
+chmodSync(join(dist, 'main.js'), 0o755);
 const inputs = [command, commands].flatMap(({ metafile }) => Object.keys(metafile.inputs));
 const packages = [
   ...new Set(

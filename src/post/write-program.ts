@@ -73,8 +73,9 @@ export function writeProgram(input: ProgramInput): Outcome<ProgramText> {
 }
 
 function writeSteps(writer: Writer, motion: Motion): void {
-  for (const [i, step] of motion.steps.entries()) {
-    writer.step = i;
+  writer.step = -1;
+  for (const step of motion.steps) {
+    writer.step++;
     if (isMove(step)) {
       if (writer.offWanted) {
         stopSpindle(writer);

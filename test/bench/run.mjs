@@ -1,7 +1,6 @@
 /** Runs a TypeScript bench of this folder: `node test/bench/run.mjs figures [arguments]`. */
 import { build } from 'esbuild';
 import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
 import { pathToFileURL } from 'node:url';
 
