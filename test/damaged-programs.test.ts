@@ -76,7 +76,7 @@ function targetOf({ form, crossings, job }: SheetFacts): NonNullable<ProofInput[
     form,
     ...(crossings === undefined ? {} : { crossings }),
     thickness: job.wheel.thickness,
-    bore: job.wheel.bore - 2 * job.cuts.bore.leave,
+    bore: job.wheel.bore - job.cuts.bore.leave,
     finishingDiameter: job.cuts.finishing.cutter.diameter,
     slugsHeld: job.setup.holding.includes('skin'),
   };

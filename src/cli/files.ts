@@ -12,6 +12,7 @@ import {
   readFileSync,
   readSync,
   renameSync,
+  statSync,
   rmSync,
   writeFileSync,
 } from 'node:fs';
@@ -25,6 +26,10 @@ const LARGEST = 64_000_000;
 /** A text file as UTF-8. Not there, not a file, too large or not text: a problem. */
 export function readText(path: string, largest = LARGEST): Outcome<string> {
   try {
+    const about = statSync(path);
+    if (!about.isFile() && !about.isDirectory() && !isStandardInput(path)) {
+      return unreadable(path, 'is no regular file');
+    }
     const handle = openSync(path, 'r');
     try {
       const stat = fstatSync(handle);
@@ -46,7 +51,12 @@ export function readText(path: string, largest = LARGEST): Outcome<string> {
   }
 }
 
-/** Pipes and devices say no size: read until the end or the bound. */
+/** A pipe that is named waits for ever for somebody to write; only the one we were started with is read. */
+function isStandardInput(path: string): boolean {
+  return path === '/dev/stdin' || path === '/dev/fd/0';
+}
+
+/** Standard input says no size: read until the end or the bound. */
 function readBounded(handle: number, largest: number): Buffer | undefined {
   const chunks: Buffer[] = [];
   let total = 0;
@@ -83,6 +93,7 @@ export function changeFolder(folder: string, change: Change): Outcome<null> {
   try {
     makeFolder(folder);
     for (const file of change.write) {
+      refuseOddTarget(join(folder, file.name));
       const path = temporary(file.name);
       written.push(path);
       writeFileSync(path, file.text);
@@ -145,6 +156,14 @@ export function isThere(path: string): boolean {
   return existsSync(path);
 }
 
+/** A device, a pipe or a folder is never replaced by a file of ours. */
+function refuseOddTarget(path: string): void {
+  const about = statSync(path, { throwIfNoEntry: false });
+  if (about !== undefined && !about.isFile()) {
+    throw Object.assign(new Error(path), { code: about.isDirectory() ? 'EISDIR' : 'ENODEV' });
+  }
+}
+
 /** Names in a folder, sorted; none where it is not there. */
 export function namesIn(folder: string): readonly string[] {
   try {
@@ -199,6 +218,7 @@ const REASONS: Readonly<Record<string, string>> = {
   ENOSPC: 'the disk is full',
   ENOTDIR: 'a part of the path is a file, not a folder',
   EISDIR: 'it is a folder',
+  ENODEV: 'something that is no regular file stands there',
 };
 
 function reasonOf(error: unknown): string {

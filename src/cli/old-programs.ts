@@ -89,6 +89,12 @@ function recordsOf(folder: string, name: string): ReadonlyMap<string, string> {
   return records;
 }
 
+/** Programs of a job's name that lie in a folder, whatever machine they were written for. */
+export function programsIn(folder: string, name: string): readonly string[] {
+  const known = endings('.nc');
+  return namesIn(folder).filter((file) => isProgramOf(file, name, known));
+}
+
 /** NAME.nc, NAME-1.nc, NAME-walk.nc, with the ending of any machine file. */
 function isProgramOf(file: string, name: string, known: readonly string[]): boolean {
   if (!file.startsWith(name)) {

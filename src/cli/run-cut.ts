@@ -6,7 +6,7 @@ import { cut, type CutResult } from '../cut.ts';
 import { changeFolder, readText } from './files.ts';
 import { sha256 } from './hash.ts';
 import { findMachine, ownMachine } from './own-machines.ts';
-import { keepOldPrograms } from './old-programs.ts';
+import { keepOldPrograms, programsIn } from './old-programs.ts';
 import type { Exit } from './program.ts';
 import { terminalOf, type Terminal } from './terminal.ts';
 
@@ -36,10 +36,11 @@ export function runCut(jobFile: string, options: CutOptions, version: string): E
   });
   terminal.progressDone();
   terminal.problems(result.problems);
+  const folder = options.out ?? dirname(jobFile);
   if (result.exit === 2) {
+    sayOfOldOnes(folder, jobFile, terminal);
     return 2;
   }
-  const folder = options.out ?? dirname(jobFile);
   const put = putInPlace(folder, result, options.force === true, terminal);
   if (put !== undefined) {
     terminal.problems(put);
@@ -47,6 +48,16 @@ export function runCut(jobFile: string, options: CutOptions, version: string): E
   }
   report(result, folder, options, terminal);
   return result.exit;
+}
+
+/** A job that cannot be read changes nothing on disk; that programs of an earlier one lie there must be said. */
+function sayOfOldOnes(folder: string, jobFile: string, terminal: Terminal): void {
+  const old = programsIn(folder, nameOf(jobFile));
+  if (old.length > 0) {
+    terminal.say(
+      `Nothing was changed in ${folder}. There, from an earlier run and not of this job as it stands: ${old.join(', ')}. Do not run them.`,
+    );
+  }
 }
 
 /** Everything of a run at once; problems where nothing was changed. */

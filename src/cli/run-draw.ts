@@ -1,6 +1,6 @@
 /** `ogive draw`: the exact outline of a job's wheel, or the one its cutter leaves, as SVG or DXF. */
 import { basename, dirname, join, resolve } from 'node:path';
-import type { Outcome } from '../base/problem.ts';
+import type { Outcome, Problem } from '../base/problem.ts';
 import { failure, success } from '../base/problem.ts';
 import { readJob } from '../job/read-job.ts';
 import { outlineDxf } from '../report/draw-dxf.ts';
@@ -9,7 +9,7 @@ import type { OutlineShape } from '../report/outline-shape.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
-import { changeFolder, readText } from './files.ts';
+import { changeFolder, isThere, readText } from './files.ts';
 import type { Exit } from './program.ts';
 import { terminalOf } from './terminal.ts';
 
@@ -44,6 +44,10 @@ export function runDraw(jobFile: string, options: DrawOptions): Exit {
   }
   const ending = options.dxf === true ? 'dxf' : 'svg';
   const file = options.out ?? join(dirname(jobFile), `${job.value.name}-outline.${ending}`);
+  if (isThere(file) && !file.toLowerCase().endsWith(`.${ending}`)) {
+    terminal.problems([notOurs(file, ending)]);
+    return 2;
+  }
   const done = changeFolder(dirname(file), { write: [{ name: basename(file), text: drawing }], rename: [] });
   terminal.problems(done.problems);
   if (!done.ok) {
@@ -51,6 +55,17 @@ export function runDraw(jobFile: string, options: DrawOptions): Exit {
   }
   terminal.say(`${file} is written, in millimetres.`);
   return 0;
+}
+
+/** A job or a program named by mistake would be lost. */
+function notOurs(file: string, ending: string): Problem {
+  return {
+    code: 'file.unwritable',
+    severity: 'error',
+    message: `is there already and its name does not end in .${ending}; it is kept as it is.`,
+    hint: `Name a file that ends in .${ending}, or one that is not there yet.`,
+    at: { kind: 'file', file },
+  };
 }
 
 function shapeOf(

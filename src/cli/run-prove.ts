@@ -13,7 +13,7 @@ import type { Proof } from '../prove/proof.ts';
 import { proveProgram } from '../prove/prove-program.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
-import { changeFolder, readText } from './files.ts';
+import { changeFolder, isThere, readText } from './files.ts';
 import { findMachine, ownMachine } from './own-machines.ts';
 import type { Exit } from './program.ts';
 import { terminalOf, type Terminal } from './terminal.ts';
@@ -88,7 +88,7 @@ function targetOf(job: Job): Pick<Parameters<typeof proveProgram>[0], 'target'> 
       form: form.value,
       ...(windows?.ok === true ? { crossings: windows.value } : {}),
       thickness: job.wheel.thickness,
-      bore: Math.max(job.wheel.bore - 2 * job.cuts.bore.leave, 0),
+      bore: Math.max(job.wheel.bore - job.cuts.bore.leave, 0),
       finishingDiameter: job.cuts.finishing.cutter.diameter,
       slugsHeld: job.setup.holding.includes('skin'),
     },
@@ -102,6 +102,12 @@ function answer(
   options: ProveOptions,
   terminal: Terminal,
 ): Exit {
+  if (options.moves !== undefined && isThere(options.moves) && !/\.(?:jsonl|ndjson)$/i.test(options.moves)) {
+    process.stderr.write(
+      `${options.moves}: is there already and its name does not end in .jsonl; it is kept as it is.\n`,
+    );
+    return 2;
+  }
   if (options.moves !== undefined) {
     const text = proof.moves.map((move) => `${JSON.stringify(move)}\n`).join('');
     const change = { write: [{ name: basename(options.moves), text }], rename: [] };

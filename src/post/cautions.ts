@@ -101,7 +101,7 @@ function whenItStops(facts: HeaderFacts, machine: Machine): readonly string[] {
         ]),
     ...(facts.kind === 'cut'
       ? [
-          'Do not start in the middle of a tooth: a start in mid program lacks units, feed, spindle and offset. Begin at a place marked Cutter, with zero and length checked',
+          'Do not start in the middle of a program: a start there lacks units, feed, spindle and offset. After a stop or a broken cutter check zero and length and run the whole program again from its first line, through the air it has cut already',
           'Measure with the spindle still and the machine held, burrs taken off first',
         ]
       : []),

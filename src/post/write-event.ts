@@ -79,7 +79,7 @@ function oneCutterOnly(writer: Writer, number: number): void {
   }
 }
 
-/** The axes come back to where they were; trusted for the top only, where a retract has put them there. */
+/** A changer may leave the axes anywhere: up first, before anything moves aside. */
 function automaticChange(writer: Writer): void {
   if (writer.machine.words.cutters.words === 'none') {
     complain(writer.sink, 'post.cannot-say', 'cutter-words', {
@@ -87,11 +87,11 @@ function automaticChange(writer: Writer): void {
       hint: 'set cutters.words, or cutters.change: by-hand',
     });
   }
-  const wasAtTop = writer.atTop;
   cutterWords(writer, writer.cutter ?? 0);
   forgetPlace(writer);
-  writer.atTop = wasAtTop;
+  writer.atTop = false;
   beginAgain(writer);
+  writeTop(writer);
 }
 
 /** Everything a person needs who starts from here: modes, path, the cutter's length, and soon the name of the pass. */

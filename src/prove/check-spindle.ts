@@ -8,28 +8,60 @@ import { findingAt, type Said } from './finding-at.ts';
 import type { Finding } from './proof.ts';
 import type { Trace } from './trace-program.ts';
 
-export function checkSpindle(evidence: Evidence): Finding[] {
-  return evidence.traces.flatMap((trace) => {
-    const cutting = trace.moves.filter((move) => move.kind !== 'rapid' && isLow(evidence, move));
-    return [
-      ...first(cutting, (move) => turning(evidence, move)),
-      ...first(cutting, (move) => speedOf(evidence, move)),
-      ...first(trace.moves, (move) => feedOf(evidence, move)),
-      ...first(cutting, (move) => unknownCutter(evidence, move)),
-      ...notUp(evidence, trace),
-    ];
-  });
+/** A rule about one move; some hold only where it cuts low. */
+interface Rule {
+  readonly onlyLow: boolean;
+  readonly judge: (evidence: Evidence, move: TracedMove) => Said | undefined;
 }
 
-/** Only the first of each kind: the rest are the same fault again. */
-function first(moves: readonly TracedMove[], judge: (move: TracedMove) => Said | undefined): Finding[] {
+const RULES: readonly Rule[] = [
+  { onlyLow: true, judge: turning },
+  { onlyLow: true, judge: speedOf },
+  { onlyLow: false, judge: feedOf },
+  { onlyLow: true, judge: unknownCutter },
+];
+
+export function checkSpindle(evidence: Evidence): Finding[] {
+  return evidence.traces.flatMap((trace) => [
+    ...firstOfEach(evidence, trace),
+    ...notUp(evidence, trace),
+    ...handsAtATurningCutter(evidence, trace),
+  ]);
+}
+
+/** Only the first move against each rule: the rest are the same fault again. */
+function firstOfEach(evidence: Evidence, { moves }: Trace): Finding[] {
+  const found: (Finding | undefined)[] = RULES.map(() => undefined);
+  let was: TracedMove | undefined;
+  let wasLow = false;
   for (const move of moves) {
-    const said = judge(move);
+    if (move.kind === 'rapid') {
+      continue;
+    }
+    const low = isLow(evidence, move);
+    // Rules look at spindle, feed and cutter: most moves are made like the one before.
+    const isAlike =
+      was !== undefined &&
+      move.spindle === was.spindle &&
+      move.feed === was.feed &&
+      move.cutter === was.cutter &&
+      low === wasLow;
+    if (!isAlike) {
+      judgeMove(evidence, move, low, found);
+    }
+    was = move;
+    wasLow = low;
+  }
+  return found.filter((finding) => finding !== undefined);
+}
+
+function judgeMove(evidence: Evidence, move: TracedMove, low: boolean, found: (Finding | undefined)[]): void {
+  for (const [k, { onlyLow, judge }] of RULES.entries()) {
+    const said = found[k] === undefined && (low || !onlyLow) ? judge(evidence, move) : undefined;
     if (said !== undefined) {
-      return [findingAt(move, said)];
+      found[k] = findingAt(move, said);
     }
   }
-  return [];
 }
 
 /** Below the clear height, or perhaps. */
@@ -108,11 +140,15 @@ function notUp(evidence: Evidence, trace: Trace): Finding[] {
     }
     const [was, now] = [speed, event.speed];
     speed = now;
-    const move = trace.moves.slice(event.before).find(({ kind }) => kind !== 'rapid');
-    if (now === 0 || was === now || move === undefined || move.spindle !== now || !isLow(evidence, move)) {
+    if (now === 0 || was === now) {
       return [];
     }
-    const waited = waitBefore(trace, k, trace.moves.indexOf(move));
+    const at = firstCut(trace, event.before);
+    const move = trace.moves[at];
+    if (move === undefined || move.spindle !== now || !isLow(evidence, move)) {
+      return [];
+    }
+    const waited = waitBefore(trace, k, at);
     return waited >= spinUpSeconds - 1e-3
       ? []
       : [
@@ -125,6 +161,15 @@ function notUp(evidence: Evidence, trace: Trace): Finding[] {
   });
 }
 
+/** The first move from number `from` on that is not fast. */
+function firstCut({ moves }: Trace, from: number): number {
+  let at = from;
+  while (at < moves.length && moves[at]!.kind === 'rapid') {
+    at += 1;
+  }
+  return at;
+}
+
 function waitBefore({ events }: Trace, from: number, move: number): number {
   let waited = 0;
   for (const event of events.slice(from)) {
@@ -133,4 +178,35 @@ function waitBefore({ events }: Trace, from: number, move: number): number {
     }
   }
   return waited;
+}
+
+/** Where a cutter is changed or hands are asked for, the spindle must have been stopped by a word of its own before. */
+function handsAtATurningCutter({ input }: Evidence, trace: Trace): Finding[] {
+  if (input.machine.words.spindle.run === 'by-hand') {
+    return [];
+  }
+  let turning = false;
+  // A change of cutter stops the spindle by itself (NISTIR 6556 §3.6.3): that is too late, and is no word of its own.
+  let stoppedAt = -1;
+  for (const event of trace.events) {
+    if (event.kind === 'spindle') {
+      stoppedAt = turning && event.speed === 0 ? event.line : stoppedAt;
+      turning = event.speed !== 0;
+    } else if (
+      (turning || stoppedAt === event.line) &&
+      (event.kind === 'cutter' || (event.kind === 'stop' && !event.optional))
+    ) {
+      return [
+        {
+          code: 'prove.spindle',
+          severity: 'error',
+          message: `${event.kind === 'cutter' ? 'the cutter is changed' : 'hands are asked for'} while the spindle turns`,
+          hint: 'Stop the spindle (M5) in a block before this one, with the cutter up.',
+          file: trace.file,
+          line: event.line,
+        },
+      ];
+    }
+  }
+  return [];
 }

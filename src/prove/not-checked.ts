@@ -9,9 +9,9 @@ export function notChecked(evidence: Evidence): string[] {
     'bending of cutter, spindle and blank under the load of the cut',
     'play of the slides',
     'how strongly the blank is held',
-    'what the controller does beyond what its machine file says',
     `that zero was set on the wheel's axis and at the right height`,
     'feed and speed overrides turned by hand',
+    `whether speeds and feeds suit cutter and material: only the machine's limits are held`,
   ]);
   if (setup.zeroAt === undefined) {
     said.add(

@@ -55,11 +55,11 @@ function boreRows(facts: SheetFacts): readonly string[] {
     return [];
   }
   const ready = setup.bored >= wheel.bore;
-  const bore = ready ? wheel.bore : wheel.bore - 2 * cuts.bore.leave;
+  const bore = ready ? wheel.bore : wheel.bore - cuts.bore.leave;
   const how = ready
     ? 'Pin gauge; the hole was there before and is not cut.'
     : cuts.bore.leave > 0
-      ? `Pin gauge; ${lengthOnly(cuts.bore.leave, length)} a side is left for broach or reamer, the finished bore is ${lengthOnly(wheel.bore, length)}.`
+      ? `Pin gauge; ${lengthOnly(cuts.bore.leave, length)} on the diameter is left for broach or reamer, the finished bore is ${lengthOnly(wheel.bore, length)}.`
       : 'Pin gauge, from both faces.';
   return [row(facts, 'bore', bore, 'bore', how)];
 }

@@ -2,6 +2,7 @@
 /** Text as it may stand between tags or in a quoted attribute. */
 export function escapeText(text: string): string {
   return text
+    .replaceAll(/[\p{Cc}\p{Cs}]/gu, (letter) => (letter === '\n' || letter === '\t' ? ' ' : ''))
     .replaceAll('&', '&amp;')
     .replaceAll('<', '&lt;')
     .replaceAll('>', '&gt;')

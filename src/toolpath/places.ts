@@ -59,15 +59,25 @@ export function parkPlace(task: CutTask): Position {
   return { ...nearestIn(withinTravel(task), aside), z: task.heights.park };
 }
 
-export function touchPlace({ job, form, crossings }: CutTask): Point {
+export function touchPlace({ job, machine, form, crossings }: CutTask): Point {
   const inner = Math.max(job.wheel.bore, job.setup.bored) / 2;
   const outer = crossings?.windowInner ?? form.rootRadius;
   const rim = crossings === undefined ? outer : (crossings.windowOuter + form.rootRadius) / 2;
   const places = [(inner + outer) / 2, rim].flatMap((radius) =>
     Array.from({ length: DIRECTIONS }, (_, i) => polar(radius, (2 * Math.PI * i) / DIRECTIONS)),
   );
+  // A hand brings the cutter down there: shank and cutter must pass everything that stands; the nut is higher than all of it
+  // only by its stick-out, so it is counted where it is not.
+  const widest = (toZ: number): number =>
+    Math.max(
+      ...job.setup.cutters.map(({ diameter, shank, stickOut }) =>
+        Math.max(diameter, shank, toZ - job.setup.topZ > stickOut ? machine.limits.nut.diameter : 0),
+      ),
+    ) / 2;
   const free = places.find((at) =>
-    job.setup.obstacles.every((o) => Math.hypot(at.x - o.x, at.y - o.y) > o.radius + AIR_ROUND),
+    job.setup.obstacles.every(
+      (o) => Math.hypot(at.x - o.x, at.y - o.y) > o.radius + widest(o.toZ) + AIR_ROUND,
+    ),
   );
   return free ?? (places[0] as Point);
 }

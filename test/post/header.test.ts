@@ -119,7 +119,7 @@ describe('cautions', () => {
     ['eyes and ears', /glasses.*ear protection/],
     ['emergency stop and lost place', /emergency stop.*lost/],
     ['unattended', /Stay with it/],
-    ['restart', /Do not start in the middle of a tooth/],
+    ['restart', /Do not start in the middle of a program/],
     ['park', /park the cutter at X 0\.000 mm, Y 0\.000 mm, at height 25\.000 mm/],
     ['an unproved machine file', /not been proved/],
   ])('%s', (_, pattern) => {

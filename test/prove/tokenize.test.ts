@@ -149,8 +149,8 @@ describe('lines', () => {
     ['a word more', 'I5', 'I5J1'],
     ['a word less', 'X4', '  '],
     ['what is no word', 'X4', '[4'],
-  ])('%s read otherwise is seen', (_, ours, theirs) => {
-    expect(secondReadingAgrees(text.replace(ours, theirs).split('\n'), theirs)).toBe(false);
+  ])('%s read otherwise is seen', (_, ours, other) => {
+    expect(secondReadingAgrees(text.replace(ours, other).split('\n'), theirs)).toBe(false);
   });
 
   /** Beyond all numbers: ours reads Infinity, which the second reader's check does not take. */
