@@ -8,10 +8,10 @@ export function millimetresPer(unit: LengthUnit): number {
   return unit === 'mm' ? 1 : MM_PER_INCH;
 }
 
-export function degrees(radians: number): number {
-  return (radians * 180) / Math.PI;
+export function degrees(angle: number): number {
+  return (angle * 180) / Math.PI;
 }
 
-export function radians(degreesValue: number): number {
-  return (degreesValue * Math.PI) / 180;
+export function radians(angle: number): number {
+  return (angle * Math.PI) / 180;
 }

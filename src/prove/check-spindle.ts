@@ -185,15 +185,15 @@ function handsAtATurningCutter({ input }: Evidence, trace: Trace): Finding[] {
   if (input.machine.words.spindle.run === 'by-hand') {
     return [];
   }
-  let turning = false;
+  let turns = false;
   // A change of cutter stops the spindle by itself (NISTIR 6556 §3.6.3): that is too late, and is no word of its own.
   let stoppedAt = -1;
   for (const event of trace.events) {
     if (event.kind === 'spindle') {
-      stoppedAt = turning && event.speed === 0 ? event.line : stoppedAt;
-      turning = event.speed !== 0;
+      stoppedAt = turns && event.speed === 0 ? event.line : stoppedAt;
+      turns = event.speed !== 0;
     } else if (
-      (turning || stoppedAt === event.line) &&
+      (turns || stoppedAt === event.line) &&
       (event.kind === 'cutter' || (event.kind === 'stop' && !event.optional))
     ) {
       return [

@@ -26,6 +26,7 @@ export interface BenchProgram {
 }
 
 export function traceLines({ lines, at, modes, feed, machine, start }: BenchProgram): Trace {
+  const read = machine ?? post('bench-mill');
   const text = [
     '%',
     modes ?? 'G21 G17 G90 G94 G54',
@@ -33,10 +34,10 @@ export function traceLines({ lines, at, modes, feed, machine, start }: BenchProg
     `G43 H1 ${feed ?? 'F100'}`,
     `G0 ${at ?? 'X0 Y0 Z0'}`,
     ...lines,
-    'M2',
+    read.words.end.end,
     '%',
   ];
-  return traceProgram('case.ngc', text.join('\n'), machine ?? post('bench-mill'), start);
+  return traceProgram('case.ngc', text.join('\n'), read, start);
 }
 
 /** The moves of the lines of interest. */
