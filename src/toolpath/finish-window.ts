@@ -53,9 +53,11 @@ export function finishWindow(task: WallTask): Run | undefined {
   const join = startOf(path[0] as Piece);
   const heading = headingOn(path[0] as Piece, 0);
   const inward = way === 1 ? leftOf(heading) : leftOf({ x: -heading.x, y: -heading.y });
-  const overlap = Math.min(OVERLAP, lengthOf(path[0] as Piece) / 2);
+  // In a slot the straight is for the arcs in and out first.
+  const overlap = Math.min(OVERLAP, lengthOf(path[0] as Piece) / (task.open === 'slot' ? 4 : 2));
+  const room = lengthOf(path[0] as Piece) - overlap;
   const left = addScaled(join, heading, overlap);
-  const lead = task.open === 'slot' ? slotLead(task) : windowLead(task, [join, left], heading, inward);
+  const lead = task.open === 'slot' ? slotLead(task, room) : windowLead(task, [join, left], heading, inward);
   if (lead === undefined) {
     return undefined;
   }
@@ -150,10 +152,13 @@ function wallLeg({ settings, way, radialDepth }: WallTask, piece: Piece): Leg {
   return arcLeg(endOf(piece), piece.centre, piece.turn, feed);
 }
 
-/** From the middle of the slot, which lies as far aside as the metal left on the wall: a short arc of one diameter. */
-function slotLead({ settings, radialDepth }: WallTask): Lead {
-  const radius = 2 * settings.radius;
-  return { radius, sweep: Math.acos(1 - radialDepth / radius) };
+/**
+ * From the middle of the slot, which lies as far aside as the metal left on the wall: a short arc of one diameter, or less where
+ * the straight of the wall is short, lest it begin beyond the slot. None where even a quarter circle is longer than that.
+ */
+function slotLead({ settings, radialDepth }: WallTask, room: number): Lead | undefined {
+  const radius = Math.min(2 * settings.radius, (room * room + radialDepth * radialDepth) / (2 * radialDepth));
+  return room < radialDepth ? undefined : { radius, sweep: Math.acos(1 - radialDepth / radius) };
 }
 
 /** The largest quarter circle in and out that stays free of the wall. */
