@@ -87,3 +87,16 @@ it('finishes with the cutter that leaves the working flank whole, though a large
   ];
   expect(complaints(small({ wheel, blank, cutters }))).toEqual([]);
 });
+
+it('joins the wall of a window within its straight, where round corners leave little of that and a skin holds the slug', () => {
+  const wheel =
+    '{ teeth: 20, mate: { leaves: 15 }, module: 1, dedendum: 1.44, thickness: 0.3, crossings: { arms: 3, arm: 1.4, rim: 0.226, hub: 9.2, corner: 1.71 } }';
+  const blank = '{ material: aluminium, shape: sheet, size: [34, 34], holding: skin, skin: 0.05 }';
+  const cutters = [
+    '{ diameter: 0.8, reach: 2, flute: 2, helix: 30 }',
+    '{ diameter: 1.8, reach: 5, flute: 5, helix: 30 }',
+  ];
+  expect(
+    complaints(small({ wheel, blank, cutters, more: ['zero: plate'], cuts: ['crossings: { cutter: 2 }'] })),
+  ).toEqual([]);
+});
