@@ -28,17 +28,18 @@ export function checkLoose(evidence: Evidence): Finding[] {
     return [];
   }
   const reach = cutReach(evidence, body.form.outsideRadius);
-  const raster = blankRaster(setup, reach, squareSize(evidence, reach));
+  const through = setup.plateZ + lastDigit;
+  const raster = blankRaster(setup, reach, squareSize(evidence, reach), through);
   const cutting: Cutting = {
     raster,
     height: new Float64Array(solids.count).fill(Number.NaN),
     waiting: [],
     waits: new Uint8Array(solids.count),
   };
-  const through = setup.plateZ + lastDigit;
   const worst: Bite = { bite: 0, share: DEEPEST_BITE };
   const loose: Finding[] = [];
   let cutThrough = false;
+  let opened = 0;
   for (let i = 0; i < solids.count && loose.length === 0; i++) {
     const z1 = solids.z1[i]!;
     if (solids.rapid[i] === 0) {
@@ -48,7 +49,10 @@ export function checkLoose(evidence: Evidence): Finding[] {
     if (cutThrough && (z1 > setup.topZ || i === solids.count - 1)) {
       cutThrough = false;
       drawWaiting(cutting, evidence.paths);
-      const piece = loosePiece(raster, body, through, setup.shape.kind === 'sheet');
+      // Nothing new comes loose where nothing more was cut through.
+      const piece =
+        raster.opened > opened ? loosePiece(raster, body, setup.shape.kind === 'sheet') : undefined;
+      opened = raster.opened;
       loose.push(...(piece === undefined ? [] : [cameLoose(solids.moves[i]!, piece)]));
     }
   }

@@ -4,9 +4,11 @@ import type { Evidence } from './evidence.ts';
 import { findingAt, gathered } from './finding-at.ts';
 import type { Finding } from './proof.ts';
 
-export function checkPlace({ moves }: Evidence): Finding[] {
+export function checkPlace({ moves, solids }: Evidence): Finding[] {
+  // Where every move's place is known there is nothing to look for.
+  const lost = solids.count === moves.length ? [] : moves.filter(isLost);
   return gathered(
-    moves.filter(isLost).map((move) =>
+    lost.map((move) =>
       findingAt(move, {
         code: 'prove.unknown-place',
         message: `a cutting move before ${missing(move)} was named`,

@@ -90,6 +90,9 @@ type Figure = 'gouge' | 'left' | 'thickness';
 function takeWorst(low: Copy, high: Copy, figures: Record<Height, ContourFigures>): void {
   const { stations, readings } = low;
   for (let i = 0; i < stations.count; i++) {
+    if (!isWorth(low, figures.low, i) && !isWorth(high, figures.high, i)) {
+      continue;
+    }
     if (readsAlike(readings, i) && knowAlike(figures, stations.region[i]!)) {
       takeStation(low, figures.low, i);
       copyFigures(figures, stations.region[i]!);
@@ -114,6 +117,39 @@ function copyFigures({ low, high }: Record<Height, ContourFigures>, region: numb
   high.gouge = low.gouge;
   high.rootMiss = low.rootMiss;
   high.left[region] = low.left[region]!;
+}
+
+/** Whether station i could show anything worse than what is known: few do, and it is asked of every one. */
+function isWorth({ stations, readings, height }: Copy, figures: ContourFigures, i: number): boolean {
+  const region = stations.region[i]!;
+  const deviations = readings[height];
+  const deviation = deviations[i]!;
+  if (region === REGION.root) {
+    return (
+      isPeak(stations, deviations, i, 1, figures.rootMiss.value) ||
+      stations.beyond[i]! + Math.max(0, deviation) > figures.left[region]!.value + WORTH
+    );
+  }
+  if (deviation < 0) {
+    return isPeak(stations, deviations, i, -1, figures.gouge.value);
+  }
+  return region !== REGION.bare && isPeak(stations, deviations, i, 1, figures.left[region]!.value);
+}
+
+/** Whether the deviation, times `sign`, is highest at station i of its neighbours, and may rise above `known` there. */
+function isPeak(
+  { piece }: Stations,
+  deviations: Float64Array,
+  i: number,
+  sign: 1 | -1,
+  known: number,
+): boolean {
+  const value = sign * deviations[i]!;
+  const own = piece[i];
+  const rise = piece[i - 1] === own ? value - sign * deviations[i - 1]! : 0;
+  const fall = piece[i + 1] === own ? value - sign * deviations[i + 1]! : 0;
+  // A crown, or a kink between two slopes, rises above its highest station by half the larger step at most.
+  return rise >= 0 && fall >= 0 && value + (rise > fall ? rise : fall) / 2 > known + WORTH;
 }
 
 function takeStation(copy: Copy, figures: ContourFigures, i: number): void {
@@ -147,21 +183,28 @@ function figureOf(stations: Stations, figure: Figure, piece: number, u: number, 
 function better(copy: Copy, known: Worst, figure: Figure, i: number): Worst {
   const { stations } = copy;
   const piece = stations.piece[i]!;
-  const before = i > 0 && stations.piece[i - 1] === piece ? i - 1 : i;
-  const after = i + 1 < stations.count && stations.piece[i + 1] === piece ? i + 1 : i;
+  const before = stations.piece[i - 1] === piece ? i - 1 : i;
+  const after = stations.piece[i + 1] === piece ? i + 1 : i;
   const deviations = copy.readings[copy.height];
-  const value = figureOf(stations, figure, piece, stations.u[i]!, deviations[i]!);
-  const rise = value - figureOf(stations, figure, piece, stations.u[before]!, deviations[before]!);
-  const fall = value - figureOf(stations, figure, piece, stations.u[after]!, deviations[after]!);
-  // A crown, or a kink between two slopes, rises above its highest station by half the larger step at most.
+  const at = (k: number): number => figureOf(stations, figure, piece, stations.u[k]!, deviations[k]!);
+  if (figure !== 'thickness') {
+    const sign = figure === 'gouge' ? -1 : 1;
+    if (!isPeak(stations, deviations, i, sign, known.value)) {
+      return known;
+    }
+  }
+  const value = at(i);
+  const rise = value - at(before);
+  const fall = value - at(after);
   if (rise < 0 || fall < 0 || value + Math.max(rise, fall) / 2 <= known.value + WORTH) {
     return known;
   }
   const between = peakReader(copy, figure, piece, before, after);
   const u = highestOf(between, stations.u[before]!, stations.u[after]!);
   const top = between(u);
-  const [at, most] = top > value ? [u, top] : [stations.u[i]!, value];
-  return most <= known.value ? known : worstAt(copy, piece, at, most);
+  const isHigher = top > value;
+  const most = isHigher ? top : value;
+  return most <= known.value ? known : worstAt(copy, piece, isHigher ? u : stations.u[i]!, most);
 }
 
 /** The figure anywhere between two stations of a piece. */

@@ -9,12 +9,12 @@ import { PROOF_RESOLUTION } from '../base/tolerances.ts';
 import type { WheelForm } from '../tooth/wheel.ts';
 import { measureContour, type ContourFigures } from './deviation-contour.ts';
 import type { Field, Readings } from './deviation-measure.ts';
-import { worseTooth, type WorstTooth } from './deviation-plot.ts';
+import { pointsAlong, worseTooth, type WorstTooth } from './deviation-plot.ts';
 import { REGION } from './deviation-stations.ts';
 import { rootFactor, toothRing, toothStations } from './deviation-tooth.ts';
 import { pathsBelow, type PathSet } from './metal-paths.ts';
 import type { SolidMoves } from './metal-solids.ts';
-import type { DepthFigures } from './proof.ts';
+import type { DepthFigures, DeviationPoint } from './proof.ts';
 import { NO_ROLLING, readRollingLaw, rollingLaw, type RollingReading } from './rolling-law.ts';
 
 export interface Heights {
@@ -32,7 +32,8 @@ export interface ToothFigures {
   readonly atBottom: ContourFigures;
   readonly byDepth: readonly DepthFigures[];
   readonly rolling: RollingReading;
-  readonly worst: WorstTooth | undefined;
+  /** Which copy, from 0, and the deviation along its worse flank. */
+  readonly worst: { readonly copy: number; readonly points: readonly DeviationPoint[] } | undefined;
   /** How much further a cutter stands off in the root corner when it stands off its two sides by one. */
   readonly rootFactor: number;
 }
@@ -73,7 +74,7 @@ export function toothFigures(
     atBottom: edges.low,
     byDepth: [low, ...between, high],
     rolling,
-    worst,
+    worst: worst && { copy: worst.copy, points: pointsAlong(stations, worst) },
     rootFactor: rootFactor(form, cutterDiameter),
   };
 }

@@ -34,7 +34,9 @@ export interface Readings {
 
 export type Height = 'low' | 'high';
 
+/** Stations that are picked for together; first for some groups at once, so that most paths are looked at seldom. */
 const GROUP = 8;
+const GROUPS = 4 * GROUP;
 const STEPS = 200;
 const CLOSE = PROOF_RESOLUTION / 10;
 
@@ -45,10 +47,15 @@ export function readingsFor(count: number): Readings {
 /** Fills `readings` for every station of the copy. */
 export function measureCopy(field: Field, stations: Stations, readings: Readings): void {
   const { paths, deep } = field.near;
+  const all = { paths, deep, count: paths.length, trusted: Infinity };
+  const wide = pickingRoom(paths.length);
   const picked = pickingRoom(paths.length);
   for (let first = 0; first < stations.count; first += GROUP) {
+    if (first % GROUPS === 0) {
+      pickPaths(field, all, stations, first, Math.min(first + GROUPS, stations.count), wide);
+    }
     const last = Math.min(first + GROUP, stations.count);
-    pickPaths(field, stations, first, last, picked);
+    pickPaths(field, wide, stations, first, last, picked);
     for (let i = first; i < last; i++) {
       const follow = stations.region[i]! !== REGION.bare;
       place(field, stations.x[i]!, stations.y[i]!, stations.nx[i]!, stations.ny[i]!);
@@ -85,8 +92,10 @@ export function narrowed(
   first: number,
   last: number,
 ): { readonly field: Field; readonly trusted: number } {
-  const picked = pickingRoom(field.near.paths.length);
-  pickPaths(field, stations, first, last + 1, picked);
+  const { paths, deep } = field.near;
+  const all = { paths, deep, count: paths.length, trusted: Infinity };
+  const picked = pickingRoom(paths.length);
+  pickPaths(field, all, stations, first, last + 1, picked);
   const near = { paths: picked.paths.subarray(0, picked.count), deep: picked.deep };
   return { field: { ...field, near }, trusted: picked.trusted };
 }
@@ -133,66 +142,103 @@ function highFrom(field: Field, picked: Picked, low: number, follow: boolean): n
   return deviationAt(field, paths, 0, paths.length, follow);
 }
 
-/** The paths that can decide a group of neighbouring stations, the deep ones first. */
-interface Picked {
+/** Paths, the deep ones first, and up to which deviations they are enough. */
+interface Choice {
   readonly paths: Int32Array;
+  readonly deep: number;
+  readonly count: number;
+  readonly trusted: number;
+}
+
+/** The paths that can decide a group of neighbouring stations. */
+interface Picked extends Choice {
   readonly gaps: Float64Array;
   deep: number;
   count: number;
-  /** Deviations up to this are decided by `paths`. */
   trusted: number;
+  /** The deep path nearest to the last group, or -1. */
+  best: number;
 }
 
 function pickingRoom(size: number): Picked {
-  return { paths: new Int32Array(size), gaps: new Float64Array(size), deep: 0, count: 0, trusted: 0 };
+  return {
+    paths: new Int32Array(size),
+    gaps: new Float64Array(size),
+    deep: 0,
+    count: 0,
+    trusted: 0,
+    best: -1,
+  };
 }
 
 /**
- * Those whose gap at the group's middle is within twice the group's spread of the least deep one, or of how far
- * normals are followed: gaps change by no more than the spread from the middle to any station.
+ * Of those to choose from the ones whose gap at the group's middle is within twice the group's spread of the least deep
+ * one, or of how far normals are followed: gaps change by no more than the spread from the middle to any station.
  */
-function pickPaths(field: Field, stations: Stations, first: number, last: number, picked: Picked): void {
-  const { set, near, cos, sin } = field;
+function pickPaths(
+  { set, cos, sin }: Field,
+  from: Choice,
+  stations: Stations,
+  first: number,
+  last: number,
+  picked: Picked,
+): void {
   const middle = (first + last) >> 1;
   const sx = stations.x[middle]!;
   const sy = stations.y[middle]!;
-  let spread2 = 0;
-  for (let i = first; i < last; i++) {
-    const dx = stations.x[i]! - sx;
-    const dy = stations.y[i]! - sy;
-    spread2 = Math.max(spread2, dx * dx + dy * dy);
-  }
-  const spread = Math.sqrt(spread2);
+  const spread = spreadOf(stations, first, last, sx, sy);
   const x = sx * cos - sy * sin;
   const y = sx * sin + sy * cos;
-  let least = Infinity;
-  for (let k = 0; k < near.paths.length; k++) {
-    const i = near.paths[k]!;
-    const dx = set.mx[i]! - x;
-    const dy = set.my[i]! - y;
-    const bound = Math.sqrt(dx * dx + dy * dy) - set.bound[i]! - set.radius[i]!;
+  const { mx, my, bound, radius } = set;
+  // The path that was nearest to the stations before is a good guess.
+  let least = picked.best < 0 ? Infinity : pathDistance(set, picked.best, x, y) - radius[picked.best]!;
+  let margin = (least > 0 ? 2 * least : 0) + 3 * spread;
+  const { gaps } = picked;
+  for (let k = 0; k < from.count; k++) {
+    const i = from.paths[k]!;
+    const dx = mx[i]! - x;
+    const dy = my[i]! - y;
+    const reach = bound[i]! + radius[i]! + margin;
     // What is surely further than the best so far and its margin need not be measured.
-    const gap =
-      bound > 2 * Math.max(least, 0) + 3 * spread ? bound : pathDistance(set, i, x, y) - set.radius[i]!;
-    picked.gaps[k] = gap;
-    least = k < near.deep && gap < least ? gap : least;
+    if (dx * dx + dy * dy > reach * reach) {
+      gaps[k] = Infinity;
+      continue;
+    }
+    const gap = pathDistance(set, i, x, y) - radius[i]!;
+    gaps[k] = gap;
+    if (k < from.deep && gap < least) {
+      least = gap;
+      margin = (least > 0 ? 2 * least : 0) + 3 * spread;
+      picked.best = i;
+    }
   }
-  picked.trusted = 2 * Math.max(least, 0) + spread;
-  keepWithin(near, picked, picked.trusted + spread);
+  const enough = 2 * Math.max(least, 0) + spread;
+  picked.trusted = Math.min(enough, from.trusted);
+  keepWithin(from, picked, enough + spread);
 }
 
-function keepWithin(near: NearList, picked: Picked, limit: number): void {
+/** How far stations of a group are from a place at most. */
+function spreadOf({ x, y }: Stations, first: number, last: number, sx: number, sy: number): number {
+  let most = 0;
+  for (let i = first; i < last; i++) {
+    const dx = x[i]! - sx;
+    const dy = y[i]! - sy;
+    const away = dx * dx + dy * dy;
+    most = away > most ? away : most;
+  }
+  return Math.sqrt(most);
+}
+
+function keepWithin(from: Choice, picked: Picked, limit: number): void {
+  const { gaps, paths } = picked;
   let count = 0;
-  for (let k = 0; k < near.paths.length; k++) {
-    if (k === near.deep) {
-      picked.deep = count;
-    }
-    if (picked.gaps[k]! <= limit) {
-      picked.paths[count++] = near.paths[k]!;
+  let deep = 0;
+  for (let k = 0; k < from.count; k++) {
+    if (gaps[k]! <= limit) {
+      paths[count++] = from.paths[k]!;
+      deep = k < from.deep ? count : deep;
     }
   }
   picked.count = count;
-  if (near.deep === near.paths.length) {
-    picked.deep = count;
-  }
+  picked.deep = deep;
 }

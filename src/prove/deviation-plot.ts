@@ -11,33 +11,45 @@ export interface WorstTooth {
   readonly copy: number;
   /** Greatest deviation from the exact flank at a station, either way, mm. */
   readonly most: number;
-  readonly points: readonly DeviationPoint[];
+  /** The station it is at. */
+  readonly at: number;
+  readonly readings: Readings;
 }
 
 /** Metal cut away shows at the upper height, metal left at the lower. */
-function signed(readings: Readings, i: number): number {
-  return readings.high[i]! < 0 ? readings.high[i]! : readings.low[i]!;
+function signed({ low, high }: Readings, i: number): number {
+  return high[i]! < 0 ? high[i]! : low[i]!;
 }
 
 /** The worse of what is known and this tooth. */
 export function worseTooth(
   known: WorstTooth | undefined,
   copy: number,
-  stations: Stations,
+  { region, count }: Stations,
   readings: Readings,
 ): WorstTooth {
+  const { low, high, path } = readings;
   let most = -1;
   let at = 0;
-  for (let i = 0; i < stations.count; i++) {
-    if (stations.region[i] === REGION.flank && Math.abs(signed(readings, i)) > most) {
-      most = Math.abs(signed(readings, i));
+  for (let i = 0; i < count; i++) {
+    if (region[i] !== REGION.flank) {
+      continue;
+    }
+    const size = high[i]! < 0 ? -high[i]! : Math.abs(low[i]!);
+    if (size > most) {
+      most = size;
       at = i;
     }
   }
   if (known !== undefined && most <= known.most) {
     return known;
   }
-  return { copy, most, points: sidePoints(stations, readings, at) };
+  // The readings are used again for the next tooth.
+  return { copy, most, at, readings: { low: low.slice(), high: high.slice(), path: path.slice() } };
+}
+
+export function pointsAlong(stations: Stations, { readings, at }: WorstTooth): DeviationPoint[] {
+  return sidePoints(stations, readings, at);
 }
 
 /** Up to the land, or down from it, by the side on which `at` lies. */

@@ -33,7 +33,7 @@ export interface Evidence {
 }
 
 export function gatherEvidence(input: ProofInput, traces: readonly Trace[]): Evidence {
-  const moves = traces.flatMap((trace) => trace.moves);
+  const moves = ([] as TracedMove[]).concat(...traces.map((trace) => trace.moves));
   const cutters = new Map(input.setup.cutters.map((cutter) => [cutter.number, cutter]));
   let last: Cutter | undefined;
   // Most moves are made with the cutter of the move before.

@@ -18,51 +18,52 @@ export interface Piece {
 /** One square or two may be a ridge between two cuts, which goes as a chip. */
 const FEWEST = 3;
 
-interface Run {
-  readonly row: number;
-  readonly from: number;
+/** Runs of squares in reading order, as columns of numbers. */
+interface Runs {
+  readonly row: number[];
+  readonly from: number[];
   /** One past the last. */
-  readonly to: number;
+  readonly to: number[];
 }
 
 /** The largest loose piece, if there is one. */
-export function loosePiece(
-  raster: Raster,
-  body: WheelBody,
-  through: number,
-  isSheet: boolean,
-): Piece | undefined {
-  const runs = runsOf(raster, through);
-  const root = joinRuns(runs);
-  const count = new Map<number, number>();
-  const held = new Set<number>();
-  runs.forEach((run, k) => {
-    const piece = root(k);
-    count.set(piece, (count.get(piece) ?? 0) + run.to - run.from);
-    if (isSheet && isAtEdge(raster, run)) {
-      held.add(piece);
+export function loosePiece(raster: Raster, body: WheelBody, isSheet: boolean): Piece | undefined {
+  const runs = runsOf(raster);
+  const piece = joinRuns(runs);
+  const squares = new Int32Array(piece.length);
+  const held = new Uint8Array(piece.length);
+  for (let k = 0; k < piece.length; k++) {
+    squares[piece[k]!]! += runs.to[k]! - runs.from[k]!;
+    if (isSheet && isAtEdge(raster, runs, k)) {
+      held[piece[k]!] = 1;
     }
-  });
-  runs.forEach((run, k) => {
-    if (!held.has(root(k)) && isInWheel(raster, body, run)) {
-      held.add(root(k));
+  }
+  for (let k = 0; k < piece.length; k++) {
+    if (held[piece[k]!] === 0 && isInWheel(raster, body, runs, k)) {
+      held[piece[k]!] = 1;
     }
-  });
-  return largestOf(raster, runs, count, held);
+  }
+  return largestOf(raster, runs, squares, held);
 }
 
-function runsOf({ columns, rows, left }: Raster, through: number): Run[] {
-  const runs: Run[] = [];
+function runsOf({ columns, rows, left, through }: Raster): Runs {
+  const runs: Runs = { row: [], from: [], to: [] };
   for (let row = 0; row < rows; row++) {
+    const end = (row + 1) * columns;
     const base = row * columns;
-    let from = -1;
-    for (let column = 0; column <= columns; column++) {
-      const solid = column < columns && left[base + column]! > through;
-      if (solid && from < 0) {
-        from = column;
-      } else if (!solid && from >= 0) {
-        runs.push({ row, from, to: column });
-        from = -1;
+    let at = base;
+    while (at < end) {
+      while (at < end && left[at]! <= through) {
+        at += 1;
+      }
+      const from = at;
+      while (at < end && left[at]! > through) {
+        at += 1;
+      }
+      if (at > from) {
+        runs.row.push(row);
+        runs.from.push(from - base);
+        runs.to.push(at - base);
       }
     }
   }
@@ -70,35 +71,41 @@ function runsOf({ columns, rows, left }: Raster, through: number): Run[] {
 }
 
 /** Which run stands for the piece a run belongs to: the first one in reading order. */
-function joinRuns(runs: readonly Run[]): (k: number) => number {
-  const parent = runs.map((_, k) => k);
-  const root = (k: number): number => {
-    let at = k;
-    while (parent[at] !== at) {
-      at = parent[at] = parent[parent[at]!]!;
-    }
-    return at;
-  };
+function joinRuns({ row, from, to }: Runs): Int32Array {
+  const parent = new Int32Array(row.length);
   let above = 0;
-  runs.forEach((run, k) => {
-    while (runs[above]!.row < run.row - 1 || (runs[above]!.row < run.row && runs[above]!.to < run.from)) {
-      above++;
+  for (let k = 0; k < parent.length; k++) {
+    parent[k] = k;
+    while (row[above]! < row[k]! - 1 || (row[above]! < row[k]! && to[above]! < from[k]!)) {
+      above += 1;
     }
-    for (let other = above; other < k && runs[other]!.row < run.row && runs[other]!.from <= run.to; other++) {
-      const [a, b] = [root(other), root(k)];
-      parent[Math.max(a, b)] = Math.min(a, b);
+    for (let other = above; other < k && row[other]! < row[k]! && from[other]! <= to[k]!; other++) {
+      const a = rootOf(parent, other);
+      const b = rootOf(parent, k);
+      parent[a > b ? a : b] = a > b ? b : a;
     }
-  });
-  return root;
+  }
+  for (let k = 0; k < parent.length; k++) {
+    parent[k] = rootOf(parent, k);
+  }
+  return parent;
 }
 
-function isAtEdge({ rows, columns }: Raster, { row, from, to }: Run): boolean {
-  return row === 0 || row === rows - 1 || from === 0 || to === columns;
+function rootOf(parent: Int32Array, k: number): number {
+  let at = k;
+  while (parent[at] !== at) {
+    at = parent[at] = parent[parent[at]!]!;
+  }
+  return at;
 }
 
-function isInWheel({ size, x0, y0 }: Raster, body: WheelBody, { row, from, to }: Run): boolean {
-  for (let column = from; column < to; column++) {
-    if (isInsideWheel(body, x0 + column * size, y0 + row * size)) {
+function isAtEdge({ rows, columns }: Raster, { row, from, to }: Runs, k: number): boolean {
+  return row[k] === 0 || row[k] === rows - 1 || from[k] === 0 || to[k] === columns;
+}
+
+function isInWheel({ size, x0, y0 }: Raster, body: WheelBody, { row, from, to }: Runs, k: number): boolean {
+  for (let column = from[k]!; column < to[k]!; column++) {
+    if (isInsideWheel(body, x0 + column * size, y0 + row[k]! * size)) {
       return true;
     }
   }
@@ -107,16 +114,15 @@ function isInWheel({ size, x0, y0 }: Raster, body: WheelBody, { row, from, to }:
 
 function largestOf(
   { size, x0, y0 }: Raster,
-  runs: readonly Run[],
-  count: ReadonlyMap<number, number>,
-  held: ReadonlySet<number>,
+  { row, from, to }: Runs,
+  squares: Int32Array,
+  held: Uint8Array,
 ): Piece | undefined {
   let worst: Piece | undefined;
-  for (const [piece, squares] of count) {
-    const area = squares * size * size;
-    if (!held.has(piece) && squares >= FEWEST && area > (worst?.area ?? 0)) {
-      const { row, from, to } = runs[piece]!;
-      worst = { x: x0 + ((from + to - 1) / 2) * size, y: y0 + row * size, area };
+  for (let k = 0; k < squares.length; k++) {
+    const area = squares[k]! * size * size;
+    if (held[k] === 0 && squares[k]! >= FEWEST && area > (worst?.area ?? 0)) {
+      worst = { x: x0 + ((from[k]! + to[k]! - 1) / 2) * size, y: y0 + row[k]! * size, area };
     }
   }
   return worst;

@@ -94,15 +94,20 @@ export function sweptGap(
 
 /** The point of path i nearest to (x, y). */
 export function nearestOnPath(set: PathSet, i: number, x: number, y: number): { x: number; y: number } {
-  const [x0, y0, x1, y1] = [set.x0[i]!, set.y0[i]!, set.x1[i]!, set.y1[i]!];
+  const x0 = set.x0[i]!;
+  const y0 = set.y0[i]!;
+  const x1 = set.x1[i]!;
+  const y1 = set.y1[i]!;
   const arc = set.arc[i]!;
   if (arc === 0) {
-    const [dx, dy] = [x1 - x0, y1 - y0];
+    const dx = x1 - x0;
+    const dy = y1 - y0;
     const length2 = dx * dx + dy * dy;
     const u = length2 === 0 ? 0 : Math.min(1, Math.max(0, ((x - x0) * dx + (y - y0) * dy) / length2));
     return { x: x0 + u * dx, y: y0 + u * dy };
   }
-  const [cx, cy] = [set.cx[i]!, set.cy[i]!];
+  const cx = set.cx[i]!;
+  const cy = set.cy[i]!;
   if (withinSweep(x - cx, y - cy, x0 - cx, y0 - cy, x1 - cx, y1 - cy, set.turn[i]!)) {
     const rho = Math.hypot(x - cx, y - cy) || 1;
     return { x: cx + ((x - cx) * arc) / rho, y: cy + ((y - cy) * arc) / rho };

@@ -15,10 +15,14 @@ export interface Raster {
   readonly y0: number;
   /** Height that is left; -Infinity where there never was metal. */
   readonly left: Float32Array;
+  /** Squares that were cut down to here or below count as cut through. */
+  readonly through: number;
+  /** How many have been cut through. */
+  opened: number;
 }
 
 /** Covers the blank within `reach` of the axis, in squares of `size`. */
-export function blankRaster(setup: Setup, reach: number, size: number): Raster {
+export function blankRaster(setup: Setup, reach: number, size: number, through: number): Raster {
   const { shape } = setup;
   const halfX = Math.min(reach, shape.kind === 'disc' ? shape.diameter / 2 : shape.width / 2);
   const halfY = Math.min(reach, shape.kind === 'disc' ? shape.diameter / 2 : shape.height / 2);
@@ -26,6 +30,10 @@ export function blankRaster(setup: Setup, reach: number, size: number): Raster {
   const rows = Math.max(1, Math.ceil((2 * halfY) / size));
   const [x0, y0] = [(-columns * size) / 2 + size / 2, (-rows * size) / 2 + size / 2];
   const left = new Float32Array(columns * rows).fill(setup.topZ);
+  const raster = { size, columns, rows, x0, y0, left, through, opened: 0 };
+  if (shape.kind === 'sheet' && setup.bored === 0) {
+    return raster;
+  }
   for (let row = 0; row < rows; row++) {
     for (let column = 0; column < columns; column++) {
       if (!isInBlank(setup, x0 + column * size, y0 + row * size)) {
@@ -33,7 +41,7 @@ export function blankRaster(setup: Setup, reach: number, size: number): Raster {
       }
     }
   }
-  return { size, columns, rows, x0, y0, left };
+  return raster;
 }
 
 /**
@@ -41,7 +49,7 @@ export function blankRaster(setup: Setup, reach: number, size: number): Raster {
  * in metal on both sides.
  */
 export function cutRaster(raster: Raster, paths: PathSet, i: number, z: number): number {
-  const { size, columns, rows, x0, y0, left } = raster;
+  const { size, columns, rows, x0, y0, left, through } = raster;
   const radius = paths.radius[i]!;
   const reach = paths.bound[i]! + radius;
   const [mx, my] = [paths.mx[i]!, paths.my[i]!];
@@ -60,6 +68,7 @@ export function cutRaster(raster: Raster, paths: PathSet, i: number, z: number):
       const away = pathDistance(paths, i, x0 + column * size, y0 + row * size);
       if (away < radius) {
         left[at] = z;
+        raster.opened += z <= through && height > through ? 1 : 0;
         bite = away < radius / 2 ? Math.max(bite, height - z) : bite;
       }
     }

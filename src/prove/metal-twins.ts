@@ -6,6 +6,9 @@
  */
 import type { SolidMoves } from './metal-solids.ts';
 
+/** To a millimetre. */
+const STEPS = 1e5;
+
 export type Twins = Pick<SolidMoves, 'twin' | 'next' | 'places'>;
 
 export function twinsOf(solids: Omit<SolidMoves, keyof Twins>): Twins {
@@ -22,9 +25,8 @@ export function twinsOf(solids: Omit<SolidMoves, keyof Twins>): Twins {
   const table = new Int32Array(size).fill(-1);
   for (let i = 0; i < count; i++) {
     // Places are written to four or five decimals: as whole numbers they differ in their lowest bits.
-    const steps = (x0[i]! * 31 + y0[i]! * 1009 + x1[i]! * 523 + y1[i]! * 7919) * 1e5;
-    const whole = (steps % 0x7fffffff) | 0;
-    let at = (whole ^ (whole >>> 15)) & (size - 1);
+    const mixture = Math.imul((x1[i]! * STEPS) | 0, 0x9e3779b1) ^ Math.imul((y1[i]! * STEPS) | 0, 0x85ebca6b);
+    let at = (mixture ^ (mixture >>> 15)) & (size - 1);
     let k = table[at]!;
     while (
       k >= 0 &&

@@ -39,6 +39,8 @@ export interface Codes {
   /** A length without a point would count thousandths. */
   readonly pointAlways: boolean;
   readonly valueLargest: number;
+  /** What may not stand on a line with a comment: what is not plain text, and what the machine file bans. */
+  readonly dangerous: RegExp;
 }
 
 /** Ten times the number of a word like 'G61.1'; -1 for anything else. */
@@ -79,7 +81,16 @@ export function codesOf(machine: Machine): Codes {
     pathTolerance: pathWords.some((word) => word.includes('P')),
     pointAlways: machine.words.numbers.point === 'always',
     valueLargest: machine.words.numbers.valueLargest,
+    dangerous: dangerousIn(machine.words.file.bannedCharacters),
   };
+}
+
+function dangerousIn(banned: string): RegExp {
+  const escaped = Array.from(
+    { length: banned.length },
+    (_, i) => `\\u${banned.charCodeAt(i).toString(16).padStart(4, '0')}`,
+  );
+  return new RegExp(`[^\\t\\x20-\\x7e]${banned === '' ? '' : `|[${escaped.join('')}]`}`);
 }
 
 function putByWords(machine: Machine, put: (group: number, ...codes: readonly number[]) => void): void {

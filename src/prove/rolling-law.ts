@@ -76,27 +76,41 @@ export function readRollingLaw(
 ): RollingReading {
   let worst = known;
   const { cos, sin, set } = field;
+  const { dx, dy, allowed } = law;
   for (let i = 0; i < stations.count; i++) {
+    // Not a number where the law does not hold.
+    if (!(allowed[i]! > 0)) {
+      continue;
+    }
     const path = readings.path[i]!;
-    if (Number.isNaN(law.dx[i]!) || path < 0 || readings.low[i]! >= field.farthest) {
+    if (path < 0 || readings.low[i]! >= field.farthest) {
       continue;
     }
     const out = readings.low[i]!;
     const sx = stations.x[i]! + out * stations.nx[i]!;
     const sy = stations.y[i]! + out * stations.ny[i]!;
-    const [x, y] = [sx * cos - sy * sin, sx * sin + sy * cos];
+    const x = sx * cos - sy * sin;
+    const y = sx * sin + sy * cos;
     const axis = nearestOnPath(set, path, x, y);
-    const [ax, ay] = [axis.x - x, axis.y - y];
-    const [lx, ly] = [law.dx[i]! * cos - law.dy[i]! * sin, law.dx[i]! * sin + law.dy[i]! * cos];
-    const angle = Math.abs(Math.atan2(lx * ay - ly * ax, lx * ax + ly * ay));
-    const share = angle / law.allowed[i]!;
+    const ax = axis.x - x;
+    const ay = axis.y - y;
+    const lx = dx[i]! * cos - dy[i]! * sin;
+    const ly = dx[i]! * sin + dy[i]! * cos;
+    const across = Math.abs(lx * ay - ly * ax);
+    const along = lx * ax + ly * ay;
+    // An angle is no larger than its tangent: few need the angle itself.
+    if (across <= along * Math.min(worst.angle, worst.share * allowed[i]!)) {
+      continue;
+    }
+    const angle = Math.atan2(across, along);
+    const share = angle / allowed[i]!;
     if (angle > worst.angle || share > worst.share) {
       worst = {
         ...(share > worst.share
           ? {
               share,
               shareAngle: angle,
-              shareAllowed: law.allowed[i]!,
+              shareAllowed: allowed[i]!,
               copy,
               x,
               y,
