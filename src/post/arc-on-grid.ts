@@ -105,7 +105,7 @@ function writePart(
   if (isWholeTurn(turn)) {
     // Both ends are one place: a unit apart, a controller might run the unit instead of the circle.
     const circle = bestArc(sweep, start, { x: start.x, y: start.y, z: end.z }, turn);
-    if (circle.kind === 'miss' || !strays(sweep, start, circle, turn)) {
+    if (circle.kind === 'miss' || !strays(circle)) {
       moves.push(circle);
       return end;
     }
@@ -117,7 +117,7 @@ function writePart(
     return end;
   }
   const arc = bestArc(sweep, start, end, turn);
-  if (arc.kind === 'arc' && strays(sweep, start, arc, turn) && Math.abs(turn) > LEAST_HALVED) {
+  if (arc.kind === 'arc' && strays(arc) && Math.abs(turn) > LEAST_HALVED) {
     return writeHalves(sweep, start, share0, share1, moves);
   }
   const centred = arc.kind === 'arc' && sweep.words.centre !== 'radius';

@@ -7,15 +7,15 @@ import { distance, type GridArc, type GridMiss, type GridPlace, type Sweep } fro
 import { toGrid, type Grid } from './program-grid.ts';
 
 /** An arc of less cannot stray by more than a count: at its middle the roundings (each under 0.71 counts) of its ends
- *  and, by 1 - cos of half its turn, of its centre add up. */
-const SURE_TURN = radians(100);
+ *  and, by 1 - cos of half its turn, of its centre add up to 0.86, and half a count of its height goes across. */
+const SURE_TURN = radians(75);
 
 /** Counts an arc may stray. Why: what is read back shall lie within one unit of the last digit of what was meant, and
  *  between the places looked at it may be half a percent greater. */
 const MOST_STRAY = 0.99;
 
 /** Between the places at which a stray is looked for: it varies as a sine, of whose top that misses half a percent. */
-const LOOK_STEP = radians(6);
+const LOOK_STEP = radians(12);
 
 /**
  * About the rounded centre, or that of its eight neighbours which strays least where the controller would refuse it or it
@@ -27,31 +27,29 @@ export function bestArc(sweep: Sweep, start: GridPlace, end: GridPlace, turn: nu
   const cy = toGrid(grid, sweep.centre.y);
   const first = arcAbout(sweep, start, end, cx, cy);
   const fits = mayMiss(words, grid, first);
-  if (words.centre === 'radius' || (fits && !strays(sweep, start, first, turn))) {
-    return first;
+  const sure = words.centre !== 'radius' && Math.abs(turn) <= SURE_TURN;
+  let best = fits ? { ...first, stray: sure ? 0 : strayOf(sweep, start, first, turn) } : undefined;
+  if (words.centre === 'radius' || (best !== undefined && !strays(best))) {
+    return best ?? first;
   }
-  let best: GridArc | undefined = fits ? first : undefined;
-  let least = best === undefined ? Infinity : strayOf(sweep, start, best, turn);
   let miss = first.miss;
   for (let k = 0; k < 9; k++) {
     const other = arcAbout(sweep, start, end, cx + (k % 3) - 1, cy + Math.floor(k / 3) - 1);
-    const stray = mayMiss(words, grid, other) ? strayOf(sweep, start, other, turn) : Infinity;
     miss = Math.min(miss, other.miss);
-    if (stray < least) {
-      best = other;
-      least = stray;
+    const stray = mayMiss(words, grid, other) ? strayOf(sweep, start, other, turn) : Infinity;
+    if (stray < (best?.stray ?? Infinity)) {
+      best = { ...other, stray };
     }
   }
   return best ?? { kind: 'miss', radius: sweep.radius, miss: miss / grid.perMm };
 }
 
 /** Whether the arc, as the controller will make it, lies further off than it may. */
-export function strays(sweep: Sweep, start: GridPlace, arc: GridArc, turn: number): boolean {
-  const sure = sweep.words.centre !== 'radius' && Math.abs(turn) <= SURE_TURN;
-  return !sure && strayOf(sweep, start, arc, turn) > MOST_STRAY;
+export function strays(arc: GridArc): boolean {
+  return arc.stray > MOST_STRAY;
 }
 
-/** How far it lies off the exact circle, between its ends, at worst; counts. */
+/** How far it lies off the exact arc, between its ends, at worst; counts. */
 function strayOf(sweep: Sweep, start: GridPlace, arc: GridArc, turn: number): number {
   const centre = sweep.words.centre === 'radius' ? centreByRadius(start, arc) : { x: arc.cx, y: arc.cy };
   const { perMm } = sweep.grid;
@@ -69,7 +67,12 @@ function strayOf(sweep: Sweep, start: GridPlace, arc: GridArc, turn: number): nu
     const y = centre.y + r * Math.sin(angle) - sweep.centre.y * perMm;
     worst = Math.max(worst, Math.abs(Math.sqrt(x * x + y * y) - sweep.radius * perMm));
   }
-  return worst;
+  return Math.hypot(worst, heightOff(sweep));
+}
+
+/** How far rounding moves its height, in counts; at worst half a count on a helix, whose parts end anywhere. */
+function heightOff({ grid, from, to }: Sweep): number {
+  return from.z === to.z ? Math.abs(toGrid(grid, from.z) - from.z * grid.perMm) : 0.5;
 }
 
 /** The same angle between -pi and pi. */
@@ -93,7 +96,18 @@ function arcAbout(sweep: Sweep, start: GridPlace, end: GridPlace, cx: number, cy
   const { x, y, z } = end;
   const counterClockwise = sweep.turn > 0;
   if (sweep.words.centre === 'radius') {
-    return { kind: 'arc', x, y, z, cx, cy, radius: meanRadius(sweep, start, end), counterClockwise, miss: 0 };
+    return {
+      kind: 'arc',
+      x,
+      y,
+      z,
+      cx,
+      cy,
+      radius: meanRadius(sweep, start, end),
+      counterClockwise,
+      miss: 0,
+      stray: 0,
+    };
   }
   const r1 = distance(start.x, start.y, cx, cy);
   return {
@@ -106,6 +120,7 @@ function arcAbout(sweep: Sweep, start: GridPlace, end: GridPlace, cx: number, cy
     radius: r1,
     counterClockwise,
     miss: Math.abs(r1 - distance(x, y, cx, cy)),
+    stray: 0,
   };
 }
 

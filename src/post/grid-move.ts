@@ -23,6 +23,8 @@ export interface GridArc extends GridPlace {
   readonly counterClockwise: boolean;
   /** Difference of start and end radius as written, in counts. */
   readonly miss: number;
+  /** How far it lies off the exact circle at worst, in counts; 0 where it turns too little to stray. */
+  readonly stray: number;
 }
 
 /** An arc that no centre on the grid makes acceptable. */
