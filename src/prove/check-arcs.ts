@@ -8,14 +8,18 @@ import { findingAt, gathered, type Said } from './finding-at.ts';
 import type { Finding } from './proof.ts';
 
 export function checkArcs(evidence: Evidence): Finding[] {
-  const findings: Finding[] = [];
-  for (const move of evidence.moves) {
-    const fault = move.kind === 'arc' ? outOfSize(evidence, move) : undefined;
-    if (fault !== undefined) {
-      findings.push(findingAt(move, fault));
-    }
+  const { moves, solids } = evidence;
+  // Where every move is placed, one of each place tells whether any arc is at fault.
+  const some = solids.count === moves.length ? Array.from(solids.places, (i) => solids.moves[i]!) : moves;
+  if (!some.some((move) => outOfSize(evidence, move) !== undefined)) {
+    return [];
   }
-  return gathered(findings);
+  return gathered(
+    moves.flatMap((move) => {
+      const fault = outOfSize(evidence, move);
+      return fault === undefined ? [] : [findingAt(move, fault)];
+    }),
+  );
 }
 
 function outOfSize({ input, lastDigit }: Evidence, move: TracedMove): Said | undefined {

@@ -2,6 +2,7 @@
  * How deep: the cutter against the plate under the blank and the skin that is to stay, its shank (where it is wider than what it cuts) against the
  * walls beside it, and the collet nut against the blank's top.
  */
+import type { Cutter } from '../cutting/setup.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, lengthText } from './finding-at.ts';
 import { isCleared, isInBlank } from './metal-cover.ts';
@@ -17,11 +18,16 @@ export function checkDepth(evidence: Evidence): Finding[] {
   let deepest = 0;
   let wide = -1;
   let rubs = -1;
+  let deep = Infinity;
+  // Nothing but a cutter's tip comes below the top while it cuts no deeper than this.
+  const harmless = setup.topZ - lastDigit - Math.min(...setup.cutters.map(shortest));
   for (let i = 0; i < solids.count; i++) {
     const low = lowOf(solids, i);
-    deepest = low < lowOf(solids, deepest) ? i : deepest;
-    // What follows is for cutters that work below the top.
-    if (low < setup.topZ) {
+    if (low < deep) {
+      deep = low;
+      deepest = i;
+    }
+    if (low < harmless) {
       wide = wide < 0 && shankRubs(evidence, i, low) ? i : wide;
       rubs = rubs < 0 && nutRubs(evidence, i, low) ? i : rubs;
     }
@@ -35,6 +41,11 @@ export function checkDepth(evidence: Evidence): Finding[] {
     ...(wide < 0 ? [] : [shank(evidence, wide)]),
     ...(rubs < 0 ? [] : [nut(evidence, rubs)]),
   ];
+}
+
+/** What of a cutter is above its tip and no wider than it. */
+function shortest({ reach, stickOut, shank, diameter }: Cutter): number {
+  return shank > diameter ? Math.min(reach, stickOut) : stickOut;
 }
 
 /** Where move i ends. */
