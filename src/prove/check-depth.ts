@@ -43,9 +43,9 @@ export function checkDepth(evidence: Evidence): Finding[] {
   ];
 }
 
-/** What of a cutter is above its tip and no wider than it. */
-function shortest({ reach, stickOut, shank, diameter }: Cutter): number {
-  return shank > diameter ? Math.min(reach, stickOut) : stickOut;
+/** How far above its tip a cutter first gets wider than what it cuts. */
+function shortest(cutter: Cutter): number {
+  return cutter.shank > cutter.diameter ? Math.min(cutter.reach, cutter.stickOut) : cutter.stickOut;
 }
 
 /** Where move i ends. */

@@ -59,6 +59,15 @@ describe('the way into metal', () => {
     expect(errorsOf(prove(edited(roughing, 0, ...hole), plunging))).toEqual([]);
   });
 
+  it('holds the feed of a plunge to the limits of the machine', () => {
+    const plunging = withSetup({ cutters: [{ ...cutter!, plunges: true }] });
+    const { feedHighest } = machine().limits;
+    const fast = hole.map((line) => line.replace('F50', `F${String(2 * feedHighest)}`));
+    const proof = prove(edited(roughing, 0, ...fast), plunging);
+    expect(errorsOf(proof)).toEqual(['prove.feed-limits']);
+    expect(findingOf(proof, 'prove.feed-limits').line).toBe(roughing + 3);
+  });
+
   it('refuses a ramp steeper than the material allows [brass 3 degrees; 0.3 in 2 mm is 14]', () => {
     const ramp = ['G0 X8 Y8', 'G0 Z0.2', 'G1 Z0 F50', 'G1 X10 Z-0.5 F50', 'G0 Z5'];
     const proof = prove(edited(roughing, 0, ...ramp));
@@ -74,6 +83,31 @@ describe('what stands in the way', () => {
     const proof = prove(GOOD, withSetup({ obstacles: [{ ...clamp, x: 5, toZ: 1 }] }));
     expect(errorsOf(proof)).toContain('prove.obstacle');
     expect(findingOf(proof, 'prove.obstacle').message).toMatch(/the cutter/);
+  });
+
+  it('is passed by at the top of the machine, where Z is not known but nothing stands', () => {
+    const tall = withSetup({ obstacles: [{ ...clamp, x: 30, toZ: 80 }] });
+    const over = ['G53 G0 Z0', 'G0 X30 Y0', 'G0 X40', 'G0 X8 Y8', 'G0 Z5'];
+    expect(errorsOf(prove(edited(roughing, 0, ...over), tall))).toEqual([]);
+    const cut = edited(roughing, 0, 'G53 G0 Z0', 'G0 X30 Y0', 'G1 X40 F100', 'G0 X8 Y8', 'G0 Z5');
+    expect(errorsOf(prove(cut, tall))).toEqual(['prove.unknown-place']);
+    const coming = edited(
+      roughing,
+      0,
+      'G53 G0 Z0',
+      'G0 X30 Y0',
+      'G0 Z5',
+      'G0 X40',
+      'G53 G0 Z0',
+      'G0 X8 Y8',
+      'G0 Z5',
+    );
+    expect(errorsOf(prove(coming, tall))).toEqual(['prove.obstacle']);
+  });
+
+  it('is not passed by where Z is not known for another reason', () => {
+    const lost = edited(roughing, 0, 'G49', 'G0 X30 Y0', 'G43 H1', 'G0 Z5');
+    expect(errorsOf(prove(lost))).toContain('prove.fast-move');
   });
 
   it('refuses a shank that does', () => {

@@ -1,6 +1,7 @@
 /**
  * A wheel form built by hand from its definition, so that the prover's tests lean on nothing but the exact pieces:
- * radial flanks, addendum rolled by half the mate's pitch circle, tooth = half the pitch, no fillet.
+ * radial flanks, addendum rolled by half the mate's pitch circle, tooth = half the pitch, and a fillet that touches root circle
+ * and flank where one is asked for.
  */
 import { mirrorPiece, reversePiece } from '../../src/geometry/change-piece.ts';
 import { cycloidPoint } from '../../src/geometry/cycloid.ts';
@@ -8,7 +9,7 @@ import type { CycloidPiece, Piece } from '../../src/geometry/piece.ts';
 import { angleOf, norm, ORIGIN, polar } from '../../src/geometry/point.ts';
 import type { WheelForm, WheelPiece } from '../../src/tooth/wheel.ts';
 
-export function exactWheel(teeth: number, module: number, leaves: number): WheelForm {
+export function exactWheel(teeth: number, module: number, leaves: number, fillet = 0): WheelForm {
   const pitchRadius = (module * teeth) / 2;
   const generatingRadius = (module * leaves) / 4;
   const dedendum = 1.5708 * module;
@@ -38,17 +39,29 @@ export function exactWheel(teeth: number, module: number, leaves: number): Wheel
     start,
     turn,
   });
-  const flank: Piece = { kind: 'line', from: polar(rootRadius, -beta), to: polar(pitchRadius, -beta) };
+  // The fillet's centre stands off the root circle and the flank by its radius.
+  const aside = Math.asin(fillet / (rootRadius + fillet));
+  const foot = (rootRadius + fillet) * Math.cos(aside);
+  const round: Piece = {
+    kind: 'arc',
+    centre: polar(rootRadius + fillet, -beta - aside),
+    radius: fillet,
+    start: Math.PI - beta - aside,
+    turn: aside - Math.PI / 2,
+  };
+  const flank: Piece = { kind: 'line', from: polar(foot, -beta), to: polar(pitchRadius, -beta) };
   const half = Math.PI / teeth;
   const mirrored = (piece: Piece): Piece => reversePiece(mirrorPiece(piece));
   const sector: WheelPiece[] = [
-    { role: 'root', piece: arc(rootRadius, -half, half - beta) },
+    { role: 'root', piece: arc(rootRadius, -half, half - beta - aside) },
+    ...(fillet > 0 ? [{ role: 'fillet', piece: round } as const] : []),
     { role: 'flank', piece: flank },
     { role: 'addendum', piece: face },
     { role: 'land', piece: arc(outsideRadius, tip, -2 * tip) },
     { role: 'addendum', piece: mirrored(face) },
     { role: 'flank', piece: mirrored(flank) },
-    { role: 'root', piece: arc(rootRadius, beta, half - beta) },
+    ...(fillet > 0 ? [{ role: 'fillet', piece: mirrored(round) } as const] : []),
+    { role: 'root', piece: arc(rootRadius, beta + aside, half - beta - aside) },
   ];
   return {
     proportions: {
@@ -60,7 +73,7 @@ export function exactWheel(teeth: number, module: number, leaves: number): Wheel
       height: 0.95,
       tooth: 0.5,
       dedendum: 1.5708,
-      rootFillet: 0,
+      rootFillet: fillet,
     },
     pitchRadius,
     outsideRadius,

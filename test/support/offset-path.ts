@@ -17,7 +17,8 @@ import {
   turnPoint,
   type Point,
 } from '../../src/geometry/point.ts';
-import type { WheelForm } from '../../src/tooth/wheel.ts';
+import type { Piece } from '../../src/geometry/piece.ts';
+import type { PieceRole, WheelForm } from '../../src/tooth/wheel.ts';
 
 export interface PathMove {
   readonly to: Point;
@@ -49,30 +50,69 @@ export function offsetPath(form: WheelForm, offset: number, options: PathOptions
   return moves;
 }
 
+/** In the middle of the space: on the root circle's parallel, or where those of the two flanks meet above it. */
 export function pathStart(form: WheelForm, offset: number): Point {
-  return polar(form.rootRadius + offset, -Math.PI / form.proportions.teeth);
+  const half = Math.PI / form.proportions.teeth;
+  return polar(Math.max(form.rootRadius + offset, wedgedAt(form, offset)), -half);
+}
+
+/** How far out the parallels of two flanks meet. */
+function wedgedAt(form: WheelForm, offset: number): number {
+  const half = Math.PI / form.proportions.teeth;
+  return offset / Math.sin(half + angleOf(pointOn(pieceOf(form, 'flank'), 0)));
+}
+
+/** The first one of the sector. */
+function pieceOf(form: WheelForm, role: PieceRole): Piece {
+  const found = form.sector.find((each) => each.role === role);
+  if (found === undefined) {
+    throw new Error(`no ${role} in this outline`);
+  }
+  return found.piece;
 }
 
 function toothPath(form: WheelForm, offset: number, options: PathOptions): PathMove[] {
-  const half = Math.PI / form.proportions.teeth;
-  const floor = form.rootRadius + offset;
-  const [, flank, face, land] = form.sector;
-  const rising = offsetPiece(flank!.piece, offset)!;
-  const beta = Math.abs(angleOf(pointOn(flank!.piece, 0)));
-  const corner = pointOn(face!.piece, 1);
-  const low = beta + Math.asin(offset / floor);
-  const side: PathMove[] = [
-    aroundAxis(polar(floor, -low), half - low),
-    { to: pointOn(rising, 1) },
-    ...facePath(face!.piece, offset, options),
-  ];
-  const end = addScaled(corner, outward(face!.piece, 1), offset);
-  const onto = addScaled(corner, outward(land!.piece, 0), offset);
+  const rising = offsetPiece(pieceOf(form, 'flank'), offset)!;
+  const face = pieceOf(form, 'addendum');
+  const corner = pointOn(face, 1);
+  const side: PathMove[] = [...rootPath(form, offset), ...sidePath(rising, face, offset, options)];
+  const end = addScaled(corner, outward(face, 1), offset);
+  const down = mirrored(side, pathStart(form, offset));
+  const land = form.sector.find(({ role }) => role === 'land')?.piece;
+  if (land === undefined) {
+    // The two sides meet on the tooth's middle line.
+    const over = { x: end.x, y: -end.y };
+    return [...side, { to: over, centre: corner, turn: sweep(corner, end, over) }, ...down];
+  }
+  const onto = addScaled(corner, outward(land, 0), offset);
   const round: PathMove = { to: onto, centre: corner, turn: sweep(corner, end, onto) };
   const tip = Math.abs(angleOf(corner));
   const over = aroundAxis(polar(form.outsideRadius + offset, tip), 2 * tip);
   const up = [...side, round];
-  return [...up, over, ...mirrored(up, polar(floor, -half))];
+  return [...up, over, ...mirrored(up, pathStart(form, offset))];
+}
+
+/** From the middle of the space to where the flank's parallel begins: nothing where the cutter is wedged. */
+function rootPath(form: WheelForm, offset: number): PathMove[] {
+  const half = Math.PI / form.proportions.teeth;
+  const floor = form.rootRadius + offset;
+  if (wedgedAt(form, offset) > floor) {
+    return [];
+  }
+  if (form.proportions.rootFillet > offset) {
+    const fillet = pieceOf(form, 'fillet');
+    const round = offsetPiece(fillet, offset)!;
+    const to = pointOn(round, 0);
+    return fillet.kind === 'arc'
+      ? [
+          aroundAxis(to, half + angleOf(to)),
+          { to: pointOn(round, 1), centre: fillet.centre, turn: fillet.turn },
+        ]
+      : [];
+  }
+  const beta = Math.abs(angleOf(pointOn(pieceOf(form, 'flank'), 0)));
+  const low = beta + Math.asin(offset / floor);
+  return [aroundAxis(polar(floor, -low), half - low)];
 }
 
 /** The same moves mirrored across X and travelled the other way. */
@@ -86,7 +126,19 @@ function mirrored(moves: readonly PathMove[], start: Point): PathMove[] {
     .toReversed();
 }
 
-function facePath(piece: Parameters<typeof pointOn>[0], offset: number, options: PathOptions): PathMove[] {
+/** Up the flank and along the addendum; one arc leaves the flank at a corner, round which the cutter turns. */
+function sidePath(rising: Piece, face: Piece, offset: number, options: PathOptions): PathMove[] {
+  const top = { to: pointOn(rising, 1) };
+  if (face.kind !== 'arc') {
+    return [top, ...facePath(face, offset, options)];
+  }
+  const along = offsetPiece(face, offset)!;
+  const [onto, to, corner] = [pointOn(along, 0), pointOn(along, 1), pointOn(face, 0)];
+  const round = { to: onto, centre: corner, turn: sweep(corner, top.to, onto) };
+  return [top, round, { to, centre: face.centre, turn: face.turn }];
+}
+
+function facePath(piece: Piece, offset: number, options: PathOptions): PathMove[] {
   const parts = options.parts ?? 24;
   const at = (u: number): Point => addScaled(pointOn(piece, u), outward(piece, u), offset);
   return Array.from({ length: parts }, (_, k) => {
@@ -95,7 +147,7 @@ function facePath(piece: Parameters<typeof pointOn>[0], offset: number, options:
   });
 }
 
-function outward(piece: Parameters<typeof pointOn>[0], u: number): Point {
+function outward(piece: Piece, u: number): Point {
   const heading = headingOn(piece, u);
   return { x: heading.y, y: -heading.x };
 }
