@@ -37,6 +37,7 @@ const DOORMEN: Readonly<Record<string, RegExp>> = {
   'node:url': /^cli\/[a-z-]+\.ts$/,
   'node:module': /^cli\/load-part\.ts$/,
   'node:zlib': /^cli\/load-part\.ts$/,
+  'node:v8': /^cli\/main\.ts$/,
   'node:vm': /^cli\/load-part\.ts$/,
 };
 

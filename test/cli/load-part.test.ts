@@ -21,9 +21,10 @@ function runNew(flags: readonly string[] = []): { readonly status: number | null
   return { status, text: stdout + stderr };
 }
 
-/** Whether V8 takes the kept code: asked of V8 itself, of the text and code as they lie in dist. */
+/** Whether V8 takes the kept code: asked of V8 itself, of the text and code as they lie in dist, under the flags main sets. */
 function isTaken(): boolean {
-  const program = `const { readFileSync } = require('node:fs'); const { Script } = require('node:vm');
+  const program = `require('node:v8').setFlagsFromString('--interrupt-budget=800000');
+    const { readFileSync } = require('node:fs'); const { Script } = require('node:vm');
     const file = ${JSON.stringify(join(folder, 'dist/run-new.js'))};
     const cachedData = readFileSync(file + '.code').subarray(4);
     const script = new Script(require('node:module').wrap(readFileSync(file, 'latin1')), { cachedData });
