@@ -37,7 +37,7 @@ const DOORMEN: Readonly<Record<string, RegExp>> = {
   'node:url': /^cli\/[a-z-]+\.ts$/,
   'node:module': /^cli\/load-part\.ts$/,
   'node:zlib': /^cli\/load-part\.ts$/,
-  'node:v8': /^cli\/main\.ts$/,
+  'node:v8': /^cli\/load-part\.ts$/,
   'node:vm': /^cli\/load-part\.ts$/,
 };
 

@@ -10,7 +10,7 @@ import { Script } from 'node:vm';
 import { setFlagsFromString } from 'node:v8';
 import { crc32 } from 'node:zlib';
 
-// As in `main.ts`: byte code is taken only under the flags it was made with.
+// As in `load-part.ts`: byte code is taken only under the flags it was made with.
 setFlagsFromString('--interrupt-budget=800000');
 
 const [file, root] = process.argv.slice(2);

@@ -9,6 +9,7 @@
 import { createRequire, Module } from 'node:module';
 import { dirname } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { setFlagsFromString } from 'node:v8';
 import { Script } from 'node:vm';
 import { crc32 } from 'node:zlib';
 import { readOwnBytes } from './files.ts';
@@ -24,9 +25,16 @@ type PartFunction = (
 /** Bytes at the head of the code: the CRC-32 of text and code, as `keep-code.mjs` puts it there. */
 const SUM_BYTES = 4;
 
+/**
+ * A run is over in a second: code that V8 would optimise early hardly runs again, and doing so took nearly half of the time.
+ * `keep-code.mjs` sets the same, for V8 takes kept byte code only under the flags it was made with.
+ */
+const OPTIMISE_LATE = '--interrupt-budget=800000';
+
 const HERE = import.meta.url;
 
 export function loadPart(name: string): object {
+  setFlagsFromString(OPTIMISE_LATE);
   const file = fileURLToPath(new URL(`./${name}.js`, HERE));
   const require = createRequire(HERE);
   const text = readOwnBytes(file);

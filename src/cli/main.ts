@@ -1,10 +1,5 @@
 /** The command's entry: runs it, and turns a fault of ours into exit 70 with nothing written. */
-import { setFlagsFromString } from 'node:v8';
 import { runProgram } from './program.ts';
-
-// A run is over in a second: code that V8 would optimise early hardly runs again, and doing so took nearly half of the time.
-// `keep-code.mjs` sets the same, for V8 takes kept byte code only under the flags it was made with.
-setFlagsFromString('--interrupt-budget=800000');
 
 /** Exit code for a fault of ours (sysexits.h, EX_SOFTWARE). */
 const OUR_FAULT = 70;

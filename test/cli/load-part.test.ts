@@ -21,7 +21,7 @@ function runNew(flags: readonly string[] = []): { readonly status: number | null
   return { status, text: stdout + stderr };
 }
 
-/** Whether V8 takes the kept code: asked of V8 itself, of the text and code as they lie in dist, under the flags main sets. */
+/** Whether V8 takes the kept code: asked of V8 itself, of the text and code as they lie in dist, under the flags load-part sets. */
 function isTaken(): boolean {
   const program = `require('node:v8').setFlagsFromString('--interrupt-budget=800000');
     const { readFileSync } = require('node:fs'); const { Script } = require('node:vm');
