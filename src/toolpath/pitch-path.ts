@@ -17,7 +17,7 @@ import type { ArcPiece, LinePiece, Piece } from '../geometry/piece.ts';
 import { headingOn } from '../geometry/on-piece.ts';
 import { cross, dot, norm } from '../geometry/point.ts';
 import type { WheelForm } from '../tooth/wheel.ts';
-import { overLand } from './over-land.ts';
+import { overLand, roundTip, type TipPath } from './over-land.ts';
 
 export type PathRole = 'root' | 'fillet' | 'flank' | 'addendum' | 'corner' | 'land';
 
@@ -52,8 +52,8 @@ export interface PathRequest {
   readonly strays: number;
   /** How far arcs may lie from curves, to either side: closer, and where that takes too many blocks. */
   readonly arcError: { readonly close: number; readonly most: number };
-  /** 'clear': the lands are not cut (a disc turned to the tip circle). */
-  readonly lands: 'cut' | 'clear';
+  /** 'clear': the lands are not cut (a disc turned to the tip circle). A number: one arc round the tip if it leaves no more on it. */
+  readonly lands: 'cut' | 'clear' | number;
   /** Which corner of tooth 1, in travel order, begins the path; the other one where a path runs against another's way. */
   readonly begins: 'after-land' | 'before-land';
 }
@@ -66,7 +66,7 @@ export interface OffsetPiece {
 }
 
 export function pitchPath(request: PathRequest): Outcome<PitchPath> {
-  const { form, distance, way, made, strays, lands } = request;
+  const { form, distance, way, made, strays } = request;
   const { teeth } = form.proportions;
   const outline = form.sector.map(({ piece }) => piece);
   const offset = offsetSector(outline, teeth, distance);
@@ -81,7 +81,7 @@ export function pitchPath(request: PathRequest): Outcome<PitchPath> {
   const travelled =
     way === 1 ? named : named.toReversed().map((part) => ({ ...part, piece: reversePiece(part.piece) }));
   const exact = fromCorner(mergeRoot(travelled), request);
-  const { corner, rest } = lands === 'clear' ? overLand(exact, teeth, way) : exact;
+  const { corner, rest } = overTip(exact, request);
   return success({
     distance,
     way,
@@ -91,6 +91,17 @@ export function pitchPath(request: PathRequest): Outcome<PitchPath> {
     rest: fewest(rest, request),
     land: rest.at(-1)?.role === 'land',
   });
+}
+
+function overTip(path: TipPath, { form, way, lands }: PathRequest): TipPath {
+  switch (lands) {
+    case 'cut':
+      return path;
+    case 'clear':
+      return overLand(path, form.proportions.teeth, way);
+    default:
+      return roundTip(path, lands);
+  }
 }
 
 /** What a piece of the offset runs along, told by its kind and place. */
@@ -122,10 +133,7 @@ function mergeRoot(pieces: readonly OffsetPiece[]): readonly OffsetPiece[] {
 }
 
 /** Begins at a tip corner of tooth 1; what lies before it is the next tooth's. */
-function fromCorner(
-  pieces: readonly OffsetPiece[],
-  { form, way, begins }: PathRequest,
-): { readonly corner: ArcPiece; readonly rest: readonly OffsetPiece[] } {
+function fromCorner(pieces: readonly OffsetPiece[], { form, way, begins }: PathRequest): TipPath {
   const { teeth } = form.proportions;
   const isCorner = ({ role }: OffsetPiece): boolean => role === 'corner';
   const at = begins === 'after-land' ? pieces.findLastIndex(isCorner) : pieces.findIndex(isCorner);

@@ -51,7 +51,12 @@ interface Teeth {
 /** Metal in the root's corner, over the finishing cutter's diameter, above which its middle cuts too: a slot, no finishing. */
 const THICK = 0.25;
 /** How far the roughing path may stray outward, over the allowance: few blocks, and hardly more to finish. Judgement. */
-const ROUGH_STRAYS = 0.1;
+const ROUGH_STRAYS = 0.25;
+/**
+ * How much further it may stray over a tip, which it goes round in one arc. Judgement: round the outside of a tip little of
+ * the edge is engaged, so that finishing it bears twice the depth.
+ */
+const ROUGH_TIP = 1;
 /** A disc at most this much over the tip circle is turned to it. */
 const TURNED = 0.05;
 
@@ -106,7 +111,7 @@ function pathsOf(
     made,
     strays,
     arcError: { close: strays, most: strays },
-    lands: 'cut',
+    lands: ROUGH_TIP * allowance,
     begins: roughWay === way ? 'after-land' : 'before-land',
   });
   if (!roughPath.ok) {
