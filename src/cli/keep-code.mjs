@@ -11,7 +11,9 @@ import { setFlagsFromString } from 'node:v8';
 import { crc32 } from 'node:zlib';
 
 // As in `load-part.ts`: byte code is taken only under the flags it was made with.
-setFlagsFromString('--interrupt-budget=800000');
+for (const flag of ['--interrupt-budget=800000', '--semi-space-growth-factor=16']) {
+  setFlagsFromString(flag);
+}
 
 const [file, root] = process.argv.slice(2);
 const sample = join(root, 'samples/third-wheel.yaml');

@@ -24,7 +24,7 @@ export function keepOldPrograms(
 ): Outcome<readonly Renaming[]> {
   const present = namesIn(folder);
   const records = recordsOf(folder, name);
-  const old = present.filter((file) => isProgramOf(file, name, endings(ending)));
+  const old = programsAmong(present, name, ending);
   const written = new Map(files.map((file) => [file.name, file]));
   const edited: string[] = [];
   const renamings: Renaming[] = [];
@@ -91,8 +91,25 @@ function recordsOf(folder: string, name: string): ReadonlyMap<string, string> {
 
 /** Programs of a job's name that lie in a folder, whatever machine they were written for. */
 export function programsIn(folder: string, name: string): readonly string[] {
-  const known = endings('.nc');
-  return namesIn(folder).filter((file) => isProgramOf(file, name, known));
+  return programsAmong(namesIn(folder), name);
+}
+
+/** What Ogive writes beside programs: common, and not worth reading every machine file for its ending. */
+const BESIDE = /\.(?:html|svg|dxf|json|yaml|txt)$/;
+
+function programsAmong(names: readonly string[], name: string, ending?: string): readonly string[] {
+  const isBeside = (file: string): boolean =>
+    BESIDE.test(file) && (ending === undefined || !file.endsWith(ending));
+  const likely = names.filter((file) => file.startsWith(name) && !isBeside(file));
+  if (likely.length === 0) {
+    return [];
+  }
+  const own = ending === undefined ? [] : likely.filter((file) => isProgramOf(file, name, [ending]));
+  if (own.length === likely.length) {
+    return own;
+  }
+  const known = endings(ending ?? '.nc');
+  return likely.filter((file) => isProgramOf(file, name, known));
 }
 
 /** NAME.nc, NAME-1.nc, NAME-walk.nc, with the ending of any machine file. */

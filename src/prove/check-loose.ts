@@ -13,7 +13,7 @@ import type { PathSet } from './metal-paths.ts';
 import { lowOf, type SolidMoves } from './metal-solids.ts';
 
 /** Squares from the axis to the edge of what is looked at: what a wheel needs so that its spaces are seen. */
-const SQUARES = 150;
+const SQUARES = 100;
 /** mm; finer shows nothing that matters. */
 const FINEST = 0.06;
 /** A slot is at least this many squares wide. */

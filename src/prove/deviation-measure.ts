@@ -35,8 +35,8 @@ export interface Readings {
 export type Height = 'low' | 'high';
 
 /** Stations that are picked for together; first for some groups at once, so that most paths are looked at seldom. */
-const GROUP = 8;
-const GROUPS = 4 * GROUP;
+const GROUP = 4;
+const GROUPS = 8 * GROUP;
 const STEPS = 200;
 const CLOSE = PROOF_RESOLUTION / 10;
 

@@ -23,7 +23,7 @@ function runNew(flags: readonly string[] = []): { readonly status: number | null
 
 /** Whether V8 takes the kept code: asked of V8 itself, of the text and code as they lie in dist, under the flags load-part sets. */
 function isTaken(): boolean {
-  const program = `require('node:v8').setFlagsFromString('--interrupt-budget=800000');
+  const program = `for (const flag of ['--interrupt-budget=800000', '--semi-space-growth-factor=16']) { require('node:v8').setFlagsFromString(flag); }
     const { readFileSync } = require('node:fs'); const { Script } = require('node:vm');
     const file = ${JSON.stringify(join(folder, 'dist/run-new.js'))};
     const cachedData = readFileSync(file + '.code').subarray(4);
