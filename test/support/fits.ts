@@ -99,7 +99,12 @@ function lengths(job: RandomJob): Reason[] {
   if (job.crossings !== undefined) {
     passes.push('crossings');
   }
-  const short = passes.filter((pass) => none(job, pass, ({ reach }) => reach >= need));
+  // A longer cutter that is wider than the spaces is no help to them.
+  const enters = (pass: RandomPass, cutter: RandomCutter): boolean =>
+    pass === 'roughing' || pass === 'finishing' ? fitsSpace(job, cutter) : true;
+  const short = passes.filter((pass) =>
+    none(job, pass, (cutter) => cutter.reach >= need && enters(pass, cutter)),
+  );
   const noFlute =
     job.finishingStep === undefined
       ? none(job, 'finishing', (cutter) => fluteOf(cutter) >= need && fitsSpace(job, cutter))
@@ -107,7 +112,7 @@ function lengths(job: RandomJob): Reason[] {
   return [
     ...short.map((pass) => ({
       bears: ['cutters'],
-      why: `no cutter for ${pass} reaches ${need.toFixed(3)} mm`,
+      why: `no cutter that fits reaches ${need.toFixed(3)} mm in ${pass}`,
     })),
     ...(noFlute
       ? [

@@ -34,7 +34,10 @@ function readMoves(
 ): { readonly samples: Sample[]; readonly cutters: number } {
   const samples: Sample[] = [];
   let [x, y, z, mode, unit, cutter, stopped, fed, relative] = [0, 0, 1e9, 0, 1, first, false, false, false];
+  // Hands that set the speed stop too: only where a comment names a cutter do they change it.
+  let named = false;
   for (const line of text.split(/\r?\n/)) {
+    named ||= /^\W*CUTTER \d+/i.test(line);
     const words = [
       ...line
         .replaceAll(/\([^)]*\)/g, '')
@@ -49,7 +52,7 @@ function readMoves(
       if (letter === 'G' && (value === 21 || value === 71)) unit = 1;
       if (letter === 'G' && (value === 90 || value === 91)) relative = value === 91;
       if (letter === 'G' && (value === 28 || value === 53 || value === 4)) machine = true;
-      if (letter === 'M' && (value === 6 || value === 0)) stopped = true;
+      if (letter === 'M' && (value === 6 || (value === 0 && named))) stopped = true;
     }
     if (machine) {
       if (at.has('Z')) z = 1e9;
@@ -63,7 +66,7 @@ function readMoves(
     };
     if (mode > 0) {
       if (stopped && fed) cutter += 1;
-      [stopped, fed] = [false, true];
+      [stopped, fed, named] = [false, true, false];
       if (wanted(to.x, to.y, Math.min(z, to.z))) {
         const centre = {
           x: (at.get('I') ?? 0) * unit + (absoluteCentres ? 0 : x),
