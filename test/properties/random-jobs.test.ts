@@ -1,6 +1,6 @@
 /**
  * Random jobs, as people would write them: most are written, none of those gouges or stays unread, and every refusal is borne out
- * by an independent test of fit. OGIVE_RUNS asks for more of them, and OGIVE_SEED for others.
+ * by an independent test of fit. OGIVE_RUNS asks for more of them, OGIVE_SEED for others, OGIVE_SHRINK for the smallest that shows a fault.
  */
 import * as fc from 'fast-check';
 import { expect, it } from 'vitest';
@@ -11,7 +11,7 @@ import { lookAtProgram, type Look } from '../support/look-at-program.ts';
 import { jobText, randomJob, type RandomJob } from '../support/random-job.ts';
 
 const SEED = Number(process.env['OGIVE_SEED'] ?? 60);
-const RUNS = Number(process.env['OGIVE_RUNS'] ?? 16);
+const RUNS = Number(process.env['OGIVE_RUNS'] ?? 14);
 /** Wheels of more teeth take seconds each: they are left to whoever asks for a number of runs. */
 const TEETH = process.env['OGIVE_RUNS'] === undefined ? 96 : 400;
 const SHARE = 0.7;
@@ -107,10 +107,28 @@ it(`random jobs are written true or refused for a reason (seed ${String(SEED)})`
     }
   }
   report(fates, faults);
+  if (faults.length > 0 && process.env['OGIVE_SHRINK'] !== undefined) {
+    console.log(smallestFault());
+  }
   expect(faults).toEqual([]);
   const share = fates.filter((fate) => fate.written).length / fates.length;
   expect(share).toBeGreaterThanOrEqual(SHARE);
 }, 7_200_000);
+
+/** The smallest job of those that shrinking finds in as many seconds as OGIVE_SHRINK says. */
+function smallestFault(): string {
+  const property = fc.property(randomJob(TEETH), (job) => fateOf(job).wrong.length === 0);
+  const seconds = Number(process.env['OGIVE_SHRINK']);
+  const { counterexample } = fc.check(property, {
+    seed: SEED,
+    numRuns: RUNS,
+    interruptAfterTimeLimit: 1000 * seconds,
+  });
+  const job = counterexample?.[0];
+  return job === undefined
+    ? 'nothing smaller in this time'
+    : `the smallest:\n${fateOf(job).wrong.join('\n')}\n${jobText(job)}`;
+}
 
 function report(fates: readonly Fate[], faults: readonly string[]): void {
   if (process.env['OGIVE_RUNS'] === undefined) {
