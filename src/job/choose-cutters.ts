@@ -1,8 +1,8 @@
 /**
  * Which cutter of the list does which pass where the job does not say. The largest that fits is the quickest and the
  * stiffest: rough a space with the largest it lets in, finish with the largest that gets to the root, bore and cross out
- * with the largest that the hole and the corners allow. Only cutters that reach deep enough; the smallest where none fits,
- * so that what is wrong can be said of a real cutter.
+ * with the largest that the hole and the corners allow. Only cutters that reach deep enough; where none fits, the
+ * smallest of those, which may do what is wanted less well, and else what is wrong can be said of a real cutter.
  * Widths and rules of roughing: the root of a space is as wide as D + 2 allowance + room for the chips. mm.
  */
 import { Bug } from '../base/bug.ts';
@@ -58,7 +58,12 @@ export function chooseRoughing(
     width >= cutter.diameter + 2 * (allowance ?? usualAllowance(cutter.diameter)) + CHIP_ROOM &&
     (finishing === undefined ||
       finishing.diameter <= cutter.diameter + (allowance ?? usualAllowance(cutter.diameter)));
-  return largest(cutters, fits, `the largest that roughs a space ${width.toFixed(3)} mm wide at the root`);
+  return largest(
+    cutters,
+    depth,
+    fits,
+    `the largest that roughs a space ${width.toFixed(3)} mm wide at the root`,
+  );
 }
 
 export function chooseFinishing({ cutters, depth, side, workingRadius }: Choosing, slot: number): Choice {
@@ -69,7 +74,7 @@ export function chooseFinishing({ cutters, depth, side, workingRadius }: Choosin
     footOf(side, cutter) <= workingRadius;
   const why = `the largest that gets to the root, where ${reaches.toFixed(3)} mm would fit, in the slot that was roughed`;
   const full = cutters.filter((cutter) => cutter.flute >= depth - WRITTEN_LENGTH);
-  return full.some(fits) ? largest(full, fits, why) : largest(cutters, fits, why);
+  return largest(full.some(fits) ? full : cutters, depth, fits, why);
 }
 
 /** Where the flank begins that a cutter makes. */
@@ -81,7 +86,7 @@ function footOf(side: ToothSide, { diameter }: Cutter): number {
 export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {
   const fits = (cutter: Cutter): boolean =>
     cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter <= HOLE_SHARE * bore;
-  return largest(cutters, fits, `the largest that has room to go round in a bore of ${bore} mm`);
+  return largest(cutters, depth, fits, `the largest that has room to go round in a bore of ${bore} mm`);
 }
 
 export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings): Choice {
@@ -89,18 +94,27 @@ export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings
   const room = HOLE_SHARE * (windows.windowOuter - windows.windowInner);
   const fits = (cutter: Cutter): boolean =>
     cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter < 2 * corner && cutter.diameter <= room;
-  return largest(cutters, fits, `the largest that goes round corners of ${corner} mm radius`);
+  return largest(cutters, depth, fits, `the largest that goes round corners of ${corner} mm radius`);
 }
 
-function largest(cutters: readonly Cutter[], fits: (cutter: Cutter) => boolean, why: string): Choice {
+function largest(
+  cutters: readonly Cutter[],
+  depth: number,
+  fits: (cutter: Cutter) => boolean,
+  why: string,
+): Choice {
   const bySize = cutters.toSorted((a, b) => b.diameter - a.diameter || a.number - b.number);
   const chosen = bySize.find(fits);
-  const last = bySize.at(-1);
-  if (chosen === undefined && last !== undefined) {
-    return { cutter: last, why: 'the smallest: none of the list fits' };
+  if (chosen !== undefined) {
+    return { cutter: chosen, why };
   }
-  if (chosen === undefined) {
+  const smallest = bySize.at(-1);
+  const last = bySize.findLast(({ reach }) => reach >= depth - WRITTEN_LENGTH) ?? smallest;
+  if (last === undefined) {
     throw new Bug('A job without cutters came to the choice of cutters.');
   }
-  return { cutter: chosen, why };
+  return {
+    cutter: last,
+    why: `the smallest${last === smallest ? '' : ' that goes deep enough'}: none of the list fits`,
+  };
 }

@@ -71,6 +71,10 @@ describe('roughing: root width at least D + 2 allowance + 0.05', () => {
       cutter: { diameter: 1 },
       why: 'the smallest: none of the list fits',
     });
+    expect(chooseRoughing(choosing([0.5, 1.5], [1, 4], [2, 4]), undefined)).toMatchObject({
+      cutter: { diameter: 1 },
+      why: 'the smallest that goes deep enough: none of the list fits',
+    });
   });
 });
 

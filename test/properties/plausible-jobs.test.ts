@@ -53,6 +53,16 @@ it('a cutter that reaches 0.4 mm in inches goes through 0.3 mm and 0.1 mm in inc
   expect(complaints(small({ wheel, cutters, cuts: ['below: 0.00393701 inch'] }))).toEqual([]);
 });
 
+it('a cutter too short for the plate is not taken instead of one that leaves some metal at the root', () => {
+  const wheel = '{ teeth: 7, mate: { leaves: 7 }, module: 1, dedendum: 1.72, thickness: 0.5 }';
+  const blank = '{ material: leaded-brass, shape: sheet, size: [18, 18], holding: glue }';
+  const cutters = [
+    '{ diameter: 1, reach: 3, flute: 3, helix: 25 }',
+    '{ diameter: 0.3, reach: 0.5, flute: 0.5, helix: 25 }',
+  ];
+  expect(complaints(small({ wheel, blank, cutters }))).toEqual([]);
+});
+
 it('a clamp beyond the travel is walked to no further than the travel goes', () => {
   const blank =
     '{ material: leaded-brass, shape: sheet, size: [12, 12], holding: glue, keep-out: [{ x: 90, y: 100, radius: 5, height: 3 }, { x: -90, y: -100, radius: 5, height: 3 }] }';
