@@ -1,8 +1,9 @@
 /**
  * Which cutter of the list does which pass where the job does not say. The largest that fits is the quickest and the
  * stiffest: rough a space with the largest it lets in, finish with the largest that gets to the root, bore and cross out
- * with the largest that the hole and the corners allow. Only cutters that reach deep enough; where none fits, the
- * smallest of those, which may do what is wanted less well, and else what is wrong can be said of a real cutter.
+ * with the largest that the hole and the corners allow. Only cutters that reach deep enough. Where none fits, the
+ * smallest that goes deep enough and in, which leaves more metal; else the smallest, so that what is wrong can be said of a
+ * real cutter.
  * Widths and rules of roughing: the root of a space is as wide as D + 2 allowance + room for the chips. mm.
  */
 import { Bug } from '../base/bug.ts';
@@ -38,6 +39,11 @@ export function rootWidth({ rootRadius, spaceAngle }: ToothSide): number {
   return 2 * rootRadius * Math.sin(spaceAngle);
 }
 
+/** Width of a tooth space at the pitch circle, where its flanks are furthest apart. */
+function pitchWidth({ pitchRadius, spaceAngle }: ToothSide): number {
+  return 2 * pitchRadius * Math.sin(spaceAngle);
+}
+
 export interface Choosing {
   readonly cutters: readonly Cutter[];
   /** From the top of the blank to the deepest cut. */
@@ -53,28 +59,32 @@ export function chooseRoughing(
   finishing?: Cutter,
 ): Choice {
   const width = rootWidth(side);
+  const slot = (cutter: Cutter): number =>
+    cutter.diameter + 2 * (allowance ?? usualAllowance(cutter.diameter));
+  const enters = (cutter: Cutter): boolean =>
+    cutter.reach >= depth - WRITTEN_LENGTH && slot(cutter) < pitchWidth(side);
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - WRITTEN_LENGTH &&
-    width >= cutter.diameter + 2 * (allowance ?? usualAllowance(cutter.diameter)) + CHIP_ROOM &&
+    enters(cutter) &&
+    width >= slot(cutter) + CHIP_ROOM &&
     (finishing === undefined ||
       finishing.diameter <= cutter.diameter + (allowance ?? usualAllowance(cutter.diameter)));
   return largest(
     cutters,
-    depth,
     fits,
+    enters,
     `the largest that roughs a space ${width.toFixed(3)} mm wide at the root`,
   );
 }
 
 export function chooseFinishing({ cutters, depth, side, workingRadius }: Choosing, slot: number): Choice {
   const reaches = 2 * largestCutter(side);
+  const enters = (cutter: Cutter): boolean =>
+    cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter <= Math.min(slot, pitchWidth(side));
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - WRITTEN_LENGTH &&
-    cutter.diameter <= Math.min(reaches, slot) &&
-    footOf(side, cutter) <= workingRadius;
+    enters(cutter) && cutter.diameter <= reaches && footOf(side, cutter) <= workingRadius;
   const why = `the largest that gets to the root, where ${reaches.toFixed(3)} mm would fit, in the slot that was roughed`;
   const full = cutters.filter((cutter) => cutter.flute >= depth - WRITTEN_LENGTH);
-  return largest(full.some(fits) ? full : cutters, depth, fits, why);
+  return largest(full.some(fits) ? full : cutters, fits, enters, why);
 }
 
 /** Where the flank begins that a cutter makes. */
@@ -84,23 +94,26 @@ function footOf(side: ToothSide, { diameter }: Cutter): number {
 }
 
 export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {
-  const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter <= HOLE_SHARE * bore;
-  return largest(cutters, depth, fits, `the largest that has room to go round in a bore of ${bore} mm`);
+  const enters = (cutter: Cutter): boolean =>
+    cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter < bore;
+  const fits = (cutter: Cutter): boolean => enters(cutter) && cutter.diameter <= HOLE_SHARE * bore;
+  return largest(cutters, fits, enters, `the largest that has room to go round in a bore of ${bore} mm`);
 }
 
 export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings): Choice {
   const { corner } = windows.proportions;
   const room = HOLE_SHARE * (windows.windowOuter - windows.windowInner);
+  const enters = (cutter: Cutter): boolean =>
+    cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter <= 2 * corner;
   const fits = (cutter: Cutter): boolean =>
-    cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter < 2 * corner && cutter.diameter <= room;
-  return largest(cutters, depth, fits, `the largest that goes round corners of ${corner} mm radius`);
+    enters(cutter) && cutter.diameter < 2 * corner && cutter.diameter <= room;
+  return largest(cutters, fits, enters, `the largest that goes round corners of ${corner} mm radius`);
 }
 
 function largest(
   cutters: readonly Cutter[],
-  depth: number,
   fits: (cutter: Cutter) => boolean,
+  enters: (cutter: Cutter) => boolean,
   why: string,
 ): Choice {
   const bySize = cutters.toSorted((a, b) => b.diameter - a.diameter || a.number - b.number);
@@ -109,12 +122,12 @@ function largest(
     return { cutter: chosen, why };
   }
   const smallest = bySize.at(-1);
-  const last = bySize.findLast(({ reach }) => reach >= depth - WRITTEN_LENGTH) ?? smallest;
+  const last = bySize.findLast(enters) ?? smallest;
   if (last === undefined) {
     throw new Bug('A job without cutters came to the choice of cutters.');
   }
   return {
     cutter: last,
-    why: `the smallest${last === smallest ? '' : ' that goes deep enough'}: none of the list fits`,
+    why: `the smallest${last === smallest ? '' : ' that goes deep enough and in'}: none of the list fits`,
   };
 }

@@ -71,10 +71,13 @@ describe('roughing: root width at least D + 2 allowance + 0.05', () => {
       cutter: { diameter: 1 },
       why: 'the smallest: none of the list fits',
     });
-    expect(chooseRoughing(choosing([0.5, 1.5], [1, 4], [2, 4]), undefined)).toMatchObject({
-      cutter: { diameter: 1 },
-      why: 'the smallest that goes deep enough: none of the list fits',
+  });
+  it('takes one that leaves metal at the root rather than one too short, but none wider than the space, 0.785', () => {
+    expect(chooseRoughing(choosing([0.5, 1.5], [0.7, 4], [2, 4]), undefined)).toMatchObject({
+      cutter: { diameter: 0.7 },
+      why: 'the smallest that goes deep enough and in: none of the list fits',
     });
+    expect(chooseRoughing(choosing([0.5, 1.5], [1, 4], [2, 4]), undefined).cutter.diameter).toBe(0.5);
   });
 });
 

@@ -6,6 +6,8 @@
  * rests on the root circle Rr and a flank touches the flank at sqrt(Rr^2 + 2 Rr r) (a right triangle, centre at Rr + r).
  */
 import type { RandomCutter, RandomJob, RandomPass } from './random-job.ts';
+import { roundWindow, straightOf } from './fits-windows.ts';
+import { boreRoom, fitsSpace, fluteOf, goesThrough, spaceAngle, thirdOgive, width } from './fits-space.ts';
 import { tipRadius } from './tooth-points.ts';
 
 export interface Reason {
@@ -52,14 +54,6 @@ export function reasonsAgainst(job: RandomJob): readonly Reason[] {
   ];
 }
 
-function width({ diameter, cuts }: RandomCutter): number {
-  return cuts ?? diameter;
-}
-
-function fluteOf(cutter: RandomCutter): number {
-  return cutter.flute ?? Math.min(cutter.reach, 2 * cutter.diameter);
-}
-
 /** The cutters that may do a pass: the named one, or all of them. */
 function may(job: RandomJob, pass: RandomPass): readonly RandomCutter[] {
   const number = job.named[pass];
@@ -99,16 +93,24 @@ function lengths(job: RandomJob): Reason[] {
   if (job.crossings !== undefined) {
     passes.push('crossings');
   }
-  // A longer cutter that is wider than the spaces is no help to them.
+  // A longer cutter that is too wide for what it is to make is no help.
+  const slots = may(job, 'roughing').filter((cutter) => cutter.reach >= need && fitsSpace(job, cutter));
   const enters = (pass: RandomPass, cutter: RandomCutter): boolean =>
-    pass === 'roughing' || pass === 'finishing' ? fitsSpace(job, cutter) : true;
+    ({
+      bore: width(cutter) <= boreRoom(job),
+      crossings: width(cutter) <= 2 * (job.crossings?.corner ?? 0),
+      roughing: slots.includes(cutter),
+      finishing: slots.some((slot) => goesThrough(job, slot, cutter)),
+    })[pass];
   const short = passes.filter((pass) =>
     none(job, pass, (cutter) => cutter.reach >= need && enters(pass, cutter)),
   );
-  const noFlute =
-    job.finishingStep === undefined
-      ? none(job, 'finishing', (cutter) => fluteOf(cutter) >= need && fitsSpace(job, cutter))
-      : none(job, 'finishing', (cutter) => fluteOf(cutter) >= (job.finishingStep ?? 0));
+  const once = job.finishingStep ?? need;
+  const noFlute = none(
+    job,
+    'finishing',
+    (cutter) => cutter.reach >= need && fluteOf(cutter) >= once && enters('finishing', cutter),
+  );
   return [
     ...short.map((pass) => ({
       bears: ['cutters'],
@@ -118,36 +120,22 @@ function lengths(job: RandomJob): Reason[] {
       ? [
           {
             bears: ['cutters', 'cuts.finishing'],
-            why: `no flute for finishing cuts ${need.toFixed(3)} mm, or none that fits the space`,
+            why: `no flute that fits cuts ${once.toFixed(3)} mm at a time for finishing`,
           },
         ]
       : []),
   ];
 }
 
-/** Half the angle of a space between its radial flanks. */
-function spaceAngle(job: RandomJob): number {
-  return ((1 - job.tooth) * Math.PI) / job.teeth;
-}
-
-/** Does a cutter get between the flanks at the pitch circle at all? */
-function fitsSpace(job: RandomJob, cutter: RandomCutter): boolean {
-  return width(cutter) < 2 * ((job.module * job.teeth) / 2) * Math.sin(spaceAngle(job));
-}
-
 function widths(job: RandomJob, rootRadius: number): Reason[] {
   const reasons: Reason[] = [];
-  if (
-    none(job, 'roughing', (cutter) => fitsSpace(job, cutter)) ||
-    none(job, 'finishing', (cutter) => fitsSpace(job, cutter))
-  ) {
+  if (none(job, 'roughing', (cutter) => fitsSpace(job, cutter))) {
     reasons.push({
       bears: ['cuts.roughing', 'cuts.finishing', 'cutters'],
-      why: 'no cutter is narrower than the spaces',
+      why: 'no cutter enters the spaces',
     });
   }
-  const bore = job.bore - (job.leave ?? 0);
-  if (job.bore > job.bored && none(job, 'bore', (cutter) => width(cutter) * 1.1 <= bore)) {
+  if (job.bore > job.bored && none(job, 'bore', (cutter) => width(cutter) <= boreRoom(job))) {
     reasons.push({ bears: ['cuts.bore', 'wheel.bore'], why: 'no cutter has room in the bore' });
   }
   if (job.bore / 2 >= rootRadius || (job.crossings !== undefined && job.bore >= job.crossings.hub)) {
@@ -176,17 +164,6 @@ function flank(job: RandomJob, rootRadius: number): Reason[] {
     : [];
 }
 
-/** Height of a leaf's tip in modules: two arcs of 2/3 of its thickness about points of the pitch circle, meeting on the leaf's axis. */
-function thirdOgive(job: RandomJob): number {
-  const leaf = job.leaf ?? (job.leaves > 10 ? 1.25 : 1.05);
-  const pitch = job.leaves / 2;
-  const radius = (2 / 3) * leaf;
-  // The arc's centre lies a chord `radius` away from the pitch point along the pitch circle, past the axis.
-  const centre = 2 * Math.asin(radius / (2 * pitch)) - leaf / (2 * pitch);
-  const [cx, cy] = [pitch * Math.cos(centre), pitch * Math.sin(centre)];
-  return cx + Math.sqrt(radius * radius - cy * cy) - pitch;
-}
-
 function crossings(job: RandomJob, rootRadius: number): Reason[] {
   const w = job.crossings;
   if (w === undefined) {
@@ -195,9 +172,7 @@ function crossings(job: RandomJob, rootRadius: number): Reason[] {
   const reasons: Reason[] = [];
   const outer = rootRadius - w.rim;
   const room = outer - w.hub / 2;
-  // A disc in the middle of the window touches two arms and the rim: (outer - c) sin(pi/n) = arm/2 + c.
-  const sine = Math.sin(Math.PI / w.arms);
-  const largest = Math.min(room / 2, (outer * sine - Math.min(w.atRim, w.atHub) / 2) / (1 + sine));
+  const largest = Math.min(room / 2, roundWindow(w, outer));
   if (room <= 0 || w.corner > largest - 1e-6) {
     reasons.push({
       bears: ['wheel.crossings'],
@@ -209,6 +184,13 @@ function crossings(job: RandomJob, rootRadius: number): Reason[] {
   }
   if (none(job, 'crossings', (cutter) => width(cutter) / 2 < 0.9 * largest)) {
     reasons.push({ bears: ['cuts.crossings'], why: 'no cutter has room in a window' });
+  }
+  const straight = straightOf(w, outer);
+  if (job.holding === 'skin' && none(job, 'crossings', (cutter) => straight > 0.15 * width(cutter))) {
+    reasons.push({
+      bears: ['cuts.crossings'],
+      why: `${straight.toFixed(3)} mm of straight wall: no cutter comes up to it in the slot round the slug`,
+    });
   }
   return reasons;
 }

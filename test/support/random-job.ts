@@ -317,7 +317,7 @@ function held(
   const holding = isDisc
     ? c.one(bore > 0 ? (['arbor', 'glue', 'tape'] as const) : (['glue', 'tape'] as const))
     : c.one(
-        bore >= 1
+        bore >= 1 && bore <= 25
           ? (['glue', 'glue', 'tape', 'skin', 'glue-and-screw'] as const)
           : (['glue', 'tape', 'skin'] as const),
       );
