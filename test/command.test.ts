@@ -202,7 +202,7 @@ describe('ogive draw', { timeout: 60_000 }, () => {
     );
     const dxf = filesIn(folder).get('small-wheel-outline.dxf') ?? '';
     expect(dxf).toMatch(/^ *0\r?\nSECTION\r?\n/);
-    // Group 42 of a polyline's corner is its bulge: an arc (AutoCAD DXF reference, LWPOLYLINE; from memory).
+    // Group 42 of a polyline's corner is its bulge: an arc (DXF reference, LWPOLYLINE; from memory).
     expect(dxf).toMatch(/LWPOLYLINE[\s\S]*\n *42\r?\n-?0?\.\d/);
   });
 });

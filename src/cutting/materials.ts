@@ -2,9 +2,10 @@
  * What the blank may be made of, and how it cuts: specific cutting force (Kienzle), cutting speed, chip load by cutter
  * diameter, depths. mm, N/mm2, m/min. Figures marked "judgement" are defaults of ours between published ones.
  *
- * Sources: kc1.1 and mc by VDI 3323 material group (as tabled in an indexable-tool catalogue of 2017/2022); 11SMnPb30
- * 1200/0.18 and acetal from memory and judgement; cutting speeds: carbide figures of catalogues and shop charts, taken low;
- * chip loads: a solid-carbide catalogue of 2021 gives 0.13 to 0.6 % of the diameter at 1 to 3 mm; ours are judgement.
+ * Sources: VDI 3323 only groups materials; kc1.1 and mc of a group are those of a maker's catalogue of inserts (2017/2022), no
+ * open source and taken as judgement; 11SMnPb30 1200/0.18 and acetal from memory and judgement; cutting speeds: carbide figures of
+ * catalogues and shop charts, taken low; chip loads: a maker's catalogue of solid carbide (2021) gives 0.13 to 0.6 % of the
+ * diameter at 1 to 3 mm; ours are judgement.
  */
 export type MaterialName =
   'leaded-brass' | 'brass' | 'free-cutting-steel' | 'silver-steel' | 'aluminium' | 'acetal';
@@ -24,7 +25,6 @@ export interface Material {
   readonly ramp: number;
   /** Deepest step of a full slot as a share of the diameter. */
   readonly slotShare: number;
-  readonly forceSource: string;
   readonly hazards: readonly Hazard[];
 }
 
@@ -45,7 +45,7 @@ export const MATERIALS: Readonly<Record<MaterialName, Material>> = {
     chipLoads: BRASS_CHIPS,
     ramp: 3,
     slotShare: 0.25,
-    forceSource: 'VDI 3323 group 26',
+    // VDI 3323 group 26.
     hazards: ['lead', 'needles', 'not-beryllium'],
   },
   brass: {
@@ -57,7 +57,7 @@ export const MATERIALS: Readonly<Record<MaterialName, Material>> = {
     chipLoads: BRASS_CHIPS,
     ramp: 3,
     slotShare: 0.2,
-    forceSource: 'VDI 3323 group 27; lead-free brass is really somewhat higher',
+    // VDI 3323 group 27; lead-free brass is really somewhat higher.
     hazards: ['needles', 'strings', 'not-beryllium'],
   },
   'free-cutting-steel': {
@@ -69,7 +69,7 @@ export const MATERIALS: Readonly<Record<MaterialName, Material>> = {
     chipLoads: [0.0015, 0.002, 0.0025, 0.003, 0.004, 0.005, 0.007, 0.01, 0.015],
     ramp: 2,
     slotShare: 0.15,
-    forceSource: 'VDI 3323 group 1, the safe upper value',
+    // VDI 3323 group 1, the safe upper value.
     hazards: ['lead'],
   },
   'silver-steel': {
@@ -81,7 +81,7 @@ export const MATERIALS: Readonly<Record<MaterialName, Material>> = {
     chipLoads: [0.0012, 0.0015, 0.002, 0.0025, 0.003, 0.004, 0.006, 0.008, 0.012],
     ramp: 2,
     slotShare: 0.08,
-    forceSource: 'VDI 3323 group 6',
+    // VDI 3323 group 6.
     hazards: [],
   },
   aluminium: {
@@ -93,7 +93,7 @@ export const MATERIALS: Readonly<Record<MaterialName, Material>> = {
     chipLoads: [0.002, 0.003, 0.004, 0.005, 0.006, 0.008, 0.012, 0.016, 0.025],
     ramp: 3,
     slotShare: 0.25,
-    forceSource: 'VDI 3323 group 22',
+    // VDI 3323 group 22.
     hazards: ['strings'],
   },
   acetal: {
@@ -105,7 +105,7 @@ export const MATERIALS: Readonly<Record<MaterialName, Material>> = {
     chipLoads: [0.005, 0.007, 0.008, 0.01, 0.014, 0.018, 0.028, 0.038, 0.06],
     ramp: 5,
     slotShare: 0.5,
-    forceSource: 'judgement: 1.5 to 3 times its strength',
+    // Judgement: 1.5 to 3 times its strength.
     hazards: ['melts'],
   },
 };

@@ -35,7 +35,7 @@ function wordDangers(machine: Machine): readonly Danger[] {
         list.some((word) => word.startsWith('G61')) &&
         danger(
           `words.path.${key}`,
-          'Controllers that take G71 for millimetres take G61 for rounding: the corners of the teeth would be cut off.',
+          'Some controllers that take G71 for millimetres take G61 for rounding: the corners of the teeth would be cut off.',
           'Exact stop is G60 there.',
         ),
     );

@@ -3,9 +3,10 @@
  * have, and the speed at which it may begin. mm, mm/s, mm/s2. A program has tens of thousands of moves and is timed once:
  * columns are filled and swept several times faster than as many small objects.
  *
- * A corner's speed is that of a fictitious arc which stays within the corner allowance d of the corner (S. K. Jeon, 2011):
- * v = sqrt(a d s / (1 - s)), s the sine of half the angle between the two moves; on arcs v <= sqrt(a R); along a
- * heading the acceleration and the rapid rate are those of the axis that limits it.
+ * A corner is taken as fast as an arc of radius R that touches both moves and passes the corner at the allowance d: with s the
+ * sine of half the angle between the moves the arc's centre is R / s from the corner, so R / s - R = d and
+ * v = sqrt(a R) = sqrt(a d s / (1 - s)); on arcs v <= sqrt(a R); along a heading the acceleration and the rapid rate are those
+ * of the axis that limits it.
  */
 import type { Position } from './motion.ts';
 

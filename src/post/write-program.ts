@@ -3,7 +3,7 @@
  *
  * In  : machine, motion (mm, program frame), the facts its header tells. Out: the file's name and text, or what this
  *       machine has no words for. Same input, same bytes.
- * Kept: design rules of every program: header before anything moves, all modes written, no M word on a block that moves,
+ * Kept in every program: header before anything moves, all modes written, no M word on a block that moves,
  *       arcs safe after rounding, nothing of a user's text outside a comment.
  */
 import { failure, success, type Outcome, type Problem } from '../base/problem.ts';

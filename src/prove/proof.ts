@@ -68,7 +68,7 @@ export interface Proof {
     readonly y: readonly [number, number];
     readonly z: readonly [number, number];
   };
-  /** With a target: the figures of design 6, worst over every height. */
+  /** With a target: how far the cut wheel is from its exact outline, worst over every height. */
   readonly figures?: {
     readonly flankGouge: number;
     readonly flankLeft: number;

@@ -9,7 +9,7 @@ import { pointOn, startOf } from '../geometry/on-piece.ts';
 import type { Loop } from '../geometry/piece.ts';
 import { loopsOf, type OutlineShape } from './outline-shape.ts';
 
-/** AutoCAD colour numbers are part of the format: 7 is the pen's own colour. */
+/** Colour numbers of the DXF format: 7 is the pen's own colour. */
 const PEN = 7;
 const LAYERS = { teeth: 'TEETH', bore: 'BORE', crossing: 'CROSSINGS' } as const;
 

@@ -35,7 +35,7 @@ export interface Reach {
   /** Thickest metal the finishing cutter leaves at the root beyond the exact outline, and its area a space, mm and mm2. */
   readonly leftAtRoot: number;
   readonly leftArea: number;
-  /** The largest cutter of the job's list that could rough the spaces (roughing.md rule: root width >= D + 2 allowance + 0.05). */
+  /** The largest cutter of the job's list that could rough the spaces (root width >= D + 2 allowance + 0.05). */
   readonly roughingCutter: number | null;
   /** Sentences for the sheet: what a larger roughing cutter would save, and so on. */
   readonly remarks: readonly string[];

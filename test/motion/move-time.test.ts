@@ -28,7 +28,7 @@ describe('trapezoid [kinematics of constant acceleration, closed form]', () => {
   });
 });
 
-describe('corner speed [v = sqrt(a d s / (1 - s)), S. K. Jeon 2011]', () => {
+describe('corner speed [of an arc that touches both moves and passes the corner at d: R / s - R = d, v = sqrt(a R)]', () => {
   it.each([
     [100, 0.01, 60, 1.0],
     [100, 0.01, 90, 1.5538],

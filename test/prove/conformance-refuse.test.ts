@@ -61,7 +61,7 @@ const SILENT: readonly Row[] = [
 /** Of the language, and not followed by this reader. */
 const NOT_FOLLOWED: readonly Row[] = [
   { ref: '§3.5.5', wrong: ['G10 L2 P1 X5'] },
-  { ref: '§3.5.7', wrong: ['G41 D1', 'G42'] },
+  { ref: '§3.5.10', wrong: ['G41 D1', 'G42'] },
   { ref: '§3.5.9', wrong: ['G38.2 Z-1'] },
   { ref: '§3.5.16', wrong: ['G81 X1 Y1 Z-1 R2', 'G82 X1 Z-1 R2 P0.5', 'G83 X1 Z-1 R2 Q0', 'G89 X1'] },
   { ref: '§3.5.18', wrong: ['G92 X7', 'G92', 'G92.1', 'G92.2', 'G92.3', 'G1 G92 X5'] },

@@ -216,7 +216,7 @@ it('rings in red the place where a program failed its proof, and shows no progra
   expect(page).toContain('Passes that were planned');
 });
 
-describe('the summary [design of ogive-summary/1]', () => {
+describe('the summary', () => {
   const summary = summaryOf(facts) as {
     part: Record<string, number>;
     programs: { file: string; bytes: number; sha256: string; cutters: { diameter: number }[] }[];
