@@ -14,6 +14,7 @@ import { sheetFacts, type Made, type Shapes, type Understood } from './flow/shee
 import { checkJobOnMachine } from './job/check-job.ts';
 import { placeInJob } from './job/place-problems.ts';
 import { readJob } from './job/read-job.ts';
+import { targetOfJob } from './job/target-of-job.ts';
 import { readMachine } from './machine/read-machine.ts';
 import { writeProgram, type ProgramText } from './post/write-program.ts';
 import type { Proof } from './prove/proof.ts';
@@ -160,13 +161,7 @@ function proved(
     programs: written.programs.map(({ file, text }) => ({ file, text })),
     machine,
     setup: job.setup,
-    target: {
-      ...shapes,
-      thickness: job.wheel.thickness,
-      bore: Math.max(job.wheel.bore - job.cuts.bore.leave, 0),
-      finishingDiameter: job.cuts.finishing.cutter.diameter,
-      slugsHeld: job.setup.holding.includes('skin'),
-    },
+    target: targetOfJob(job, shapes),
   });
   // The walk is read back too: nothing reaches the disk that was not.
   const walked = proveProgram({

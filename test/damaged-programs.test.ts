@@ -5,12 +5,12 @@
 import { readFileSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { targetOfJob } from '../src/job/target-of-job.ts';
 import { CHECK_CODES } from '../src/prove/check-codes.ts';
 import { gatherEvidence, type Evidence } from '../src/prove/evidence.ts';
 import type { Finding, ProofInput } from '../src/prove/proof.ts';
 import { proveProgram } from '../src/prove/prove-program.ts';
 import { traceProgram } from '../src/prove/trace-program.ts';
-import type { SheetFacts } from '../src/report/facts.ts';
 import { cutText, onMachine } from './support/cut-text.ts';
 import { damage, readRecipe, type Damaged, type Recipe } from './support/damage-recipe.ts';
 
@@ -66,20 +66,10 @@ function goodInput({ job, machine }: Recipe): ProofInput {
   }
   const texts = new Map(files.map(({ name, text }) => [name, text]));
   const programs = facts.programs.map(({ file }) => ({ file, text: texts.get(file) ?? '' }));
-  const input = { programs, machine: facts.machine, setup: facts.job.setup, target: targetOf(facts) };
+  const target = targetOfJob(facts.job, facts);
+  const input = { programs, machine: facts.machine, setup: facts.job.setup, target };
   goods.set(`${job} ${machine}`, input);
   return input;
-}
-
-function targetOf({ form, crossings, job }: SheetFacts): NonNullable<ProofInput['target']> {
-  return {
-    form,
-    ...(crossings === undefined ? {} : { crossings }),
-    thickness: job.wheel.thickness,
-    bore: job.wheel.bore - job.cuts.bore.leave,
-    finishingDiameter: job.cuts.finishing.cutter.diameter,
-    slugsHeld: job.setup.holding.includes('skin'),
-  };
 }
 
 function damaged(recipe: Recipe): { readonly input: ProofInput; readonly file: string } & Damaged {

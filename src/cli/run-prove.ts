@@ -5,6 +5,7 @@ import type { Outcome } from '../base/problem.ts';
 import { showProblem } from '../base/show-problem.ts';
 import { readJob } from '../job/read-job.ts';
 import type { Job } from '../job/job.ts';
+import { targetOfJob } from '../job/target-of-job.ts';
 import { readMachine } from '../machine/read-machine.ts';
 import type { Machine } from '../machine/machine.ts';
 import { CHECK_CODES } from '../prove/check-codes.ts';
@@ -84,14 +85,10 @@ function targetOf(job: Job): Pick<Parameters<typeof proveProgram>[0], 'target'> 
   }
   const windows = job.wheel.crossings && crossings(job.wheel.crossings, form.value.rootRadius);
   return {
-    target: {
+    target: targetOfJob(job, {
       form: form.value,
       ...(windows?.ok === true ? { crossings: windows.value } : {}),
-      thickness: job.wheel.thickness,
-      bore: Math.max(job.wheel.bore - job.cuts.bore.leave, 0),
-      finishingDiameter: job.cuts.finishing.cutter.diameter,
-      slugsHeld: job.setup.holding.includes('skin'),
-    },
+    }),
   };
 }
 

@@ -1,4 +1,5 @@
 /** What to measure on the first-off, with room to write the reading beside it, and what a difference means. */
+import { boreCut } from '../job/target-of-job.ts';
 import { overTips, SPAN_SENSITIVITY, toothChord } from '../tooth/span.ts';
 import { spansOf } from './draw-jaws.ts';
 import type { SheetFacts } from './facts.ts';
@@ -50,17 +51,17 @@ function spanRows(facts: SheetFacts): readonly string[] {
 }
 
 function boreRows(facts: SheetFacts): readonly string[] {
-  const { wheel, cuts, setup, length } = facts.job;
+  const { wheel, setup, length } = facts.job;
   if (wheel.bore <= 0) {
     return [];
   }
-  const ready = setup.bored >= wheel.bore;
-  const bore = ready ? wheel.bore : wheel.bore - cuts.bore.leave;
-  const how = ready
-    ? 'Pin gauge; the hole was there before and is not cut.'
-    : cuts.bore.leave > 0
-      ? `Pin gauge; ${lengthOnly(cuts.bore.leave, length)} on the diameter is left for broach or reamer, the finished bore is ${lengthOnly(wheel.bore, length)}.`
-      : 'Pin gauge, from both faces.';
+  const bore = boreCut(facts.job);
+  const how =
+    setup.bored >= bore
+      ? 'Pin gauge; the hole was there before and is not cut.'
+      : bore < wheel.bore
+        ? `Pin gauge; ${lengthOnly(wheel.bore - bore, length)} on the diameter is left for broach or reamer, the finished bore is ${lengthOnly(wheel.bore, length)}.`
+        : 'Pin gauge, from both faces.';
   return [row(facts, 'bore', bore, 'bore', how)];
 }
 
