@@ -27,7 +27,7 @@ export const CHECK_CODES = {
     blind: 'how the file reaches the controller',
   },
   'prove.end': {
-    guards: 'a program without an end, as a broken copy has none',
+    guards: 'a program without an end, as a broken copy has none, or with words behind its end',
     blind: 'a copy that broke off and still ends well',
   },
   'prove.ambiguous': {

@@ -117,6 +117,7 @@ function moveAs(
   const written = code >= 0 ? motionOfCode(code) : undefined;
   if (written !== undefined) {
     run.modes.motion = written;
+    run.setAt[G_GROUP.motion] = run.line;
   }
   if (other === HOME || other === SECOND_HOME) {
     return goHome(run, block, axes);

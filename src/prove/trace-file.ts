@@ -6,6 +6,7 @@
  */
 import { BIT, valueOf, wholeOf, type Block } from './block.ts';
 import type { ReadLine } from './read-lines.ts';
+import { sayWhatFollows } from './trace-after-end.ts';
 import { happen, remark, unread, type Refusal, type Run } from './trace-run.ts';
 
 export interface FileState {
@@ -129,6 +130,9 @@ export function checkEnd(run: Run, state: FileState, lines: readonly ReadLine[])
     !lines.slice(run.line).some(({ text }) => /^[ \t]*%[ \t]*$/.test(text))
   ) {
     remark(run, 'prove.end', 'error', 'the program begins with % and has no closing % line');
+  }
+  if (state.ended) {
+    sayWhatFollows(run, lines, last?.kind === 'end' && last.word === '%');
   }
   if (percentLines === 'both' && state.percents === 0) {
     lacksAtTheTop(run, 'this machine wants the program between two % lines');

@@ -6,6 +6,7 @@ import { millimetresPer } from '../base/units.ts';
 import { AXES, BIT, has, valueOf, type Block } from './block.ts';
 import type { Here, MotionMode } from './modes.ts';
 import { feedRefused } from './trace-move.ts';
+import { sayAssumed } from './trace-assumed.ts';
 import { placeOf, placeRefused } from './trace-place.ts';
 import { happen, makeMove, unread, type AxisName, type Refusal, type Run } from './trace-run.ts';
 
@@ -22,6 +23,7 @@ export function goHome(run: Run, block: Block, axes: number): Refusal | undefine
     if (refused !== undefined) {
       return refused;
     }
+    sayAssumed(run, 'machine');
     const via = placeOf(run, block, axes);
     if (
       via.x !== run.here.x ||
@@ -68,6 +70,7 @@ export function moveInMachine(
   if (run.modes.distance === 'incremental') {
     return unread('G53 under G91: controllers differ in what it means');
   }
+  sayAssumed(run, 'machine');
   const unit = millimetresPer(run.modes.unit ?? 'mm');
   leaveFrame(
     run,

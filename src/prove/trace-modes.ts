@@ -3,13 +3,18 @@
  * centres, feed mode (Table 8, orders 2 and 11 to 18).
  */
 import { BIT, has, valueOf, wholeOf, type Block } from './block.ts';
-import { G_GROUP } from './modes-codes.ts';
+import { G_GROUP, G_GROUPS } from './modes-codes.ts';
 import { wordOfCode } from './modes.ts';
 import { remark, unread, type Refusal, type Run } from './trace-run.ts';
 
 export function changeModes(run: Run, block: Block): Refusal | undefined {
   const { modes } = run;
   const { g } = block;
+  for (let group = G_GROUP.motion + 1; group < G_GROUPS; group++) {
+    if (g[group]! >= 0) {
+      run.setAt[group] = run.line;
+    }
+  }
   if ((g[G_GROUP.feedMode] ?? -1) >= 0) {
     modes.feedMode = 'per-minute';
   }

@@ -3,6 +3,7 @@
  */
 import type { Block } from './block.ts';
 import { spindleOf } from './modes.ts';
+import { sayAssumed } from './trace-assumed.ts';
 import { readArc, type ReadArc } from './trace-arc.ts';
 import { placeOf, placeRefused } from './trace-place.ts';
 import { isLengthKnown, makeMove, remark, unread, type Refusal, type Run } from './trace-run.ts';
@@ -28,10 +29,8 @@ export function runMove(
   if (refused !== undefined) {
     return refused;
   }
-  if (!run.placed) {
-    run.placed = true;
-    sayWhatIsAssumed(run);
-  }
+  run.placed = true;
+  sayAssumed(run, motion);
   if (motion !== 'G0' && !run.cutting) {
     run.cutting = true;
     if (!isLengthKnown(run)) {
@@ -57,19 +56,6 @@ export function runMove(
     makeArc(run, to, arc);
   }
   return undefined;
-}
-
-function sayWhatIsAssumed(run: Run): void {
-  const { workOffset } = run.machine.words.positions;
-  if (workOffset !== 'none' && run.modes.work === undefined) {
-    remark(
-      run,
-      'prove.assumed',
-      'warning',
-      `no work offset is selected (${workOffset}): the zero is whichever was last on`,
-      'work',
-    );
-  }
 }
 
 function makeArc(run: Run, to: Here, { centre, turn }: ReadArc): void {

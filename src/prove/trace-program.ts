@@ -9,10 +9,11 @@
 import type { Machine } from '../machine/machine.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
 import type { Block } from './block.ts';
-import { codesOf, M_GROUP } from './modes-codes.ts';
+import { codesOf, G_GROUPS, M_GROUP } from './modes-codes.ts';
 import { NOWHERE, powerOn, type FinalModes } from './modes.ts';
 import type { Finding } from './proof.ts';
 import { readLines, type ReadLine } from './read-lines.ts';
+import { modesAsked } from './trace-assumed.ts';
 import { runBlock } from './trace-block.ts';
 import { handsDone, readComments, type ByHand } from './trace-comments.ts';
 import { checkEnd, checkLine, checkNumber, readLabel, readPercent, type FileState } from './trace-file.ts';
@@ -27,6 +28,8 @@ export interface Trace {
   readonly blocks: number;
   /** As the program leaves them, before its end word itself resets any. */
   readonly finalModes: FinalModes;
+  /** By modal group of G codes (`G_GROUP`): the line that last set it, 1-based; 0 where none has. */
+  readonly setAt: readonly number[];
   /** Every line up to the program's end was read. */
   readonly complete: boolean;
   readonly notChecked: readonly string[];
@@ -54,6 +57,7 @@ export function traceProgram(file: string, text: string, machine: Machine, start
     findings,
     blocks: state.blocks,
     finalModes: { ...modes },
+    setAt: run.setAt,
     complete,
     notChecked,
   };
@@ -69,6 +73,8 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
     here: NOWHERE,
     line: 0,
     placed: false,
+    setAt: Array.from({ length: G_GROUPS }, () => 0),
+    unasked: modesAsked(machine, codes),
     cutting: false,
     moves: [],
     events: [],

@@ -51,6 +51,10 @@ export interface Run {
   line: number;
   /** A place in the program's own frame has been named. */
   placed: boolean;
+  /** By modal group of G codes: the line that last set it, 1-based; 0 where none has. */
+  readonly setAt: number[];
+  /** Modes that no move has hung on yet, as bits of their groups. */
+  unasked: number;
   /** A cutting move has been made. */
   cutting: boolean;
   readonly moves: TracedMove[];

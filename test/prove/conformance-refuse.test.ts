@@ -14,7 +14,7 @@ interface Row extends Partial<BenchProgram> {
   readonly code?: string;
 }
 
-const inch = { machine: post('inch-bench-mill'), modes: 'G20 G17 G90 G94 G54', feed: 'F10' };
+const inch = { machine: post('inch-bench-mill'), modes: 'G20 G17 G40 G61 G90 G94 G54', feed: 'F10' };
 
 const ERRORS: readonly Row[] = [
   { ref: '§3.3.2.1, App. E', wrong: ['G0 X.', 'G0 X--5', 'G0 X1e-3', 'G0 X1.2.3'] },

@@ -12,7 +12,7 @@ describe('a plain program', () => {
   }
   const lines = [
     '%',
-    'G21 G17 G90 G94 G54',
+    'G21 G17 G40 G61 G90 G94 G54',
     'T1 M6',
     'G43 H1',
     'S1000',

@@ -18,7 +18,7 @@ export interface BenchProgram {
   readonly lines: readonly string[];
   /** Where it stands before the first of them. */
   readonly at?: string;
-  /** Words in place of `G21 G17 G90 G94 G54`. */
+  /** Words in place of `G21 G17 G40 G61 G90 G94 G54`. */
   readonly modes?: string;
   readonly feed?: string;
   readonly machine?: Machine;
@@ -29,7 +29,7 @@ export function traceLines({ lines, at, modes, feed, machine, start }: BenchProg
   const read = machine ?? post('bench-mill');
   const text = [
     '%',
-    modes ?? 'G21 G17 G90 G94 G54',
+    modes ?? 'G21 G17 G40 G61 G90 G94 G54',
     'T1 M6',
     `G43 H1 ${feed ?? 'F100'}`,
     `G0 ${at ?? 'X0 Y0 Z0'}`,
