@@ -38,6 +38,10 @@ export const CHECK_CODES = {
     guards: 'a mode that is left to what the controller remembers from the last program',
     blind: 'what it remembers',
   },
+  'prove.work-offset': {
+    guards: 'programs of one job that count from different zeros',
+    blind: 'whether each zero was set, and set at the same place for every cutter',
+  },
   'prove.gouge': {
     guards: 'metal of the wheel cut away',
     blind: 'bending, runout beyond the stated cutting diameter, play of the slides',
@@ -98,6 +102,10 @@ export const CHECK_CODES = {
   'prove.spindle': {
     guards: 'cutting with the spindle still or turning backwards',
     blind: 'a spindle that is switched by hand',
+  },
+  'prove.stopped-low': {
+    guards: 'a spindle stopped, a cutter changed or hands asked for while the cutter stands low',
+    blind: 'a stop by hand, by a switch or by a broken cable',
   },
   'prove.spindle-limits': {
     guards: 'spindle speeds that this machine does not run',

@@ -13,7 +13,7 @@ import type { Finding } from './proof.ts';
 const GAP = 10 * FORM_ERROR;
 
 export function checkFast(evidence: Evidence): Finding[] {
-  const fast = fastMoves(evidence.traces, evidence.solids);
+  const fast = fastMoves(evidence.traces, evidence.solids, evidence.input.machine);
   return gathered(
     fast.flatMap((each) => {
       const message = sideways(evidence, each) ?? downwards(evidence, each);

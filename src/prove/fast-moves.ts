@@ -2,7 +2,9 @@
  * Every fast move in the order it is run, with what is asked of it: its path among the known ones, how many were run
  * before it, and whether the spindle stood at the machine's top when its Z is not known.
  */
+import type { Machine } from '../machine/machine.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
+import { goesToTop } from './at-top.ts';
 import type { SolidMoves } from './metal-solids.ts';
 import type { Trace } from './trace-program.ts';
 
@@ -16,7 +18,11 @@ export interface FastMove {
   readonly atTop: boolean;
 }
 
-export function fastMoves(traces: readonly Trace[], { moves: solids }: SolidMoves): FastMove[] {
+export function fastMoves(
+  traces: readonly Trace[],
+  { moves: solids }: SolidMoves,
+  machine: Machine,
+): FastMove[] {
   const moves: FastMove[] = [];
   let before = 0;
   for (const { moves: own, events } of traces) {
@@ -26,7 +32,9 @@ export function fastMoves(traces: readonly Trace[], { moves: solids }: SolidMove
       const move = own[k]!;
       for (; next < events.length && events[next]!.before <= k; next++) {
         const event = events[next]!;
-        atTop = event.kind === 'machine-place' && event.axes.includes('z') ? true : atTop;
+        if (event.kind === 'machine-place' && event.axes.includes('z')) {
+          atTop = goesToTop(event, machine);
+        }
       }
       const path = solids[before] === move ? before : -1;
       if (move.kind === 'rapid') {

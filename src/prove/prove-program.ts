@@ -13,9 +13,11 @@ import { checkFast } from './check-fast.ts';
 import { checkForm } from './check-form.ts';
 import { checkLoose } from './check-loose.ts';
 import { checkObstacles } from './check-obstacles.ts';
+import { checkOffset } from './check-offset.ts';
 import { checkOrder } from './check-order.ts';
 import { checkPlace } from './check-place.ts';
 import { checkSpindle } from './check-spindle.ts';
+import { checkStops } from './check-stops.ts';
 import { checkTravel } from './check-travel.ts';
 import { gatherEvidence, type Evidence } from './evidence.ts';
 import { notChecked } from './not-checked.ts';
@@ -32,6 +34,8 @@ const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [
   checkObstacles,
   checkDepth,
   checkSpindle,
+  checkStops,
+  checkOffset,
   checkTravel,
   checkArcs,
   checkLoose,

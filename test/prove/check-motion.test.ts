@@ -231,7 +231,27 @@ describe('the end', () => {
   it('refuses one that leaves the cutter down', () => {
     const end = lineOf('M5');
     const proof = prove(GOOD.toSpliced(end - 1, 3, 'G0 Z2', 'M5'));
-    expect(errorsOf(proof)).toEqual(['prove.left-on']);
+    expect(errorsOf(proof)).toEqual(['prove.stopped-low', 'prove.left-on']);
     expect(findingOf(proof, 'prove.left-on').message).toMatch(/Z 2 mm.*5 mm/);
+  });
+
+  it('refuses one whose height nobody knows', () => {
+    const end = lineOf('M5');
+    const proof = prove(GOOD.toSpliced(end + 1, 1, 'G53 G0 Z-80'));
+    expect(errorsOf(proof)).toEqual(['prove.left-on']);
+    expect(findingOf(proof, 'prove.left-on').line).toBe(end + 2);
+  });
+});
+
+describe('stops', () => {
+  it('refuses hands asked for, even perhaps, while the cutter is down', () => {
+    const proof = prove(edited(finishing, 0, 'M1'));
+    expect(errorsOf(proof)).toEqual(['prove.stopped-low']);
+    expect(findingOf(proof, 'prove.stopped-low').line).toBe(finishing + 1);
+  });
+
+  it('lets the spindle change its speed there, and stop above', () => {
+    expect(errorsOf(prove(edited(finishing, 0, 'S13000', 'G4 P4')))).toEqual([]);
+    expect(errorsOf(prove(edited(roughing, 0, 'M5', 'M1', 'M3', 'G4 P4')))).toEqual([]);
   });
 });

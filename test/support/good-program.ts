@@ -104,6 +104,7 @@ export function goodLines(options: GoodOptions = {}): string[] {
     ...pen.rapid({ z: 5 }),
     'M5',
     'G53 G0 Z0',
+    'G49',
     'G90 G94 G40 G80 G61',
     'M2',
     '%',
