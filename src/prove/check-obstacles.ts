@@ -3,6 +3,7 @@
  * of them has; a fast move may go anywhere between its ends where the machine does not run it straight.
  */
 import type { Cutter, Obstacle } from '../cutting/setup.ts';
+import type { TracedMove } from '../motion/traced-move.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, lengthText } from './finding-at.ts';
 import { pathDistance } from './metal-distance.ts';
@@ -16,15 +17,48 @@ interface SpindlePart {
   readonly from: number;
 }
 
+/** Each obstacle once, at the first move that meets it: there the cutter breaks. */
 export function checkObstacles(evidence: Evidence): Finding[] {
-  return evidence.input.setup.obstacles.flatMap((obstacle) => {
-    let worst: { readonly found: Finding; readonly depth: number } | undefined;
-    for (let i = 0; i < evidence.solids.count; i++) {
-      const met = meet(evidence, i, obstacle);
-      worst = met !== undefined && met.depth > (worst?.depth ?? 0) ? met : worst;
+  const { obstacles } = evidence.input.setup;
+  const descents = obstacles.length === 0 ? [] : descentsOf(evidence);
+  return obstacles.flatMap((obstacle) => {
+    const { count } = evidence.solids;
+    let met: Finding | undefined;
+    let at = 0;
+    for (; at < count && met === undefined; at++) {
+      met = meet(evidence, at, obstacle);
     }
-    return worst === undefined ? [] : [worst.found];
+    for (const { move, before } of descents) {
+      const landed = before < at || met === undefined ? land(evidence, move, obstacle) : undefined;
+      if (landed !== undefined) {
+        return [landed];
+      }
+    }
+    return met === undefined ? [] : [met];
   });
+}
+
+/** A move that comes from a height or place that is not known, as from the machine's top, to one that is. */
+interface Descent {
+  readonly move: TracedMove;
+  /** How many moves of known places were made before it. */
+  readonly before: number;
+}
+
+function descentsOf({ moves, solids }: Evidence): Descent[] {
+  const descents: Descent[] = [];
+  if (solids.count === moves.length) {
+    return descents;
+  }
+  let before = 0;
+  for (const move of moves) {
+    if (solids.moves[before] === move) {
+      before += 1;
+    } else if (move.to.x !== null && move.to.y !== null && move.to.z !== null) {
+      descents.push({ move, before });
+    }
+  }
+  return descents;
 }
 
 export function spindleParts(evidence: Evidence, cutter: Cutter): readonly SpindlePart[] {
@@ -36,37 +70,55 @@ export function spindleParts(evidence: Evidence, cutter: Cutter): readonly Spind
   ];
 }
 
-/** How far the spindle and what it holds go into an obstacle on one move. */
-function meet(evidence: Evidence, i: number, obstacle: Obstacle) {
+function meet(evidence: Evidence, i: number, obstacle: Obstacle): Finding | undefined {
   const low = lowOf(evidence.solids, i);
-  if (low >= obstacle.toZ) {
-    return undefined;
-  }
-  const cutter = evidence.cutterOf(evidence.solids.moves[i]!);
+  return low < obstacle.toZ
+    ? deepest(evidence, evidence.solids.moves[i]!, obstacle, low, distanceTo(evidence, i, obstacle))
+    : undefined;
+}
+
+/** Of a descent only its end is known: where it comes down. */
+function land(evidence: Evidence, move: TracedMove, obstacle: Obstacle): Finding | undefined {
+  const { x, y, z } = move.to;
+  return z !== null && z < obstacle.toZ
+    ? deepest(evidence, move, obstacle, z, Math.hypot((x ?? 0) - obstacle.x, (y ?? 0) - obstacle.y))
+    : undefined;
+}
+
+/** The part of the spindle that goes deepest into an obstacle, whose middle the axis passes at a distance. */
+function deepest(
+  evidence: Evidence,
+  move: TracedMove,
+  obstacle: Obstacle,
+  low: number,
+  distance: number,
+): Finding | undefined {
+  const cutter = evidence.cutterOf(move);
   if (cutter === undefined) {
     return undefined;
   }
-  const away = distanceTo(evidence, i, obstacle) - obstacle.radius;
-  let worst: { readonly found: Finding; readonly depth: number } | undefined;
-  for (const part of spindleParts(evidence, cutter)) {
-    const depth = part.radius - away;
-    if (low + part.from < obstacle.toZ && depth > evidence.lastDigit && depth > (worst?.depth ?? 0)) {
-      worst = { found: hit(evidence, i, part, obstacle, away), depth };
-    }
+  const away = distance - obstacle.radius;
+  const widest = Math.max(cutter.diameter, cutter.shank, evidence.input.machine.limits.nut.diameter) / 2;
+  if (widest - away <= evidence.lastDigit) {
+    return undefined;
   }
-  return worst;
+  let worst: SpindlePart | undefined;
+  for (const part of spindleParts(evidence, cutter)) {
+    const isIn = low + part.from < obstacle.toZ && part.radius - away > evidence.lastDigit;
+    worst = isIn && part.radius > (worst?.radius ?? 0) ? part : worst;
+  }
+  return worst === undefined ? undefined : hit(move, worst, obstacle, away);
 }
 
-function hit({ solids }: Evidence, i: number, part: SpindlePart, obstacle: Obstacle, away: number): Finding {
+function hit(move: TracedMove, part: SpindlePart, obstacle: Obstacle, away: number): Finding {
   const { name, toZ, x, y } = obstacle;
-  return findingAt(solids.moves[i], {
+  return findingAt(move, {
     code: 'prove.obstacle',
     message:
       `the ${part.name} (radius ${lengthText(part.radius)}) passes ${lengthText(Math.max(0, away))} from the ${name} at ` +
       `X ${lengthText(x)} Y ${lengthText(y)}, which stands up to Z ${lengthText(toZ)}`,
     hint: `Move the ${name}, or go round or over it.`,
-    x: solids.x1[i]!,
-    y: solids.y1[i]!,
+    ...(move.to.x === null || move.to.y === null ? {} : { x: move.to.x, y: move.to.y }),
   });
 }
 
