@@ -147,6 +147,10 @@ export const CHECK_CODES = {
     guards: 'a slot deeper than the cutter is wide, as when finishing runs before roughing',
     blind: 'wear, and the finer rules of load that the passes were planned by',
   },
+  'prove.chip': {
+    guards: 'feeds and spindle speeds far from what a cutter bears in this material, or so slow that it rubs',
+    blind: 'what suits it best, runout, and a material that is not the one that was said',
+  },
 } as const satisfies Record<string, CheckText>;
 
 export type CheckCode = keyof typeof CHECK_CODES;

@@ -11,7 +11,7 @@ export function notChecked(evidence: Evidence): string[] {
     'how strongly the blank is held',
     `that zero was set on the wheel's axis and at the right height`,
     'feed and speed overrides turned by hand',
-    `whether speeds and feeds suit cutter and material: only the machine's limits are held`,
+    'whether speeds and feeds suit cutter and material well: only what no cutter bears, and the limits of the machine, are held',
   ]);
   if (setup.zeroAt === undefined) {
     said.add(

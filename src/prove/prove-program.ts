@@ -6,6 +6,7 @@
  *       for certain, 'refuse' where any check found an error.
  */
 import { checkArcs } from './check-arcs.ts';
+import { checkChip } from './check-chip.ts';
 import { checkDepth } from './check-depth.ts';
 import { checkEnd } from './check-end.ts';
 import { checkEntry } from './check-entry.ts';
@@ -38,6 +39,7 @@ const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [
   checkOffset,
   checkTravel,
   checkArcs,
+  checkChip,
   checkLoose,
   checkOrder,
   checkEnd,

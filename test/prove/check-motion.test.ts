@@ -64,7 +64,7 @@ describe('the way into metal', () => {
     const { feedHighest } = machine().limits;
     const fast = hole.map((line) => line.replace('F50', `F${String(2 * feedHighest)}`));
     const proof = prove(edited(roughing, 0, ...fast), plunging);
-    expect(errorsOf(proof)).toEqual(['prove.feed-limits']);
+    expect(errorsOf(proof)).toEqual(['prove.feed-limits', 'prove.chip']);
     expect(findingOf(proof, 'prove.feed-limits').line).toBe(roughing + 3);
   });
 
@@ -176,7 +176,22 @@ describe('spindle and feed', () => {
   it('refuses speeds and feeds this machine does not run', () => {
     expect(errorsOf(prove(edited(lineOf('S12000'), 1, 'S30000')))).toEqual(['prove.spindle-limits']);
     const fast = GOOD.map((line, k) => (k === finishing + 9 ? line.replace('F150', 'F5000') : line));
-    expect(errorsOf(prove(fast))).toEqual(['prove.feed-limits']);
+    expect(errorsOf(prove(fast))).toEqual(['prove.feed-limits', 'prove.chip']);
+  });
+
+  it('refuses an edge faster than the material bears [leaded brass: 100 m/min in the table, four times that at most]', () => {
+    const { limits } = machine();
+    const wild = { machine: { ...machine(), limits: { ...limits, spindleHighest: 300000 } } };
+    const proof = prove(edited(lineOf('S12000'), 1, 'S220000'), wild);
+    expect(errorsOf(proof)).toEqual(['prove.chip']);
+    // pi * 0.6 mm * 220000 / 1000
+    expect(findingOf(proof, 'prove.chip').message).toMatch(/414\.7 m\/min.*400\.0 m\/min/);
+  });
+
+  it('warns of a spindle that hardly turns the edge', () => {
+    const proof = prove(GOOD.map((line) => line.replace('S12000', 'S800').replace('F150', 'F10')));
+    expect(errorsOf(proof)).toEqual([]);
+    expect(findingOf(proof, 'prove.chip')).toMatchObject({ severity: 'warning' });
   });
 
   it('refuses a cutter that the set-up does not have', () => {
