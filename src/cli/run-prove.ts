@@ -10,8 +10,8 @@ import { readMachine } from '../machine/read-machine.ts';
 import type { Machine } from '../machine/machine.ts';
 import { CHECK_CODES } from '../prove/check-codes.ts';
 import { proofJson } from '../prove/proof-json.ts';
-import type { Proof } from '../prove/proof.ts';
-import { proveProgram } from '../prove/prove-program.ts';
+import type { Proof, ProofInput } from '../prove/proof.ts';
+import { proveSet, type SetProof } from '../prove/prove-set.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
 import { changeFolder, isThere, readText } from './files.ts';
@@ -48,11 +48,7 @@ export function runProve(files: readonly string[], options: ProveOptions): Exit 
   const programs = texts.map(({ file, text }) => ({ file, text: text.ok ? text.value : '' }));
   const { job, machine } = understood.value;
   const bare = { programs, machine, setup: job.setup };
-  const held = proveProgram({ ...bare, ...targetOf(job) });
-  // What never leaves the air, as the walk-round, is not held against a wheel it does not cut.
-  const cuts = held.moves.some(({ kind }) => kind !== 'rapid');
-  const proof = cuts ? held : proveProgram(bare);
-  return answer(files, proof, machine, options, terminal);
+  return answer(files, proveSet({ ...bare, ...targetOf(job) }), machine, options, terminal);
 }
 
 function understand(jobFile: string): Outcome<{ job: Job; machine: Machine }> {
@@ -78,7 +74,7 @@ function understand(jobFile: string): Outcome<{ job: Job; machine: Machine }> {
     : machine;
 }
 
-function targetOf(job: Job): Pick<Parameters<typeof proveProgram>[0], 'target'> {
+function targetOf(job: Job): Pick<ProofInput, 'target'> {
   const form = wheelForm(job.wheel);
   if (!form.ok) {
     return {};
@@ -94,11 +90,12 @@ function targetOf(job: Job): Pick<Parameters<typeof proveProgram>[0], 'target'> 
 
 function answer(
   files: readonly string[],
-  proof: Proof,
+  set: SetProof,
   machine: Machine,
   options: ProveOptions,
   terminal: Terminal,
 ): Exit {
+  const { proof } = set;
   if (options.moves !== undefined && isThere(options.moves) && !/\.(?:jsonl|ndjson)$/i.test(options.moves)) {
     process.stderr.write(
       `${options.moves}: is there already and its name does not end in .jsonl; it is kept as it is.\n`,
@@ -124,19 +121,23 @@ function answer(
     const text = showProblem({ ...finding, code: 'post.cannot-say', at });
     process.stderr.write(`${finding.severity === 'error' ? terminal.danger(text) : text}\n`);
   }
-  terminal.say(verdictWords(files.length, proof, machine));
+  terminal.say(verdictWords(set, machine));
   return proof.verdict === 'pass' ? 0 : 1;
 }
 
-function verdictWords(programs: number, proof: Proof, machine: Machine): string {
+function verdictWords({ proof, cutting, walks }: SetProof, machine: Machine): string {
   const words = {
     pass: 'Passed.',
     refuse: 'Refused: do not run it.',
     unread: 'Not read to its end: do not run it.',
   };
+  const programs = [
+    ...(cutting > 0 ? [cutting === 1 ? '1 program' : `${cutting} programs`] : []),
+    ...(walks > 0 ? [walks === 1 ? '1 that cuts nothing' : `${walks} that cut nothing`] : []),
+  ].join(' and ');
   return [
     words[proof.verdict],
-    `${programs === 1 ? '1 program' : `${programs} programs`} for ${machine.name}, ${proof.blocks} blocks, ${figureWords(proof)}`,
+    `${programs} for ${machine.name}, ${proof.blocks} blocks, ${figureWords(proof)}`,
     'Not checked:',
     ...proof.notChecked.map((line) => `  ${line}`),
   ].join('\n');

@@ -38,6 +38,10 @@ export const CHECK_CODES = {
     guards: 'a mode that is left to what the controller remembers from the last program',
     blind: 'what it remembers',
   },
+  'prove.missing': {
+    guards: 'a set of programs from which one is missing, and parts of the wheel that none of them cuts',
+    blind: 'programs of another job or of another day among them',
+  },
   'prove.work-offset': {
     guards: 'programs of one job that count from different zeros',
     blind: 'whether each zero was set, and set at the same place for every cutter',

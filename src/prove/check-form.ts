@@ -1,5 +1,6 @@
 /**
  * Form: the cut metal against the exact outline. Gouge, metal left on flank, tip and root, the rolling law, bore, crossings.
+ * While programs of the set are missing, metal left is not held against those that are here.
  * Allowed is the form error plus one unit of the machine file's last digit.
  */
 import { degrees } from '../base/units.ts';
@@ -7,6 +8,7 @@ import type { CheckCode } from './check-codes.ts';
 import { REGION } from './deviation-stations.ts';
 import type { Worst } from './deviation-contour.ts';
 import type { Evidence } from './evidence.ts';
+import { missingPrograms } from './check-missing.ts';
 import { findingAt, lengthText, micronText } from './finding-at.ts';
 import type { Finding } from './proof.ts';
 import type { RollingReading } from './rolling-law.ts';
@@ -20,8 +22,12 @@ export function checkForm(evidence: Evidence): Finding[] {
   const { teeth, bore, window, inside, allowed } = figures;
   const isSheet = input.setup.shape.kind === 'sheet';
   const left = teeth.atBottom.left;
+  // Metal that a missing program would cut is no fault of those that are here: that one is missing has been said.
+  const isWhole = missingPrograms(evidence.traces).length === 0;
   const over = (worst: Worst, code: CheckCode, what: string, hint: string, most = allowed): Finding[] =>
-    worst.value > most ? [outOfForm(evidence, worst, code, what, most, hint)] : [];
+    worst.value > most && (isWhole || hint !== LEFT)
+      ? [outOfForm(evidence, worst, code, what, most, hint)]
+      : [];
   return [
     ...insideWheel(inside),
     ...over(teeth.atTop.gouge, 'prove.gouge', `tooth ${toothOf(teeth.atTop.gouge)} is cut into`, GOUGE),

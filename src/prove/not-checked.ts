@@ -1,8 +1,10 @@
 /** What no reading of a program can tell: said with every verdict, never empty. */
 import type { Evidence } from './evidence.ts';
+import type { Trace } from './trace-program.ts';
 
-export function notChecked(evidence: Evidence): string[] {
-  const { input, traces } = evidence;
+/** `named`: the programs that are spoken of, which may be more than those that cut. */
+export function notChecked(evidence: Evidence, named: readonly Trace[]): string[] {
+  const { input } = evidence;
   const { setup, target } = input;
   const said = new Set([
     'the cutters: runout, wear, length, and that each is the one the program calls for',
@@ -28,8 +30,28 @@ export function notChecked(evidence: Evidence): string[] {
       said.add('the hole that was there before: its size and place');
     }
   }
-  for (const trace of traces) {
-    trace.notChecked.forEach((sentence) => said.add(sentence));
+  for (const sentence of notReadOf(named)) {
+    said.add(sentence);
   }
   return [...said];
+}
+
+/** What reading itself leaves open, over all programs: each thing once. */
+function notReadOf(traces: readonly Trace[]): string[] {
+  const alone = traces.reduce((sum, trace) => sum + trace.alone, 0);
+  const passedOver = traces.reduce((sum, trace) => sum + trace.passedOver, 0);
+  return [
+    'what the controller itself does otherwise than its machine file says',
+    ...(alone > 0
+      ? [`${String(alone)} % line${alone === 1 ? '' : 's'}: the second reader cannot hold them`]
+      : []),
+    ...(passedOver > 0
+      ? [
+          `${String(passedOver)} line${passedOver === 1 ? '' : 's'} that begin${passedOver === 1 ? 's' : ''} with /: passed over, as the switch was said to be on`,
+        ]
+      : []),
+    ...traces.flatMap((trace) =>
+      trace.complete ? [] : [`everything from line ${String(trace.lastRead)} of ${trace.file} on`],
+    ),
+  ];
 }

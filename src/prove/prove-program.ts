@@ -13,6 +13,7 @@ import { checkEntry } from './check-entry.ts';
 import { checkFast } from './check-fast.ts';
 import { checkForm } from './check-form.ts';
 import { checkLoose } from './check-loose.ts';
+import { checkMissing } from './check-missing.ts';
 import { checkObstacles } from './check-obstacles.ts';
 import { checkOffset } from './check-offset.ts';
 import { checkOrder } from './check-order.ts';
@@ -24,10 +25,11 @@ import { gatherEvidence, type Evidence } from './evidence.ts';
 import { notChecked } from './not-checked.ts';
 import type { Finding, Proof, ProofInput } from './proof.ts';
 import { proofFigures } from './proof-figures.ts';
-import { traceProgram } from './trace-program.ts';
+import { traceProgram, type Trace } from './trace-program.ts';
 
 /** Every check, in the order its findings are given. */
 const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [
+  checkMissing,
   checkForm,
   checkPlace,
   checkFast,
@@ -46,7 +48,18 @@ const CHECKS: readonly ((evidence: Evidence) => readonly Finding[])[] = [
 ];
 
 export function proveProgram(input: ProofInput): Proof {
-  const traces = input.programs.map(({ file, text }) => traceProgram(file, text, input.machine));
+  return proveTraces(
+    input,
+    input.programs.map(({ file, text }) => traceProgram(file, text, input.machine)),
+  );
+}
+
+/** The same of programs that are read already; `named`: all that are spoken of together, in what was not checked. */
+export function proveTraces(
+  input: ProofInput,
+  traces: readonly Trace[],
+  named: readonly Trace[] = traces,
+): Proof {
   const evidence = gatherEvidence(input, traces);
   const findings = [
     ...traces.flatMap((trace) => trace.findings),
@@ -58,7 +71,7 @@ export function proveProgram(input: ProofInput): Proof {
   return {
     verdict: read ? (refused ? 'refuse' : 'pass') : 'unread',
     findings,
-    notChecked: notChecked(evidence),
+    notChecked: notChecked(evidence, named),
     moves: evidence.moves,
     blocks: traces.reduce((sum, trace) => sum + trace.blocks, 0),
     extents: evidence.extents,

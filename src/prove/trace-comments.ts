@@ -4,7 +4,7 @@
  *
  * In: "Cutter 2", "Set the spindle to 12000 turns a minute …", "Switch the spindle off", each at a comment's beginning.
  * They hold from the next stop for hands, if nothing moves before it; where one program runs for one cutter, its number
- * holds at once, before anything has moved.
+ * holds at once, before anything has moved. Also which program of a set this is, as its head says.
  */
 import { spindleOf } from './modes.ts';
 import { loadCutter } from './trace-settings.ts';
@@ -19,6 +19,8 @@ export interface ByHand {
 const CUTTER = /^cutter (\d{1,4})$/i;
 const SPEED = /^set the spindle to (\d{1,6}(?:\.\d*)?) turns a minute/i;
 const STILL = /^switch the spindle off/i;
+/** At the head of a program that is one of several. */
+const PART = /^cutting program\W+number (\d{1,3}) of (\d{1,3})$/i;
 const MESSAGE = /^\s*m\s*s\s*g\s*,/i;
 
 export function readComments(run: Run, comments: readonly string[], byHand: ByHand): void {
@@ -29,12 +31,22 @@ export function readComments(run: Run, comments: readonly string[], byHand: ByHa
     if (isMessage) {
       happen(run, { kind: 'message', text });
     }
+    if (run.part === undefined && run.moves.length === 0) {
+      readPart(run, text);
+    }
     if (cutters.change !== 'automatic' && cutters.words === 'none') {
       readCutter(run, text, byHand);
     }
     if (spindle.run === 'by-hand') {
       readSpeed(text, byHand);
     }
+  }
+}
+
+function readPart(run: Run, text: string): void {
+  const [, number, of] = PART.exec(text) ?? [];
+  if (number !== undefined && of !== undefined) {
+    run.part = { number: Number(number), of: Number(of), line: run.line };
   }
 }
 

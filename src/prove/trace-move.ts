@@ -1,7 +1,7 @@
 /**
  * G0 to G3: from the words of a block to a traced move. Frame: the program's; mm, mm/min, radians.
  */
-import type { Block } from './block.ts';
+import { BIT, type Block } from './block.ts';
 import { spindleOf } from './modes.ts';
 import { sayAssumed } from './trace-assumed.ts';
 import { readArc, type ReadArc } from './trace-arc.ts';
@@ -31,17 +31,11 @@ export function runMove(
   }
   run.placed = true;
   sayAssumed(run, motion);
-  if (motion !== 'G0' && !run.cutting) {
-    run.cutting = true;
-    if (!isLengthKnown(run)) {
-      remark(
-        run,
-        'prove.length-offset',
-        'error',
-        "a cutting move before G43 with the cutter's own H",
-        'no H',
-      );
-    }
+  // A height that is named without the cutter's length is a height nobody knows, fast or not.
+  if (!run.lengthAsked && !isLengthKnown(run) && (motion !== 'G0' || (axes & BIT.Z) !== 0)) {
+    run.lengthAsked = true;
+    const what = motion === 'G0' ? 'a height is named' : 'a cutting move';
+    remark(run, 'prove.length-offset', 'error', `${what} before G43 with the cutter's own H`, 'no H');
   }
   const to = placeOf(run, block, axes);
   if (motion === 'G0') {

@@ -17,7 +17,7 @@ import { modesAsked } from './trace-assumed.ts';
 import { runBlock } from './trace-block.ts';
 import { handsDone, readComments, type ByHand } from './trace-comments.ts';
 import { checkEnd, checkLine, checkNumber, readLabel, readPercent, type FileState } from './trace-file.ts';
-import { countRemarks, unread, type Refusal, type Run, type TracedEvent } from './trace-run.ts';
+import { countRemarks, unread, type Part, type Refusal, type Run, type TracedEvent } from './trace-run.ts';
 
 export interface Trace {
   readonly file: string;
@@ -32,7 +32,13 @@ export interface Trace {
   readonly setAt: readonly number[];
   /** Every line up to the program's end was read. */
   readonly complete: boolean;
-  readonly notChecked: readonly string[];
+  /** Which program of a set this is, where its head says so. */
+  readonly part: Part | undefined;
+  /** Lines that the second reader could not hold, and lines that begin with / and were passed over. */
+  readonly alone: number;
+  readonly passedOver: number;
+  /** The line at which reading ended or stopped. */
+  readonly lastRead: number;
 }
 
 /** What may be known before the program's first line. */
@@ -49,7 +55,6 @@ export function traceProgram(file: string, text: string, machine: Machine, start
   const complete = runLines(run, readLines(text, machine, run.codes), start, state);
   countRemarks(run);
   const { moves, events, findings, modes } = run;
-  const notChecked = notCheckedOf(run, state, complete);
   return {
     file,
     moves,
@@ -59,7 +64,10 @@ export function traceProgram(file: string, text: string, machine: Machine, start
     finalModes: { ...modes },
     setAt: run.setAt,
     complete,
-    notChecked,
+    part: run.part,
+    alone: state.alone,
+    passedOver: state.passedOver,
+    lastRead: run.line,
   };
 }
 
@@ -72,10 +80,11 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
     modes: powerOn(machine, codes, start.cutter ?? null),
     here: NOWHERE,
     line: 0,
+    part: undefined,
     placed: false,
     setAt: Array.from({ length: G_GROUPS }, () => 0),
     unasked: modesAsked(machine, codes),
-    cutting: false,
+    lengthAsked: false,
     moves: [],
     events: [],
     findings: [],
@@ -182,22 +191,4 @@ function passesOver(run: Run, start: TraceStart): boolean | Refusal {
   return start.skipSwitch === undefined
     ? unread('a line that begins with /: whether it is run depends on a switch of the machine')
     : start.skipSwitch === 'on';
-}
-
-function notCheckedOf(run: Run, state: FileState, complete: boolean): readonly string[] {
-  const said = ['what the controller itself does otherwise than its machine file says'];
-  if (state.alone > 0) {
-    said.push(
-      `${String(state.alone)} % line${state.alone === 1 ? '' : 's'}: the second reader cannot hold them`,
-    );
-  }
-  if (state.passedOver > 0) {
-    said.push(
-      `${String(state.passedOver)} lines that begin with /: passed over, as the switch was said to be on`,
-    );
-  }
-  if (!complete) {
-    said.push(`everything from line ${String(run.line)} on`);
-  }
-  return said;
 }

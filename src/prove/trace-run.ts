@@ -42,6 +42,13 @@ export interface Refusal {
   readonly message: string;
 }
 
+/** Which program of how many this is, and the line that says so. */
+export interface Part {
+  readonly number: number;
+  readonly of: number;
+  readonly line: number;
+}
+
 export interface Run {
   readonly file: string;
   readonly machine: Machine;
@@ -49,14 +56,16 @@ export interface Run {
   readonly modes: ModalState;
   here: Here;
   line: number;
+  /** Where a comment at its head tells. */
+  part: Part | undefined;
   /** A place in the program's own frame has been named. */
   placed: boolean;
   /** By modal group of G codes: the line that last set it, 1-based; 0 where none has. */
   readonly setAt: number[];
   /** Modes that no move has hung on yet, as bits of their groups. */
   unasked: number;
-  /** A cutting move has been made. */
-  cutting: boolean;
+  /** It has been said that a move hangs on a length that is not on. */
+  lengthAsked: boolean;
   readonly moves: TracedMove[];
   readonly events: TracedEvent[];
   readonly findings: Finding[];

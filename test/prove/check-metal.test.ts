@@ -121,7 +121,9 @@ describe('crossings', () => {
     expect(wide.figures!.crossingGouge).toBeCloseTo(0.005, 4);
     const narrow = prove(edited(end, 0, ...round(0.095)), { target });
     expect(narrow.figures!.crossingLeft).toBeCloseTo(0.005, 4);
-    expect(errorsOf(prove(GOOD, { target }))).toEqual(['prove.crossing']);
+    const uncut = prove(GOOD, { target });
+    expect(errorsOf(uncut)).toEqual(['prove.missing', 'prove.crossing']);
+    expect(findingOf(uncut, 'prove.missing').message).toBe('nothing here cuts the crossings');
   });
 
   it('come last, or a warning says so', () => {
