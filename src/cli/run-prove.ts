@@ -131,10 +131,9 @@ function verdictWords({ proof, cutting, walks }: SetProof, machine: Machine): st
     refuse: 'Refused: do not run it.',
     unread: 'Not read to its end: do not run it.',
   };
-  const programs = [
-    ...(cutting > 0 ? [cutting === 1 ? '1 program' : `${cutting} programs`] : []),
-    ...(walks > 0 ? [walks === 1 ? '1 that cuts nothing' : `${walks} that cut nothing`] : []),
-  ].join(' and ');
+  const counted = (count: number): string => (count === 1 ? '1 program' : `${count} programs`);
+  const beside = walks === 1 ? ' and 1 that cuts nothing' : ` and ${walks} that cut nothing`;
+  const programs = cutting === 0 ? counted(walks) : `${counted(cutting)}${walks === 0 ? '' : beside}`;
   return [
     words[proof.verdict],
     `${programs} for ${machine.name}, ${proof.blocks} blocks, ${figureWords(proof)}`,

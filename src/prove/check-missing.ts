@@ -24,7 +24,7 @@ export function checkMissing(evidence: Evidence): Finding[] {
   const message =
     numbers.length === 0
       ? without
-      : `of the ${String(of)} programs of this job number ${wordsOf(numbers)} ${numbers.length === 1 ? 'is' : 'are'} not here${without === '' ? '' : `: ${without}`}`;
+      : `of the ${String(of)} programs of this job ${numbers.length === 1 ? 'number' : 'numbers'} ${wordsOf(numbers)} ${numbers.length === 1 ? 'is' : 'are'} not here${without === '' ? '' : `: ${without}`}`;
   return [
     {
       code: 'prove.missing',
