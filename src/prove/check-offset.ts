@@ -2,13 +2,19 @@
  * Work offsets: the programs of one job must all count from one zero, since the metal carries over from one to the next. A
  * change within a program is refused by the reader.
  */
+import type { Machine } from '../machine/machine.ts';
 import type { Evidence } from './evidence.ts';
 import { G_GROUP } from './modes-codes.ts';
 import type { Finding } from './proof.ts';
 import type { Trace } from './trace-program.ts';
 
 export function checkOffset({ input, traces }: Evidence): Finding[] {
-  const ours = input.machine.words.positions.workOffset;
+  return offsetFindings(input.machine, traces);
+}
+
+/** Also asked of programs that are not proved together, as a walk-round and those it is to make safe. */
+export function offsetFindings(machine: Machine, traces: readonly Trace[]): Finding[] {
+  const ours = machine.words.positions.workOffset;
   const used = traces.filter(({ moves, finalModes }) => moves.length > 0 && finalModes.work !== undefined);
   // The zero that was touched off is the machine file's, where any of them uses it; else that of the first.
   const wanted = used.find(({ finalModes }) => finalModes.work === ours) ?? used[0];

@@ -2,8 +2,9 @@
  * Programs as somebody names them, in the order they are run: those that cut are held together against what they are to
  * make; one that never leaves the air, as the walk-round, is proved by itself and cuts no part of it.
  */
+import { offsetFindings } from './check-offset.ts';
 import type { Extents } from './extents.ts';
-import type { Proof, ProofInput } from './proof.ts';
+import type { Finding, Proof, ProofInput } from './proof.ts';
 import { proveTraces } from './prove-program.ts';
 import { traceProgram, type Trace } from './trace-program.ts';
 
@@ -23,7 +24,27 @@ export function proveSet(input: ProofInput): SetProof {
     ...(cutting.length > 0 ? [proveTraces(input, cutting, traces)] : []),
     ...walks.map((trace) => proveTraces(bare, [trace], traces)),
   ];
-  return { proof: proofs.reduce(joined), cutting: cutting.length, walks: walks.length };
+  const proof = withStrays(proofs.reduce(joined), strayWalks(input, cutting, walks));
+  return { proof, cutting: cutting.length, walks: walks.length };
+}
+
+/** A walk-round from another zero than the cuts shows nothing of where they go. */
+function strayWalks({ machine }: ProofInput, cutting: readonly Trace[], walks: readonly Trace[]): Finding[] {
+  return walks.flatMap((walk) =>
+    offsetFindings(machine, [...cutting, walk]).filter(
+      ({ severity, file }) => severity === 'error' && file === walk.file,
+    ),
+  );
+}
+
+function withStrays(proof: Proof, strays: readonly Finding[]): Proof {
+  return strays.length === 0
+    ? proof
+    : {
+        ...proof,
+        verdict: proof.verdict === 'pass' ? 'refuse' : proof.verdict,
+        findings: [...proof.findings, ...strays],
+      };
 }
 
 /** Read to its end, and nothing in it moves but fast. */

@@ -71,6 +71,12 @@ describe('a walk-round among them', () => {
     expect(errorsOf(proveSet(set(lost)).proof)).toEqual(['prove.length-offset']);
   });
 
+  it('is refused where it counts from another zero than the cuts', () => {
+    const other = walk.map((line) => line.replace('G54', 'G55'));
+    const { proof } = proveSet(set(other, one, two));
+    expect([proof.verdict, ...errorsOf(proof)]).toEqual(['refuse', 'prove.work-offset']);
+  });
+
   it('is refused for its own faults', () => {
     const low = walk.toSpliced(walk.indexOf('Z5'), 1, 'Z2');
     expect(proveSet(set(low, one, two)).proof.verdict).toBe('refuse');
