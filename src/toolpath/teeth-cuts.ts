@@ -224,17 +224,18 @@ function finishingLevels({
   task,
   fine,
   rough,
-  allowance,
+  roughPath,
 }: Teeth): Outcome<{ readonly count: number; readonly why: string }> {
   const { job, machine, heights, form } = task;
   const depth = heights.top - heights.bottom;
-  const roughed = asCut(form, 2 * (rough.radius + allowance));
+  const roughed = asCut(form, 2 * roughPath.distance);
   const finished = asCut(form, fine.cutter.diameter);
   if (!roughed.ok || !finished.ok) {
     return failure([...roughed.problems, ...finished.problems]);
   }
-  const thick = roughed.value.leftAtRoot - finished.value.leftAtRoot;
-  if (thick + allowance > THICK * fine.cutter.diameter) {
+  // How much further in the finishing cutter goes: where both wedge between the flanks, several times what is left on these.
+  const thick = roughed.value.floorRadius + roughPath.distance - rough.radius - finished.value.floorRadius;
+  if (thick > THICK * fine.cutter.diameter) {
     const slot = settingsFor(job, machine, 'finishing', 'slot', 0);
     if (!slot.ok) {
       return slot;

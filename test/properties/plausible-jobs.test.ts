@@ -110,3 +110,11 @@ it('joins the wall of a window within its straight, where round corners leave li
     complaints(small({ wheel, blank, cutters, more: ['zero: plate'], cuts: ['crossings: { cutter: 2 }'] })),
   ).toEqual([]);
 });
+
+it('a finishing cutter that goes on into the wedge of a space, beyond where the roughing one stopped, goes in levels', () => {
+  const wheel = '{ teeth: 7, mate: { leaves: 19 }, module: 2, tooth: 0.52, thickness: 3 }';
+  const blank = '{ material: silver-steel, shape: sheet, size: [28, 28], holding: glue }';
+  const cutters = ['{ diameter: 2, reach: 6, flute: 6 }'];
+  const cuts = ['roughing: { allowance: 0.126 }', 'finishing: { cutter: 1, spring: 0 }'];
+  expect(complaints(small({ wheel, blank, cutters, cuts }))).toEqual([]);
+});
