@@ -23,12 +23,12 @@ export interface DeviationPlate {
   readonly unit: LengthUnit;
 }
 
-const WIDTH = 170;
-const HEIGHT = 68;
-const LEFT = 13;
-const RIGHT = 147;
+const WIDTH = 82;
+const HEIGHT = 60;
+const LEFT = 11;
+const RIGHT = 79;
 const TOP = 9;
-const BOTTOM = 56;
+const BOTTOM = 48;
 
 export function drawDeviation(plate: DeviationPlate): string {
   const { points, allowed, unit } = plate;
@@ -40,7 +40,7 @@ export function drawDeviation(plate: DeviationPlate): string {
   const per = millimetresPer(unit);
   const most =
     1000 * Math.max(allowed * 1.6, ...flank(plate).map(({ deviation }) => Math.abs(deviation) * 1.15));
-  const x = linearScale([first.along / per, last.along / per], [LEFT, RIGHT], 8);
+  const x = linearScale([first.along / per, last.along / per], [LEFT, RIGHT], 6);
   const y = linearScale([-most, most], [BOTTOM, TOP], 5);
   const spots = points.map(({ along, deviation }): Spot => [x.at(along / per), y.at(deviation * 1000)]);
   const band = [y.at(allowed * 1000), y.at(-allowed * 1000)] as const;
@@ -85,12 +85,7 @@ function curve(plate: DeviationPlate, spots: readonly Spot[], { x, y }: { x: Sca
   const label =
     a === undefined || b === undefined || a[1] > TOP + 1 || plate.leftAtRoot === 0
       ? ''
-      : words(
-          `to ${tinyLength(plate.leftAtRoot, plate.unit)} in the corner`,
-          Math.max((a[0] + b[0]) / 2, LEFT + 18),
-          TOP - 4,
-          'middle',
-        );
+      : words(`to ${tinyLength(plate.leftAtRoot, plate.unit)} in the corner`, LEFT + 2, TOP - 4);
   return (
     `<path class="deviation" data-figure="deviation" data-worst="${fixed(worst(plate) * 1000, 3)}" ${scales} d="${runs.map(linePath).join('')}"/>` +
     arrows.join('') +
@@ -144,8 +139,8 @@ function axes(x: Scale, y: Scale, unit: LengthUnit): string {
   return (
     `<path class="line" d="M${LEFT} ${TOP}V${BOTTOM}H${RIGHT}"/><path class="line" d="M${LEFT} ${plain(zero, 3)}H${RIGHT}"/>${ticksX.join('')}${ticksY.join('')}` +
     `<text text-anchor="end" x="${LEFT - 2}" y="${TOP - 4}">µm</text>` +
-    `<text x="${RIGHT + 2.5}" y="${plain((TOP + zero) / 2 + 1, 2)}">metal left</text><text x="${RIGHT + 2.5}" y="${plain(zero + 1, 2)}">exact curve</text><text x="${RIGHT + 2.5}" y="${plain((BOTTOM + zero) / 2 + 1, 2)}">cut away</text>` +
-    `<text text-anchor="end" x="${RIGHT}" y="${BOTTOM + 10}">${shortUnit(unit)} along the outline, from the middle of the space to the tip</text>`
+    `<text class="halo" text-anchor="end" x="${RIGHT - 1}" y="${TOP + 3.4}">metal left</text><text class="halo" text-anchor="end" x="${RIGHT - 1}" y="${BOTTOM - 1.6}">cut away</text>` +
+    `<text text-anchor="end" x="${RIGHT}" y="${BOTTOM + 10}">${shortUnit(unit)} along the outline, from mid-space to the tip</text>`
   );
 }
 

@@ -28,15 +28,20 @@ export interface SizesPlate extends Metal {
 const MARGIN = 3;
 const FOOT = 10;
 
+/** `foot` is drawn under the plate; `tallest` is the most paper the wheel may take, mm. */
 export function drawSizes(
   plate: SizesPlate,
   name: string,
   foot: { readonly height: number; readonly marks: (frame: PlateFrame) => string } = NOTHING,
+  tallest = Infinity,
 ): { readonly svg: string; readonly scale: number } {
   const { form, thickness } = plate;
   const stack = stackWidth(diametersOf(plate).length);
   const room = PAPER - 2 * MARGIN - SECTION_GAP - stack;
-  const scale = scaleToFit(2 * form.outsideRadius + thickness, room);
+  const scale = Math.min(
+    scaleToFit(2 * form.outsideRadius + thickness, room),
+    scaleToFit(2 * form.outsideRadius, tallest),
+  );
   const radius = form.outsideRadius * scale;
   const frame: PlateFrame = {
     left: -radius - MARGIN,

@@ -24,8 +24,8 @@ import { spread } from './spread.ts';
 import { chainPath, drawable } from './svg-path.ts';
 import { coordinate, escapeText, fixed, plain } from './words.ts';
 
-const PICTURE = 112;
-const LABELS = 58;
+const PICTURE = 57;
+const LABELS = 39;
 const LABEL_GAP = 5.2;
 /** Pitches that are seen: a little more than a tooth on each side of the space. */
 const SEEN = 0.85;
@@ -122,10 +122,8 @@ function radii({ form, asCut, job }: SheetFacts, frame: PlateFrame, edge: number
   const rows = [
     { figure: 'tip-radius', name: 'tip', radius: form.outsideRadius },
     { figure: 'pitch-radius', name: 'pitch circle', radius: form.pitchRadius },
-    { figure: 'working-radius', name: 'working flank begins', radius: form.workingRadius },
-    ...(asCut === undefined
-      ? []
-      : [{ figure: 'foot-radius', name: 'foot: cut down to here', radius: asCut.footRadius }]),
+    { figure: 'working-radius', name: 'working flank', radius: form.workingRadius },
+    ...(asCut === undefined ? [] : [{ figure: 'foot-radius', name: 'foot', radius: asCut.footRadius }]),
     { figure: 'root-radius', name: 'root', radius: form.rootRadius },
   ].toSorted((a, b) => b.radius - a.radius);
   const heights = rows.map(
@@ -136,7 +134,7 @@ function radii({ form, asCut, job }: SheetFacts, frame: PlateFrame, edge: number
     const [y, label] = [heights[i] ?? 0, places[i] ?? 0];
     return (
       `<g data-figure="${figure}" data-value="${fixed(radius, 6)}"><path class="line" d="M${plain(edge, 3)} ${plain(y, 3)}h2L${plain(edge + 6, 3)} ${plain(label, 3)}"/>` +
-      `${words(`r ${bareLength(radius, job.length)}`, edge + 7, label + 1)}${words(name, edge + 22, label + 1)}</g>`
+      `${words(`r ${bareLength(radius, job.length)}`, edge + 7, label + 1)}${words(name, edge + 20.5, label + 1)}</g>`
     );
   });
   return lines.join('');

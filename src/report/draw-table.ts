@@ -8,15 +8,16 @@ import { SAME_METAL } from './draw-metal.ts';
 import { drawHeights } from './draw-heights.ts';
 import type { SheetFacts } from './facts.ts';
 import { bareLength } from './lengths.ts';
-import { LIGHT, onWork, PAPER, plateSvg, scaleBar, scaleToFit, type PlateFrame } from './plate.ts';
+import { LIGHT, onWork, plateSvg, scaleBar, scaleToFit, type PlateFrame } from './plate.ts';
 import { coordinate, plain } from './words.ts';
 
 /** Room round the plan for its figures, and for the heights beside it, mm of paper. */
 const LEFT = 12;
 const ABOVE = 9;
 const BELOW = 17;
-const HEIGHTS = 68;
-const PLAN = 80;
+const HEIGHTS = 58;
+const PLAN = 62;
+const BETWEEN = 12;
 
 /** `undefined` where no program was planned. */
 export function drawTable(facts: SheetFacts): { readonly svg: string; readonly scale: number } | undefined {
@@ -27,7 +28,7 @@ export function drawTable(facts: SheetFacts): { readonly svg: string; readonly s
   const scale = scaleToFit(Math.max(box.right - box.left, box.top - box.bottom), PLAN);
   const frame: PlateFrame = {
     left: box.left * scale - LEFT,
-    right: box.left * scale - LEFT + PAPER,
+    right: box.right * scale + BETWEEN + HEIGHTS,
     top: -box.top * scale - ABOVE,
     bottom: -box.bottom * scale + BELOW,
     scale,

@@ -20,6 +20,8 @@ import { capitalised, coordinate, duration, escapeText, numeral, plain } from '.
 
 /** Stock that is shown outside the paths, mm of paper. */
 const STOCK = 2.5;
+/** Width on the sheet, mm of paper. Why: programs, plate and passes stand on one page of A4. */
+const ON_SHEET = 140;
 const LEGEND_LINE = 4.4;
 const COLUMNS = 3;
 
@@ -28,19 +30,20 @@ export interface WorkPlate {
   readonly scale: number;
 }
 
-/** `metal`: drawn here, or already drawn elsewhere in the page. */
+/** `metal`: drawn here with a legend, or already drawn elsewhere in the page, whose table of passes is the legend. */
 export function drawWork(facts: SheetFacts, metal: 'here' | 'elsewhere'): WorkPlate {
   const { paths } = facts;
   const widest = Math.max(0, ...facts.job.setup.cutters.map(({ diameter }) => diameter / 2));
   const reach = Math.max(facts.form.outsideRadius, pathReach(paths) + widest);
   const dialWidth = facts.passes.length > 0 ? DIAL_WIDTH : 0;
-  const scale = scaleToFit(2 * reach, PAPER - 2 * (STOCK + dialWidth));
+  const paper = metal === 'here' ? PAPER : ON_SHEET;
+  const scale = scaleToFit(2 * reach, paper - 2 * (STOCK + dialWidth));
   const inside = reach * scale + STOCK;
   const half = inside + dialWidth + 0.5;
-  const rows = Math.ceil(facts.passes.length / COLUMNS);
+  const rows = metal === 'here' ? Math.ceil(facts.passes.length / COLUMNS) : 0;
   const frame: PlateFrame = {
-    left: -PAPER / 2,
-    right: PAPER / 2,
+    left: -paper / 2,
+    right: paper / 2,
     top: -half,
     bottom: half + 2 + rows * LEGEND_LINE,
     scale,
@@ -53,7 +56,7 @@ export function drawWork(facts: SheetFacts, metal: 'here' | 'elsewhere'): WorkPl
   const marks =
     drawDial(facts.passes, inside) +
     toothOne(facts, frame) +
-    legend(facts, half + 4) +
+    (metal === 'here' ? legend(facts, half + 4) : '') +
     scaleBar(frame, frame.left + 1, -half + 2, facts.job.length);
   return {
     svg: plateSvg(frame, 'The work: the paths of the cutters, and the minutes they take', body, marks),

@@ -23,5 +23,5 @@ const ORDER: readonly PlateName[] = ['sizes', 'table', 'work', 'space', 'deviati
 /** A plate with its caption; nothing where there is no picture. */
 export function plateFigure(facts: SheetFacts, name: PlateName, svg: string, caption: string): string {
   const before = ORDER.slice(0, ORDER.indexOf(name) + 1).filter((one) => hasPlate(facts, one));
-  return `<figure>\n${svg}\n<figcaption><b>Plate ${numeral(before.length)}.</b> ${caption}</figcaption>\n</figure>\n`;
+  return `<figure class="plate-${name}">\n${svg}\n<figcaption><b>Plate ${numeral(before.length)}.</b> ${caption}</figcaption>\n</figure>\n`;
 }

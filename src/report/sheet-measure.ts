@@ -4,7 +4,7 @@ import { overTips, SPAN_SENSITIVITY, toothChord } from '../tooth/span.ts';
 import { spansOf } from './draw-jaws.ts';
 import type { SheetFacts } from './facts.ts';
 import { lengthBoth, lengthOnly } from './lengths.ts';
-import { head } from './sheet-set-up.ts';
+import { head, scroll } from './table-parts.ts';
 import { fixed } from './words.ts';
 
 export function measureSection(facts: SheetFacts): string {
@@ -19,7 +19,7 @@ export function measureSection(facts: SheetFacts): string {
   return (
     '<section class="whole">\n<h2>Measure on the first-off</h2>\n<p>Take the burr off first, and measure while the wheel is still held if you can, spindle still. ' +
     `The span over teeth tells what the cutter really cuts, whatever the form of the teeth: ${example} more than it should read is half of that left on every flank, and a cutter that cuts ${example} narrower than the job says.</p>\n` +
-    `<div class="scroll"><table class="measures">\n<thead><tr>${head(['size', 'should read', 'read', 'how'], [1])}</tr></thead>\n` +
+    `${scroll('sizes to measure')}<table class="measures">\n<thead><tr>${head(['size', 'should read', 'read', 'how'], [1])}</tr></thead>\n` +
     `<tbody>${rows}</tbody>\n</table></div>\n` +
     '<p class="soft record">Cut on <span class="rule"></span> by <span class="rule"></span> in the plates it runs <span class="rule"></span></p>\n</section>'
   );
@@ -45,7 +45,7 @@ function spanRows(facts: SheetFacts): readonly string[] {
       `over ${span.teeth} teeth`,
       span.reading,
       `span-${span.teeth}`,
-      `Flat jaws, which touch ${lengthOnly(span.height, facts.job.length)} above the pitch circle; reads ${SPAN_SENSITIVITY} times the error of one flank.`,
+      `Flat jaws; they touch ${lengthOnly(span.height, facts.job.length)} above the pitch circle. Reads ${SPAN_SENSITIVITY} times the error of a flank.`,
     ),
   );
 }

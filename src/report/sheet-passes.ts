@@ -6,8 +6,8 @@ import type { SheetFacts, SheetPass } from './facts.ts';
 import { bareLength, shortUnit, unitInWords } from './lengths.ts';
 import { scaleWords } from './plate.ts';
 import { plateFigure } from './plate-numbers.ts';
-import { head } from './sheet-set-up.ts';
-import { capitalised, duration, escapeText, fixed, numeral, numeralList, plain } from './words.ts';
+import { head, scroll } from './table-parts.ts';
+import { capitalised, escapeText, fixed, inMinutes, numeral, numeralList, plain } from './words.ts';
 
 export function passesSection(facts: SheetFacts): string {
   return facts.passes.length === 0
@@ -22,15 +22,16 @@ function programsTable(facts: SheetFacts): string {
   const rows = facts.programs.map(
     (program, i) =>
       `<tr><th scope="row" class="n">${i + 1}</th><td class="mark">${escapeText(program.file)}</td><td>${program.cutters.join(', ')}</td>` +
-      `<td>${unitInWords(program.units)}</td><td class="n">${program.blocks}</td><td class="n">${duration(program.seconds)}</td><td class="mark">${program.sha256.slice(0, 12)}</td></tr>`,
+      `<td>${unitInWords(program.units)}</td><td class="n">${program.blocks}</td><td class="n">${inMinutes(program.seconds)}</td><td class="mark">${program.sha256.slice(0, 12)}</td></tr>`,
   );
   const walk =
     facts.walkFile === undefined
       ? ''
       : `<tr><td></td><td class="mark">${escapeText(facts.walkFile)}</td><td colspan="5">before all others: round the work and over what stands in the way, high up, spindle still</td></tr>`;
   return (
-    '<div class="scroll whole"><table>\n<caption>Programs, in the order they are run.</caption>\n<thead><tr>' +
-    head(['', 'file', 'cutter', 'written in', 'blocks', 'time', 'SHA-256 begins'], [4, 5]) +
+    scroll('programs', 'whole') +
+    '<table>\n<caption>Programs, in the order they are run.</caption>\n<thead><tr>' +
+    head(['', 'file', 'cutter', 'written in', 'blocks', 'time<br>min', 'SHA-256 begins'], [4, 5]) +
     `</tr></thead>\n<tbody>${walk}${rows.join('\n')}</tbody>\n</table></div>\n`
   );
 }
@@ -50,7 +51,8 @@ function passesTable(facts: SheetFacts): string {
   const unit = shortUnit(facts.job.length);
   const total = facts.passes.reduce((sum, pass) => sum + pass.seconds, 0);
   return (
-    '<div class="scroll whole"><table>\n<caption>Passes. Times are reckoned with the acceleration in the machine file; what hands do comes on top.</caption>\n<thead><tr>' +
+    scroll('passes', 'whole') +
+    '<table>\n<caption>Passes. Down: the feed on the way down; a lap: once round, and how much deeper each time. Times are reckoned with the acceleration in the machine file; what hands do comes on top.</caption>\n<thead><tr>' +
     head(
       [
         '',
@@ -62,12 +64,12 @@ function passesTable(facts: SheetFacts): string {
         `a lap<br>${unit}`,
         'laps',
         `to Z<br>${unit}`,
-        'time',
+        'time<br>min',
       ],
       [3, 4, 5, 6, 7, 8, 9],
     ) +
     `</tr></thead>\n<tbody>${facts.passes.map((pass, i) => passRow(facts, pass, i)).join('\n')}</tbody>\n` +
-    `<tfoot><tr><td></td><td colspan="8">all passes</td><td class="n" data-figure="seconds" data-value="${fixed(total, 3)}">${duration(total)}</td></tr></tfoot>\n</table></div>\n`
+    `<tfoot><tr><td></td><td colspan="8">all passes</td><td class="n" data-figure="seconds" data-value="${fixed(total, 3)}">${inMinutes(total)}</td></tr></tfoot>\n</table></div>\n`
   );
 }
 
@@ -78,7 +80,7 @@ function passRow({ job }: SheetFacts, pass: SheetPass, i: number): string {
   return (
     `<tr><th scope="row">${numeral(i + 1)}</th><td>${escapeText(capitalised(pass.name))}</td><td>${pass.cutter}</td>` +
     `<td class="n">${plain(pass.speed, 0)}</td><td class="n">${rate(pass.feed)}</td><td class="n">${rate(pass.plunge)}</td>` +
-    `<td class="n">${length(pass.step)}</td><td class="n">${pass.laps}</td><td class="n">${length(pass.depth)}</td><td class="n">${duration(pass.seconds)}</td></tr>`
+    `<td class="n">${length(pass.step)}</td><td class="n">${pass.laps}</td><td class="n">${length(pass.depth)}</td><td class="n">${inMinutes(pass.seconds)}</td></tr>`
   );
 }
 
@@ -97,7 +99,7 @@ function reasons({ passes, job }: SheetFacts): string {
   }
   const items = [...together].map(
     ([numbers, whys]) =>
-      `<dt>${numbers}</dt><dd>${escapeText(capitalised(jobText(whys.join('; '), job.length)))}.</dd>`,
+      `<div><dt>${numbers}</dt> <dd>${escapeText(capitalised(jobText(whys.join('; '), job.length)))}.</dd></div>`,
   );
   return items.length === 0
     ? ''

@@ -22,6 +22,8 @@ export function sizesPlate(facts: SheetFacts): string {
       ...(crossings === undefined ? {} : { crossings }),
     },
     `The wheel with its sizes, in plan and cut through the axis`,
+    undefined,
+    TALLEST,
   );
   return plateFigure(
     facts,
@@ -30,6 +32,9 @@ export function sizesPlate(facts: SheetFacts): string {
     `The exact wheel, in plan and cut through its axis, ${scaleWords(scale)} on A4; figures in ${unitInWords(job.length)}.${windowWords(facts)}`,
   );
 }
+
+/** Of the wheel in plan, mm of paper. Why: the set-up begins on the same page of A4. */
+const TALLEST = 82;
 
 function windowWords({ crossings, job }: SheetFacts): string {
   if (crossings === undefined) {
@@ -94,6 +99,6 @@ export function deviationPlate(facts: SheetFacts): string {
     facts,
     'deviation',
     svg,
-    `The cut flank against the exact curve along tooth ${figures.worstTooth}, the worst of all, read back from the program. The band is what is allowed, ${tinyLength(allowed, facts.job.length, 1)} either way.`,
+    `The cut flank against the exact curve along tooth ${figures.worstTooth}, the worst of all, read back from the program. The line through 0 is the exact curve; the band is what is allowed, ${tinyLength(allowed, facts.job.length, 1)} either way. Foot: above it the flank is cut as drawn, below it the round of the cutter stays.`,
   );
 }

@@ -10,6 +10,7 @@ import { lengthBoth, lengthOnly, sizeOnly } from './lengths.ts';
 import { scaleWords } from './plate.ts';
 import { plateFigure } from './plate-numbers.ts';
 import { handSteps } from './hand-steps.ts';
+import { head, scroll } from './table-parts.ts';
 import { capitalised, duration, escapeText, plain } from './words.ts';
 
 export function setUpSection(facts: SheetFacts): string {
@@ -50,9 +51,16 @@ function blankSteps({ job }: SheetFacts): readonly string[] {
   ];
 }
 
-function cutterStep(facts: SheetFacts): string {
-  const count = new Set(facts.programs.flatMap(({ cutters }) => cutters)).size;
-  return `<b>Cutters.</b> ${count === 1 ? 'One' : capitalised(numberWord(count))} by the table below, ${count === 1 ? '' : 'in the order they are used, '}clean in the collet, sticking out just so far. The paths are reckoned with the width each one <i>cuts</i>, not with the size on its box.`;
+function cutterStep({ programs }: SheetFacts): string {
+  const order = programs.flatMap(({ cutters }) => cutters);
+  const count = new Set(order).size;
+  const again =
+    order.length > count ? `, fitted ${numberWord(order.length)} times in the order of the table below,` : '';
+  const words =
+    count === 1
+      ? 'One, by the table below,'
+      : `${capitalised(numberWord(count))}${again === '' ? ', by the table below in the order they are used,' : again}`;
+  return `<b>Cutters.</b> ${words} clean in the collet, sticking out just so far. The paths are reckoned with the width each one <i>cuts</i>, not with the size on its box.`;
 }
 
 function numberWord(count: number): string {
@@ -120,22 +128,15 @@ function cuttersTable(facts: SheetFacts): string {
           `<td class="n">${length(cutter.stickOut)}</td><td class="n">${sizeOnly(cutter.reach, job.length)}</td><td class="n">${sizeOnly(cutter.flute, job.length)}</td><td class="n">${sizeOnly(cutter.shank, job.length)}</td><td class="mark">${escapeText(file)}</td></tr>`;
   });
   return (
-    '<div class="scroll whole"><table>\n<caption>Cutters in the order they are used.</caption>\n<thead><tr>' +
+    scroll('cutters', 'whole') +
+    '<table>\n<caption>Cutters in the order they are used.</caption>\n<thead><tr>' +
     head(
       ['', 'cutter', 'cuts', 'on the box', 'flutes', 'sticks out', 'reach', 'flute', 'shank', 'program'],
       [0, 2, 3, 4, 5, 6, 7, 8],
     ) +
-    `</tr></thead>\n<tbody>${rows.join('\n')}</tbody>\n</table></div>\n`
+    `</tr></thead>\n<tbody>${rows.join('\n')}</tbody>\n</table></div>\n` +
+    '<p class="soft note">Sticks out: below the collet. Reach: how deep it goes beside a wall before neck or shank touches. Flute: the part that cuts.</p>\n'
   );
-}
-
-/** Heads of columns; those of `figures` stand to the right. */
-export function head(names: readonly string[], figures: readonly number[]): string {
-  return names
-    .map((name, i) =>
-      name === '' ? '<td></td>' : `<th scope="col"${figures.includes(i) ? ' class="n"' : ''}>${name}</th>`,
-    )
-    .join('');
 }
 
 function tablePlate(facts: SheetFacts): string {

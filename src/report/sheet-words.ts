@@ -3,7 +3,6 @@ import { displayed } from './derived-words.ts';
 import type { LengthUnit } from '../base/units.ts';
 import { jobText } from './job-text.ts';
 import type { SheetFacts } from './facts.ts';
-import { head } from './sheet-set-up.ts';
 import { escapeText, sentence } from './words.ts';
 
 export function findingsSection(facts: SheetFacts): string {
@@ -11,7 +10,7 @@ export function findingsSection(facts: SheetFacts): string {
   const unseen = facts.proof?.notChecked ?? ['No program was made, so nothing was proved.'];
   return (
     `<section>\n<h2>What was found</h2>\n${found.length === 0 ? `<p>${facts.verdict === 'pass' ? 'Nothing that needs a word.' : 'Nothing besides why it was refused.'}</p>` : list(found)}\n` +
-    `<h2>What was not checked</h2>\n<ul class="columns">${[...new Set(unseen)].map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ul>\n</section>`
+    `<div class="whole">\n<h2>What was not checked</h2>\n<ul class="columns">${[...new Set(unseen)].map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ul>\n</div>\n</section>`
   );
 }
 
@@ -71,7 +70,7 @@ export function cautionsSection({ cautions }: SheetFacts): string {
     : `<section>\n<h2>Cautions</h2>\n<ol class="columns">${cautions.map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ol>\n</section>`;
 }
 
-/** Values that share a reason share a row. */
+/** Values that share a reason stand together. */
 export function derivedSection({ job }: SheetFacts): string {
   const byWhy = new Map<string, string[]>();
   for (const [key, derived] of Object.entries(job.derived)) {
@@ -82,9 +81,9 @@ export function derivedSection({ job }: SheetFacts): string {
     ]);
   }
   const rows = [...byWhy].map(
-    ([why, values]) => `<tr><td>${values.join('<br>')}</td><td>${escapeText(why)}</td></tr>`,
+    ([why, values]) => `<div><dt>${values.join(', ')}:</dt> <dd>${escapeText(why)}.</dd></div>`,
   );
   return rows.length === 0
     ? ''
-    : `<section>\n<h2>What the job left out</h2>\n<div class="scroll"><table class="small">\n<thead><tr>${head(['taken', 'why'], [])}</tr></thead>\n<tbody>${rows.join('\n')}</tbody>\n</table></div>\n</section>`;
+    : `<section>\n<h2>What the job left out, what was taken, and why</h2>\n<dl class="taken">${rows.join('\n')}</dl>\n</section>`;
 }

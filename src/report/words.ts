@@ -28,16 +28,19 @@ export function fixed(value: number, decimals: number): string {
   return Number(text) === 0 ? text.replace('-', '') : text;
 }
 
-/** "45 s", "12 min", "1 h 05 min". */
+/** "0.1 min", "9.4 min", "61 min": minutes only, as the dial counts them, a decimal where they are few. */
 export function duration(seconds: number): string {
-  if (seconds < 90) {
-    return `${Math.max(Math.round(seconds), 0)} s`;
-  }
-  const minutes = Math.round(seconds / 60);
-  return minutes < 90
-    ? `${minutes} min`
-    : `${Math.floor(minutes / 60)} h ${String(minutes % 60).padStart(2, '0')} min`;
+  return `${inMinutes(seconds, seconds < FEW ? 1 : 0)} min`;
 }
+
+/** "0.1", "61.0": a column of minutes. What takes any time at all takes a tenth of a minute. */
+export function inMinutes(seconds: number, decimals = 1): string {
+  const least = seconds > 0 ? 0.1 : 0;
+  return Math.max(seconds / 60, least).toFixed(decimals);
+}
+
+/** Below this a decimal tells something; s. */
+const FEW = 570;
 
 const NUMERALS: readonly (readonly [number, string])[] = [
   [10, 'X'],

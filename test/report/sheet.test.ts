@@ -115,6 +115,19 @@ describe('the page', () => {
     expect(SHEET_STYLE).toMatch(/@page\{size:A4/);
     expect(SHEET_STYLE).toMatch(/figure\{[^}]*break-inside:avoid/);
     expect(SHEET_STYLE).toMatch(/tr\{break-inside:avoid\}/);
+    expect(SHEET_STYLE).toMatch(/\.pair\{[^}]*break-inside:avoid/);
+  });
+
+  it('"Two cutters" over a table of three rows: says how often they are fitted', () => {
+    expect(html).toContain('Two, fitted three times in the order of the table below');
+    expect((html.match(/<td>cutter \d+<\/td>/g) ?? []).length).toBe(3);
+    expect(sheetHtml(factsOf('great-wheel'))).toContain('Two, by the table below in the order they are used');
+  });
+
+  it('lets whoever has only a keyboard scroll a wide table', () => {
+    const frames = html.match(/<div class="scroll[^>]*>/g) ?? [];
+    expect(frames.length).toBeGreaterThan(3);
+    expect(frames.every((tag) => /tabindex="0" role="region" aria-label="[^"]+"/.test(tag))).toBe(true);
   });
 });
 

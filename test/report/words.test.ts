@@ -1,4 +1,6 @@
 import { describe, expect, it } from 'vitest';
+import { sheetHtml } from '../../src/report/sheet.ts';
+import { factsOf } from '../support/sheets.ts';
 import { jobText } from '../../src/report/job-text.ts';
 import { bareLength, lengthBoth, lengthOnly, sizeOnly, tinyLength } from '../../src/report/lengths.ts';
 import {
@@ -56,21 +58,20 @@ describe('lengths, the job first', () => {
 
 describe('times and numerals', () => {
   it.each([
-    [0.4, '0 s'],
-    [89.4, '89 s'],
-    [90, '2 min'],
-    [5369, '89 min'],
-    [5399, '1 h 30 min'],
-    [5460, '1 h 31 min'],
-    [7200, '2 h 00 min'],
+    [0, '0.0 min'],
+    [0.4, '0.1 min'],
+    [85, '1.4 min'],
+    [569, '9.5 min'],
+    [570, '10 min'],
+    [3660, '61 min'],
   ])('%f s is %s', (seconds, text) => {
     expect(duration(seconds)).toBe(text);
   });
 
-  it('does not say 1 h 60 min', () => {
-    for (let seconds = 5300; seconds < 20000; seconds += 7) {
-      expect(duration(seconds)).not.toContain('60 min');
-    }
+  it('"72 s, 22 min and 1 h 05 min in one table": every time of the sheet is in minutes', () => {
+    const page = sheetHtml(factsOf('third-wheel')).replace(/<style>[\s\S]*?<\/style>/, '');
+    expect(page).not.toMatch(/[>\s][\d.]+ (?:s|h|seconds|hours)\b/);
+    expect(page).toMatch(/[>\s][\d.]+ min\b/);
   });
 
   it('writes numerals [Roman numerals with subtraction, common practice]', () => {
