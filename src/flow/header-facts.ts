@@ -23,8 +23,8 @@ export interface HeaderSources {
 }
 
 const PROVED = {
-  cut: 'read back from this text: the flanks against the exact curve at every depth, bore and crossings, travel, fast moves, keep-outs, feeds and spindle, loose metal',
-  walk: 'read back from this text: travel, keep-outs, nothing below the clear height, spindle still',
+  cut: 'read back from its own text, all programs of this mark together: the flanks against the exact curve at every depth, bore and crossings, travel, fast moves, keep-outs, feeds and spindle, loose metal',
+  walk: 'read back from its own text: travel, keep-outs, nothing below the clear height, spindle still',
 } as const;
 
 const NOT_PROVED = {
@@ -91,8 +91,14 @@ function together(all: readonly Reach[]): Reach {
   };
 }
 
-function headerCutter({ number, diameter, flutes, stickOut }: Job['setup']['cutters'][number]): HeaderCutter {
-  return { number, diameter, flutes, stickOut };
+function headerCutter({
+  number,
+  diameter,
+  flutes,
+  stickOut,
+  shank,
+}: Job['setup']['cutters'][number]): HeaderCutter {
+  return { number, diameter, flutes, stickOut, shank };
 }
 
 function partLines({ job, form, crossings }: HeaderSources, unit: LengthUnit): readonly string[] {

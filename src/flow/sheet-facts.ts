@@ -13,6 +13,7 @@ import type { CutPlan } from '../toolpath/plan.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 import { headerFacts } from './header-facts.ts';
+import { lapsOf, mergedName } from './laps-of.ts';
 
 /** A job and a machine that were read without error. */
 export interface Understood {
@@ -66,7 +67,7 @@ export function sheetFacts(
       : {}),
     motions: plan?.programs.map((program) => program.motion) ?? [],
     paths: passPaths(plan?.programs.map((program) => program.motion) ?? []),
-    passes: plan === undefined ? [] : passesOf(plan, times),
+    passes: plan === undefined ? [] : passesOf(plan, times, job.setup.topZ),
     ...(proof === undefined ? {} : { proof }),
     problems,
     again: header?.again ?? '',
@@ -96,18 +97,22 @@ function programsOf(
   }));
 }
 
-function passesOf(plan: CutPlan, times: readonly ProgramTime[]): readonly SheetPass[] {
+function passesOf(plan: CutPlan, times: readonly ProgramTime[], topZ: number): readonly SheetPass[] {
+  const run = lapsOf(
+    plan.programs.map(({ motion }) => motion),
+    topZ,
+  );
   return plan.passes.map((pass) => ({
     ...pass,
+    ...(run.get(pass.name) ?? { laps: [pass.laps, pass.laps] as const, step: pass.step }),
     seconds: times.reduce((sum, { byPass }) => sum + secondsOf(pass.name, byPass), 0),
   }));
 }
 
-/** Every window is a pass of its own in the program; on the sheet they are one. */
 function secondsOf(name: string, byPass: ReadonlyMap<string, number>): number {
   let sum = 0;
   for (const [pass, seconds] of byPass) {
-    sum += pass.replace(/^crossing \d+/, 'crossings') === name ? seconds : 0;
+    sum += mergedName(pass) === name ? seconds : 0;
   }
   return sum;
 }

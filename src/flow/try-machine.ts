@@ -62,7 +62,7 @@ function headerOf({ what, motion }: NamedMotion, version: string): HeaderFacts {
     blank: 'none',
     holding: 'nothing',
     material: 'air',
-    cutters: cutters.map((number) => ({ number, diameter: 1, flutes: 2, stickOut: 12 })),
+    cutters: cutters.map((number) => ({ number, diameter: 1, flutes: 2, stickOut: 12, shank: 3 })),
     speeds,
     extents: { x, y, z },
     clear: z[1],

@@ -38,7 +38,7 @@ function stillSpindle(facts: HeaderFacts, machine: Machine): readonly string[] {
   const lowest = lengthInWords(facts.extents.z[0], machine.units);
   return facts.kind === 'walk'
     ? [
-        `This program turns no spindle and goes round at height ${lowest}, never below it: watch that the cutter passes over or round everything that stands on the table`,
+        `This program turns no spindle and goes round at height ${lowest}, never below it. Switch the spindle's power off, have the first cutter in and its height touched off, a hand on feed hold: watch that the cutter passes over or round everything that stands on the table`,
       ]
     : ['This program is for the air: no blank, no cutter near anything'];
 }
@@ -51,7 +51,7 @@ function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[]
     `Before the start park the cutter at X ${length(park.x)}, Y ${length(park.y)}, at height ${length(park.z)} or above, with nothing between it and the clear height ${length(clear)}`,
     `Set zero with care, then move by hand to X 0, Y 0 and the clear height ${length(clear)} and look whether the place is right. Take off shifts, turns, scales and mirrors left by earlier work`,
     ...(facts.kind === 'cut' ? [airRun(facts, length)] : []),
-    `The lowest point is height ${length(deepest)}${underTheBlank(facts, length)}. Compare all the reaches above with clamps, screws, vice, table edges and the ends of travel`,
+    `The lowest point is height ${length(deepest)}${underTheBlank(facts, length)}. Compare all the reaches above with clamps, screws, vice, table edges and the ends of travel${besideTheCutter(facts, machine)}`,
     `The words are in ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. A part that measures anything but ${bothUnits(facts.check.size, machine.units)} at ${facts.check.what} is in the wrong unit or badly set: stop`,
     ...facts.cutters.map(
       (cutter) =>
@@ -62,7 +62,7 @@ function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[]
 }
 
 function airRun(facts: HeaderFacts, length: (mm: number) => string): string {
-  return `First run: raise the zero of height by ${length(raise(facts))} so that everything happens in the air, rapid override low, a hand on feed hold. Then block by block down to the first cut`;
+  return `First run: raise the zero of height by ${length(raise(facts))}, and parking with it, so that everything happens in the air, rapid override low, a hand on feed hold. Then put the zero back and go block by block down to the first cut`;
 }
 
 /** From the lowest point to above the blank, with a clear height to spare. */
@@ -78,17 +78,32 @@ function underTheBlank(facts: HeaderFacts, length: (mm: number) => string): stri
 function atTheCutter(facts: HeaderFacts, machine: Machine): readonly string[] {
   const highest = facts.speeds.at(-1);
   return [
-    `The spindle goes up to ${highest === undefined ? 'no speed' : `${Math.round(highest)} turns a minute`}: see that cutter, collet and nut are made for it, the nut tight and the key out`,
+    `The spindle goes up to ${highest === undefined ? 'no speed' : `${Math.round(highest)} turns a minute`}: see that cutter, collet and nut are made for it, that it turns the way the cutter cuts, the nut tight and the key out`,
     ...(machine.words.spindle.run === 'by-hand'
       ? [
           'The program cannot switch this spindle: at each stop do what it says, and never go on with the spindle still',
         ]
       : []),
-    'Guards shut and their switches working. Never reach in. No gloves, loose cuffs, long hair, rings or chains near a turning spindle',
+    'Guards shut and their switches working. Never reach in, and take the power off the spindle before hands go near a cutter. No gloves, loose cuffs, long hair, rings or chains near a turning spindle',
+    'Cutting fluid, where any is used: kept clean, off the skin, its mist out of the lungs',
     'Wear glasses made for impact, as small cutters break and fly, and ear protection where the noise asks for it',
     'Know where the emergency stop is and try it first. After using it find the machine zero and the work zero anew: the place may be lost',
     'Stay with it. Listen, and stop when the sound changes: a broken cutter tells nobody, and the rest of the program cuts air or worse',
   ];
+}
+
+/** What goes beyond the reaches of the cutter's middle: the thicker of cutter and shank low down, the collet nut above. */
+function besideTheCutter(
+  { cutters, extents }: Pick<HeaderFacts, 'cutters' | 'extents'>,
+  { limits, units }: Machine,
+): string {
+  if (cutters.length === 0) {
+    return '';
+  }
+  const wide = Math.max(...cutters.map(({ diameter, shank }) => Math.max(diameter, shank))) / 2;
+  const nut = extents.z[0] + Math.min(...cutters.map(({ stickOut }) => stickOut));
+  const length = (mm: number): string => lengthInWords(mm, units);
+  return `. They are those of its middle: cutter and shank go ${length(wide)} further to every side, and above height ${length(nut)} the collet nut goes ${length(limits.nut.diameter / 2)} further`;
 }
 
 function whenItStops(facts: HeaderFacts, machine: Machine): readonly string[] {
@@ -97,7 +112,7 @@ function whenItStops(facts: HeaderFacts, machine: Machine): readonly string[] {
     ...(facts.kind !== 'cut' || change === 'automatic' || facts.program.of + facts.cutters.length <= 2
       ? []
       : [
-          'After every change of cutter touch off height anew at the same spot: no two cutters stick out alike',
+          'After every change of cutter touch off height anew where the program and the sheet say, as no two cutters stick out alike',
         ]),
     ...(facts.kind === 'cut'
       ? [

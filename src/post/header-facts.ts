@@ -8,6 +8,8 @@ export interface HeaderCutter {
   readonly diameter: number;
   readonly flutes: number;
   readonly stickOut: number;
+  /** Of the shank above what it cuts with. */
+  readonly shank: number;
 }
 
 export interface HeaderFacts {

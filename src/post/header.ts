@@ -27,7 +27,7 @@ export function setUpLines(facts: HeaderFacts, machine: Machine): readonly strin
   const { park, check, extents } = facts;
   return [
     `Title: ${facts.title}`,
-    `Mark ${facts.mark}, made by version ${facts.version}`,
+    `Mark ${facts.mark}, made by Ogive, version ${facts.version}`,
     KINDS[facts.kind] + placeInOrder(facts),
     ...facts.part.map((line) => `Part: ${line}`),
     `Machine file ${machine.name}, ${machine.proved === 'unproved' ? 'not yet proved on a machine' : `proved: ${machine.proved}`}`,
@@ -38,17 +38,31 @@ export function setUpLines(facts: HeaderFacts, machine: Machine): readonly strin
         `Cutter ${cutter.number}: cuts ${length(cutter.diameter)} wide, ${cutter.flutes} flutes, sticking out ${length(cutter.stickOut)}`,
     ),
     spindleLine(facts, machine),
-    `Zero of X and Y: the axis of the wheel. Zero of height: ${facts.zero === 'top' ? 'the top of the blank' : 'the plate under the blank'}. To find it again: ${facts.again}`,
-    `Reaches in X ${span(extents.x)}, in Y ${span(extents.y)}, in height ${span(extents.z)}. Clear height ${length(facts.clear)}`,
+    `Zero of X and Y: the axis of the wheel. Zero of height: ${facts.zero === 'top' ? 'the top of the blank' : 'the plate under the blank'}. ${zeroPlace(machine)}. To find it again: ${facts.again}`,
+    `The middle of the cutter reaches in X ${span(extents.x)}, in Y ${span(extents.y)}, in height ${span(extents.z)}. Clear height ${length(facts.clear)}`,
     `Park before the start: X ${length(park.x)}, Y ${length(park.y)}, height ${length(park.z)}`,
     ...facts.proved.map((line) => `Proved: ${line}`),
     ...facts.notProved.map((line) => `Not proved: ${line}`),
   ];
 }
 
+/** In words: a letter with its number could be taken for one that acts, were the marks of the comment lost. */
+function zeroPlace({ words }: Machine): string {
+  const { workOffset } = words.positions;
+  const place = ['first', 'second', 'third', 'fourth', 'fifth', 'sixth', 'seventh', 'eighth', 'ninth'];
+  const index = ['G54', 'G55', 'G56', 'G57', 'G58', 'G59', 'G59.1', 'G59.2', 'G59.3'].indexOf(workOffset);
+  return index < 0
+    ? 'The controller has this one zero'
+    : `They are kept in the ${place[index] ?? ''} work offset`;
+}
+
 /** Where this is one of the programs that are run in order; a walk-round and a sheet are none. */
 function placeInOrder({ program }: HeaderFacts): string {
-  return program.number === 0 ? '' : `, number ${program.number} of ${program.of}`;
+  return program.number === 0
+    ? ''
+    : program.of === 1
+      ? ', the only one'
+      : `, number ${program.number} of ${program.of}`;
 }
 
 function spindleLine(facts: HeaderFacts, machine: Machine): string {

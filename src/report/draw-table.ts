@@ -1,12 +1,13 @@
 /**
- * The plate of the set-up: what stands on the table seen from above - the blank, what is in the way, zero, where to park, how
- * far the cutter's centre reaches - and beside it the heights. mm of paper, Y down.
+ * The plate of the set-up: what stands on the table seen from above - the blank, what is in the way, zero, where to park, what
+ * must be kept clear - and beside it the heights. mm of paper, Y down.
  */
 import type { Setup } from '../cutting/setup.ts';
 import { levelDimension, uprightDimension, words } from './dimension.ts';
 import { SAME_METAL } from './draw-metal.ts';
 import { drawHeights } from './draw-heights.ts';
 import type { SheetFacts } from './facts.ts';
+import { keepClear } from './keep-clear.ts';
 import { bareLength } from './lengths.ts';
 import { LIGHT, onWork, plateSvg, scaleBar, scaleToFit, type PlateFrame } from './plate.ts';
 import { coordinate, plain } from './words.ts';
@@ -60,7 +61,9 @@ interface Box {
 }
 
 /** Everything that is drawn, mm of the work. */
-function boxOf({ job, proof, park }: SheetFacts): Box | undefined {
+function boxOf(facts: SheetFacts): Box | undefined {
+  const { job, park } = facts;
+  const clear = keepClear(facts);
   if (park === undefined) {
     return undefined;
   }
@@ -70,14 +73,14 @@ function boxOf({ job, proof, park }: SheetFacts): Box | undefined {
     -w / 2,
     w / 2,
     park.x,
-    ...(proof?.extents.x ?? []),
+    ...(clear?.x ?? []),
     ...stands.flatMap((one) => [one.x - one.radius, one.x + one.radius]),
   ];
   const y = [
     -h / 2,
     h / 2,
     park.y,
-    ...(proof?.extents.y ?? []),
+    ...(clear?.y ?? []),
     ...stands.flatMap((one) => [one.y - one.radius, one.y + one.radius]),
   ];
   return { left: Math.min(...x), right: Math.max(...x), bottom: Math.min(...y), top: Math.max(...y) };
@@ -104,20 +107,21 @@ function obstacles(setup: Setup, frame: PlateFrame): string {
   return found.length === 0 ? '' : hatch + found.join('');
 }
 
-/** How far the centres of the cutters go, with the figures above and on the right. */
-function reaches({ proof, job }: SheetFacts, box: Box, frame: PlateFrame): string {
-  if (proof === undefined) {
+/** What must be kept clear, with the figures above and on the right. */
+function reaches(facts: SheetFacts, box: Box, frame: PlateFrame): string {
+  const clear = keepClear(facts);
+  if (clear === undefined) {
     return '';
   }
-  const [x0, x1] = proof.extents.x.map((value) => value * frame.scale) as [number, number];
-  const [y0, y1] = proof.extents.y.map((value) => -value * frame.scale) as [number, number];
-  const say = (value: number): string => bareLength(value, job.length);
+  const [x0, x1] = clear.x.map((value) => value * frame.scale) as [number, number];
+  const [y0, y1] = clear.y.map((value) => -value * frame.scale) as [number, number];
+  const say = (value: number): string => bareLength(value, facts.job.length);
   const top = -box.top * frame.scale - 3;
   const right = box.right * frame.scale + 4;
   return (
-    `<rect class="line dashed" data-figure="extents" x="${plain(x0, 3)}" y="${plain(y1, 3)}" width="${plain(x1 - x0, 3)}" height="${plain(y0 - y1, 3)}"/>` +
-    words(`X ${say(proof.extents.x[0])} to ${say(proof.extents.x[1])}`, (x0 + x1) / 2, top, 'middle') +
-    `<text class="halo" text-anchor="middle" transform="translate(${plain(right, 2)} ${plain((y0 + y1) / 2, 2)}) rotate(-90)">Y ${say(proof.extents.y[0])} to ${say(proof.extents.y[1])}</text>`
+    `<rect class="line dashed" data-figure="keep-clear" x="${plain(x0, 3)}" y="${plain(y1, 3)}" width="${plain(x1 - x0, 3)}" height="${plain(y0 - y1, 3)}"/>` +
+    words(`X ${say(clear.x[0])} to ${say(clear.x[1])}`, (x0 + x1) / 2, top, 'middle') +
+    `<text class="halo" text-anchor="middle" transform="translate(${plain(right, 2)} ${plain((y0 + y1) / 2, 2)}) rotate(-90)">Y ${say(clear.y[0])} to ${say(clear.y[1])}</text>`
   );
 }
 

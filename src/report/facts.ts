@@ -17,8 +17,10 @@ export interface SheetPass {
   readonly speed: number;
   readonly feed: number;
   readonly plunge: number;
+  /** How much deeper a lap goes at most. */
   readonly step: number;
-  readonly laps: number;
+  /** Least and most: a hole cleared in rings makes its own count of laps in each. */
+  readonly laps: readonly [number, number];
   readonly depth: number;
   readonly seconds: number;
   readonly why: readonly string[];

@@ -52,7 +52,7 @@ function passesTable(facts: SheetFacts): string {
   const total = facts.passes.reduce((sum, pass) => sum + pass.seconds, 0);
   return (
     scroll('passes', 'whole') +
-    '<table>\n<caption>Passes. Down: the feed on the way down; a lap: once round, and how much deeper each time. Times are reckoned with the acceleration in the machine file; what hands do comes on top.</caption>\n<thead><tr>' +
+    '<table>\n<caption>Passes. Down: the feed on the way down; a lap: once round, and how much deeper at most; where a hole is cleared in rings, each ring makes its own count of laps. Times are reckoned with the acceleration in the machine file; what hands do comes on top.</caption>\n<thead><tr>' +
     head(
       [
         '',
@@ -80,8 +80,12 @@ function passRow({ job }: SheetFacts, pass: SheetPass, i: number): string {
   return (
     `<tr><th scope="row">${numeral(i + 1)}</th><td>${escapeText(capitalised(pass.name))}</td><td>${pass.cutter}</td>` +
     `<td class="n">${plain(pass.speed, 0)}</td><td class="n">${rate(pass.feed)}</td><td class="n">${rate(pass.plunge)}</td>` +
-    `<td class="n">${length(pass.step)}</td><td class="n">${pass.laps}</td><td class="n">${length(pass.depth)}</td><td class="n">${inMinutes(pass.seconds)}</td></tr>`
+    `<td class="n">${length(pass.step)}</td><td class="n">${lapsWords(pass.laps)}</td><td class="n">${length(pass.depth)}</td><td class="n">${inMinutes(pass.seconds)}</td></tr>`
   );
+}
+
+function lapsWords([least, most]: SheetPass['laps']): string {
+  return least === most ? String(most) : `${least}–${most}`;
 }
 
 /** Each sentence once, with the passes it holds for; sentences of the same passes together. */

@@ -57,7 +57,7 @@ export function spacePlate(facts: SheetFacts): string {
   const left =
     asCut === undefined
       ? ` A cutter of ${size(cutter.diameter)} does not enter it.`
-      : ` The cutter of ${size(cutter.diameter)} where it stands deepest${asCut.reachesRoot ? '' : ', short of the root'}; the darker metal is what it cannot reach, ${lengthOnly(asCut.leftAtRoot, job.length)} at its thickest, ${fixed(asCut.areaLeft, 4)} mm² a space.`;
+      : ` The cutter of ${size(cutter.diameter)} where it stands deepest${asCut.reachesRoot ? '' : ', short of the root'}; the darker metal is what it cannot reach, ${lengthOnly(asCut.leftAtRoot, job.length)} at its thickest, ${fixed(asCut.areaLeft, 4)} mm² a space. From the foot up the flank is cut as drawn.`;
   const largest =
     asCut === undefined
       ? ''
@@ -99,6 +99,6 @@ export function deviationPlate(facts: SheetFacts): string {
     facts,
     'deviation',
     svg,
-    `The cut flank against the exact curve along tooth ${figures.worstTooth}, the worst of all, read back from the program. The line through 0 is the exact curve; the band is what is allowed, ${tinyLength(allowed, facts.job.length, 1)} either way. Foot: above it the flank is cut as drawn, below it the round of the cutter stays.`,
+    `The cut flank against the exact curve along tooth ${figures.worstTooth}, the worst of all, read back from the program. The line through 0 is the exact curve; the band is what is allowed, ${tinyLength(allowed, facts.job.length, 1)} either way.`,
   );
 }

@@ -5,13 +5,14 @@
 import { materialNamed } from '../cutting/materials.ts';
 import { drawTable } from './draw-table.ts';
 import type { SheetFacts } from './facts.ts';
+import { keepClear } from './keep-clear.ts';
 import { HOLDING_WORDS } from './holding-words.ts';
 import { lengthBoth, lengthOnly, sizeOnly } from './lengths.ts';
 import { scaleWords } from './plate.ts';
 import { plateFigure } from './plate-numbers.ts';
 import { handSteps } from './hand-steps.ts';
 import { head, scroll } from './table-parts.ts';
-import { capitalised, duration, escapeText, plain } from './words.ts';
+import { capitalised, escapeText, plain } from './words.ts';
 
 export function setUpSection(facts: SheetFacts): string {
   if (facts.verdict !== 'pass') {
@@ -44,7 +45,7 @@ function blankSteps({ job }: SheetFacts): readonly string[] {
   const clamps =
     things === 0
       ? ''
-      : ` ${things === 1 ? 'The place kept out stands' : `The ${things} places kept out stand`} where the plate below shows; nothing else may stand inside the dashed line.`;
+      : ` ${things === 1 ? 'The place kept out stands' : `The ${things} places kept out stand`} where the plate below shows.`;
   return [
     `<b>Blank.</b> ${escapeText(`${form}, ${size(topZ - plateZ)} thick, ${words}.`)} ` +
       `${holding.map((hold) => escapeText(HOLDING_WORDS[hold](job))).join(' ')}${clamps}`,
@@ -102,7 +103,7 @@ function walkStep({ walkFile, proof, job }: SheetFacts): string {
   const reach =
     proof === undefined
       ? ''
-      : ` The work reaches in X from ${span(proof.extents.x)}, in Y from ${span(proof.extents.y)}, in Z from ${span(proof.extents.z)}.`;
+      : ` The cutters' middle reaches in X from ${span(proof.extents.x)}, in Y from ${span(proof.extents.y)}, in Z from ${span(proof.extents.z)}.`;
   return `<b>Walk round first:</b> run <span class="mark">${escapeText(walkFile ?? '')}</span> with the spindle still. It goes round the reaches and over what stands in the way, high up; watch it past every clamp and table edge.${reach}`;
 }
 
@@ -144,12 +145,22 @@ function tablePlate(facts: SheetFacts): string {
   if (plate === undefined) {
     return '';
   }
-  const seconds = facts.programs.reduce((sum, program) => sum + program.seconds, 0);
   return plateFigure(
     facts,
     'table',
     plate.svg,
     `The table from above, ${scaleWords(plate.scale)} on A4, and the heights from the side, to a scale of their own. ` +
-      `Dashed: as far as the centres of the cutters go, parking included, in ${duration(seconds)} of work. Hatched: what stands in the way.`,
+      clearWords(facts),
   );
+}
+
+function clearWords(facts: SheetFacts): string {
+  const clear = keepClear(facts);
+  const unit = facts.job.length;
+  const hatched =
+    facts.job.setup.obstacles.length === 0 ? '' : ' Hatched: what the job says stands in the way.';
+  return clear === undefined
+    ? hatched.trim()
+    : `Dashed: as far as cutters and shanks go below the clear height, ways in and out included; nothing may stand inside it but what the job names. ` +
+        `What stands higher than Z ${lengthOnly(clear.nutZ, unit)} keeps ${lengthOnly(clear.nutFurther, unit)} further away, for the collet nut.${hatched}`;
 }

@@ -9,8 +9,8 @@ export function findingsSection(facts: SheetFacts): string {
   const found = [...warnings(facts), ...findings(facts, 'warning')];
   const unseen = facts.proof?.notChecked ?? ['No program was made, so nothing was proved.'];
   return (
-    `<section>\n<h2>What was found</h2>\n${found.length === 0 ? `<p>${facts.verdict === 'pass' ? 'Nothing that needs a word.' : 'Nothing besides why it was refused.'}</p>` : list(found)}\n` +
-    `<div class="whole">\n<h2>What was not checked</h2>\n<ul class="columns">${[...new Set(unseen)].map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ul>\n</div>\n</section>`
+    `<section class="whole">\n<h2>What was found, and what was not checked</h2>\n${found.length === 0 ? `<p>Found: ${facts.verdict === 'pass' ? 'nothing that needs a word' : 'nothing besides why it was refused'}. Not checked:</p>` : `${list(found)}\n<p>Not checked:</p>`}\n` +
+    `<ul class="columns">${[...new Set(unseen)].map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ul>\n</section>`
   );
 }
 

@@ -18,7 +18,7 @@ const motion: Motion = {
   ],
 };
 const changes = {
-  cutters: [{ number: 2, diameter: 0.512, flutes: 2, stickOut: 14 }],
+  cutters: [{ number: 2, diameter: 0.512, flutes: 2, stickOut: 14, shank: 3 }],
   clear: 6.5,
   park: { x: 0, y: 0, z: 25 },
   program: { number: 2, of: 3 },

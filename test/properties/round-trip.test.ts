@@ -25,7 +25,7 @@ const HEADER: HeaderFacts = {
   blank: 'sheet',
   holding: 'glue',
   material: 'leaded-brass',
-  cutters: [{ number: 1, diameter: 1, flutes: 2, stickOut: 12 }],
+  cutters: [{ number: 1, diameter: 1, flutes: 2, stickOut: 12, shank: 3 }],
   speeds: [10000],
   extents: { x: [-60, 60], y: [-60, 60], z: [-3, 6] },
   clear: 5,

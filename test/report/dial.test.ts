@@ -4,7 +4,18 @@ import type { SheetPass } from '../../src/report/facts.ts';
 import { attributeOf } from '../support/svg-read.ts';
 
 function pass(name: string, seconds: number): SheetPass {
-  return { name, seconds, cutter: 1, speed: 1, feed: 1, plunge: 1, step: 1, laps: 1, depth: -1, why: [] };
+  return {
+    name,
+    seconds,
+    cutter: 1,
+    speed: 1,
+    feed: 1,
+    plunge: 1,
+    step: 1,
+    laps: [1, 1],
+    depth: -1,
+    why: [],
+  };
 }
 
 /** Clockwise from twelve, in turns. */

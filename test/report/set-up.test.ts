@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { sheetHtml } from '../../src/report/sheet.ts';
 import type { SheetFacts } from '../../src/report/facts.ts';
 import { attributeOf, elementOf, textsOf } from '../support/svg-read.ts';
-import { factsOf } from '../support/sheets.ts';
+import { factsOf, runOf } from '../support/sheets.ts';
 
 const facts = factsOf('third-wheel');
 
@@ -48,16 +48,19 @@ describe('the set-up', () => {
     expect(wordsOf(table)).toContain('14.000 mm(0.5512 in)');
   });
 
-  it('draws the reaches, the place to park and the heights as the proof has them', () => {
+  it('draws what must be kept clear, the place to park and the heights as the proof has them', () => {
     const extents = facts.proof?.extents;
     const scale = Number(/data-scale="([\d.]+)"/.exec(setUpOf(page))?.[1]);
-    const rect = elementOf(page, 'extents');
-    expect(Number(attributeOf(rect, 'x')) / scale).toBeCloseTo(extents?.x[0] ?? 0, 2);
-    expect(Number(attributeOf(rect, 'width')) / scale).toBeCloseTo(
-      (extents?.x[1] ?? 0) - (extents?.x[0] ?? 0),
-      2,
-    );
-    expect(-Number(attributeOf(rect, 'y')) / scale).toBeCloseTo(extents?.y[1] ?? 0, 2);
+    // By hand from the moves: ends of what goes below the clear height, arcs of the teeth lie within those of the bay and sides.
+    const low = facts.proof?.moves.filter(({ to }) => (to.z ?? 0) < facts.job.setup.clearZ) ?? [];
+    const thickest = Math.max(...facts.job.setup.cutters.map(({ shank }) => shank)) / 2;
+    const xs = low.map(({ to }) => to.x ?? 0);
+    const rect = elementOf(page, 'keep-clear');
+    const [left, width] = ['x', 'width'].map((name) => Number(attributeOf(rect, name)) / scale);
+    expect(left).toBeCloseTo(Math.min(...xs) - thickest, 1);
+    expect((left ?? 0) + (width ?? 0)).toBeCloseTo(Math.max(...xs) + thickest, 1);
+    // The bay beside tooth 1 reaches further than the ring of the finishing path.
+    expect(Math.max(...xs)).toBeGreaterThan(facts.form.outsideRadius + 1);
     for (const [figure, z] of [
       ['z-park', facts.park?.z],
       ['z-clear', facts.job.setup.clearZ],
@@ -108,6 +111,20 @@ describe('what is measured', () => {
     expect(chapters.map(([, number]) => Number(number))).toEqual(facts.passes.map((_, i) => i + 1));
     const total = chapters.reduce((sum, [, , seconds]) => sum + Number(seconds), 0);
     expect(Number(attributeOf(elementOf(page, 'seconds'), 'data-value'))).toBeCloseTo(total, 1);
+  });
+
+  it('"4 laps of 0.229 mm" of a bore whose program counts to 12: says laps as the comments of the programs count them', () => {
+    const { files } = runOf('third-wheel');
+    const text = files.map(({ name, text: one }) => (/-\d\.nc$/.test(name) ? one : '')).join('\n');
+    for (const pass of facts.passes) {
+      const name = pass.name.replace(/^crossings/, 'CROSSING \\d+').toUpperCase();
+      const counts = [
+        ...text.matchAll(new RegExp(`\\(${name.replace('D+', 'd+')},[^)]*LAP \\d+ OF (\\d+)`, 'g')),
+      ].map(([, count]) => Number(count));
+      expect([Math.min(...counts), Math.max(...counts)]).toEqual(pass.laps);
+    }
+    const bore = facts.passes.find(({ name }) => name === 'bore');
+    expect(page).toContain(`<td class="n">${bore?.laps.join('\u2013')}</td>`);
   });
 
   it('says each reason once, with the passes it holds for', () => {

@@ -15,7 +15,7 @@ export function headerFacts(motion: Motion, changes: Partial<HeaderFacts> = {}):
     blank: 'sheet 44.000 by 44.000 mm, 1.500 mm thick',
     holding: 'glue',
     material: 'leaded-brass',
-    cutters: [{ number: 1, diameter: 1, flutes: 2, stickOut: 12 }],
+    cutters: [{ number: 1, diameter: 1, flutes: 2, stickOut: 12, shank: 3 }],
     speeds,
     extents: { x, y, z },
     clear: 5,
