@@ -5,6 +5,7 @@ import { failure, success } from '../base/problem.ts';
 import { readJob } from '../job/read-job.ts';
 import { outlineDxf } from '../report/draw-dxf.ts';
 import { outlineSvg } from '../report/draw-outline.ts';
+import { sizeOnly } from '../report/lengths.ts';
 import type { OutlineShape } from '../report/outline-shape.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import { crossings } from '../tooth/crossings.ts';
@@ -93,6 +94,10 @@ function shapeOf(
     bore: job.wheel.bore,
     thickness: job.wheel.thickness,
     unit: job.length,
-    what: cut ? `as a cutter that cuts ${diameter} mm leaves it` : 'the exact outline',
+    ...(opened === undefined ? {} : { asCut: opened.value }),
+    what:
+      opened === undefined
+        ? 'the exact outline'
+        : `the outline that a cutter of ${sizeOnly(diameter, job.length)} leaves`,
   });
 }

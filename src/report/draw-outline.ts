@@ -12,13 +12,13 @@ import { capitalised, escapeText, plain } from './words.ts';
 const LINE = 5;
 
 export function outlineSvg(shape: OutlineShape): string {
-  const { title, form, what } = shape;
+  const { title, form, what, asCut } = shape;
   const unit = shape.unit ?? 'mm';
   const { teeth, module } = form.proportions;
   const words = (frame: PlateFrame): readonly string[] => [
     title,
     `${capitalised(what)}, ${scaleWords(frame.scale)}; figures in ${unitInWords(unit)}`,
-    `${teeth} teeth, module ${plain(module, 5)} mm`,
+    `${teeth} teeth, module ${plain(module, 5)} mm${asCut === undefined ? '' : '; below its foot the flank is rounder than the exact one, all else is as drawn'}`,
   ];
   const marks = (frame: PlateFrame): string =>
     words(frame)

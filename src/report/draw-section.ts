@@ -3,7 +3,7 @@
  * the diameters one outside the other. mm of paper, Y down.
  */
 import { arrowHead, uprightDimension } from './dimension.ts';
-import type { SizesPlate } from './draw-sizes.ts';
+import { floorOf, type SizesPlate } from './draw-sizes.ts';
 import { bareLength } from './lengths.ts';
 import { HEAVY, LIGHT, type PlateFrame } from './plate.ts';
 import { plain } from './words.ts';
@@ -20,7 +20,7 @@ export interface Diameter {
 }
 
 /** Rising. */
-export function diametersOf({ form, crossings, bore }: SizesPlate): readonly Diameter[] {
+export function diametersOf({ form, crossings, bore, asCut }: SizesPlate): readonly Diameter[] {
   const found: Diameter[] = [
     ...(bore > 0 ? [{ figure: 'bore', name: 'bore', value: bore }] : []),
     ...(crossings === undefined
@@ -29,7 +29,17 @@ export function diametersOf({ form, crossings, bore }: SizesPlate): readonly Dia
           { figure: 'hub', name: 'hub', value: 2 * crossings.hubRadius },
           { figure: 'rim-inside', name: 'in the rim', value: 2 * crossings.windowOuter },
         ]),
-    { figure: 'root-diameter', name: 'root circle', value: 2 * form.rootRadius },
+    {
+      figure: 'root-diameter',
+      name: asCut === undefined ? 'root circle' : 'exact root circle',
+      value: 2 * form.rootRadius,
+    },
+    ...(asCut === undefined
+      ? []
+      : [{ figure: 'foot-diameter', name: 'foot, as cut', value: 2 * asCut.footRadius }]),
+    ...(asCut === undefined || asCut.reachesRoot
+      ? []
+      : [{ figure: 'floor-diameter', name: 'floor, as cut', value: 2 * asCut.floorRadius }]),
     { figure: 'pitch-diameter', name: 'pitch circle', value: 2 * form.pitchRadius },
     { figure: 'tip-diameter', name: 'tip circle', value: 2 * form.outsideRadius },
   ];
@@ -63,6 +73,7 @@ const HATCH =
 /** Everything in brass first, then the hatching over what the cut goes through, then the edges. */
 function metal(plate: SizesPlate, frame: PlateFrame, left: number, right: number): string {
   const { form, crossings, bore } = plate;
+  const floor = floorOf(plate);
   const band = (inner: number, outer: number, kind: string): string =>
     [-1, 1]
       .map((side) => {
@@ -72,13 +83,13 @@ function metal(plate: SizesPlate, frame: PlateFrame, left: number, right: number
       .join('');
   const cut: [number, number][] =
     crossings === undefined
-      ? [[bore / 2, form.rootRadius]]
+      ? [[bore / 2, floor]]
       : [
           [bore / 2, crossings.hubRadius],
-          [crossings.windowOuter, form.rootRadius],
+          [crossings.windowOuter, floor],
         ];
   const arm = crossings === undefined ? '' : band(crossings.hubRadius, crossings.windowOuter, 'brass far');
-  const teeth = band(form.rootRadius, form.outsideRadius, 'brass');
+  const teeth = band(floor, form.outsideRadius, 'brass');
   const parts = cut
     .map(([inner, outer]) => band(inner, outer, 'brass') + band(inner, outer, 'hatched'))
     .join('');

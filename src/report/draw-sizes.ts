@@ -3,6 +3,7 @@
  * cut through the axis, with thickness and diameters. Figures in the job's unit, which the caption says.
  */
 import type { LengthUnit } from '../base/units.ts';
+import type { AsCut } from '../tooth/as-cut.ts';
 import { drawJaws, JAWS_HEIGHT } from './draw-jaws.ts';
 import { drawMetal, type Metal } from './draw-metal.ts';
 import { diametersOf, drawSection, SECTION_GAP, stackWidth } from './draw-section.ts';
@@ -22,6 +23,13 @@ import { coordinate } from './words.ts';
 export interface SizesPlate extends Metal {
   readonly thickness: number;
   readonly unit: LengthUnit;
+  /** Where the outline drawn is the one a cutter leaves: its foot and its floor, which are not the exact ones. */
+  readonly asCut?: Pick<AsCut, 'footRadius' | 'floorRadius' | 'reachesRoot'>;
+}
+
+/** Of the outline that is drawn. */
+export function floorOf({ form, asCut }: Pick<SizesPlate, 'form' | 'asCut'>): number {
+  return asCut?.floorRadius ?? form.rootRadius;
 }
 
 /** Room to the left of the wheel and to the right of the last figure, mm of paper. */

@@ -4,7 +4,7 @@
  */
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 import { pinchedDimension } from './dimension.ts';
-import type { SizesPlate } from './draw-sizes.ts';
+import { floorOf, type SizesPlate } from './draw-sizes.ts';
 import { bareLength } from './lengths.ts';
 import type { PlateFrame } from './plate.ts';
 import { plain } from './words.ts';
@@ -63,20 +63,22 @@ function chordAt(radius: number, chord: number): number {
   return Math.sqrt(Math.max(radius * radius - (chord * chord) / 4, 0));
 }
 
-function rimSize({ form, unit }: SizesPlate, crossings: Crossings, frame: PlateFrame): string {
+function rimSize(plate: SizesPlate, crossings: Crossings, frame: PlateFrame): string {
+  const { form, unit } = plate;
+  const floor = floorOf(plate);
   const angle = spaceNear(form, windowToTheLeft(crossings.count) + OFF_AXIS / crossings.count);
   const at = (radius: number) => ({
     x: radius * frame.scale * Math.cos(angle),
     y: -radius * frame.scale * Math.sin(angle),
   });
-  const value = form.rootRadius - crossings.windowOuter;
+  const value = floor - crossings.windowOuter;
   return pinchedDimension(
     {
       figure: 'rim',
       value,
       text: `rim ${bareLength(value, unit)}`,
       from: at(crossings.windowOuter),
-      to: at(form.rootRadius),
+      to: at(floor),
     },
     4.5,
     'start',

@@ -3,6 +3,7 @@ import type { LengthUnit } from '../base/units.ts';
 import { repeatRound, turnChain } from '../geometry/change-piece.ts';
 import { ORIGIN } from '../geometry/point.ts';
 import type { Loop } from '../geometry/piece.ts';
+import type { AsCut } from '../tooth/as-cut.ts';
 import type { Crossings, WheelForm, WheelPiece } from '../tooth/wheel.ts';
 
 export interface OutlineShape {
@@ -17,6 +18,8 @@ export interface OutlineShape {
   readonly thickness?: number;
   /** Unit of the figures on the drawing. */
   readonly unit?: LengthUnit;
+  /** Where the pitch is the one a cutter leaves. */
+  readonly asCut?: AsCut;
   /** "exact outline", "as a 0.5 mm cutter leaves it". */
   readonly what: string;
 }

@@ -5,6 +5,7 @@ import { sampleChain } from '../../src/geometry/sample-piece.ts';
 import { turnPoint } from '../../src/geometry/point.ts';
 import { CHORD_SAG } from '../../src/base/tolerances.ts';
 import { drawSizes, type SizesPlate } from '../../src/report/draw-sizes.ts';
+import { asCut } from '../../src/tooth/as-cut.ts';
 import { crossings } from '../../src/tooth/crossings.ts';
 import type { WheelProportions } from '../../src/tooth/wheel.ts';
 import { wheelForm } from '../../src/tooth/wheel-form.ts';
@@ -150,4 +151,42 @@ it('rests the jaws where the span is read: their gap is the reading', () => {
   const [left = 0, right = 0] = blades;
   const span = /data-figure="span-\d+-drawn" data-value="([\d.]+)"/.exec(svg)?.[1];
   expect((right - left) / scale).toBeCloseTo(Number(span), 2);
+});
+
+describe('"root circle" on the drawing of what a cutter leaves, where no metal ends at it', () => {
+  const plate = plateOf(60, 0.5, 5, 'mm');
+  const drawn = (diameter: number): string => {
+    const cut = asCut(plate.form, diameter);
+    if (!cut.ok) {
+      throw new Error('does not enter');
+    }
+    return drawSizes({ ...plate, sector: cut.value.sector, asCut: cut.value }, 'x').svg;
+  };
+  const value = (svg: string, figure: string): number =>
+    Number(attributeOf(elementOf(svg, figure), 'data-value'));
+
+  it('is called exact, and the foot that is cut stands beside it', () => {
+    const svg = drawn(0.5);
+    expect(textsOf(svg).some((text) => text.startsWith('exact root circle'))).toBe(true);
+    expect(textsOf(svg).some((text) => text.startsWith('root circle'))).toBe(false);
+    expect(value(svg, 'foot-diameter')).toBeGreaterThan(value(svg, 'root-diameter'));
+    expect(svg).not.toContain('floor-diameter');
+    // What is not touched by the cutter's round is called what it is called on the exact drawing.
+    const exact = drawSizes(plate, 'x').svg;
+    for (const figure of ['tip-diameter', 'pitch-diameter', 'bore', 'rim']) {
+      expect(value(svg, figure)).toBe(value(exact, figure));
+    }
+  });
+
+  it('has the floor of a cutter that does not reach it, and the rim measured to that floor', () => {
+    const svg = drawn(0.78);
+    const short = value(svg, 'floor-diameter') - value(svg, 'root-diameter');
+    expect(short).toBeGreaterThan(0);
+    const rim = value(drawSizes(plate, 'x').svg, 'rim');
+    expect(value(svg, 'rim')).toBeCloseTo(rim + short / 2, 5);
+  });
+
+  it('is the root circle of the exact wheel elsewhere', () => {
+    expect(textsOf(drawSizes(plate, 'x').svg).some((text) => text.startsWith('root circle'))).toBe(true);
+  });
 });
