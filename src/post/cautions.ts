@@ -38,7 +38,7 @@ function stillSpindle(facts: HeaderFacts, machine: Machine): readonly string[] {
   const lowest = lengthInWords(facts.extents.z[0], machine.units);
   return facts.kind === 'walk'
     ? [
-        `This program turns no spindle and goes round at height ${lowest}, never below it. Switch the spindle's power off, have the first cutter in and its height touched off, a hand on feed hold: watch that the cutter passes over or round everything that stands on the table`,
+        `This program turns no spindle and goes round at height ${lowest}, never below it. Switch off the power of the spindle, have the first cutter in and its height touched off, a hand on feed hold: watch that the cutter passes over or round everything that stands on the table`,
       ]
     : ['This program is for the air: no blank, no cutter near anything'];
 }

@@ -19,12 +19,17 @@ export function handSteps(facts: SheetFacts): readonly string[] {
         stops.push(...step.say.map(sentence));
         cutter = step.number;
       } else if (step.kind === 'stop') {
-        stops.push(`At the stop: ${step.say.map(sentence).join(' ')}`);
+        stops.push(`${AT_STOP} ${step.say.map(sentence).join(' ')}`);
       }
     }
-    return `<b>Run</b> <span class="mark">${escapeText(program.file)}</span>, ${passWords(facts, program)}, ${duration(program.seconds)}. ${escapeText(jobText([...stops, ...notes].join(' '), facts.job.length))}`;
+    const words = [...stops, ...notes].map((text) => escapeText(jobText(text, facts.job.length)));
+    return `<b>Run</b> <span class="mark">${escapeText(program.file)}</span>, ${passWords(facts, program)}, ${duration(program.seconds)}. ${words.join(' ').replaceAll(` ${STOPS}`, `<br>${STOPS}`).replaceAll(` ${AT_STOP}`, `<br>${AT_STOP}`)}`;
   });
 }
+
+/** Where hands come in a new line begins. */
+const STOPS = 'It stops,';
+const AT_STOP = 'At the stop:';
 
 function fitted(facts: SheetFacts, number: number): string {
   return facts.machine.words.cutters.change === 'automatic'
@@ -36,7 +41,7 @@ function fitted(facts: SheetFacts, number: number): string {
 function changed(facts: SheetFacts, number: number): string {
   return facts.machine.words.cutters.change === 'automatic'
     ? `Then it changes to cutter ${number} by itself; its length must be in the table of the controller.`
-    : `It stops, parked high and aside with the spindle still: fit cutter ${number}.`;
+    : `${STOPS} parked high and aside with the spindle still: fit cutter ${number}.`;
 }
 
 /** The numerals of the passes it holds. */

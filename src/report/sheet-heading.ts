@@ -11,7 +11,7 @@ export function heading(facts: SheetFacts): string {
   return (
     `<header>\n<h1>${escapeText(job.title)}</h1>\n<p class="what">${partWords(facts)}</p>\n` +
     `<p class="soft">For the machine <span class="mark">${escapeText(machine.name)}</span>${time}. Job <span class="mark">${escapeText(job.name)}</span>, ` +
-    `mark <span class="mark">${facts.mark}</span>, which the programs carry too. Ogive ${escapeText(facts.version)}.</p>\n${verdict(facts)}</header>`
+    `mark <span class="mark">${facts.mark}</span>${facts.verdict === 'pass' ? ', which the programs carry too' : ''}. Ogive ${escapeText(facts.version)}.</p>\n${verdict(facts)}</header>`
   );
 }
 

@@ -52,7 +52,7 @@ function passesTable(facts: SheetFacts): string {
   const total = facts.passes.reduce((sum, pass) => sum + pass.seconds, 0);
   return (
     scroll('passes', 'whole') +
-    '<table>\n<caption>Passes. Down: the feed on the way down; a lap: once round, and how much deeper at most; where a hole is cleared in rings, each ring makes its own count of laps. Times are reckoned with the acceleration in the machine file; what hands do comes on top.</caption>\n<thead><tr>' +
+    '<table>\n<caption>Passes.</caption>\n<thead><tr>' +
     head(
       [
         '',
@@ -69,7 +69,8 @@ function passesTable(facts: SheetFacts): string {
       [3, 4, 5, 6, 7, 8, 9],
     ) +
     `</tr></thead>\n<tbody>${facts.passes.map((pass, i) => passRow(facts, pass, i)).join('\n')}</tbody>\n` +
-    `<tfoot><tr><td></td><td colspan="8">all passes</td><td class="n" data-figure="seconds" data-value="${fixed(total, 3)}">${inMinutes(total)}</td></tr></tfoot>\n</table></div>\n`
+    `<tfoot><tr><td></td><td colspan="8">all passes</td><td class="n" data-figure="seconds" data-value="${fixed(total, 3)}">${inMinutes(total)}</td></tr></tfoot>\n</table></div>\n` +
+    '<p class="soft note">Down: the feed on the way down. A lap: once round, and how much deeper at most; where a hole is cleared in rings, each ring makes its own count of laps. Times are reckoned with the acceleration in the machine file; what hands do comes on top.</p>\n'
   );
 }
 

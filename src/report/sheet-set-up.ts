@@ -111,7 +111,7 @@ function walkStep({ walkFile, proof, job }: SheetFacts): string {
 function airStep({ job, proof, programs }: SheetFacts): string {
   const { topZ, clearZ } = job.setup;
   const raise = topZ - (proof?.extents.z[0] ?? 0) + clearZ - topZ;
-  return `<b>In the air:</b> raise the zero of Z by ${lengthBoth(raise, job.length)} and run <span class="mark">${escapeText(programs[0]?.file ?? '')}</span> so, rapid override low, a hand on feed hold. Put the zero back, and go block by block down to the first cut.`;
+  return `<b>In the air:</b> raise the zero of Z by ${lengthBoth(raise, job.length)}, and parking with it, and run <span class="mark">${escapeText(programs[0]?.file ?? '')}</span> so, rapid override low, a hand on feed hold. Put the zero back, and go block by block down to the first cut.`;
 }
 
 function cuttersTable(facts: SheetFacts): string {

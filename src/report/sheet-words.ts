@@ -67,7 +67,7 @@ function list(items: readonly string[]): string {
 export function cautionsSection({ cautions }: SheetFacts): string {
   return cautions.length === 0
     ? ''
-    : `<section>\n<h2>Cautions</h2>\n<ol class="columns">${cautions.map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ol>\n</section>`;
+    : `<section class="whole">\n<h2>Cautions</h2>\n<ol class="columns">${cautions.map((line) => `<li>${escapeText(sentence(line))}</li>`).join('\n')}</ol>\n</section>`;
 }
 
 /** Values that share a reason stand together. */

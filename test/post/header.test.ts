@@ -68,6 +68,16 @@ describe('head of a program [29 CFR 1910.212; ISO 12100; what a set-up needs to 
     }
   });
 
+  it('names the work offset where there is one, in words that no controller acts on', () => {
+    expect(joined(headerLines(facts, desk))).toContain('kept in the first work offset');
+    const third = changedMachine(desk, { positions: { workOffset: 'G56' } });
+    expect(joined(headerLines(facts, third))).toContain('kept in the third work offset');
+    expect(joined(headerLines(facts, postMachine('lines-only')))).toContain(
+      'The controller has this one zero',
+    );
+    expect(joined(headerLines(facts, third))).not.toMatch(/G5[4-9]/);
+  });
+
   it('is in inches on a machine that works in inches, with millimetres beside the size to check', () => {
     const lines = joined(headerLines(facts, postMachine('inch-bench-mill')));
     expect(lines).toContain('INCHES');
@@ -116,6 +126,13 @@ describe('cautions', () => {
     ['stick-out', /sticking out 14\.000 mm/],
     ['spindle speed', /18500 turns a minute/],
     ['guards, gloves, hair', /Guards shut.*No gloves, loose cuffs, long hair/],
+    ['power off before hands come near', /power off the spindle before hands go near/],
+    [
+      'what goes beyond the middle of the cutter [shank 3, nut 19 of the desk machine: half of each; -1.6 + 14]',
+      /shank go 1\.500 mm further.*above height 12\.400 mm the collet nut goes 9\.500 mm further/,
+    ],
+    ['the way it turns', /turns the way the cutter cuts/],
+    ['fluid', /fluid.*off the skin/],
     ['eyes and ears', /glasses.*ear protection/],
     ['emergency stop and lost place', /emergency stop.*lost/],
     ['unattended', /Stay with it/],

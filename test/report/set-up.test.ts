@@ -33,7 +33,7 @@ describe('the set-up', () => {
     ],
     [
       'how high to raise zero for a run in the air',
-      /raise the zero of Z by 6\.600 mm \(0\.2598 in\) and run third-wheel-1\.nc/,
+      /raise the zero of Z by 6\.600 mm \(0\.2598 in\), and parking with it, and run third-wheel-1\.nc/,
     ],
     ['each program in order', /Run third-wheel-1\.nc.*Run third-wheel-2\.nc.*Run third-wheel-3\.nc/],
     ['touching off anew after a change of cutter', /touch off its height/i],
