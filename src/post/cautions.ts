@@ -103,7 +103,7 @@ function besideTheCutter(
   const wide = Math.max(...cutters.map(({ diameter, shank }) => Math.max(diameter, shank))) / 2;
   const nut = extents.z[0] + Math.min(...cutters.map(({ stickOut }) => stickOut));
   const length = (mm: number): string => lengthInWords(mm, units);
-  return `. They are those of its middle: cutter and shank go ${length(wide)} further to every side, and above height ${length(nut)} the collet nut goes ${length(limits.nut.diameter / 2)} further`;
+  return `. The reaches are those of the middle of the cutter: cutter and shank go ${length(wide)} further to every side, and above height ${length(nut)} the collet nut goes ${length(limits.nut.diameter / 2)} further`;
 }
 
 function whenItStops(facts: HeaderFacts, machine: Machine): readonly string[] {

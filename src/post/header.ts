@@ -53,7 +53,7 @@ function zeroPlace({ words }: Machine): string {
   const index = ['G54', 'G55', 'G56', 'G57', 'G58', 'G59', 'G59.1', 'G59.2', 'G59.3'].indexOf(workOffset);
   return index < 0
     ? 'The controller has this one zero'
-    : `They are kept in the ${place[index] ?? ''} work offset`;
+    : `All three are kept in the ${place[index] ?? ''} work offset`;
 }
 
 /** Where this is one of the programs that are run in order; a walk-round and a sheet are none. */
