@@ -18,6 +18,12 @@ const SQUARES = 100;
 const FINEST = 0.06;
 /** A slot is at least this many squares wide. */
 const ACROSS = 3;
+/**
+ * Fewer squares may be a ridge between two cuts, which goes as a chip; and where a slot is fewer squares wide than it should be,
+ * what is left on a tooth before it is finished, told apart from the tooth.
+ */
+const FEWEST = 3;
+const FEWEST_COARSE = 9;
 /** A slot deeper than this share of the diameter breaks small cutters, whatever the material. */
 const DEEPEST_BITE = 1.05;
 
@@ -29,7 +35,10 @@ export function checkLoose(evidence: Evidence): Finding[] {
   }
   const reach = cutReach(evidence, body.form.outsideRadius);
   const through = setup.plateZ + lastDigit;
-  const raster = blankRaster(setup, reach, squareSize(evidence, reach), through);
+  const narrowest = Math.min(...setup.cutters.map(({ diameter }) => diameter));
+  const size = Math.max(FINEST, Math.min(reach / SQUARES, narrowest / ACROSS));
+  const fewest = size * ACROSS > narrowest ? FEWEST_COARSE : FEWEST;
+  const raster = blankRaster(setup, reach, size, through);
   const cutting: Cutting = {
     raster,
     height: new Float64Array(solids.count).fill(Number.NaN),
@@ -51,17 +60,12 @@ export function checkLoose(evidence: Evidence): Finding[] {
       drawWaiting(cutting, evidence.paths);
       // Nothing new comes loose where nothing more was cut through.
       const piece =
-        raster.opened > opened ? loosePiece(raster, body, setup.shape.kind === 'sheet') : undefined;
+        raster.opened > opened ? loosePiece(raster, body, setup.shape.kind === 'sheet', fewest) : undefined;
       opened = raster.opened;
       loose.push(...(piece === undefined ? [] : [cameLoose(solids.moves[i]!, piece)]));
     }
   }
   return [...loose, ...(worst.path === undefined ? [] : [tooDeep(solids, worst.path, worst.bite)])];
-}
-
-function squareSize({ input }: Evidence, reach: number): number {
-  const narrowest = Math.min(...input.setup.cutters.map(({ diameter }) => diameter));
-  return Math.max(FINEST, Math.min(reach / SQUARES, narrowest / ACROSS));
 }
 
 /** How far from the axis anything is cut, and a little more, so that the sheet's edge is seen round it. */

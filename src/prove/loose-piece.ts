@@ -15,9 +15,6 @@ export interface Piece {
   readonly area: number;
 }
 
-/** One square or two may be a ridge between two cuts, which goes as a chip. */
-const FEWEST = 3;
-
 /** Runs of squares in reading order, as columns of numbers. */
 interface Runs {
   readonly row: number[];
@@ -26,8 +23,13 @@ interface Runs {
   readonly to: number[];
 }
 
-/** The largest loose piece, if there is one. */
-export function loosePiece(raster: Raster, body: WheelBody, isSheet: boolean): Piece | undefined {
+/** The largest loose piece of `fewest` squares or more, if there is one. */
+export function loosePiece(
+  raster: Raster,
+  body: WheelBody,
+  isSheet: boolean,
+  fewest: number,
+): Piece | undefined {
   const runs = runsOf(raster);
   const piece = joinRuns(runs);
   const squares = new Int32Array(piece.length);
@@ -43,7 +45,7 @@ export function loosePiece(raster: Raster, body: WheelBody, isSheet: boolean): P
       held[piece[k]!] = 1;
     }
   }
-  return largestOf(raster, runs, squares, held);
+  return largestOf(raster, runs, squares, held, fewest);
 }
 
 function runsOf({ columns, rows, left, through }: Raster): Runs {
@@ -117,11 +119,12 @@ function largestOf(
   { row, from, to }: Runs,
   squares: Int32Array,
   held: Uint8Array,
+  fewest: number,
 ): Piece | undefined {
   let worst: Piece | undefined;
   for (let k = 0; k < squares.length; k++) {
     const area = squares[k]! * size * size;
-    if (held[k] === 0 && squares[k]! >= FEWEST && area > (worst?.area ?? 0)) {
+    if (held[k] === 0 && squares[k]! >= fewest && area > (worst?.area ?? 0)) {
       worst = { x: x0 + ((from[k]! + to[k]! - 1) / 2) * size, y: y0 + row[k]! * size, area };
     }
   }

@@ -43,7 +43,11 @@ function notReadOf(traces: readonly Trace[]): string[] {
   return [
     'what the controller itself does otherwise than its machine file says',
     ...(alone > 0
-      ? [`${String(alone)} % line${alone === 1 ? '' : 's'}: the second reader cannot hold them`]
+      ? [
+          alone === 1
+            ? '1 line that holds only %: the second reader cannot read it'
+            : `${String(alone)} lines that hold only %: the second reader cannot read them`,
+        ]
       : []),
     ...(passedOver > 0
       ? [
