@@ -4,24 +4,28 @@ import type { Cutter } from '../cutting/setup.ts';
 import { neededPasses } from './derive-cuts.ts';
 import { jobProblem, type JobProblem } from './job-problem.ts';
 import { PASS_KINDS, type JobText } from './job-schema.ts';
-import type { WheelJob } from './job.ts';
+import type { Job, WheelJob } from './job.ts';
 import { showLength } from './show-length.ts';
 
-export function checkCutters(text: JobText, cutters: readonly Cutter[]): Problem[] {
+export function checkCutters(text: JobText, cutters: readonly Cutter[], derived: Job['derived']): Problem[] {
   if (cutters.length === 0) {
     const hint = 'Give at least one: 1: { diameter: 0.5, flutes: 2, reach: 2.0 }.';
     return [jobProblem({ path: ['cutters'], code: 'job.invalid', message: 'there is no cutter.', hint })];
   }
-  return [...cutters.flatMap((cutter) => sizes(cutter, text)), ...named(text, cutters)].map(jobProblem);
+  return [...cutters.flatMap((cutter) => sizes(cutter, text, derived)), ...named(text, cutters)].map(
+    jobProblem,
+  );
 }
 
 /** How much wider or narrower than its box says a cutter may cut. Why: beyond a tenth one of the two is a slip of the pen. */
 const CUTS_SHARE = 0.1;
 
-function sizes(cutter: Cutter, text: JobText): JobProblem[] {
+function sizes(cutter: Cutter, text: JobText, derived: Job['derived']): JobProblem[] {
   const show = (mm: number): string => showLength(mm, text.length ?? 'mm');
   const at = (key: string): (string | number)[] => ['cutters', String(cutter.number), key];
   const problems: JobProblem[] = [];
+  const saysReach = derived[`cutters.${cutter.number}.reach`] === undefined;
+  const assumed = saysReach ? '' : ' (assumed, as the job does not say it)';
   if (Math.abs(cutter.diameter - cutter.nominal) > CUTS_SHARE * cutter.nominal) {
     const message = `${show(cutter.diameter)} is far from the diameter of ${show(cutter.nominal)}.`;
     problems.push({
@@ -39,11 +43,11 @@ function sizes(cutter: Cutter, text: JobText): JobProblem[] {
     });
   }
   if (cutter.stickOut <= cutter.reach) {
-    const message = `it sticks out ${show(cutter.stickOut)}, no more than its reach of ${show(cutter.reach)}: the collet would strike the blank.`;
+    const message = `it sticks out ${show(cutter.stickOut)}, no more than its reach of ${show(cutter.reach)}${assumed}: the collet would strike the blank.`;
     problems.push({
       path: at('stick-out'),
       message,
-      hint: 'The stick-out is measured from the tip to the collet.',
+      hint: `The stick-out is measured from the tip to the collet${saysReach ? '' : '; write the reach too'}.`,
     });
   }
   if (cutter.shank < cutter.nominal) {

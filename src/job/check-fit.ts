@@ -7,7 +7,7 @@ import { WRITTEN_LENGTH } from '../base/tolerances.ts';
 import type { Cutter, Setup } from '../cutting/setup.ts';
 import type { WheelForm } from '../tooth/wheel.ts';
 import { jobProblem, type JobProblem } from './job-problem.ts';
-import type { CutSettings, Cuts, PassKind, WheelJob } from './job.ts';
+import type { CutSettings, Cuts, Derived, Job, PassKind, WheelJob } from './job.ts';
 import { showLength } from './show-length.ts';
 import type { LengthUnit } from '../base/units.ts';
 
@@ -17,6 +17,8 @@ export interface FitGround {
   readonly form: WheelForm;
   readonly setup: Setup;
   readonly cuts: Cuts;
+  /** What the job left out, by its key: a length that was only assumed is not told as if it had been said. */
+  readonly derived: Job['derived'];
 }
 
 export function checkFit(ground: FitGround): Problem[] {
@@ -67,15 +69,19 @@ function blank({ form, setup, cuts }: FitGround, show: Show): JobProblem[] {
 }
 
 /** From the top of the blank to the deepest cut: no cutter rubs above its reach. */
-function reach({ wheel, cuts }: FitGround, show: Show): JobProblem[] {
+function reach({ wheel, cuts, derived }: FitGround, show: Show): JobProblem[] {
   const deep = wheel.thickness + cuts.below;
   const short = cuts.order.filter((pass) => cuts[pass].cutter.reach < deep - WRITTEN_LENGTH);
   const numbers = [...new Set(short.map((pass) => cuts[pass].cutter.number))];
   return numbers.map((number) => {
     const passes = short.filter((pass) => cuts[pass].cutter.number === number);
     const reaches = show(cuts[passes[0] ?? 'roughing'].cutter.reach);
-    const message = `cutter ${number} reaches ${reaches}; ${passes.join(' and ')} ${passes.length > 1 ? 'are' : 'is'} ${deepOf({ wheel, cuts }, show)}.`;
-    const hint = 'Take a cutter with a longer neck or flute; this one would rub above its reach.';
+    const assumed = derived[`cutters.${number}.reach`];
+    const message = `cutter ${number} reaches ${reaches}${asAssumed(assumed)}; ${passes.join(' and ')} ${passes.length > 1 ? 'are' : 'is'} ${deepOf({ wheel, cuts }, show)}.`;
+    const hint =
+      assumed === undefined
+        ? 'Take a cutter with a longer neck or flute; this one would rub above its reach.'
+        : 'If it is longer, write its reach (what fits beside a wall) and its flute (what cuts); else take a longer one.';
     return { path: ['cutters', String(number), 'reach'], message, hint };
   });
 }
@@ -87,16 +93,24 @@ function deepOf({ wheel, cuts }: Pick<FitGround, 'wheel' | 'cuts'>, show: Show):
     : `${deep} deep`;
 }
 
-function flute(pass: PassKind, { wheel, cuts }: FitGround, show: Show): JobProblem[] {
+/** For a length that the job does not say. */
+function asAssumed(derived: Derived | undefined): string {
+  return derived === undefined ? '' : ` (assumed, as the job does not say: ${derived.why})`;
+}
+
+function flute(pass: PassKind, { wheel, cuts, derived }: FitGround, show: Show): JobProblem[] {
   const { cutter, step }: CutSettings = cuts[pass];
   const deep = wheel.thickness + cuts.below - WRITTEN_LENGTH;
+  const assumed = derived[`cutters.${cutter.number}.flute`];
+  const longer = assumed === undefined ? '' : 'If its flute is longer, write it; else g';
   if (step !== undefined && step > cutter.flute) {
-    const message = `a step of ${show(step)} is more than the flute of cutter ${cutter.number}, ${show(cutter.flute)}.`;
-    return [{ path: ['cuts', pass, 'step'], message, hint: `Give a step of at most ${show(cutter.flute)}.` }];
+    const message = `a step of ${show(step)} is more than the flute of cutter ${cutter.number}, ${show(cutter.flute)}${asAssumed(assumed)}.`;
+    const hint = `${longer || 'G'}ive a step of at most ${show(cutter.flute)}.`;
+    return [{ path: ['cuts', pass, 'step'], message, hint }];
   }
   if (pass === 'finishing' && step === undefined && cutter.flute < deep && cutter.reach >= deep) {
-    const message = `finishing is ${deepOf({ wheel, cuts }, show)}, but cutter ${cutter.number} cuts only ${show(cutter.flute)} of its length.`;
-    const hint = `Give finishing a step of at most ${show(cutter.flute)}, or take a cutter with a longer flute.`;
+    const message = `finishing is ${deepOf({ wheel, cuts }, show)}, but cutter ${cutter.number} cuts only ${show(cutter.flute)} of its length${asAssumed(assumed)}.`;
+    const hint = `${longer || 'G'}ive finishing a step of at most ${show(cutter.flute)}, or take a cutter with a longer flute.`;
     return [{ path: ['cutters', String(cutter.number), 'flute'], message, hint }];
   }
   return [];

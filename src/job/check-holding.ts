@@ -3,6 +3,7 @@ import type { Problem } from '../base/problem.ts';
 import { WRITTEN_LENGTH } from '../base/tolerances.ts';
 import { holdingOf, skinOf } from './derive-setup.ts';
 import { jobProblem, type JobProblem } from './job-problem.ts';
+import { SCREW_FORM } from './job-schema-blank.ts';
 import type { JobText, WheelText } from './job-schema.ts';
 import { showLength } from './show-length.ts';
 
@@ -28,7 +29,8 @@ function holds(text: JobText): JobProblem[] {
     });
   } else if (holding.every((one) => one === 'screw')) {
     const message = 'a screw alone does not hold: cutting turns the wheel off it.';
-    problems.push({ path, message, hint: 'Add a second hold: [glue, { screw: … }], or tape, or an arbor.' });
+    const hint = `Add a second hold: ${SCREW_FORM}, with the sizes of yours; tape or arbor will do for glue.`;
+    problems.push({ path, message, hint });
   }
   const twice = holding.find((one, i) => holding.indexOf(one) !== i);
   if (twice !== undefined) {

@@ -51,8 +51,10 @@ function checkMate({ mate }: WheelText): Problem[] {
         code: both ? 'job.conflict' : 'job.invalid',
         message: both
           ? 'a mate has leaves or trundles, not both.'
-          : 'the mate has neither leaves nor trundles.',
-        hint: 'Give leaves: for a pinion cut from the solid, or trundles: for a lantern pinion.',
+          : 'how many leaves the mate has is not given.',
+        hint: both
+          ? 'Keep leaves: for a pinion cut from the solid; wheels for a lantern pinion come in a later version.'
+          : 'Give leaves: of the pinion that the wheel drives.',
       }),
     ];
   }
@@ -63,7 +65,7 @@ function checkMate({ mate }: WheelText): Problem[] {
       jobProblem({
         path: ['wheel', 'mate', key],
         message: `${key} belongs to a ${mate.trundles === undefined ? 'lantern pinion' : 'pinion with leaves'}.`,
-        hint: `Leave ${key} out, or say ${mate.trundles === undefined ? 'trundles' : 'leaves'}.`,
+        hint: mate.trundles === undefined ? `Leave ${key} out.` : `Leave ${key} out, or say leaves.`,
       }),
     );
 }

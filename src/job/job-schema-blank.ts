@@ -6,11 +6,13 @@ import {
   choiceOf,
   lengthIn,
   lengthOf,
+  listed,
   pointIn,
   valueOf,
   type Range,
   type Read,
 } from './job-schema-values.ts';
+import { showValue } from './read-number.ts';
 
 export const HOLDINGS = ['glue', 'tape', 'arbor', 'skin'] as const;
 
@@ -30,11 +32,8 @@ export function blankSchema(unit: LengthUnit) {
       }).optional(),
       bored: boredOf(unit).optional(),
       holding: z.union([
-        choiceOf(
-          { says: 'What holds it: glue, tape, arbor, skin, or a list with { screw: … }', example: 'glue' },
-          HOLDINGS,
-        ),
-        z.array(z.union([choiceOf({ says: 'What holds it', example: 'glue' }, HOLDINGS), screwSchema(unit)])),
+        holdOf('What holds it: glue, tape, arbor, skin, or a list of them'),
+        z.array(z.union([holdOf('What holds it: glue, tape, arbor or skin'), screwSchema(unit)])),
       ]),
       skin: length('With holding skin: how much stays under the wheel', 0.08, {
         least: 0.01,
@@ -44,12 +43,33 @@ export function blankSchema(unit: LengthUnit) {
         .array(keepOutSchema(unit))
         .meta({
           description: 'Clamps and the like: { x, y, radius, height }, solid from the plate up',
-          examples: ['[]'],
+          examples: ['[{ x: 18, y: 18, radius: 6, height: 12 }]'],
         })
         .optional(),
     })
     .meta({ description: 'The piece it is made from, and how it is held' });
 }
+
+/** One hold by its name. A screw by itself is a likely slip, and its form cannot be guessed: it is shown. */
+function holdOf(says: string) {
+  return valueOf({ says, example: 'glue' }, { enum: HOLDINGS }, (value): Read<(typeof HOLDINGS)[number]> => {
+    const hold = HOLDINGS.find((one) => one === value);
+    if (hold !== undefined) {
+      return { value: hold };
+    }
+    const screw = value === 'screw' || (typeof value === 'object' && value !== null && 'screw' in value);
+    return screw
+      ? {
+          message:
+            'a screw is said with its sizes, in a list, beside something that keeps the wheel from turning.',
+          hint: `Write ${SCREW_FORM}, with the sizes of yours; tape or arbor will do for glue.`,
+        }
+      : { message: `${showValue(value)} is not known here. Use ${listed(HOLDINGS)}.` };
+  });
+}
+
+/** How a screw is written, for whoever has to write one. */
+export const SCREW_FORM = '[glue, { screw: { head: 8.0, height: 4.0, thread: 3.0 } }]';
 
 function screwSchema(unit: LengthUnit) {
   const length = (says: string, example: number) =>

@@ -15,11 +15,11 @@ export function wheelSchema(unit: LengthUnit) {
         'mm',
       ).optional(),
       'diametral-pitch': numberOf(
-        { says: 'Instead of a module: teeth to an inch of pitch diameter', example: 50.8 },
+        { says: 'Instead of module: teeth to an inch of pitch diameter', example: 50.8 },
         { least: 4, most: 500 },
       ).optional(),
       centres: length(
-        'Distance of the two pivots the pair will run at; alone, the module follows from it',
+        'Distance of the two pivots the pair will run at; instead of module, which then follows from it, or beside it',
         17,
         { least: 1, most: 500 },
       ).optional(),
@@ -84,10 +84,13 @@ function mateSchema() {
         most: 5,
       }),
       trundles: countOf(
-        { says: 'Instead of leaves: pins of a lantern pinion', example: 8 },
+        { says: 'Instead of leaves: pins of a lantern pinion; comes in a later version', example: 8 },
         range,
       ).optional(),
-      trundle: inModules('Diameter of a trundle, in modules', 1.05, { least: 0.4, most: 2.5 }),
+      trundle: inModules('Diameter of a trundle, in modules; comes in a later version', 1.05, {
+        least: 0.4,
+        most: 2.5,
+      }),
     })
     .meta({ description: 'The pinion it runs with' });
 }

@@ -3,6 +3,7 @@
  * What the example sets stands as a line, everything else behind a comment mark with an example: take away "# " and the line
  * is in its place. The JSON Schema for editors is the schema itself.
  */
+import { SCREW_FORM } from './job-schema-blank.ts';
 import { jobJsonSchema, type JsonSchema } from './job-schema.ts';
 
 export { jobJsonSchema };
@@ -40,12 +41,24 @@ const HEAD = [
   '# A job for ogive: one wheel, from its measurements to a program. It runs as it is: ogive cut THIS-FILE',
   '# Plain lengths are in the unit that `length` says; a value may say its own: 0.5 mm, 3/64 inch.',
   '# Lines that begin with "# " may be used too: take the mark away. What is left out is derived, and the sheet says why.',
+  '# Where such a line says "Instead of", put the mark before the line whose place it takes.',
   '',
 ];
 
 export function newJob(): string {
   return `${[...HEAD, ...linesOf(jobJsonSchema())].join('\n')}\n`;
 }
+
+/** Keys of the schema that are refused until wheels for lantern pinions can be cut: not offered. */
+const LATER = ['wheel.mate.trundles', 'wheel.mate.trundle'];
+
+/** A second form of a line, shown under it. */
+const FORMS: Readonly<Record<string, readonly string[]>> = {
+  'blank.holding': [
+    'With a screw, which wants a second hold beside it and a hole, given as bored, to go through:',
+    `holding: ${SCREW_FORM}`,
+  ],
+};
 
 interface Line {
   readonly live: boolean;
@@ -67,6 +80,9 @@ function group(key: string, schema: JsonSchema, path: readonly string[]): Line[]
   if (key === 'cutters') {
     return cutterLines(schema);
   }
+  if (LATER.includes(here.join('.'))) {
+    return [];
+  }
   const children = Object.entries(schema.properties ?? {}).flatMap(([name, child]) =>
     group(name, child, here),
   );
@@ -78,9 +94,13 @@ function group(key: string, schema: JsonSchema, path: readonly string[]): Line[]
   const comment = schema.description ?? leaf.description;
   const value = EXAMPLE[here.join('.')];
   const example = value ?? String(schema.examples?.[0] ?? leaf.examples?.[0] ?? '');
+  const forms = (FORMS[here.join('.')] ?? []).map((form) => ({ live: false, text: '', comment: form }));
   return comment === undefined
     ? []
-    : [{ live: value !== undefined, text: `${indent}${key}: ${example}`, comment: choices(comment, leaf) }];
+    : [
+        { live: value !== undefined, text: `${indent}${key}: ${example}`, comment: choices(comment, leaf) },
+        ...forms,
+      ];
 }
 
 function choices(comment: string, { enum: options }: JsonSchema): string {

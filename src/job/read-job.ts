@@ -72,7 +72,7 @@ function understand(
   const wheel = deriveWheel(text.wheel, notes);
   const alone = [
     ...checkHolding(text, text.wheel),
-    ...checkCutters(text, cutters),
+    ...checkCutters(text, cutters, notes.all()),
     ...(wheel.ok ? checkOrder(text, wheel.value) : wheel.problems),
   ];
   const ground = { file, text, unit, cutters, notes };
@@ -149,7 +149,7 @@ function fillIn({ file, text, unit, cutters, notes }: Ground, shapes: Shapes): J
   const ground = { text, ...shapes, cutters, below };
   const setup = deriveSetup(ground, notes);
   const cuts = deriveCuts(ground, notes);
-  const fit = { unit, ...shapes, setup, cuts };
+  const fit = { unit, ...shapes, setup, cuts, derived: notes.all() };
   return {
     name: nameOf(file),
     file,

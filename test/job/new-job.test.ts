@@ -12,6 +12,9 @@ function keysOf(schema: JsonSchema, path: string): string[] {
   });
 }
 
+/** Refused until wheels for lantern pinions can be cut. */
+const LATER = ['wheel.mate.trundles', 'wheel.mate.trundle'];
+
 describe('the starter job', () => {
   it('runs as it is', () => {
     const job = readJob('new.yaml', newJob());
@@ -20,7 +23,7 @@ describe('the starter job', () => {
   });
   it('has every key that a job may have, with its meaning', () => {
     const lines = newJob().split('\n');
-    const keys = keysOf(jobJsonSchema(), '').filter((path) => path !== 'pinion');
+    const keys = keysOf(jobJsonSchema(), '').filter((path) => path !== 'pinion' && !LATER.includes(path));
     for (const path of keys) {
       const key = path.split('.').at(-1) ?? '';
       expect(lines.filter((line) => new RegExp(`^(# )? *${key}:`).test(line)).length, path).toBeGreaterThan(
@@ -34,10 +37,31 @@ describe('the starter job', () => {
     expect(yaml.problems).toEqual([]);
     const problems = readJob('new.yaml', bare).problems.filter(({ severity }) => severity === 'error');
     expect(problems.map(({ at }) => (at.kind === 'value' ? at.path.join('.') : ''))).toEqual([
-      'wheel.mate.trundles',
       'wheel.diametral-pitch',
       'blank.skin',
     ]);
+  });
+});
+
+describe('the starter job, read by somebody who changes it', () => {
+  it('offers no lantern pinion, which is refused', () => {
+    expect(newJob()).not.toMatch(/trundle/);
+  });
+  it('says of a diametral pitch which line it takes the place of', () => {
+    expect(newJob()).toMatch(/diametral-pitch: \S+ +# Instead of module:/);
+    const changed = newJob()
+      .replace(/^ {2}module:/m, '# $&')
+      .replace(/^# ( *diametral-pitch:)/m, '$1');
+    expect(readJob('new.yaml', changed).problems).toEqual([]);
+  });
+  it('shows how a screw is written: beside a second hold, with a hole', () => {
+    const changed = newJob()
+      .replace(/^ {2}holding:/m, '# $&')
+      .replace(/^ {2}# (holding: \[.*\])$/m, '  $1\n  bored: 4.0');
+    expect(changed).toMatch(/\n {2}holding: .*screw/);
+    const job = readJob('new.yaml', changed);
+    expect(job.problems).toEqual([]);
+    expect(job.ok && job.value.setup.holding).toEqual(['glue', 'screw']);
   });
 });
 
