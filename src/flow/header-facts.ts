@@ -1,4 +1,5 @@
 /** What a program's header and the sheet's set-up say, gathered from job, machine, shapes and plan. mm. */
+import { fixedDecimals } from '../base/fixed-decimals.ts';
 import { millimetresPer, type LengthUnit } from '../base/units.ts';
 import type { Job } from '../job/job.ts';
 import type { Machine } from '../machine/machine.ts';
@@ -39,8 +40,9 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
   const motions = kind === 'walk' ? [plan.walk] : programs.map(({ motion }) => motion);
   const { x, y, z, speeds } = together(motions.map(factsOf));
   const numbers = kind === 'walk' ? [] : programs.flatMap(({ cutters }) => cutters);
-  // A program speaks its machine's unit, the sheet the job's.
+  // A program speaks its machine's unit, with the job's beside it where a person measures; the sheet speaks the job's.
   const unit = i === 'all' ? job.length : sources.machine.units;
+  const jobs = job.length === sources.machine.units ? {} : { jobUnit: job.length };
   return {
     kind,
     title: job.title,
@@ -50,6 +52,7 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
     program: { number: kind === 'walk' || i === 'all' ? 0 : i + 1, of: plan.programs.length },
     blank: blankWords(job, unit, i === 'all'),
     holding: job.setup.holding.join(' and '),
+    ...jobs,
     material: job.setup.material,
     cutters: job.setup.cutters.filter(({ number }) => numbers.includes(number)).map(headerCutter),
     speeds,
@@ -105,19 +108,24 @@ function partLines({ job, form, crossings }: HeaderSources, unit: LengthUnit): r
   const { teeth, module, mate } = form.proportions;
   const mateWords =
     mate.kind === 'pinion' ? `pinion of ${mate.leaves} leaves` : `lantern of ${mate.trundles} trundles`;
+  const both = (mm: number): string =>
+    unit === job.length ? size(mm, unit) : `${size(mm, unit)} or ${size(mm, job.length)}`;
   const holes = [
-    job.wheel.bore > 0 ? `bore ${size(job.wheel.bore, unit)}` : 'no bore',
+    job.wheel.bore > 0 ? `bore ${both(job.wheel.bore)}` : 'no bore',
     crossings === undefined ? 'no crossings' : `${crossings.count} crossings`,
   ];
   return [
-    `wheel of ${teeth} teeth, module ${decimal(module)}, for a ${mateWords}, ${size(job.wheel.thickness, unit)} thick, ${holes.join(', ')}`,
+    `wheel of ${teeth} teeth, module ${decimal(module)}, for a ${mateWords}, ${both(job.wheel.thickness)} thick, ${holes.join(', ')}`,
   ];
 }
 
 /** Alloys with their numbers for the sheet only: in a program C353 would read as a word that moves. */
 function blankWords(job: Job, unit: LengthUnit, alloys: boolean): string {
   const { shape, topZ, plateZ } = job.setup;
-  const thick = `${size(topZ - plateZ, unit)} thick`;
+  const sizes = shape.kind === 'sheet' ? [shape.width, shape.height] : [shape.diameter];
+  const bare = [...sizes, topZ - plateZ].map((mm) => size(mm, job.length).replace(/ .*/, ''));
+  const asInJob = unit === job.length ? '' : `, in ${job.length} ${bare.join(' by ')}`;
+  const thick = `${size(topZ - plateZ, unit)} thick${asInJob}`;
   const words =
     shape.kind === 'sheet'
       ? `sheet ${size(shape.width, unit)} by ${size(shape.height, unit)}, ${thick}, its middle at zero`
@@ -146,5 +154,5 @@ function size(mm: number, unit: LengthUnit): string {
 }
 
 function decimal(value: number, decimals = 4): string {
-  return value.toFixed(decimals).replace(/\.?0+$/, '');
+  return fixedDecimals(value, decimals).replace(/\.?0+$/, '');
 }

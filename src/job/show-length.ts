@@ -1,4 +1,5 @@
 /** Lengths in the messages of a job: in mm, and for a job in inches with inches first. */
+import { fixedDecimals } from '../base/fixed-decimals.ts';
 import { MM_PER_INCH, type LengthUnit } from '../base/units.ts';
 
 export function showLength(mm: number, unit: LengthUnit): string {
@@ -14,6 +15,5 @@ export function showRange(least: number, most: number, unit: LengthUnit): string
 
 /** At most so many decimals, without zeros at the end. */
 export function figure(value: number, decimals: number): string {
-  const shown = String(Number(value.toFixed(decimals)));
-  return shown === '-0' ? '0' : shown;
+  return String(Number(fixedDecimals(value, decimals)));
 }

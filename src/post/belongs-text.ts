@@ -4,6 +4,7 @@
  *
  * In  : the step's `Belongs`, the program's unit. Out: `Roughing, lap 3 of 12, down to -0.3600 mm, tooth 5`.
  */
+import { fixedDecimals } from '../base/fixed-decimals.ts';
 import { millimetresPer, type LengthUnit } from '../base/units.ts';
 import type { Belongs } from '../motion/motion.ts';
 
@@ -45,11 +46,15 @@ export function belongsElsewhere(a: Belongs | undefined, b: Belongs): boolean {
 /** A length with its unit as a word: three decimals of a millimetre, four of an inch. */
 export function lengthInWords(mm: number, unit: LengthUnit): string {
   const decimals = unit === 'mm' ? 3 : 4;
-  const text = (mm / millimetresPer(unit)).toFixed(decimals);
-  return `${Number(text) === 0 ? (0).toFixed(decimals) : text} ${unit}`;
+  return `${fixedDecimals(mm / millimetresPer(unit), decimals)} ${unit}`;
 }
 
 /** A size that tells a wrong unit: in the program's unit first, then in the other. */
 export function bothUnits(mm: number, unit: LengthUnit): string {
   return `${lengthInWords(mm, unit)} or ${lengthInWords(mm, unit === 'mm' ? 'inch' : 'mm')}`;
+}
+
+/** What a person holds a rule to: in the program's unit, and in the job's where that is another. */
+export function lengthToMeasure(mm: number, unit: LengthUnit, jobUnit: LengthUnit | undefined): string {
+  return jobUnit === undefined || jobUnit === unit ? lengthInWords(mm, unit) : bothUnits(mm, unit);
 }

@@ -7,7 +7,7 @@
  * ISO 13850 (emergency stop), NISTIR 6556 App. A (a controller checks neither travel nor collisions). Wording is our own.
  */
 import type { Machine } from '../machine/machine.ts';
-import { bothUnits, lengthInWords } from './belongs-text.ts';
+import { bothUnits, lengthInWords, lengthToMeasure } from './belongs-text.ts';
 import type { HeaderFacts } from './header-facts.ts';
 import { materialCautions } from './material-cautions.ts';
 
@@ -45,6 +45,7 @@ function stillSpindle(facts: HeaderFacts, machine: Machine): readonly string[] {
 
 function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[] {
   const length = (mm: number): string => lengthInWords(mm, machine.units);
+  const measured = (mm: number): string => lengthToMeasure(mm, machine.units, facts.jobUnit);
   const { extents, clear, park } = facts;
   const deepest = extents.z[0];
   return [
@@ -55,7 +56,7 @@ function beforeTheStart(facts: HeaderFacts, machine: Machine): readonly string[]
     `The words are in ${machine.units === 'mm' ? 'MILLIMETRES' : 'INCHES'}. A part that measures anything but ${bothUnits(facts.check.size, machine.units)} at ${facts.check.what} is in the wrong unit or badly set: stop`,
     ...facts.cutters.map(
       (cutter) =>
-        `Cutter ${cutter.number} must be the one of ${length(cutter.diameter)}, clean in its collet, sticking out ${length(cutter.stickOut)} and no more, its length measured again after fitting`,
+        `Cutter ${cutter.number} must be the one of ${measured(cutter.diameter)}, clean in its collet, sticking out ${measured(cutter.stickOut)} and no more, its length measured again after fitting`,
     ),
     `The blank is held by ${facts.holding}: pull at it before the start, and keep every clamp outside the reaches above or named in the job`,
   ];

@@ -1,4 +1,5 @@
 /** What the head of a program and the sheet tell about it: plain data, filled by the caller. mm, 1/min. */
+import type { LengthUnit } from '../base/units.ts';
 import type { Position } from '../motion/motion.ts';
 import type { Span } from './motion-facts.ts';
 
@@ -23,6 +24,8 @@ export interface HeaderFacts {
   /** This program's place in the order they are run, 1-based; 0 for the walk-round and for all of them together. */
   readonly program: { readonly number: number; readonly of: number };
   readonly blank: string;
+  /** Unit of the job, where the machine's is another: what a person measures is then told in both. */
+  readonly jobUnit?: LengthUnit;
   readonly holding: string;
   /** The job's word for it: 'leaded-brass', 'steel'. */
   readonly material: string;

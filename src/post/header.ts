@@ -5,7 +5,7 @@
  *       into the machine's comment letters and line length. Lengths are printed in the program's unit, by its name.
  */
 import type { Machine } from '../machine/machine.ts';
-import { bothUnits, lengthInWords } from './belongs-text.ts';
+import { bothUnits, lengthInWords, lengthToMeasure } from './belongs-text.ts';
 import { cautions } from './cautions.ts';
 import type { HeaderFacts } from './header-facts.ts';
 import type { Span } from './motion-facts.ts';
@@ -23,6 +23,7 @@ export function headerLines(facts: HeaderFacts, machine: Machine): readonly stri
 
 export function setUpLines(facts: HeaderFacts, machine: Machine): readonly string[] {
   const length = (mm: number): string => lengthInWords(mm, machine.units);
+  const measured = (mm: number): string => lengthToMeasure(mm, machine.units, facts.jobUnit);
   const span = ([low, high]: Span): string => `from ${length(low)} to ${length(high)}`;
   const { park, check, extents } = facts;
   return [
@@ -35,7 +36,7 @@ export function setUpLines(facts: HeaderFacts, machine: Machine): readonly strin
     `Blank: ${facts.blank}. Material: ${facts.material}. Held by ${facts.holding}`,
     ...facts.cutters.map(
       (cutter) =>
-        `Cutter ${cutter.number}: cuts ${length(cutter.diameter)} wide, ${cutter.flutes} flutes, sticking out ${length(cutter.stickOut)}`,
+        `Cutter ${cutter.number}: cuts ${measured(cutter.diameter)} wide, ${cutter.flutes} flutes, sticking out ${measured(cutter.stickOut)}`,
     ),
     spindleLine(facts, machine),
     `Zero of X and Y: the axis of the wheel. Zero of height: ${facts.zero === 'top' ? 'the top of the blank' : 'the plate under the blank'}. ${zeroPlace(machine)}. To find it again: ${facts.again}`,

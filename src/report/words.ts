@@ -1,4 +1,6 @@
 /** How the report writes numbers, times and names: every figure with its unit, the same in every country. */
+import { fixedDecimals } from '../base/fixed-decimals.ts';
+
 /** Text as it may stand between tags or in a quoted attribute. */
 export function escapeText(text: string): string {
   return text
@@ -12,9 +14,8 @@ export function escapeText(text: string): string {
 
 /** A number without an exponent, without -0, with at most so many decimals and no trailing noughts. */
 export function plain(value: number, decimals: number): string {
-  const text = value.toFixed(decimals);
-  const short = text.includes('.') ? text.replace(/\.?0+$/, '') : text;
-  return short === '-0' ? '0' : short;
+  const text = fixedDecimals(value, decimals);
+  return text.includes('.') ? text.replace(/\.?0+$/, '') : text;
 }
 
 /** A place on a drawing, mm: four decimals, quickly. */
@@ -22,10 +23,9 @@ export function coordinate(value: number): string {
   return String(Math.round(value * 1e4) / 1e4);
 }
 
-/** A number with just so many decimals. */
+/** A number with just so many decimals, without -0. */
 export function fixed(value: number, decimals: number): string {
-  const text = value.toFixed(decimals);
-  return Number(text) === 0 ? text.replace('-', '') : text;
+  return fixedDecimals(value, decimals);
 }
 
 /** "0.1 min", "9.4 min", "61 min": minutes only, as the dial counts them, a decimal where they are few. */

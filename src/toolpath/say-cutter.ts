@@ -3,6 +3,7 @@
  *
  * In  : the task. Out: sentences for the comments of a program.
  */
+import { fixedDecimals } from '../base/fixed-decimals.ts';
 import { millimetresPer, type LengthUnit } from '../base/units.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import type { CutTask } from './cut-task.ts';
@@ -48,7 +49,7 @@ function placeWords(task: CutTask): string {
   const { units } = task.machine;
   const { x, y } = touchPlace(task);
   const decimals = units === 'mm' ? 2 : 3;
-  const beside = (mm: number): string => (Math.abs(mm) / millimetresPer(units)).toFixed(decimals);
+  const beside = (mm: number): string => fixedDecimals(Math.abs(mm) / millimetresPer(units), decimals);
   const right = Number(beside(x)) === 0 ? '' : `${beside(x)} ${units} ${x > 0 ? 'right' : 'left'} of`;
   const behind = Number(beside(y)) === 0 ? '' : `${beside(y)} ${units} ${y > 0 ? 'behind' : 'in front of'}`;
   if (behind === '') {
@@ -58,5 +59,5 @@ function placeWords(task: CutTask): string {
 }
 
 function length(mm: number, unit: LengthUnit): string {
-  return `${(mm / millimetresPer(unit)).toFixed(unit === 'mm' ? 3 : 4)} ${unit}`;
+  return `${fixedDecimals(mm / millimetresPer(unit), unit === 'mm' ? 3 : 4)} ${unit}`;
 }

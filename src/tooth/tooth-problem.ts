@@ -2,6 +2,7 @@
  * A problem of the form, placed at the value of the job that it comes from. The file's name and the line are filled in by
  * whoever read the job.
  */
+import { fixedDecimals } from '../base/fixed-decimals.ts';
 import type { Problem } from '../base/problem.ts';
 import type { ProblemCode } from '../base/problem-codes.ts';
 
@@ -20,5 +21,5 @@ export function toothProblem({ code, severity = 'error', key, message, hint }: T
 
 /** A length in a message: 0.1 um is the finest that anyone measures. */
 export function mm(length: number): string {
-  return `${Number(length.toFixed(4))} mm`;
+  return `${Number(fixedDecimals(length, 4))} mm`;
 }

@@ -87,6 +87,16 @@ describe('head of a program [29 CFR 1910.212; ISO 12100; what a set-up needs to 
     expect(lines).not.toContain('-1.600 mm');
   });
 
+  it('tells what a person of an inch job measures in both units on a machine that works in millimetres', () => {
+    const sixteenth = { number: 2, diameter: 1.5875, flutes: 2, stickOut: 12.7 };
+    const lines = joined(headerLines({ ...facts, jobUnit: 'inch', cutters: [sixteenth] }, desk));
+    expect(lines).toContain(
+      'cuts 1.588 mm or 0.0625 inch wide, 2 flutes, sticking out 12.700 mm or 0.5000 inch',
+    );
+    expect(lines).toContain('must be the one of 1.588 mm or 0.0625 inch');
+    expect(joined(headerLines({ ...facts, jobUnit: 'mm' }, desk))).toContain('cuts 0.512 mm wide');
+  });
+
   it('is a text of its own where the machine reads no comments', () => {
     const silent = changedMachine(desk, { file: { commentForm: 'none' } });
     const program = writeOne(silent, motion, { ...changes, title: 'two\nlines' });
