@@ -12,7 +12,7 @@ import { refusedText } from './flow/refused-text.ts';
 import { withRunoutOfMachine } from './flow/runout-of-machine.ts';
 import { sheetFacts, type Made, type Shapes, type Understood } from './flow/sheet-facts.ts';
 import { checkJobOnMachine } from './job/check-job.ts';
-import { placeInJob } from './job/place-problems.ts';
+import { placeAt, placeInJob } from './job/place-problems.ts';
 import { readJob } from './job/read-job.ts';
 import { targetOfJob } from './job/target-of-job.ts';
 import { readMachine } from './machine/read-machine.ts';
@@ -75,7 +75,8 @@ export function cut(input: CutInput): CutResult {
   }
   const found = input.findMachine(job.value.machine);
   if (!found.ok) {
-    return { exit: 2, problems: [...job.problems, ...found.problems], files: [] };
+    const problems = placeAt(found.problems, ['machine'], job.value);
+    return { exit: 2, problems: [...job.problems, ...problems], files: [] };
   }
   const machine = readMachine(found.value.name, found.value.file, found.value.text, input.loadMachine);
   if (!machine.ok) {

@@ -4,8 +4,14 @@ import type { Place, Problem } from './problem.ts';
 export function showProblem(problem: Problem): string {
   const place = showPlace(problem.at);
   const warning = problem.severity === 'warning' ? 'warning: ' : '';
-  const first = place === '' ? `${warning}${problem.message}` : `${place} ${warning}${problem.message}`;
-  return problem.hint === undefined ? first : `${first}\n  ${problem.hint}`;
+  const message = printable(problem.message);
+  const first = place === '' ? `${warning}${message}` : `${printable(place)} ${warning}${message}`;
+  return problem.hint === undefined ? first : `${first}\n  ${printable(problem.hint)}`;
+}
+
+/** A name or a value of a file that is shown must not clear the screen, colour it, or begin a line of its own. */
+function printable(text: string): string {
+  return text.replaceAll(/\p{Cc}+/gu, ' ');
 }
 
 function showPlace(at: Place): string {

@@ -16,8 +16,8 @@ import {
   rmSync,
   writeFileSync,
 } from 'node:fs';
-import { basename, dirname, join, resolve } from 'node:path';
-import type { Outcome } from '../base/problem.ts';
+import { dirname, join, resolve } from 'node:path';
+import type { Outcome, Problem } from '../base/problem.ts';
 import { failure, success } from '../base/problem.ts';
 
 /** Bytes of the largest input that is read. Why: a program of a million lines has some 30 MB; an input file far less. */
@@ -28,32 +28,54 @@ export function readText(path: string, largest = LARGEST): Outcome<string> {
   try {
     const about = statSync(path);
     if (!about.isFile() && !about.isDirectory() && !isStandardInput(path)) {
-      return unreadable(path, 'is no regular file');
+      return unreadable(path, 'it is no file but a pipe or a device');
     }
-    const handle = openSync(path, 'r');
+    // Opened by its name, a socket that stands for standard input would not answer.
+    const handle = isStandardInput(path) ? STANDARD_INPUT : openSync(path, 'r');
     try {
       const stat = fstatSync(handle);
       if (stat.isDirectory()) {
-        return unreadable(path, 'is a folder, not a file');
+        return unreadable(path, 'it is a folder, not a file');
       }
       if (stat.size > largest) {
-        return unreadable(path, `holds ${stat.size} bytes; at most ${largest} are read`);
+        return unreadable(path, `it holds ${stat.size} bytes; at most ${largest} are read`);
       }
       const bytes = readBounded(handle, largest);
       return bytes === undefined
-        ? unreadable(path, `holds more than ${largest} bytes`)
+        ? unreadable(path, `it holds more than ${largest} bytes`)
         : success(bytes.toString('utf8'));
     } finally {
-      closeSync(handle);
+      if (handle !== STANDARD_INPUT) {
+        closeSync(handle);
+      }
     }
   } catch (error) {
     return unreadable(path, reasonOf(error));
   }
 }
 
+const STANDARD_INPUT = 0;
+
 /** A pipe that is named waits for ever for somebody to write; only the one we were started with is read. */
-function isStandardInput(path: string): boolean {
+export function isStandardInput(path: string): boolean {
   return path === '/dev/stdin' || path === '/dev/fd/0';
+}
+
+/** Where a job's own paths count from; one that comes through a pipe has only the folder we were started in. */
+export function folderOf(jobFile: string): string {
+  return isStandardInput(jobFile) ? '.' : dirname(jobFile);
+}
+
+/** A job that comes through a pipe lies in no folder that its files could be put beside. */
+export function noPlace(path: string, wanted: string): Problem {
+  return {
+    code: 'file.unwritable',
+    severity: 'error',
+    message:
+      'a job that is read from here lies in no folder: where its files go is not known. Nothing was written.',
+    hint: `Say where: --out ${wanted}.`,
+    at: { kind: 'file', file: path },
+  };
 }
 
 /** Standard input says no size: read until the end or the bound. */
@@ -80,6 +102,8 @@ export interface NewFile {
 }
 
 export interface Change {
+  /** 'there': the folder is not made; a name that was mistyped would make one. */
+  readonly folder?: 'made' | 'there';
   readonly write: readonly NewFile[];
   /** Renamed within the folder before the new files take their places. */
   readonly rename: readonly { readonly from: string; readonly to: string }[];
@@ -90,6 +114,9 @@ export function changeFolder(folder: string, change: Change): Outcome<null> {
   const temporary = (name: string): string => join(folder, `.${name}.part`);
   const written: string[] = [];
   const renamed: { from: string; to: string }[] = [];
+  if (change.folder === 'there' && !existsSync(folder)) {
+    return failure([noFolder(folder)]);
+  }
   try {
     makeFolder(folder);
     for (const file of change.write) {
@@ -118,6 +145,16 @@ export function changeFolder(folder: string, change: Change): Outcome<null> {
       },
     ]);
   }
+}
+
+function noFolder(folder: string): Problem {
+  return {
+    code: 'file.unwritable',
+    severity: 'error',
+    message: 'there is no such folder. Nothing was written.',
+    hint: 'Make it first, or look whether its name is right.',
+    at: { kind: 'file', file: folder },
+  };
 }
 
 /** With the folders above it. Not by Node's own `recursive`: where a folder is there and takes none (/proc), that never ends. */
@@ -204,7 +241,7 @@ function unreadable(path: string, why: string): Outcome<never> {
     {
       code: 'file.unreadable',
       severity: 'error',
-      message: `${basename(path) === path ? '' : `${basename(path)} `}${why}.`,
+      message: `${why}.`,
       at: { kind: 'file', file: path },
     },
   ]);
@@ -219,9 +256,18 @@ const REASONS: Readonly<Record<string, string>> = {
   ENOTDIR: 'a part of the path is a file, not a folder',
   EISDIR: 'it is a folder',
   ENODEV: 'something that is no regular file stands there',
+  ENAMETOOLONG: 'the name is too long',
+  ELOOP: 'links in the path lead round in a ring',
+  EIO: 'what stands there gives nothing that can be read',
+  ENXIO: 'nothing answers there',
+  EAGAIN: 'nothing was there to be read',
+  EBUSY: 'another program holds it',
+  EMFILE: 'too many files are open',
+  // What Node itself says of a name with a NUL in it.
+  ERR_INVALID_ARG_VALUE: 'no file can have such a name',
 };
 
 function reasonOf(error: unknown): string {
   const code = (error as { code?: string }).code ?? '';
-  return REASONS[code] ?? (code === '' ? String(error) : code);
+  return REASONS[code] ?? (code === '' ? String(error) : `the system says ${code}`);
 }

@@ -1,6 +1,7 @@
 /** The words of the command line. Each command is loaded only when it is asked for, so that help comes at once. */
 import { Command, CommanderError } from 'commander';
 import { nearestWord } from '../base/nearest-word.ts';
+import { usageWords, type AskedCommand } from './usage-words.ts';
 
 declare const OGIVE_VERSION: string;
 
@@ -20,7 +21,7 @@ export async function runProgram(args: readonly string[]): Promise<Exit> {
     program.outputHelp();
     return 0;
   }
-  const stranger = unknownCommand(program, args);
+  const stranger = unknownCommand(program, args) ?? emptyWord(program, args);
   if (stranger !== undefined) {
     process.stderr.write(`${stranger}\n`);
     return 2;
@@ -29,7 +30,11 @@ export async function runProgram(args: readonly string[]): Promise<Exit> {
     await program.parseAsync(args, { from: 'user' });
   } catch (error) {
     if (error instanceof CommanderError) {
-      return error.exitCode === 0 ? 0 : 2;
+      if (error.exitCode === 0) {
+        return 0;
+      }
+      process.stderr.write(`${usageWords(error, askedOf(program, args))}\n`);
+      return 2;
     }
     throw error;
   }
@@ -44,11 +49,41 @@ function unknownCommand(command: Command, [word = '-', ...rest]: readonly string
   }
   const known = command.commands.find((one) => one.name() === word);
   if (known !== undefined || word === 'help') {
-    return known && unknownCommand(known, rest);
+    return unknownCommand(known ?? command, rest);
   }
   const near = nearestWord(word, names);
   const group = command.parent === null ? '' : `${command.name()} `;
   return `there is no command '${group}${word}'${near === undefined ? '' : `; did you mean '${group}${near}'?`} (ogive ${group}--help tells more)`;
+}
+
+/** A name that a script left empty: `--out "$FOLDER"` would write beside the job, which nobody asked for. */
+function emptyWord(program: Command, args: readonly string[]): string | undefined {
+  const at = args.findIndex((word) => word === '' || /^--[a-z-]+=$/.test(word));
+  if (at < 0) {
+    return undefined;
+  }
+  const before = args[at] === '' ? args[at - 1] : args[at]?.slice(0, -1);
+  const where = before?.startsWith('--') === true ? `behind ${before}` : 'in place of a name';
+  return `an empty text stands ${where}: was a name left out? (${askedOf(program, args).typed} --help tells more)`;
+}
+
+/** The command that the first words name. */
+function askedOf(program: Command, args: readonly string[]): AskedCommand {
+  let asked = program;
+  let typed = program.name();
+  for (const word of args) {
+    const next = asked.commands.find((one) => one.name() === word);
+    if (next === undefined) {
+      break;
+    }
+    asked = next;
+    typed = `${typed} ${word}`;
+  }
+  return {
+    typed,
+    options: [...asked.options.flatMap(({ long }) => long ?? []), '--help'],
+    wants: asked.registeredArguments.map((argument) => argument.name()),
+  };
 }
 
 type Done = (code: Exit) => void;
@@ -58,7 +93,8 @@ function describe(done: Done): Command {
     .description('Clock wheels from measurements to a proved milling program.')
     .version(version())
     .option('--notices', 'print the notices of the libraries inside')
-    .showHelpAfterError('(ogive --help tells more)')
+    .showSuggestionAfterError(false)
+    .configureOutput({ outputError: () => undefined })
     .exitOverride()
     .helpCommand('help [command]', 'the help of a command')
     .addHelpText('after', EXAMPLES);

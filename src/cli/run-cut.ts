@@ -1,13 +1,14 @@
 /** `ogive cut`: reads the job, runs the flow, and puts its files in place; or says why there are none. */
-import { basename, dirname, join, resolve } from 'node:path';
+import { basename, join, resolve } from 'node:path';
 import type { Problem } from '../base/problem.ts';
 import { showProblem } from '../base/show-problem.ts';
 import { cut, type CutResult } from '../cut.ts';
-import { changeFolder, readText } from './files.ts';
+import { changeFolder, folderOf, isStandardInput, noPlace, readText } from './files.ts';
 import { sha256 } from './hash.ts';
 import { findMachine, ownMachine } from './own-machines.ts';
 import { keepOldPrograms, programsIn } from './old-programs.ts';
 import type { Exit } from './program.ts';
+import { duration } from '../report/words.ts';
 import { terminalOf, type Terminal } from './terminal.ts';
 
 export interface CutOptions {
@@ -19,6 +20,10 @@ export interface CutOptions {
 
 export function runCut(jobFile: string, options: CutOptions, version: string): Exit {
   const terminal = terminalOf(options.quiet === true);
+  if (options.out === undefined && isStandardInput(jobFile)) {
+    terminal.problems([noPlace(jobFile, 'FOLDER; they are called stdin-1 and so on')]);
+    return 2;
+  }
   const job = readText(jobFile);
   if (!job.ok) {
     terminal.problems(job.problems);
@@ -28,15 +33,15 @@ export function runCut(jobFile: string, options: CutOptions, version: string): E
     file: jobFile,
     text: job.value,
     version,
-    findMachine: (name) => findMachine(name, jobFile),
+    findMachine: (name) => findMachine(name, { file: jobFile, folder: folderOf(jobFile) }),
     loadMachine: ownMachine,
-    readCutters: (path) => readText(resolve(dirname(jobFile), path)),
+    readCutters: (path) => readText(resolve(folderOf(jobFile), path)),
     hash: sha256,
     stage: terminal.progress,
   });
   terminal.progressDone();
   terminal.problems(result.problems);
-  const folder = options.out ?? dirname(jobFile);
+  const folder = options.out ?? folderOf(jobFile);
   if (result.exit === 2) {
     sayOfOldOnes(folder, jobFile, terminal);
     return 2;
@@ -118,7 +123,7 @@ function doneWords(result: CutResult, folder: string): string {
     return '';
   }
   const um = (mm: number): string => `${(mm * 1000).toFixed(2)} um`;
-  const minutes = facts.programs.map(({ seconds }) => String(Math.max(1, Math.round(seconds / 60))));
+  const times = facts.programs.map(({ seconds }) => duration(seconds));
   const counts = facts.programs.map(({ blocks }) => String(blocks));
   const column = (texts: readonly string[], i: number): string =>
     (texts[i] ?? '').padStart(Math.max(...texts.map((text) => text.length)));
@@ -126,7 +131,7 @@ function doneWords(result: CutResult, folder: string): string {
     [facts.walkFile ?? '', 'run first: round the work at clear height, spindle still'],
     ...facts.programs.map(({ file, cutters }, i) => [
       file,
-      `cutter ${cutters.join(', ')}, ${column(minutes, i)} min, ${column(counts, i)} blocks`,
+      `cutter ${cutters.join(', ')}, ${column(times, i)}, ${column(counts, i)} blocks`,
     ]),
     [`${facts.job.name}.html`, 'the sheet to read beside the machine'],
     [`${facts.job.name}.svg`, 'the drawing'],

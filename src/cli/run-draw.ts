@@ -10,7 +10,7 @@ import type { OutlineShape } from '../report/outline-shape.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
-import { changeFolder, isThere, readText } from './files.ts';
+import { changeFolder, folderOf, isStandardInput, isThere, noPlace, readText } from './files.ts';
 import type { Exit } from './program.ts';
 import { terminalOf } from './terminal.ts';
 
@@ -23,12 +23,16 @@ export interface DrawOptions {
 
 export function runDraw(jobFile: string, options: DrawOptions): Exit {
   const terminal = terminalOf(options.quiet === true);
+  if (options.out === undefined && isStandardInput(jobFile)) {
+    terminal.problems([noPlace(jobFile, 'FILE, or - for stdout')]);
+    return 2;
+  }
   const text = readText(jobFile);
   if (!text.ok) {
     terminal.problems(text.problems);
     return 2;
   }
-  const job = readJob(jobFile, text.value, (path) => readText(resolve(dirname(jobFile), path)));
+  const job = readJob(jobFile, text.value, (path) => readText(resolve(folderOf(jobFile), path)));
   terminal.problems(job.problems);
   if (!job.ok) {
     return 2;
@@ -49,7 +53,11 @@ export function runDraw(jobFile: string, options: DrawOptions): Exit {
     terminal.problems([notOurs(file, ending)]);
     return 2;
   }
-  const done = changeFolder(dirname(file), { write: [{ name: basename(file), text: drawing }], rename: [] });
+  const done = changeFolder(dirname(file), {
+    folder: 'there',
+    write: [{ name: basename(file), text: drawing }],
+    rename: [],
+  });
   terminal.problems(done.problems);
   if (!done.ok) {
     return 2;

@@ -22,7 +22,7 @@ export function listMachines(): Exit {
 
 export function explainMachine(name: string): Exit {
   const terminal = terminalOf(false);
-  const found = findMachine(name, 'command line');
+  const found = findMachine(name, { file: 'command line', folder: '.' });
   if (!found.ok) {
     terminal.problems(found.problems);
     return 2;
@@ -38,6 +38,11 @@ export function explainMachine(name: string): Exit {
   return 0;
 }
 
+/** "1 thing", "2 things". */
+function counted(count: number, what: string): string {
+  return `${count} ${what}${count === 1 ? '' : 's'}`;
+}
+
 export function checkMachineFile(file: string): Exit {
   const terminal = terminalOf(false);
   const own = ownMachine(file);
@@ -50,7 +55,9 @@ export function checkMachineFile(file: string): Exit {
   const machine = readMachine(name, file, text.value, ownMachine);
   terminal.problems(machine.problems);
   if (!machine.ok) {
-    process.stderr.write(`${file} cannot be used as it is: ${machine.problems.length} things to mend.\n`);
+    process.stderr.write(
+      `${file} cannot be used as it is: ${counted(machine.problems.length, 'thing')} to mend.\n`,
+    );
     return 2;
   }
   const trial = tryMachine(machine.value, version());
@@ -65,7 +72,7 @@ export function checkMachineFile(file: string): Exit {
   }
   const warnings = machine.problems.map(showProblem).length;
   process.stdout.write(
-    `The motions above were written in these words and came back as they were meant${warnings > 0 ? `; ${warnings} warnings above` : ''}.\n` +
+    `The motions above were written in these words and came back as they were meant${warnings > 0 ? `; ${counted(warnings, 'warning')} above` : ''}.\n` +
       'Prove it on the machine, in the air, with hand on the stop, before it cuts anything; then say so under `proved:`.\n',
   );
   return 0;

@@ -12,19 +12,22 @@ export function runNew(file: string | undefined, options: { readonly schema?: bo
     process.stdout.write(text);
     return 0;
   }
-  if (isThere(file)) {
+  const refused = isThere(file)
+    ? { message: 'is there already; it is kept as it is.', hint: 'Name a file that is not there yet.' }
+    : /[/\\]$/.test(file)
+      ? { message: 'is the name of a folder.', hint: `Name a file: ${file}my-wheel.yaml.` }
+      : undefined;
+  if (refused !== undefined) {
     terminal.problems([
-      {
-        code: 'file.unwritable',
-        severity: 'error',
-        message: 'is there already; it is kept as it is.',
-        hint: 'Name a file that is not there yet.',
-        at: { kind: 'file', file },
-      },
+      { code: 'file.unwritable', severity: 'error', ...refused, at: { kind: 'file', file } },
     ]);
     return 2;
   }
-  const done = changeFolder(dirname(file), { write: [{ name: basename(file), text }], rename: [] });
+  const done = changeFolder(dirname(file), {
+    folder: 'there',
+    write: [{ name: basename(file), text }],
+    rename: [],
+  });
   terminal.problems(done.problems);
   if (done.ok && options.schema !== true) {
     terminal.say(`${file} is written. It runs as it is: ogive cut ${/\s/.test(file) ? `'${file}'` : file}`);

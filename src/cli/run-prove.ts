@@ -1,8 +1,9 @@
 /** `ogive prove`: programs read back from disk and held against the job they were made for; or the list of checks. */
 import { basename, dirname, resolve } from 'node:path';
 import { PROBLEM_CODES } from '../base/problem-codes.ts';
-import type { Outcome } from '../base/problem.ts';
+import { failure, type Outcome } from '../base/problem.ts';
 import { showProblem } from '../base/show-problem.ts';
+import { placeAt } from '../job/place-problems.ts';
 import { readJob } from '../job/read-job.ts';
 import type { Job } from '../job/job.ts';
 import { targetOfJob } from '../job/target-of-job.ts';
@@ -14,7 +15,7 @@ import type { Proof, ProofInput } from '../prove/proof.ts';
 import { proveSet, type SetProof } from '../prove/prove-set.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
-import { changeFolder, isThere, readText } from './files.ts';
+import { changeFolder, folderOf, isThere, readText } from './files.ts';
 import { findMachine, ownMachine } from './own-machines.ts';
 import type { Exit } from './program.ts';
 import { terminalOf, type Terminal } from './terminal.ts';
@@ -56,13 +57,13 @@ function understand(jobFile: string): Outcome<{ job: Job; machine: Machine }> {
   if (!text.ok) {
     return text;
   }
-  const job = readJob(jobFile, text.value, (path) => readText(resolve(dirname(jobFile), path)));
+  const job = readJob(jobFile, text.value, (path) => readText(resolve(folderOf(jobFile), path)));
   if (!job.ok) {
     return job;
   }
-  const found = findMachine(job.value.machine, jobFile);
+  const found = findMachine(job.value.machine, { file: jobFile, folder: folderOf(jobFile) });
   if (!found.ok) {
-    return found;
+    return failure(placeAt(found.problems, ['machine'], job.value));
   }
   const machine = readMachine(found.value.name, found.value.file, found.value.text, ownMachine);
   return machine.ok
@@ -104,7 +105,8 @@ function answer(
   }
   if (options.moves !== undefined) {
     const text = proof.moves.map((move) => `${JSON.stringify(move)}\n`).join('');
-    const change = { write: [{ name: basename(options.moves), text }], rename: [] };
+    const write = [{ name: basename(options.moves), text }];
+    const change = { folder: 'there', write, rename: [] } as const;
     const done = changeFolder(dirname(options.moves), change);
     terminal.problems(done.problems);
     if (!done.ok) {

@@ -27,7 +27,9 @@ export function compareEvents(motion: Motion, trace: Trace, machine: Machine): r
   const cutters = trace.events.filter((event) => event.kind === 'cutter').map((event) => event.number);
   const meant = motion.steps.filter((step) => step.kind === 'cutter').map((step) => step.number);
   if (cutters.join() !== meant.join() && machine.words.file.commentForm !== 'none') {
-    differences.push(`cutters ${cutters.join()} where ${meant.join()} were meant`);
+    differences.push(
+      `${cutters.length === 0 ? 'no cutter is named' : `cutters ${cutters.join(', ')}`} where ${meant.join(', ')} ${meant.length > 1 ? 'were' : 'was'} meant`,
+    );
   }
   if (trace.events.at(-1)?.kind !== 'end') {
     differences.push('the program does not end');

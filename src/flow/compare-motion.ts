@@ -197,16 +197,19 @@ function isAt(walk: Walk, to: Position): boolean {
   return near(walk.place.x, to.x) && near(walk.place.y, to.y) && near(walk.place.z, to.z);
 }
 
+const A = { rapid: 'a fast move', line: 'a line', arc: 'an arc' } as const;
+
 function settingsDiffer(walk: Walk, meant: Meant, move: TracedMove): string | undefined {
   const { step } = meant;
   if ((step.kind === 'rapid') !== (move.kind === 'rapid')) {
-    return `a ${move.kind} where a ${step.kind} was meant`;
+    return `${A[move.kind]} where ${A[step.kind]} was meant`;
   }
   if (move.spindle !== meant.spindle) {
     return `spindle ${String(move.spindle)} where ${String(meant.spindle)} was meant`;
   }
   if (move.cutter !== meant.cutter && !(move.cutter === null && cannotSayCutter(walk.machine))) {
-    return `cutter ${String(move.cutter)} where ${String(meant.cutter)} was meant`;
+    const found = move.cutter === null ? 'no cutter is named' : `cutter ${String(move.cutter)}`;
+    return `${found} where ${meant.cutter === null ? 'none' : `cutter ${String(meant.cutter)}`} was meant`;
   }
   if (step.kind !== 'rapid') {
     const last = millimetresPer(walk.machine.units) * 10 ** -walk.machine.words.numbers.feedDecimals;

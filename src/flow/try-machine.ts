@@ -43,11 +43,17 @@ export function tryMachine(machine: Machine, version: string): Trial {
     example ||= text;
     const trace = traceProgram(file, text, machine);
     const unread = trace.findings.map((finding) => `${file}:${finding.line}: ${finding.message}`);
-    const strays = compareMotion(named.motion, trace, machine).map((line) => `${file}: ${line}`);
-    differences.push(...unread, ...(trace.complete ? strays : []));
+    const strays = trace.complete ? compareMotion(named.motion, trace, machine) : [];
+    differences.push(...unread, ...firstOf(strays).map((line) => `${file}: ${line}`));
     rows.push(`  ${named.what}: ${blocks} blocks`);
   }
   return { words: rows.join('\n'), example, problems, differences };
+}
+
+/** The first way in which it strays; most of the others follow from it. */
+function firstOf([first, ...others]: readonly string[]): readonly string[] {
+  const more = others.length > 0 ? `; ${others.length} more, which may follow from it` : '';
+  return first === undefined ? [] : [`${first}${more}`];
 }
 
 function headerOf({ what, motion }: NamedMotion, version: string): HeaderFacts {

@@ -33,7 +33,16 @@ export function readTree<T extends z.ZodType>(
   const result = schema.safeParse(tree, { jitless: true });
   return result.success
     ? { ok: true, value: result.data }
-    : { ok: false, issues: result.error.issues.flatMap((issue) => open(issue, [], { schema, tree })) };
+    : {
+        ok: false,
+        issues: causes(result.error.issues.flatMap((issue) => open(issue, [], { schema, tree }))),
+      };
+}
+
+/** A file of another kind, or of a later version: what else is wrong with it follows from that. */
+function causes(issues: readonly JobIssue[]): JobIssue[] {
+  const format = issues.filter(({ path }) => path.join('.') === 'format');
+  return format.length > 0 ? format : [...issues];
 }
 
 interface Ground {

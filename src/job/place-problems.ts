@@ -73,3 +73,16 @@ export function placeInJob(problem: Problem, job: Pick<Job, 'file' | 'spots'>): 
   }
   return { ...problem, at: { ...at, file: job.file } };
 }
+
+/** Problems of something that a value of the job names, at the line that names it. */
+export function placeAt(
+  problems: readonly Problem[],
+  path: readonly string[],
+  job: Pick<Job, 'file' | 'spots'>,
+): readonly Problem[] {
+  return problems.map((problem) =>
+    problem.at.kind === 'file'
+      ? placeInJob({ ...problem, at: { kind: 'value', file: '', path } }, job)
+      : problem,
+  );
+}

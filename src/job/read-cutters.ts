@@ -26,7 +26,8 @@ export function readCutters(
   }
   const content = readCutterFile?.(text);
   if (content === undefined || !content.ok) {
-    const message = `the file of cutters ${text} cannot be read.`;
+    const why = content?.problems[0]?.message;
+    const message = `the file of cutters ${text} cannot be read${why === undefined ? '.' : `: ${why}`}`;
     const hint = 'The path counts from the job file; or list the cutters here.';
     const problem = jobProblem({ path: ['cutters'], code: 'file.unreadable', message, hint });
     return failure(placeProblems([problem], job, undefined));

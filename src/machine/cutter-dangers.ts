@@ -15,6 +15,13 @@ function changeDangers(machine: Machine): readonly Danger[] {
   const { cutters, spindle, positions } = machine.words;
   const automatic = cutters.change === 'automatic';
   return those(
+    cutters.change === 'one-program' &&
+      cutters.words !== 'none' &&
+      danger(
+        'words.cutters.words',
+        `With one program for each cutter no word for a change is ever written, so ${cutters.words} would say what no program does.`,
+        'Say words: none, or change: automatic or by-hand.',
+      ),
     automatic &&
       cutters.words === 'none' &&
       danger(

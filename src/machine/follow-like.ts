@@ -29,9 +29,14 @@ export function followLike(
     }
     const layer: Layer = { name, file, yaml: yaml.value };
     layers.push(layer);
-    const base = likeOf(yaml.value.value);
-    if (base === undefined) {
+    const said = (yaml.value.value as Record<string, unknown>)['like'];
+    if (said === undefined) {
       break;
+    }
+    const base = nameOf(said);
+    if (base === undefined) {
+      // The fields that are missing follow from it: they are not told beside it.
+      return failure([likeProblem(layer, ...noName(said, load))]);
     }
     const baseText = load(base);
     const fault = chainFault(base, layers, baseText);
@@ -43,10 +48,27 @@ export function followLike(
   return success(layers);
 }
 
-/** A `like` that is no name is left to the schema, which says what is wrong with it. */
-function likeOf(tree: unknown): string | undefined {
-  const like = (tree as Record<string, unknown>)['like'];
+function nameOf(like: unknown): string | undefined {
   return typeof like === 'string' && /^[a-z0-9][a-z0-9-]*$/.test(like) ? like : undefined;
+}
+
+/** What stands behind `like:` and names no file; the name that it holds, where one is there. */
+function noName(
+  like: unknown,
+  load: (name: string) => string | undefined,
+): readonly [message: string, hint: string] {
+  const form = 'Give the name of one of posts/ alone, without folder and ending: like: bench-mill.';
+  if (typeof like !== 'string') {
+    return [like === null ? 'Nothing stands behind the colon.' : 'One name belongs here.', form];
+  }
+  const plain = like
+    .replace(/^.*[/\\]/, '')
+    .replace(/\.ya?ml$/i, '')
+    .toLowerCase()
+    .replaceAll(/[ _]+/g, '-');
+  return nameOf(plain) !== undefined && load(plain) !== undefined
+    ? [`${like} is not how a machine file is named here.`, `Write like: ${plain}.`]
+    : [`${like} is no name of a machine file.`, form];
 }
 
 function chainFault(

@@ -7,6 +7,11 @@ import * as z from 'zod';
 export const GWORD = /^G\d{1,3}(\.\d)?$/;
 export const WORDS = /^[A-Z]\d+(\.\d+)?( [A-Z]\d+(\.\d+)?)*$/;
 export const MODE = /^(UNIT|G\d{1,3}(\.\d)?)$/;
+/** A yes would be believed by whoever reads the head of a program: who, on what and when are asked for, with the year. */
+export const PROVED =
+  /^(unproved|(?!(?:un|not\b|no\b))(?=.*\b(?:19|20|21)\d\d\b)(?=.*[A-Za-z]{2,}.* )[ -~]{10,200})$/;
+export const PROVED_WORDS =
+  "unproved; or who proved this file, on which machine and when, with the year, like 'the evening class, mill by the window, March 2031'";
 export const MODES = 'a list of G words, with UNIT for the unit';
 
 /** A group that is left out is read as empty, so that each safety field in it is asked for by name. */

@@ -11,6 +11,8 @@ import {
   GWORD,
   MODE,
   MODES,
+  PROVED,
+  PROVED_WORDS,
   WORDS,
   axes,
   group,
@@ -89,7 +91,7 @@ function machineSchema() {
     description: text(/^[ -~]{3,200}$/, 'a line of plain text, 3 to 200 characters'),
     like: text(/^[a-z0-9][a-z0-9-]*$/, 'the name of another machine file').optional(),
     units: oneOf('mm', 'inch'),
-    proved: text(/^[ -~]{3,200}$/, 'who proved this file, on what and when, or unproved').default('unproved'),
+    proved: text(PROVED, PROVED_WORDS).default('unproved'),
     words: group({
       file: fileWords(),
       blocks: blockWords(),
@@ -172,7 +174,7 @@ const arcWords = () =>
   group({
     planes: oneOf('none', 'xy', 'xy-xz-yz'),
     centre: oneOf('from-start', 'from-zero', 'radius'),
-    'centre-word': orNone(text(GWORD, "a G word like 'G91.1', or none")).default(null),
+    'centre-word': orNone(text(/^G9[01]\.1$/, 'G91.1 or G90.1, or none')).default(null),
     'zero-words': oneOf('write', 'omit').default('write'),
     'end-words': oneOf('both', 'changed').default('both'),
     'longest-sweep': number(30, 360, 'degrees').default(180),
@@ -197,7 +199,8 @@ const holeWords = () =>
     cycles: z.array(oneOf('G81', 'G82', 'G83'), { error: 'a list of G81, G82, G83; [] for none' }),
     'return-word': oneOf('none', 'G98', 'G99'),
     'clear-meaning': oneOf('absolute', 'from-start-level'),
-    'end-word': text(GWORD, "a G word like 'G80'"),
+    // A word that moves, or sets a mode, would take its place in every program.
+    'end-word': oneOf('G80'),
   });
 
 const cutterWords = () =>
@@ -230,7 +233,7 @@ const pathWords = () =>
     finishing: orNone(text(WORDS, "words like 'G61', or none")),
     roughing: orNone(text(WORDS, "words like 'G64', or none")),
     'roughing-strays': orNone(number(0, 0.5, 'mm, or none')).default(null),
-    'feed-mode': orNone(text(GWORD, "a G word like 'G94', or none")).default('G94'),
+    'feed-mode': orNone(text(/^G94$/, 'G94, or none')).default('G94'),
     'helix-feed-along': oneOf('helix', 'circle').default('helix'),
     'feed-demanded': yesNo().default(true),
   });

@@ -1,5 +1,5 @@
 /** Dangers of how the path is followed, of cycles, of the way to the top and of the rotary axis. */
-import { caution, danger, those, type Danger } from './danger.ts';
+import { danger, those, type Danger } from './danger.ts';
 import type { Machine } from './machine.ts';
 
 export function pathDangers(machine: Machine): readonly Danger[] {
@@ -99,10 +99,10 @@ function topDangers(machine: Machine): readonly Danger[] {
         "Give the machine's own Z with the spindle at its highest.",
       ),
     top === 'G28-all' &&
-      caution(
+      danger(
         'words.positions.top',
-        'This G28 sends every axis home, not Z alone: X and Y move while Z rises, across whatever stands there.',
-        'If the controller moves only the named axes say G28-named; if it has machine coordinates say G53-Z.',
+        'This G28 sends every axis home, not Z alone: X and Y move while Z rises, across whatever stands there. No program that does so passes its proof.',
+        'If the controller moves only the named axes say G28-named; if it has machine coordinates say G53-Z; else say none.',
       ),
   );
 }

@@ -27,12 +27,8 @@ export function readMachine(
   const tree = joinTrees(layers.value.map(sayings).toReversed());
   const checked = checkTree(tree);
   if (!checked.ok) {
-    return failure(
-      inOrder(
-        file,
-        checked.issues.map((issue) => problemOf(issue, layers.value)),
-      ),
-    );
+    const problems = causes(checked.issues).map((issue) => problemOf(issue, layers.value));
+    return failure(inOrder(file, problems));
   }
   const machine = machineOf(name, checked.tree);
   // What is dangerous together is to be mended here, even where one half of it is inherited.
@@ -46,6 +42,20 @@ export function readMachine(
   return dangers.some((one) => one.severity === 'error')
     ? failure(inOrder(file, dangers))
     : success(machine, inOrder(file, dangers));
+}
+
+/** Another kind of file, or a mistyped `like`: the fields that are missing follow from it, and would bury it. */
+function causes(issues: readonly SchemaIssue[]): readonly SchemaIssue[] {
+  const format = issues.find((issue) => issue.path.join('.') === 'format' && issue.kind === 'invalid');
+  const like = issues.find(
+    ({ kind, path, key = '' }) =>
+      kind === 'unknown-key' && path.length === 0 && nearestWord(key, knownKeys([])) === 'like',
+  );
+  return format !== undefined
+    ? [format]
+    : like !== undefined
+      ? issues.filter((issue) => issue.kind !== 'missing')
+      : issues;
 }
 
 /** What a file says; who proved it says nothing of a file that is like it. */

@@ -7,6 +7,13 @@ export function textDangers(machine: Machine): readonly Danger[] {
   return [...labelDangers(machine), ...commentDangers(machine), ...lineDangers(machine)];
 }
 
+/** Endings that a desk computer takes for orders, archives or pictures (common knowledge, no source). */
+const STARTED = [
+  '.exe .com .bat .cmd .msi .scr .dll .sys .lnk .app .pif .cpl .hta .so .sh .bash .ps1 .vbs .js .mjs .cjs .ts .py .pl',
+  '.rb .php .jar .reg .zip .gz .tar .rar .7z .img .dmg .deb .rpm .apk .bin .pdf .doc .docx .xls .xlsx .csv .xml .htm',
+  '.md .log .ini .conf .png .jpg .jpeg .gif .bmp .webp .mp3 .mp4 .wav .part .bak .old .tmp',
+].flatMap((endings) => endings.split(' '));
+
 function labelDangers(machine: Machine): readonly Danger[] {
   const { programLabel, percentLines, labelDigits, labelLowest, labelHighest, ending } = machine.words.file;
   const labelled = programLabel !== 'none';
@@ -31,6 +38,12 @@ function labelDangers(machine: Machine): readonly Danger[] {
         'words.file.label-lowest',
         `${labelLowest} is above label-highest, ${labelHighest}: no number is left for a program.`,
         'Give the range that the controller leaves to its user.',
+      ),
+    STARTED.includes(ending) &&
+      danger(
+        'words.file.ending',
+        `A computer starts or opens a file that ends in ${ending} as something else than a program for a mill.`,
+        "Give the ending that the controller lists, like '.nc'.",
       ),
     ['.html', '.svg', '.json', '.yaml', '.yml', '.txt', '.dxf'].includes(ending) &&
       danger(

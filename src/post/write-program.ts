@@ -74,7 +74,7 @@ export function writeProgram(input: ProgramInput): Outcome<ProgramText> {
 
 function writeSteps(writer: Writer, motion: Motion): void {
   writer.step = -1;
-  for (const step of motion.steps) {
+  for (const step of inOrder(writer, motion.steps)) {
     writer.step++;
     if (isMove(step)) {
       if (writer.offWanted) {
@@ -88,6 +88,20 @@ function writeSteps(writer: Writer, motion: Motion): void {
       writeEvent(writer, step);
     }
   }
+}
+
+/**
+ * Where one program runs for one cutter it is in the spindle before the start, and is named before anything moves: the way to
+ * the top is made with it already.
+ */
+function inOrder(writer: Writer, steps: Motion['steps']): Motion['steps'] {
+  const cutter = steps.findIndex(({ kind }) => kind === 'cutter');
+  const top = steps.findIndex(({ kind }) => kind === 'top');
+  const named = steps[cutter];
+  const early = writer.machine.words.cutters.change === 'one-program' && top >= 0 && top < cutter;
+  return early && named !== undefined && !steps.slice(0, cutter).some(isMove)
+    ? [...steps.slice(0, top), named, ...steps.slice(top, cutter), ...steps.slice(cutter + 1)]
+    : steps;
 }
 
 function highestOf(motion: Motion): number {

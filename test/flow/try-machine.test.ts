@@ -20,6 +20,24 @@ describe('the trial of a machine file', () => {
     expect(trial.words).not.toContain('wait');
   });
 
+  it.each(['G53-Z', 'G28-named'] as const)(
+    'a machine that takes one program for each cutter and goes to its top by %s knows its cutter',
+    (top) => {
+      const machine = changedMachine(postMachine('desk-three-axis'), { positions: { top, topMachineZ: 0 } });
+      const trial = tryMachine(machine, '0');
+      expect([trial.problems, trial.differences]).toEqual([[], []]);
+    },
+  );
+
+  it('says in words, once for each motion, that no cutter was named', () => {
+    // Such a file is refused before it is tried: words for a change that are never written.
+    const machine = changedMachine(postMachine('desk-three-axis'), { cutters: { words: 'T-only' } });
+    const { differences } = tryMachine(machine, '0');
+    expect(differences.length).toBe(4);
+    expect(differences[0]).toMatch(/no cutter is named where cutter 1 was meant; \d more/);
+    expect(differences.join()).not.toContain('null');
+  });
+
   it('and does not where the spindle needs a wait', () => {
     const machine = changedMachine(postMachine('lines-only'), {
       dwell: { letter: 'none' },
