@@ -11,6 +11,7 @@ import { headerFacts, type HeaderKind } from './flow/header-facts.ts';
 import { refusedText } from './flow/refused-text.ts';
 import { withRunoutOfMachine } from './flow/runout-of-machine.ts';
 import { sheetFacts, type Made, type Shapes, type Understood } from './flow/sheet-facts.ts';
+import { writableTitle } from './flow/writable-title.ts';
 import { checkJobOnMachine } from './job/check-job.ts';
 import { placeAt, placeInJob } from './job/place-problems.ts';
 import { readJob } from './job/read-job.ts';
@@ -101,7 +102,7 @@ function make(input: CutInput, understood: Understood, before: readonly Problem[
   }
   const shapes: Shapes = { form: form.value, ...(windows === undefined ? {} : { crossings: windows.value }) };
   const onMachine = checkJobOnMachine(job, machine);
-  const problems = [...before, ...onMachine];
+  const problems = [...before, ...writableTitle(job, machine).problems, ...onMachine];
   if (onMachine.some(({ severity }) => severity === 'error')) {
     return refuse(input, understood, shapes, problems);
   }
@@ -192,7 +193,13 @@ function proved(
     { name: file, text, runnable: true },
     ...(headerFile === undefined ? [] : [{ name: headerFile.file, text: headerFile.text, runnable: false }]),
   ]);
-  return { exit: 0, problems, files: [...runnable, ...report], summary: summaryOf(facts), facts };
+  return {
+    exit: 0,
+    problems: facts.problems,
+    files: [...runnable, ...report],
+    summary: summaryOf(facts),
+    facts,
+  };
 }
 
 /** Nothing runnable: the sheet and the summary that say why. */

@@ -40,6 +40,9 @@ describe('ogive cut, where it writes', { timeout: 60_000 }, () => {
       expect(err).toContain(name);
     }
     expect(err).toMatch(/Not checked/);
+    // As the sheet has it: half a minute is no "1 min".
+    const seconds = /cutter 1, +(\d+ s), /.exec(err)?.[1];
+    expect(filesIn(folder).get('small-wheel.html')).toContain(`>${seconds}<`);
   });
 
   it('runs from an empty folder, into one that is not there yet', () => {

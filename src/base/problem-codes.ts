@@ -42,6 +42,7 @@ export const PROBLEM_CODES = {
   'toolpath.no-entry': 'No safe way into the metal was found.',
   'toolpath.load': 'No depth keeps the cutter from breaking.',
   'toolpath.rubs': 'The chip would be thinner than the edge can cut.',
+  'toolpath.long': 'A program takes longer than anybody stays with it.',
 
   // post: writing words
   'post.cannot-say': 'This machine file has no words for what the program needs.',

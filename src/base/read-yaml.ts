@@ -131,7 +131,11 @@ function beforeParsing(text: string, limitBytes: number): Fault | undefined {
   const tangle = tooTangled(text);
   return tangle === undefined
     ? undefined
-    : { message: 'Values are nested too deep.', spot: spotOf(text, tangle) };
+    : {
+        message: 'Values are nested too deep, or so many braces and brackets open that they may be.',
+        hint: 'Write groups on lines of their own instead of between braces.',
+        spot: spotOf(text, tangle),
+      };
 }
 
 /** Control characters other than tab and line ends, and what stands where bytes were no UTF-8. */

@@ -10,6 +10,7 @@ import type { CutPlan } from '../toolpath/plan.ts';
 import { overTips } from '../tooth/span.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 import { materialNamed } from '../cutting/materials.ts';
+import { writableTitle } from './writable-title.ts';
 
 export type HeaderKind = 'cut' | 'walk';
 
@@ -39,13 +40,14 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
   const programs = plan.programs.filter((_, k) => i === 'all' || k === i);
   const motions = kind === 'walk' ? [plan.walk] : programs.map(({ motion }) => motion);
   const { x, y, z, speeds } = together(motions.map(factsOf));
+  const title = writableTitle(job, sources.machine);
   const numbers = kind === 'walk' ? [] : programs.flatMap(({ cutters }) => cutters);
   // A program speaks its machine's unit, with the job's beside it where a person measures; the sheet speaks the job's.
   const unit = i === 'all' ? job.length : sources.machine.units;
   const jobs = job.length === sources.machine.units ? {} : { jobUnit: job.length };
   return {
     kind,
-    title: job.title,
+    title: title.ok ? title.value : job.title,
     mark,
     version,
     part: partLines(sources, unit),

@@ -14,6 +14,7 @@ import { asCut } from '../tooth/as-cut.ts';
 import type { Crossings, WheelForm } from '../tooth/wheel.ts';
 import { headerFacts } from './header-facts.ts';
 import { lapsOf, mergedName } from './laps-of.ts';
+import { longPrograms } from './long-programs.ts';
 
 /** A job and a machine that were read without error. */
 export interface Understood {
@@ -52,6 +53,8 @@ export function sheetFacts(
   const times = plan?.programs.map((program) => timeOf(program.motion, machine)) ?? [];
   const header = plan && headerFacts('cut', 'all', { ...understood, ...shapes, plan, version });
   const passed = proof?.verdict === 'pass';
+  const programs = passed ? programsOf(made, machine, times, hash) : [];
+  const passes = plan === undefined ? [] : passesOf(plan, times, job.setup.topZ);
   return {
     version,
     mark,
@@ -61,15 +64,15 @@ export function sheetFacts(
     ...shapes,
     ...(opened.ok ? { asCut: opened.value } : {}),
     ...(plan === undefined ? {} : { reach: plan.reach, park: plan.park }),
-    programs: passed ? programsOf(made, machine, times, hash) : [],
+    programs,
     ...(passed && written !== undefined
       ? { walkFile: written.walk.file, walkSha256: hash(written.walk.text) }
       : {}),
     motions: plan?.programs.map((program) => program.motion) ?? [],
     paths: passPaths(plan?.programs.map((program) => program.motion) ?? []),
-    passes: plan === undefined ? [] : passesOf(plan, times, job.setup.topZ),
+    passes,
     ...(proof === undefined ? {} : { proof }),
-    problems,
+    problems: [...problems, ...longPrograms(job, programs, passes)],
     again: header?.again ?? '',
     cautions: header === undefined ? [] : cautions(header, machine),
   };

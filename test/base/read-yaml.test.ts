@@ -98,6 +98,8 @@ describe('what would take the parser hours or its stack', () => {
   it.each([
     ['brackets', '['.repeat(200_000)],
     ['brackets closed in quotes', '["]", '.repeat(20_000)],
+    ['brackets closed in comments', '[ # ]\n'.repeat(600)],
+    ['brackets closed inside a text of many lines', 'a: [[[[ "\n]]]] }}}}\n", {b: '.repeat(200)],
     ['dashes', '- '.repeat(200_000)],
     ['dashes and tabs', '-\t'.repeat(200_000)],
     ['question marks', '? '.repeat(200_000)],
@@ -107,6 +109,12 @@ describe('what would take the parser hours or its stack', () => {
     const start = performance.now();
     expect(firstProblem(text).message).toMatch(/nested too deep|too large/);
     expect(performance.now() - start).toBeLessThan(200);
+  });
+  it('lets five hundred clamps be, each between its braces: they are not deep', () => {
+    const clamp = '  - { x: -7, y: [1, 2], radius: 1, height: 3 } # one more\n';
+    const outcome = read(`keep-out:\n${clamp.repeat(5000)}`);
+    expect(outcome.problems).toEqual([]);
+    expect(outcome.ok && (outcome.value.value as { 'keep-out': unknown[] })['keep-out'].length).toBe(5000);
   });
   it('says little of an alias bomb, and unfolds none of it', () => {
     const bomb = `a: &a [x, x]\n${Array.from({ length: 40 }, (_, i) => `b${i}: &b${i} [*a, *a]`).join('\n')}\n`;
