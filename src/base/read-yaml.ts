@@ -9,7 +9,7 @@ import { LineCounter, isAlias, isMap, isScalar, isSeq, parseDocument, type Node 
 import type { Outcome, Place, Problem } from './problem.ts';
 import { failure, success } from './problem.ts';
 import { tooTangled } from './yaml-tangle.ts';
-import { yamlSentence } from './yaml-sentence.ts';
+import { oddBlank, yamlSentence } from './yaml-sentence.ts';
 
 export type YamlPath = readonly (string | number)[];
 
@@ -61,7 +61,12 @@ export function readYaml(
   const whole =
     first === undefined
       ? wholeFaults(document, code)
-      : [{ ...yamlSentence(first.code, first.message), spot: spotAt(first.pos[0]) }];
+      : [
+          {
+            ...(oddBlank(text, first.pos[0]) ?? yamlSentence(first.code, first.message)),
+            spot: spotAt(first.pos[0]),
+          },
+        ];
   if (whole.length > 0 || root === null) {
     return refuse(whole);
   }
@@ -126,6 +131,13 @@ function beforeParsing(text: string, limitBytes: number): Fault | undefined {
       message: 'The file is not text: it holds bytes that no letter has.',
       hint: 'Save it as plain text, UTF-8.',
       spot: spotOf(text, binary),
+    };
+  }
+  if (/\r(?!\n)/.test(text) && !text.includes('\n')) {
+    return {
+      message: 'The lines end in a carriage return alone: the whole file is read as one line.',
+      hint: 'Save it with line ends of this computer (LF, or CR and LF).',
+      spot: { line: 1, column: 1 },
     };
   }
   const tangle = tooTangled(text);
@@ -193,7 +205,7 @@ function unfoldMap(pairs: readonly Pair[], path: YamlPath, complain: Complain): 
   const seen = new Set<string>();
   for (const { key, value } of pairs) {
     const name = keyName(key);
-    if (name === undefined || name === '__proto__' || name === '<<') {
+    if (name === undefined || name.trim() === '' || name === '__proto__' || name === '<<') {
       complain(
         name === '<<' ? 'Merge keys (<<) are not read.' : 'A key must be a word or a number.',
         name === '<<' ? 'Write the values out.' : undefined,

@@ -71,3 +71,19 @@ const SENTENCES: Readonly<Record<string, { message: string; hint?: string }>> = 
     hint: 'Let all keys of a group begin in the same column, further in than the key above them.',
   },
 };
+
+/** Blanks of print and of web pages look like blanks and part nothing: looked for where a line was not understood. */
+export function oddBlank(text: string, offset: number): { message: string; hint: string } | undefined {
+  const start = text.lastIndexOf('\n', offset - 1) + 1;
+  const end = text.indexOf('\n', offset);
+  const line = text.slice(start, end < 0 ? text.length : end);
+  return ODD_BLANK.test(line)
+    ? {
+        message:
+          'This line holds a blank that is none, as text copied from a page has it (a no-break space or the like).',
+        hint: 'Type the blanks of this line anew.',
+      }
+    : undefined;
+}
+
+const ODD_BLANK = /[\u00a0\u2000-\u200b\u202f\u205f\u3000\ufeff]/;

@@ -44,7 +44,11 @@ function checkAxis(
   const letter = axis.toUpperCase();
   if (high - low > end - start) {
     const message = `the work needs ${show(high - low)} of travel in ${letter}; ${name} has ${show(end - start)}.`;
-    return [travelProblem(['machine'], message, 'Take a larger machine, or a smaller module.')];
+    const hint =
+      axis === 'z'
+        ? 'Take a larger machine, a smaller clear height, or lower clamps.'
+        : 'Take a larger machine, or a smaller module.';
+    return [travelProblem(['machine'], message, hint)];
   }
   if (setup.zeroAt === undefined) {
     return [];

@@ -45,6 +45,9 @@ function causes(issues: readonly JobIssue[]): JobIssue[] {
   return format.length > 0 ? format : [...issues];
 }
 
+/** Keys that are known, but refused until a later version: not offered. */
+const LATER = ['pinion', 'trundles', 'trundle'];
+
 interface Ground {
   readonly schema: z.ZodType;
   readonly tree: unknown;
@@ -92,7 +95,12 @@ function hintOf(issue: Raw): string | undefined {
 
 function wrongType(expected: string, path: Path, value: unknown, { schema }: Ground): JobIssue {
   const known = keysAt(schema, path);
-  const wanted = expected === 'array' ? 'a list' : known.length > 0 ? 'a group of keys' : expected;
+  const wanted =
+    expected === 'array'
+      ? 'a list'
+      : known.length > 0 || expected === 'string'
+        ? 'a group of keys'
+        : expected;
   const message =
     value === undefined
       ? 'is missing.'
@@ -101,7 +109,9 @@ function wrongType(expected: string, path: Path, value: unknown, { schema }: Gro
         : `${showValue(value)} is not ${wanted}.`;
   const says = describedAt(schema, path);
   const hint =
-    expected !== 'array' && known.length > 0 ? `Keys here: ${known.join(', ')}.` : says && `${says}.`;
+    expected !== 'array' && known.length > 0
+      ? `Keys here: ${known.filter((one) => !LATER.includes(one)).join(', ')}.`
+      : says && `${says}.`;
   return { code: 'job.invalid', path, message, hint };
 }
 
@@ -121,7 +131,7 @@ function unknownKey(key: string, path: Path, ground: Ground): JobIssue {
       ? `Is ${near} meant?`
       : elsewhere !== undefined
         ? `${key} belongs to ${elsewhere}.`
-        : `Keys here: ${known.join(', ')}.`;
+        : `Keys here: ${known.filter((one) => !LATER.includes(one)).join(', ')}.`;
   const where = path.length === 0 ? 'a job' : showPath(path);
   return { code: 'job.unknown-key', path: [...path, key], message: `${where} has no key ${key}.`, hint };
 }

@@ -34,7 +34,7 @@ export function valueOf<T>(words: Words, json: Record<string, unknown>, read: (v
       context.addIssue({
         code: 'custom',
         message: result.message,
-        params: { hint: result.hint ?? `${words.says}.` },
+        params: { hint: result.hint ?? (words.says.endsWith('?') ? words.says : `${words.says}.`) },
       });
       return z.NEVER;
     })

@@ -49,7 +49,10 @@ export function wheelSchema(unit: LengthUnit) {
         },
       ).optional(),
       thickness: length('Thickness of the wheel', 1.5, { least: 0.05, most: 25 }),
-      bore: length('Diameter of the bore', 4, { least: 0.1, most: 200 }).optional(),
+      bore: length('Diameter of the bore; where there is none this line is left out', 4, {
+        least: 0.1,
+        most: 200,
+      }).optional(),
       crossings: crossingsSchema(unit).optional(),
     })
     .meta({ description: 'The wheel to be made' });

@@ -60,7 +60,7 @@ export function jobSchema(unit: LengthUnit) {
       500,
     ),
     cutters: z
-      .union([z.string(), cuttersSchema(unit)])
+      .union([z.string().regex(/\S/, { error: 'no file is named.' }), cuttersSchema(unit)])
       .meta({ description: 'The cutters at hand, by number; or the path of a file of them' }),
     cuts: cutsSchema(unit).optional(),
   });

@@ -63,6 +63,9 @@ export function showValue(value: unknown): string {
   if (typeof value === 'object' && value !== null) {
     return 'a group of keys';
   }
+  if (typeof value === 'string' && value.trim() === '') {
+    return 'an empty text';
+  }
   const text = typeof value === 'string' ? value.replaceAll(/\s+/g, ' ') : String(value);
   return text.length > LONGEST ? `${text.slice(0, LONGEST)}…` : text;
 }

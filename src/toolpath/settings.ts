@@ -74,8 +74,8 @@ export function settingsFor(
         code: 'toolpath.load',
         severity: 'error',
         message:
-          `${kind}: cutter ${cutter.number} (${cutter.diameter} mm, ${cutter.stickOut} mm out) could cut only ` +
-          `${slot.depth.toFixed(4)} mm deep a lap: ${slot.why}`,
+          `${kind}: cutter ${cutter.number} (${cutter.diameter} mm, ${cutter.stickOut} mm out) could cut ` +
+          `${slot.depth < LEAST_SAID ? `less than ${LEAST_SAID}` : `only ${slot.depth.toFixed(4)}`} mm deep a lap: ${slot.why}`,
         hint: 'use a stouter cutter, let it stand out less, or lower the feed',
         at: { kind: 'value', file: job.file, path: ['cuts', kind, 'cutter'] },
       },
@@ -84,6 +84,9 @@ export function settingsFor(
   const why = `at most ${slot.depth.toFixed(3)} mm a lap: ${slot.why}`;
   return success({ ...settings, step: slot.depth, why: [...data.why, why] });
 }
+
+/** mm; a depth that would be said as 0.0000. */
+const LEAST_SAID = 0.0001;
 
 /** What a dial set by hand can be set to. Judgement: its marks stand a thousand apart and are read to a tenth. */
 const DIAL = 100;
