@@ -94,12 +94,19 @@ function lineDangers(machine: Machine): readonly Danger[] {
   const { file, blocks } = machine.words;
   const longest = longestBlock(machine);
   const needed = neededSigns(machine).filter((sign) => file.bannedCharacters.includes(sign));
+  const letters = lettersOf(machine).filter((letter) => file.bannedCharacters.includes(letter));
   return those(
     needed.length > 0 &&
       danger(
         'words.file.banned-characters',
         `${needed.join(' ')} is banned, but no program can be written without it: the controller would act on it at once.`,
         'Look up which characters the controller picks out of the stream, or change the comment form.',
+      ),
+    letters.length > 0 &&
+      danger(
+        'words.file.banned-characters',
+        `${letters.join(' ')} is banned: what comments say to hands, which cutter to fit and which speed to set, could not be read.`,
+        'Ban signs only; where the controller trips over comments say comment-form: none.',
       ),
     longest > file.lineLongest &&
       danger(
@@ -115,6 +122,12 @@ function lineDangers(machine: Machine): readonly Danger[] {
         'Give the largest number that the controller reads.',
       ),
   );
+}
+
+/** Letters that comments are written with and words are not. */
+function lettersOf({ words: { file } }: Machine): readonly string[] {
+  const all = file.letterCase === 'any' ? 'ABCDELOQUVWabcdefghijklmnopqrstuvwxyz' : 'ABCDELOQUVW';
+  return file.commentForm === 'none' ? [] : [...all];
 }
 
 /** Signs that words cannot do without. */

@@ -24,7 +24,10 @@ export function postMotions(machine: Machine): readonly NamedMotion[] {
   // Where nothing waits, a machine file may go without a word for it.
   const waits: readonly Step[] =
     machine.words.dwell.letter === 'none' ? [] : [{ kind: 'dwell', seconds: 0.25 }];
-  const changes = machine.words.cutters.change === 'one-program' ? [] : changeSteps(speed, feed);
+  const changes =
+    machine.words.cutters.change === 'one-program'
+      ? []
+      : changeSteps(speed, feed, Math.min(2, machine.words.cutters.highest));
   return [
     {
       name: 'lines',
@@ -126,12 +129,12 @@ function tinySteps(feed: number): readonly Step[] {
   return steps;
 }
 
-function changeSteps(speed: number, feed: number): readonly Step[] {
+function changeSteps(speed: number, feed: number, second: number): readonly Step[] {
   return [
     { kind: 'line', to: at(0, 0, DEPTH), feed },
     { kind: 'rapid', to: at(0, 0, CLEAR) },
     { kind: 'top' },
-    { kind: 'cutter', number: 2, say: ['fit cutter 2, touch off on the plate'] },
+    { kind: 'cutter', number: second, say: [`fit cutter ${second}, touch off on the plate`] },
     { kind: 'spindle', speed },
     { kind: 'rapid', to: at(1, 1, CLEAR) },
     { kind: 'line', to: at(1, 1, DEPTH), feed },

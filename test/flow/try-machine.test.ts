@@ -29,6 +29,14 @@ describe('the trial of a machine file', () => {
     },
   );
 
+  it.each([
+    ['holds less than the trial takes', { file: { fileLargest: 1000 } }],
+    ['has one cutter', { cutters: { highest: 1 } }],
+  ] as const)('a machine that %s is none the worse for it', (_, words) => {
+    const trial = tryMachine(changedMachine(postMachine('lines-only'), words), '0');
+    expect([trial.problems, trial.differences]).toEqual([[], []]);
+  });
+
   it('says in words, once for each motion, that no cutter was named', () => {
     // Such a file is refused before it is tried: words for a change that are never written.
     const machine = changedMachine(postMachine('desk-three-axis'), { cutters: { words: 'T-only' } });

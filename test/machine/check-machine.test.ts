@@ -25,6 +25,7 @@ const CASES: readonly Case[] = [
   ['notes that nobody sees', 'bench-mill', { 'words.file.comment-form': 'semicolon' }, 'words.file.operator-note', 'error'],
   ['stops without a word', 'din-66025', { 'words.file.comment-form': 'none' }, 'words.file.comment-form', 'warning'],
   ['the point banned', 'desk-three-axis', { 'words.file.banned-characters': '.', 'words.file.comment-letters': '-' }, 'words.file.banned-characters', 'error'],
+  ['a letter banned that orders to hands are written with', 'lines-only', { 'words.file.banned-characters': 'E' }, 'words.file.banned-characters', 'error'],
   ['the comment mark banned', 'lines-only', { 'words.file.banned-characters': ';' }, 'words.file.banned-characters', 'error'],
   ['lines shorter than a block', 'desk-three-axis', { 'words.file.line-longest': 40 }, 'words.file.line-longest', 'error'],
   ['block numbers that end at once', 'machining-centre', { 'words.blocks.first': 9985 }, 'words.blocks.last', 'error'],
