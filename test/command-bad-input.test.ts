@@ -147,6 +147,17 @@ describe(
   },
 );
 
+describe('a drawing under a name of another kind', { timeout: 60_000 }, () => {
+  it.each([['wheel.png'], ['wheel'], ['wheel.dxf']])('%s is not written', (name) => {
+    const folder = folderWith();
+    const { exit, err } = ogive(['draw', 'small-wheel.yaml', '--out', name], folder);
+    expect([exit, namesIn(folder)]).toEqual([2, ['small-wheel.yaml']]);
+    expect(err).toMatch(
+      /a drawing is written as SVG, with --dxf as DXF, and this name does not end in \.svg/,
+    );
+  });
+});
+
 describe('folders that are not there', { timeout: 60_000 }, () => {
   it.each([
     ['new', ['new', 'wheels/third.yaml']],

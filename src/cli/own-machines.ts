@@ -81,5 +81,5 @@ function pathHint(path: string, { file, folder }: NamedIn): string {
     ? `${word} is a machine that came along: write its name alone, without folder and ending: ${word}.`
     : isAbsolute(path)
       ? 'Look whether the path is right.'
-      : `The path counts from the folder of ${file}${folder === '.' ? '' : `, ${folder}`}; \`ogive machines\` lists the ones that came along.`;
+      : `The path counts from ${folder === '.' ? 'the folder you are in' : `${folder}, the folder of ${file}`}; \`ogive machines\` lists the ones that came along.`;
 }

@@ -49,8 +49,8 @@ export function runDraw(jobFile: string, options: DrawOptions): Exit {
   }
   const ending = options.dxf === true ? 'dxf' : 'svg';
   const file = options.out ?? join(dirname(jobFile), `${job.value.name}-outline.${ending}`);
-  if (isThere(file) && !file.toLowerCase().endsWith(`.${ending}`)) {
-    terminal.problems([notOurs(file, ending)]);
+  if (!file.toLowerCase().endsWith(`.${ending}`)) {
+    terminal.problems([isThere(file) ? notOurs(file, ending) : otherKind(file, ending)]);
     return 2;
   }
   const done = changeFolder(dirname(file), {
@@ -73,6 +73,18 @@ function notOurs(file: string, ending: string): Problem {
     severity: 'error',
     message: `is there already and its name does not end in .${ending}; it is kept as it is.`,
     hint: `Name a file that ends in .${ending}, or one that is not there yet.`,
+    at: { kind: 'file', file },
+  };
+}
+
+/** A picture of another kind would not open as what its name says. */
+function otherKind(file: string, ending: string): Problem {
+  const other = ending === 'svg' ? ', with --dxf as DXF' : '';
+  return {
+    code: 'file.unwritable',
+    severity: 'error',
+    message: `a drawing is written as ${ending.toUpperCase()}${other}, and this name does not end in .${ending}. Nothing was written.`,
+    hint: `Name a file that ends in .${ending}.`,
     at: { kind: 'file', file },
   };
 }
