@@ -3,6 +3,7 @@ import { spawnSync } from 'node:child_process';
 import { chmodSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { afterAll, describe, expect, it } from 'vitest';
+import { parse } from 'yaml';
 import { onMachine } from './support/cut-text.ts';
 import { folderWith, namesIn, newFolder, ogive, removeFolders, ROOT } from './support/run-command.ts';
 
@@ -146,6 +147,49 @@ describe(
     });
   },
 );
+
+describe('what was read is not written over', { timeout: 60_000 }, () => {
+  it.each(['wheel.json', 'wheel.html', 'wheel.svg', 'wheel-1.nc', 'wheel.nc'])('a job named %s', (name) => {
+    const folder = folderWith();
+    const text = readFileSync(join(folder, 'small-wheel.yaml'), 'utf8');
+    const job = name === 'wheel.json' ? JSON.stringify(parse(text)) : text;
+    writeFileSync(join(folder, name), job);
+    const { exit, err } = ogive(['cut', name], folder);
+    expect([exit, readFileSync(join(folder, name), 'utf8')]).toEqual([2, job]);
+    expect(err).toMatch(
+      /^(wheel\S*): would be lost: \1 is to be written or renamed here.*Nothing was changed\.\n/,
+    );
+    expect(namesIn(folder)).toEqual(['small-wheel.yaml', name]);
+    expect(ogive(['cut', name, '--out', 'out'], folder).exit).toBe(0);
+  });
+  it('a file of cutters that has the name of the summary', () => {
+    const folder = folderWith((text) =>
+      text.replace(/^cutters:\n(?: {2}.*\n)+/m, 'cutters: small-wheel.json\n'),
+    );
+    const cutters = JSON.stringify({
+      cutters: { 1: { diameter: 1, reach: 3 }, 2: { diameter: 0.8, reach: 2 } },
+    });
+    writeFileSync(join(folder, 'small-wheel.json'), cutters);
+    expect(ogive(['cut', 'small-wheel.yaml'], folder)).toMatchObject({
+      exit: 2,
+      err: expect.stringMatching(/would be lost/),
+    });
+    expect(readFileSync(join(folder, 'small-wheel.json'), 'utf8')).toBe(cutters);
+  });
+  it('a job that a drawing or a list of moves is named after', () => {
+    const folder = folderWith();
+    const text = readFileSync(join(folder, 'small-wheel.yaml'), 'utf8');
+    writeFileSync(join(folder, 'w.svg'), text);
+    writeFileSync(join(folder, 'w.jsonl'), text);
+    expect(ogive(['draw', 'w.svg', '--out', 'w.svg'], folder).exit).toBe(2);
+    expect(
+      ogive(['prove', 'w.jsonl', '--job', 'small-wheel.yaml', '--moves', './w.jsonl'], folder).exit,
+    ).toBe(2);
+    expect(readFileSync(join(folder, 'w.svg'), 'utf8') + readFileSync(join(folder, 'w.jsonl'), 'utf8')).toBe(
+      text + text,
+    );
+  });
+});
 
 describe('a drawing under a name of another kind', { timeout: 60_000 }, () => {
   it.each([['wheel.png'], ['wheel'], ['wheel.dxf']])('%s is not written', (name) => {

@@ -140,7 +140,10 @@ export function changeFolder(folder: string, change: Change): Outcome<null> {
         code: 'file.unwritable',
         severity: 'error',
         message: `cannot be written: ${reasonOf(error)}. Nothing was changed.`,
-        hint: 'Name a folder you may write to with --out.',
+        hint:
+          (error as { code?: string }).code === 'ENAMETOOLONG'
+            ? 'Give the job a shorter name, or name another folder with --out.'
+            : 'Name a folder you may write to with --out.',
         at: { kind: 'file', file: folder },
       },
     ]);
@@ -191,6 +194,16 @@ function undo(
 /** Whether something of this name is there. */
 export function isThere(path: string): boolean {
   return existsSync(path);
+}
+
+/** Whether two paths lead to one file, by whatever links and in whatever capitals. */
+export function isSameFile(a: string, b: string): boolean {
+  try {
+    const [one, other] = [a, b].map((path) => statSync(path, { bigint: true }));
+    return one !== undefined && one.ino === other?.ino && one.dev === other.dev;
+  } catch {
+    return false;
+  }
 }
 
 /** A device, a pipe or a folder is never replaced by a file of ours. */

@@ -5,6 +5,7 @@ import { showProblem } from '../base/show-problem.ts';
 import { cut, type CutResult } from '../cut.ts';
 import { changeFolder, folderOf, isStandardInput, noPlace, readText } from './files.ts';
 import { sha256 } from './hash.ts';
+import { keepInputs } from './keep-inputs.ts';
 import { findMachine, ownMachine } from './own-machines.ts';
 import { keepOldPrograms, programsIn } from './old-programs.ts';
 import type { Exit } from './program.ts';
@@ -29,13 +30,22 @@ export function runCut(jobFile: string, options: CutOptions, version: string): E
     terminal.problems(job.problems);
     return 2;
   }
+  const read = [jobFile];
   const result = cut({
     file: jobFile,
     text: job.value,
     version,
-    findMachine: (name) => findMachine(name, { file: jobFile, folder: folderOf(jobFile) }),
+    findMachine: (name) => {
+      const found = findMachine(name, { file: jobFile, folder: folderOf(jobFile) });
+      read.push(...(found.ok && ownMachine(name) === undefined ? [found.value.file] : []));
+      return found;
+    },
     loadMachine: ownMachine,
-    readCutters: (path) => readText(resolve(folderOf(jobFile), path)),
+    readCutters: (path) => {
+      const file = resolve(folderOf(jobFile), path);
+      read.push(file);
+      return readText(file);
+    },
     hash: sha256,
     stage: terminal.progress,
   });
@@ -46,7 +56,7 @@ export function runCut(jobFile: string, options: CutOptions, version: string): E
     sayOfOldOnes(folder, jobFile, terminal);
     return 2;
   }
-  const put = putInPlace(folder, result, options.force === true, terminal);
+  const put = putInPlace(folder, read, result, options.force === true, terminal);
   if (put !== undefined) {
     terminal.problems(put);
     return 2;
@@ -68,6 +78,7 @@ function sayOfOldOnes(folder: string, jobFile: string, terminal: Terminal): void
 /** Everything of a run at once; problems where nothing was changed. */
 function putInPlace(
   folder: string,
+  read: readonly string[],
   result: CutResult,
   force: boolean,
   terminal: Terminal,
@@ -79,6 +90,16 @@ function putInPlace(
   const old = keepOldPrograms(folder, job.name, machine.words.file.ending, result.files, force);
   if (!old.ok) {
     return old.problems;
+  }
+  const names = [...result.files.map(({ name }) => name), ...old.value.map(({ from }) => from)];
+  const lost = keepInputs(
+    folder,
+    names,
+    read,
+    'Name another folder with --out, or give this file another name.',
+  );
+  if (lost.length > 0) {
+    return lost;
   }
   const done = changeFolder(folder, { write: result.files, rename: old.value });
   if (!done.ok) {

@@ -11,6 +11,7 @@ import { asCut } from '../tooth/as-cut.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
 import { changeFolder, folderOf, isStandardInput, isThere, noPlace, readText } from './files.ts';
+import { keepInputs } from './keep-inputs.ts';
 import type { Exit } from './program.ts';
 import { terminalOf } from './terminal.ts';
 
@@ -51,6 +52,11 @@ export function runDraw(jobFile: string, options: DrawOptions): Exit {
   const file = options.out ?? join(dirname(jobFile), `${job.value.name}-outline.${ending}`);
   if (!file.toLowerCase().endsWith(`.${ending}`)) {
     terminal.problems([isThere(file) ? notOurs(file, ending) : otherKind(file, ending)]);
+    return 2;
+  }
+  const lost = keepInputs(dirname(file), [basename(file)], [jobFile], 'Give the drawing another name.');
+  if (lost.length > 0) {
+    terminal.problems(lost);
     return 2;
   }
   const done = changeFolder(dirname(file), {

@@ -17,6 +17,7 @@ import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
 import { changeFolder, folderOf, isThere, readText } from './files.ts';
 import { findMachine, ownMachine } from './own-machines.ts';
+import { keepInputs } from './keep-inputs.ts';
 import type { Exit } from './program.ts';
 import { terminalOf, type Terminal } from './terminal.ts';
 
@@ -104,6 +105,17 @@ function answer(
     return 2;
   }
   if (options.moves !== undefined) {
+    const read = [...files, ...(options.job === undefined ? [] : [options.job])];
+    const lost = keepInputs(
+      dirname(options.moves),
+      [basename(options.moves)],
+      read,
+      'Give the moves another name.',
+    );
+    if (lost.length > 0) {
+      terminal.problems(lost);
+      return 2;
+    }
     const text = proof.moves.map((move) => `${JSON.stringify(move)}\n`).join('');
     const write = [{ name: basename(options.moves), text }];
     const change = { folder: 'there', write, rename: [] } as const;
