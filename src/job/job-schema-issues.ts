@@ -98,7 +98,7 @@ function wrongType(expected: string, path: Path, value: unknown, { schema }: Gro
   const wanted =
     expected === 'array'
       ? 'a list'
-      : known.length > 0 || expected === 'string'
+      : known.length > 0 || ['string', 'record'].includes(expected)
         ? 'a group of keys'
         : expected;
   const message =
@@ -132,7 +132,7 @@ function unknownKey(key: string, path: Path, ground: Ground): JobIssue {
       : elsewhere !== undefined
         ? `${key} belongs to ${elsewhere}.`
         : `Keys here: ${known.filter((one) => !LATER.includes(one)).join(', ')}.`;
-  const where = path.length === 0 ? 'a job' : showPath(path);
+  const where = path.length > 0 ? showPath(path) : known.includes('wheel') ? 'a job' : 'a file of cutters';
   return { code: 'job.unknown-key', path: [...path, key], message: `${where} has no key ${key}.`, hint };
 }
 

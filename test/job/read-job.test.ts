@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { Bug } from '../../src/base/bug.ts';
 import { failure, success } from '../../src/base/problem.ts';
 import type { Job } from '../../src/job/job.ts';
+import { showProblem } from '../../src/base/show-problem.ts';
 import { readJob } from '../../src/job/read-job.ts';
 
 const SAMPLES = new URL('../../samples/', import.meta.url);
@@ -176,6 +177,29 @@ describe('a file of cutters', () => {
       line: 2,
       path: ['cutters', '3', 'reach'],
     });
+  });
+  it('without its first key, or with a list, is told in words', () => {
+    const said = (text: string): readonly string[] =>
+      readJob('a.yaml', shared, () => success(text)).problems.map(showProblem);
+    expect(said('3: { diameter: 0.5 }\n')).toContain(
+      'shop.yaml:1:1 3: a file of cutters has no key 3.\n  Keys here: format, length, cutters.',
+    );
+    expect(said('cutters: [{ diameter: 0.5 }]\n')).toEqual([
+      'shop.yaml:1:10 cutters: a list is not a group of keys.',
+    ]);
+  });
+  it('that cannot be read is told why', () => {
+    const unread = failure<string>([
+      {
+        code: 'file.unreadable',
+        severity: 'error',
+        message: 'it is a folder.',
+        at: { kind: 'file', file: 'x' },
+      },
+    ]);
+    expect(readJob('a.yaml', shared, () => unread).problems[0]?.message).toBe(
+      'the file of cutters shop.yaml cannot be read: it is a folder.',
+    );
   });
   it('that cannot be read is told at the key that names it', () => {
     const job = readJob('a.yaml', shared, () => failure([]));
