@@ -273,6 +273,7 @@ const REASONS: Readonly<Record<string, string>> = {
   ELOOP: 'links in the path lead round in a ring',
   EIO: 'what stands there gives nothing that can be read',
   ENXIO: 'nothing answers there',
+  EEXIST: 'a link that leads nowhere stands there',
   EAGAIN: 'nothing was there to be read',
   EBUSY: 'another program holds it',
   EMFILE: 'too many files are open',

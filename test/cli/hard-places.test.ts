@@ -49,6 +49,12 @@ describe('ogive prove', { timeout: 60_000 }, () => {
   });
 });
 
+it.runIf(existsSync('/dev/full'))('printed to a full disk is no fault of ours', () => {
+  const shell = `${process.execPath} ${join(ROOT, 'dist/main.js')} new > /dev/full`;
+  const { status, stderr } = spawnSync('bash', ['-c', shell], { encoding: 'utf8' });
+  expect([status, stderr]).toEqual([2, 'what is printed cannot be written: the disk is full.\n']);
+});
+
 it('ends quietly where nobody reads on', () => {
   const shell = `${process.execPath} ${join(ROOT, 'dist/main.js')} machines | head -1`;
   const { stdout, stderr } = spawnSync('bash', ['-c', `${shell}; exit \${PIPESTATUS[0]}`], {
