@@ -10,7 +10,6 @@ import { jobProblem } from '../job/job-problem.ts';
 import { placeInJob } from '../job/place-problems.ts';
 import { showLength } from '../job/show-length.ts';
 import type { SheetPass, SheetProgram } from '../report/facts.ts';
-import { duration } from '../report/words.ts';
 
 /** Why: nobody stays beside a mill for longer, and no program may run alone (common practice, no source). */
 const WORKING_DAY = 8 * 3600;
@@ -29,12 +28,16 @@ export function longPrograms(
       const longest = own.toSorted((a, b) => b.seconds - a.seconds)[0];
       const kind = kindOf(longest?.name);
       const message =
-        `${program.file} takes ${duration(program.seconds)}, longer than a working day of ${duration(WORKING_DAY)}: ` +
+        `${program.file} takes ${inHours(program.seconds)}, longer than a working day of ${WORKING_DAY / 3600} h: ` +
         `somebody has to stay with it all the time.`;
       const hint = longest === undefined ? 'Take a thicker cutter.' : hintFor(job, longest, kind);
       const path = kind === undefined ? ['cuts'] : ['cuts', kind];
       return placeInJob(jobProblem({ code: 'toolpath.long', severity: 'warning', path, message, hint }), job);
     });
+}
+
+function inHours(seconds: number): string {
+  return `${(seconds / 3600).toFixed(1)} h`;
 }
 
 /** The pass of the job that a pass of the plan belongs to. */
@@ -46,9 +49,9 @@ function kindOf(name: string | undefined): PassKind | undefined {
 function hintFor({ cuts, length }: Job, pass: SheetPass, kind: PassKind | undefined): string {
   const said: CutSettings | undefined = kind === undefined ? undefined : cuts[kind];
   const given = (['step', 'speed', 'feed', 'plunge'] as const).filter((key) => said?.[key] !== undefined);
-  const laps = pass.laps > 1 ? `${pass.laps} laps of ${showLength(pass.step, length)}, ` : '';
+  const laps = pass.laps[1] > 1 ? `${pass.laps[1]} laps of ${showLength(pass.step, length)}, ` : '';
   const most =
-    `Most of it is ${pass.name} with cutter ${pass.cutter}, ${duration(pass.seconds)}: ${laps}` +
+    `Most of it is ${pass.name} with cutter ${pass.cutter}, ${inHours(pass.seconds)}: ${laps}` +
     `${showLength(pass.feed, length)} a minute.`;
   return given.length > 0
     ? `${most} Leave ${given.join(' and ')} of ${kind} out: they then follow from cutter, material and machine.`

@@ -17,8 +17,8 @@ function wordsOf(edit: (text: string) => string, hours: number): string {
   }
   const pass = { cutter: 2, speed: 20000, plunge: 5, depth: 1.5, why: [] };
   const passes: readonly SheetPass[] = [
-    { ...pass, name: 'roughing', feed: 5, step: 0.001, laps: 1500, seconds: (hours - 1) * 3600 },
-    { ...pass, name: 'finishing', feed: 60, step: 1.5, laps: 1, seconds: 3600 },
+    { ...pass, name: 'roughing', feed: 5, step: 0.001, laps: [1500, 1500], seconds: (hours - 1) * 3600 },
+    { ...pass, name: 'finishing', feed: 60, step: 1.5, laps: [1, 1], seconds: 3600 },
   ];
   const programs = [{ file: 'small-wheel-2.nc', seconds: hours * 3600, passes: ['roughing', 'finishing'] }];
   return longPrograms(job.value, programs, passes).map(showProblem).join('\n');
@@ -29,8 +29,8 @@ describe('a program that takes longer than a working day', () => {
     const slow = (text: string): string =>
       text.replace('roughing: { cutter: 2 }', 'roughing: { cutter: 2, feed: 5, step: 0.001 }');
     expect(wordsOf(slow, 51)).toBe(
-      'small-wheel.yaml:29:13 cuts.roughing: warning: small-wheel-2.nc takes 51 h 00 min, longer than a working day of 8 h 00 min: somebody has to stay with it all the time.\n' +
-        '  Most of it is roughing with cutter 2, 50 h 00 min: 1500 laps of 0.001 mm, 5 mm a minute. Leave step and feed of roughing out: they then follow from cutter, material and machine.',
+      'small-wheel.yaml:29:13 cuts.roughing: warning: small-wheel-2.nc takes 51.0 h, longer than a working day of 8 h: somebody has to stay with it all the time.\n' +
+        '  Most of it is roughing with cutter 2, 50.0 h: 1500 laps of 0.001 mm, 5 mm a minute. Leave step and feed of roughing out: they then follow from cutter, material and machine.',
     );
   });
   it('where the job slows nothing down, another cutter is the way out', () => {

@@ -61,10 +61,13 @@ it('replaces a list whole', () => {
 });
 
 it('does not take over who proved the file it is like', () => {
-  const base = `${postText('bench-mill')}`.replace('proved: unproved', 'proved: A. Turner, the mill, 2031');
+  const base = `${postText('bench-mill')}`.replace(
+    'proved: unproved',
+    'proved: the clockroom, the mill, 2031',
+  );
   const load = (): string => base;
   expect(readMachine('base', 'base.yaml', base, load)).toMatchObject({
-    value: { proved: 'A. Turner, the mill, 2031' },
+    value: { proved: 'the clockroom, the mill, 2031' },
   });
   expect(readMachine('mine', 'mine.yaml', 'like: base\n', load)).toMatchObject({
     value: { proved: 'unproved' },

@@ -88,7 +88,7 @@ describe('head of a program [29 CFR 1910.212; ISO 12100; what a set-up needs to 
   });
 
   it('tells what a person of an inch job measures in both units on a machine that works in millimetres', () => {
-    const sixteenth = { number: 2, diameter: 1.5875, flutes: 2, stickOut: 12.7 };
+    const sixteenth = { number: 2, diameter: 1.5875, flutes: 2, stickOut: 12.7, shank: 3 };
     const lines = joined(headerLines({ ...facts, jobUnit: 'inch', cutters: [sixteenth] }, desk));
     expect(lines).toContain(
       'cuts 1.588 mm or 0.0625 inch wide, 2 flutes, sticking out 12.700 mm or 0.5000 inch',
