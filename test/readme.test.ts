@@ -19,7 +19,7 @@ function starterWith(example: string): string {
 }
 
 function cut(job: string): ReturnType<typeof cutText> {
-  return cutText('my-wheel', job, 'golden', CUTTERS);
+  return cutText('my-wheel', job, 'golden', { cutters: CUTTERS });
 }
 
 describe('the examples of README', () => {

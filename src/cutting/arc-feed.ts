@@ -3,7 +3,7 @@
  *
  * The edge at the wall moves R / (R - r) times as fast as the centre on a hole of radius R: Fc = F (R - r) / R. Inside a
  * curve the same stock engages more of the cutter; the chip is kept by F sin(straight) / sin(curved). The smaller of the
- * two holds, but never below the feed at which the cutter rubs. mm, mm/min.
+ * two holds, but never below the feed at which the cutter rubs, nor below the lowest the machine runs. mm, mm/min.
  */
 import { rubbingFeed } from './edge.ts';
 import { radialDepthInside, thickestChip } from './engagement.ts';
@@ -17,6 +17,8 @@ export interface InsideArc {
   readonly radialDepth: number;
   readonly flutes: number;
   readonly speed: number;
+  /** Lowest feed of the machine. */
+  readonly lowest: number;
 }
 
 export function insideArcFeed(arc: InsideArc): number {
@@ -41,6 +43,6 @@ function wantedAndFloor(arc: InsideArc): { readonly wanted: number; readonly flo
   const straight = thickestChip(arc.radialDepth, arc.cutterDiameter);
   const curved = thickestChip(radialDepthInside(arc.radialDepth, wall, r), arc.cutterDiameter);
   const byChip = curved > 0 ? (arc.feed * straight) / curved : arc.feed;
-  const floor = Math.min(rubbingFeed(curved, arc.flutes, arc.speed), arc.feed);
+  const floor = Math.min(Math.max(rubbingFeed(curved, arc.flutes, arc.speed), arc.lowest), arc.feed);
   return { wanted: Math.min(byEdge, byChip), floor };
 }

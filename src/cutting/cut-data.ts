@@ -38,6 +38,8 @@ export interface CutData {
   readonly feedPerTooth: number;
   /** Feed below which the cutter would rub at this radial depth. */
   readonly floor: number;
+  /** Lowest feed of the machine. */
+  readonly lowest: number;
   readonly why: readonly string[];
 }
 
@@ -71,6 +73,7 @@ export function cutData(request: CutRequest): CutData {
     ramp: material.ramp,
     feedPerTooth: feed / (speed * cutter.flutes),
     floor: rubbingFeed(share, cutter.flutes, speed),
+    lowest: limits.feedLowest,
     why,
   };
 }

@@ -92,6 +92,7 @@ function finishing(task: CutTask, settings: Settings, radius: number, wall: numb
     radialDepth: wall,
     flutes: settings.cutter.flutes,
     speed: settings.data.speed,
+    lowest: settings.data.lowest,
   });
   const steps: MoveStep[] = [];
   for (let level = 1; level <= levels; level++) {

@@ -159,5 +159,6 @@ function arcFeed({ data, cutter }: Settings, pathRadius: number): number {
     radialDepth: cutter.diameter / 2,
     flutes: cutter.flutes,
     speed: data.speed,
+    lowest: data.lowest,
   });
 }

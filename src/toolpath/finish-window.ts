@@ -147,6 +147,7 @@ function wallLeg({ settings, way, radialDepth }: WallTask, piece: Piece): Leg {
           radialDepth,
           flutes: cutter.flutes,
           speed: data.speed,
+          lowest: data.lowest,
         })
       : data.feed;
   return arcLeg(endOf(piece), piece.centre, piece.turn, feed);

@@ -102,6 +102,7 @@ function feedsOf({ settings, radialDepth }: FinishTask): FeedOf {
         radialDepth,
         flutes: cutter.flutes,
         speed: data.speed,
+        lowest: data.lowest,
       });
     }
     return role === 'root' ? slow : data.feed;
@@ -110,12 +111,13 @@ function feedsOf({ settings, radialDepth }: FinishTask): FeedOf {
 
 /**
  * In a sharp inside corner the engaged angle grows from phi to 3 phi, at most by a quarter turn; the thickest chip is kept
- * what it is on the straight, down to the feed at which the cutter rubs.
+ * what it is on the straight, down to the feed at which the cutter rubs or the lowest of the machine.
  */
 export function cornerFeed({ data, cutter }: Settings, radialDepth: number): number {
   const straight = engagementAngle(radialDepth, cutter.diameter);
   const corner = Math.min(3 * straight, straight + Math.PI / 2);
   const sine = (angle: number): number => (angle >= Math.PI / 2 ? 1 : Math.sin(angle));
   const wanted = (data.feed * sine(straight)) / sine(corner);
-  return Math.max(wanted, Math.min(rubbingFeed(sine(corner), cutter.flutes, data.speed), data.feed));
+  const floor = Math.max(rubbingFeed(sine(corner), cutter.flutes, data.speed), data.lowest);
+  return Math.max(wanted, Math.min(floor, data.feed));
 }

@@ -104,6 +104,7 @@ function helix(
     radialDepth,
     flutes: settings.cutter.flutes,
     speed: data.speed,
+    lowest: data.lowest,
   });
   const feed = radialDepth < 2 * settings.radius ? beside : Math.min(beside, data.plunge);
   const round = (at: number): Leg[] => circleLegs(centre, start, way * 2 * Math.PI, at);

@@ -210,18 +210,32 @@ describe('feed on inside arcs [Fc = F (hole - d) / hole]', () => {
       radialDepth: d,
       flutes: 2,
       speed: 5000,
+      lowest: 1,
     });
     expect(slow).toBeCloseTo(centre, 2);
   });
   it.each([3, 3.2, 5, 9, 40, 900])(
     'in steps a path of radius %d is no faster, and hardly slower',
     (pathRadius) => {
-      const arc = { feed: 384, pathRadius, cutterDiameter: 1, radialDepth: 0.5, flutes: 2, speed: 24_000 };
+      const arc = {
+        feed: 384,
+        pathRadius,
+        cutterDiameter: 1,
+        radialDepth: 0.5,
+        flutes: 2,
+        speed: 24_000,
+        lowest: 1,
+      };
       const [exact, steps] = [insideArcFeed(arc), steppedArcFeed(arc)];
       expect(steps).toBeLessThanOrEqual(exact);
       expect(steps).toBeGreaterThan(exact / 1.0201);
     },
   );
+  it('never goes below the lowest feed of the machine, which its proof would refuse', () => {
+    const arc = { feed: 150, pathRadius: 0.05, cutterDiameter: 1, radialDepth: 1, flutes: 2, speed: 5000 };
+    expect(steppedArcFeed({ ...arc, lowest: 100 })).toBe(100);
+    expect(steppedArcFeed({ ...arc, lowest: 200 })).toBe(150);
+  });
   it('never goes below the feed at which the edge rubs', () => {
     const slow = insideArcFeed({
       feed: 150,
@@ -230,6 +244,7 @@ describe('feed on inside arcs [Fc = F (hole - d) / hole]', () => {
       radialDepth: 0.03,
       flutes: 2,
       speed: 20_000,
+      lowest: 1,
     });
     expect(slow).toBeCloseTo(0.4 * 0.003 * 2 * 20_000, 6);
   });

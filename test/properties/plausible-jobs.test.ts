@@ -1,6 +1,6 @@
 /** Jobs that random ones found refused, or written wrong, without a reason: each cut to the smallest that shows it. */
 import { expect, it, vi } from 'vitest';
-import { cutText } from '../support/cut-text.ts';
+import { cutText, type Beside } from '../support/cut-text.ts';
 
 vi.setConfig({ testTimeout: 60_000 });
 
@@ -29,8 +29,8 @@ function small({ wheel, blank, more = [], machine = 'bench-mill', cutters, cuts 
   ].join('\n');
 }
 
-function complaints(text: string): readonly string[] {
-  const { problems, facts } = cutText('small', text);
+function complaints(text: string, machine?: Beside['machine']): readonly string[] {
+  const { problems, facts } = cutText('small', text, 'golden', machine && { machine });
   return [...problems, ...(facts?.proof?.findings ?? [])]
     .filter(({ severity }) => severity === 'error')
     .map(({ code, message }) => `${code}: ${message}`);
@@ -117,4 +117,10 @@ it('a finishing cutter that goes on into the wedge of a space, beyond where the 
   const cutters = ['{ diameter: 2, reach: 6, flute: 6 }'];
   const cuts = ['roughing: { allowance: 0.126 }', 'finishing: { cutter: 1, spring: 0 }'];
   expect(complaints(small({ wheel, blank, cutters, cuts }))).toEqual([]);
+});
+
+it('a machine that does not creep gets no feed below its lowest, on inside arcs and before corners either', () => {
+  const text = small({ wheel: '{ teeth: 12, mate: { leaves: 8 }, module: 0.5, thickness: 0.3, bore: 1.2 }' });
+  const brisk = (file: string): string => file.replace(/feed-lowest: .*/, 'feed-lowest: 100');
+  expect(complaints(text, brisk)).toEqual([]);
 });

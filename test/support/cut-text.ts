@@ -31,8 +31,20 @@ export function machineText(name: string): string | undefined {
   return existsSync(path) ? readFileSync(path, 'utf8') : undefined;
 }
 
+export interface Beside {
+  /** The file of cutters that a job may name. */
+  readonly cutters?: string;
+  /** What is changed in the machine's file. */
+  readonly machine?: (text: string) => string;
+}
+
 /** A version that never changes, so that golden programs do not change with ours. */
-export function cutText(name: string, text: string, version = 'golden', cutters?: string): CutResult {
+export function cutText(
+  name: string,
+  text: string,
+  version = 'golden',
+  { cutters, machine: changed = (file) => file }: Beside = {},
+): CutResult {
   return cut({
     file: `${name}.yaml`,
     text,
@@ -48,7 +60,7 @@ export function cutText(name: string, text: string, version = 'golden', cutters?
               at: { kind: 'file', file: name },
             },
           ])
-        : success({ name: machine, file: `posts/${machine}.yaml`, text: found });
+        : success({ name: machine, file: `posts/${machine}.yaml`, text: changed(found) });
     },
     loadMachine: machineText,
     readCutters: (path) =>
