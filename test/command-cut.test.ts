@@ -172,6 +172,16 @@ describe('ogive cut, programs that are there already', { timeout: 60_000 }, () =
       expect.arrayContaining(['small-wheel-extra.nc', 'small-wheels.nc', 'other.nc']),
     );
   });
+
+  it("leaves another job's one program alone that is called like this one's first", () => {
+    const folder = folderWith();
+    const text = onMachine(readFileSync(join(folder, 'small-wheel.yaml'), 'utf8'), 'inch-bench-mill');
+    writeFileSync(join(folder, 'small-wheel-1.yaml'), text);
+    writeFileSync(join(folder, 'small-wheel.yaml'), text);
+    expect(ogive(['cut', 'small-wheel-1.yaml'], folder).exit).toBe(0);
+    expect(ogive(['cut', 'small-wheel.yaml'], folder).exit).toBe(0);
+    expect(namesIn(folder)).toEqual(expect.arrayContaining(['small-wheel-1.nc', 'small-wheel.nc']));
+  });
 });
 
 describe('ogive cut, a program that fails its own proof', { timeout: 60_000 }, () => {

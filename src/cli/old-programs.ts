@@ -42,6 +42,9 @@ export function keepOldPrograms(
       continue;
     }
     const byHand = records.get(file) !== sum;
+    if (next === undefined && byHand && isOfAnother(folder, name, file, sum)) {
+      continue;
+    }
     if (next === undefined) {
       rename(file, byHand ? 'edited' : 'old');
     } else if (byHand) {
@@ -56,6 +59,12 @@ export function keepOldPrograms(
   return edited.length > 0 && !force
     ? failure(edited.map((file) => handEdited(join(folder, file))))
     : success(renamings);
+}
+
+/** Whether another job's summary knows it: the one program of a job NAME-1 is called as the first of a job NAME is. */
+function isOfAnother(folder: string, name: string, file: string, sum: string): boolean {
+  const other = file.replace(/\.[^.]*$/, '');
+  return other !== name && recordsOf(folder, other).get(file) === sum;
 }
 
 function handEdited(file: string): Problem {
