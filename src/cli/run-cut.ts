@@ -70,7 +70,7 @@ function sayOfOldOnes(folder: string, jobFile: string, terminal: Terminal): void
   const old = programsIn(folder, nameOf(jobFile));
   if (old.length > 0) {
     terminal.say(
-      `Nothing was changed in ${folder}. There, from an earlier run and not of this job as it stands: ${old.join(', ')}. Do not run them.`,
+      `Nothing was changed in ${folder === '.' ? 'this folder' : folder}. There, from an earlier run and not of this job as it stands: ${old.join(', ')}. Do not run them.`,
     );
   }
 }

@@ -65,8 +65,10 @@ export function placeInJob(problem: Problem, job: Pick<Job, 'file' | 'spots'>): 
   if (at.kind !== 'value' || at.line !== undefined || (at.file !== '' && at.file !== job.file)) {
     return problem;
   }
-  for (let length = at.path.length; length >= 0; length--) {
-    const spot = job.spots?.[showPath(at.path.slice(0, length))];
+  const groups = at.path.map((_, left) => at.path.slice(0, at.path.length - left));
+  // A job that leaves the cuts out altogether has them follow from its cutters.
+  for (const path of [...groups, ...(at.path[0] === 'cuts' ? [['cutters']] : []), []]) {
+    const spot = job.spots?.[showPath(path)];
     if (spot !== undefined) {
       return { ...problem, at: { ...at, file: job.file, ...spot } };
     }

@@ -60,7 +60,7 @@ function flankInReach({ job, form }: CutTask, made: AsCut): Problem | undefined 
     message:
       `cutter ${cutter.number} of ${cutter.diameter} mm leaves metal on the flank up to a radius of ${made.footRadius.toFixed(4)} mm, ` +
       `and the mate's tip works from ${form.workingRadius.toFixed(4)} mm`,
-    hint: `the largest cutter that would do is ${(Math.floor(largest * 1000) / 1000).toFixed(3)} mm`,
+    hint: `the largest cutter that would do for the working flank is ${(Math.floor(largest * 1000) / 1000).toFixed(3)} mm`,
     at: { kind: 'value', file: job.file, path: ['cuts', 'finishing', 'cutter'] },
   };
 }

@@ -1,3 +1,4 @@
+import { placeInJob } from '../../src/job/place-problems.ts';
 import { readdirSync, readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { Bug } from '../../src/base/bug.ts';
@@ -224,4 +225,11 @@ it('hands on what does not fit, so that a sheet can say why', () => {
 
 it('knows where each value stands', () => {
   expect(jobOf(PLAIN).spots?.['wheel.teeth']).toEqual({ line: 3, column: 10 });
+});
+
+it('a refused cutter of a job without cuts stands at its cutters, not at the first line', () => {
+  const job = jobOf(PLAIN.replace(/^cuts:[\s\S]*/m, ''));
+  const at = { kind: 'value', file: '', path: ['cuts', 'finishing', 'cutter'] } as const;
+  const problem = { code: 'reach.flank', severity: 'error', message: 'too wide', at } as const;
+  expect(placeInJob(problem, job).at).toMatchObject(job.spots?.['cutters'] ?? { line: 'none' });
 });

@@ -45,7 +45,7 @@ describe('reach', () => {
       cuts: { roughing: { cutter: wide, allowance: 0.03 }, finishing: { cutter: wide } },
     });
     expect(problems.map(({ code }) => code)).toEqual(['reach.flank']);
-    expect(problems[0]!.hint).toMatch(/largest cutter that would do is 0\.\d+ mm/);
+    expect(problems[0]!.hint).toMatch(/largest cutter that would do for the working flank is 0\.\d+ mm/);
   });
 
   it('recommends the largest cutter of the list by the root width rule', () => {
