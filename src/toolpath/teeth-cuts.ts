@@ -233,8 +233,11 @@ function finishingLevels({
   if (!roughed.ok || !finished.ok) {
     return failure([...roughed.problems, ...finished.problems]);
   }
-  // How much further in the finishing cutter goes: where both wedge between the flanks, several times what is left on these.
-  const thick = roughed.value.floorRadius + roughPath.distance - rough.radius - finished.value.floorRadius;
+  const left = roughPath.distance - rough.radius;
+  // In the root's corners; and how much further in it goes where both wedge between the flanks, several times what is left on these.
+  const corner = roughed.value.leftAtRoot - finished.value.leftAtRoot + left;
+  const wedge = roughed.value.floorRadius + left - finished.value.floorRadius;
+  const thick = Math.max(corner, wedge);
   if (thick > THICK * fine.cutter.diameter) {
     const slot = settingsFor(job, machine, 'finishing', 'slot', 0);
     if (!slot.ok) {

@@ -119,6 +119,17 @@ it('a finishing cutter that goes on into the wedge of a space, beyond where the 
   expect(complaints(small({ wheel, blank, cutters, cuts }))).toEqual([]);
 });
 
+it('a finishing cutter that finds metal in the corners of the root, where a wider one could not go, goes in levels', () => {
+  const wheel = '{ teeth: 22, mate: { leaves: 19 }, module: 0.45, thickness: 1 }';
+  const blank = '{ material: silver-steel, shape: sheet, size: [20, 20], holding: glue }';
+  const cutters = [
+    '{ diameter: 0.25, reach: 1.25, flute: 1.25, stick-out: 10, helix: 40 }',
+    '{ diameter: 0.5, flutes: 3, reach: 1.5, flute: 0.75, shank: 3, stick-out: 12, helix: 40 }',
+  ];
+  const cuts = ['roughing: { cutter: 2 }', 'finishing: { cutter: 1 }'];
+  expect(complaints(small({ wheel, blank, cutters, cuts }))).toEqual([]);
+});
+
 it('a machine that does not creep gets no feed below its lowest, on inside arcs and before corners either', () => {
   const text = small({ wheel: '{ teeth: 12, mate: { leaves: 8 }, module: 0.5, thickness: 0.3, bore: 1.2 }' });
   const brisk = (file: string): string => file.replace(/feed-lowest: .*/, 'feed-lowest: 100');
