@@ -1,35 +1,13 @@
 /**
  * Feeds and speeds no cutter bears, within what the machine runs: a chip thicker than any small cutter takes, an edge faster
- * than its material allows, and (warned of) both so slow that the cutter rubs. Bounds far outside good practice, not advice.
- *
- * Chip a tooth: fz = F / (S z). Edge speed: v = pi D S / 1000 in m/min. Judged are moves below the top of the blank.
+ * than its material allows, and (warned of) both so slow that the cutter rubs. Judged are moves below the top of the blank.
  */
-import { THINNEST_CHIP } from '../cutting/edge.ts';
-import { chipLoad, materialNamed, type Material } from '../cutting/materials.ts';
+import { boundsOf, edgeSpeed, type Bounds } from '../cutting/bounds.ts';
+import { materialNamed } from '../cutting/materials.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import type { Evidence } from './evidence.ts';
 import { findingAt, micronText, type Said } from './finding-at.ts';
 import type { Finding } from './proof.ts';
-
-/** Thickest chip, as a share of the diameter. Judgement: catalogues give 0.13 to 0.6 %, our softest material 2 %. */
-const THICKEST_SHARE = 0.05;
-/** Thickest chip, in loads of the material's table. Judgement: a thin wall is given 1.5 of them already. */
-const MOST_LOADS = 6;
-/** Fastest edge, in cutting speeds of the material's table, which are taken low. Judgement. */
-const MOST_SPEEDS = 4;
-/** Slowest feed and speed, as shares of the table's (or the machine's highest). Judgement: a quarter is usual going down. */
-const LEAST_LOAD = 1 / 20;
-const LEAST_SPEED = 1 / 10;
-
-/** What one cutter bears in this material; mm, 1/min. */
-interface Bounds {
-  readonly cutter: Cutter;
-  readonly thickest: number;
-  /** Thinner than this it only rubs. */
-  readonly thinnest: number;
-  readonly fastest: number;
-  readonly slowest: number;
-}
 
 export function checkChip(evidence: Evidence): Finding[] {
   const { solids, input, lastDigit } = evidence;
@@ -37,6 +15,7 @@ export function checkChip(evidence: Evidence): Finding[] {
   const { spindleHighest } = input.machine.limits;
   const top = input.setup.topZ - lastDigit;
   const found = new Map<string, Finding>();
+  let cutter: Cutter | undefined;
   let bounds: Bounds | undefined;
   let [feed, spindle, number] = [Number.NaN, Number.NaN, Number.NaN];
   for (let i = 0; i < solids.count; i++) {
@@ -49,11 +28,14 @@ export function checkChip(evidence: Evidence): Finding[] {
       continue;
     }
     if (move.cutter !== number) {
-      const cutter = evidence.cutterOf(move);
+      cutter = evidence.cutterOf(move);
       bounds = cutter && boundsOf(cutter, material, spindleHighest);
     }
     [feed, spindle, number] = [move.feed ?? Number.NaN, move.spindle, move.cutter ?? Number.NaN];
-    for (const said of bounds === undefined || spindle === 0 ? [] : judge(bounds, feed, Math.abs(spindle))) {
+    if (cutter === undefined || bounds === undefined || spindle === 0) {
+      continue;
+    }
+    for (const said of judge(cutter, bounds, feed, Math.abs(spindle))) {
       if (!found.has(said.hint)) {
         found.set(said.hint, findingAt(move, said));
       }
@@ -62,26 +44,11 @@ export function checkChip(evidence: Evidence): Finding[] {
   return [...found.values()];
 }
 
-function boundsOf(cutter: Cutter, material: Material | undefined, highest: number): Bounds {
-  const share = THICKEST_SHARE * cutter.diameter;
-  if (material === undefined) {
-    return { cutter, thickest: share, thinnest: 0, fastest: Infinity, slowest: 0 };
-  }
-  const load = chipLoad(material, cutter.diameter);
-  const turns = (1000 * material.cuttingSpeed) / (Math.PI * cutter.diameter);
-  return {
-    cutter,
-    thickest: Math.min(share, MOST_LOADS * load),
-    thinnest: Math.min(LEAST_LOAD * load, THINNEST_CHIP / 2),
-    fastest: MOST_SPEEDS * turns,
-    slowest: LEAST_SPEED * Math.min(turns, highest),
-  };
-}
-
 const NONE: readonly Said[] = [];
 
 function judge(
-  { cutter, thickest, thinnest, fastest, slowest }: Bounds,
+  cutter: Cutter,
+  { thickest, thinnest, fastest, slowest }: Bounds,
   feed: number,
   speed: number,
 ): readonly Said[] {
@@ -90,7 +57,7 @@ function judge(
     return NONE;
   }
   const which = `cutter ${String(cutter.number)}`;
-  const edge = (turns: number): string => `${((Math.PI * cutter.diameter * turns) / 1000).toFixed(1)} m/min`;
+  const edge = (turns: number): string => `${edgeSpeed(cutter, turns).toFixed(1)} m/min`;
   const said = (message: string, hint: string, severity: Finding['severity']): Said[] => [
     { code: 'prove.chip', message, hint, severity },
   ];

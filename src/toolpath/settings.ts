@@ -6,8 +6,9 @@
  *       refusal that no depth keeps the cutter from breaking.
  */
 import { Bug } from '../base/bug.ts';
-import { failure, success, type Outcome } from '../base/problem.ts';
+import { failure, success, type Outcome, type Problem } from '../base/problem.ts';
 import { SAME_POINT } from '../base/tolerances.ts';
+import { boundsOf, edgeSpeed, type Bounds } from '../cutting/bounds.ts';
 import { cutData, type CutData } from '../cutting/cut-data.ts';
 import { materialNamed, type Material } from '../cutting/materials.ts';
 import type { Cutter } from '../cutting/setup.ts';
@@ -56,6 +57,10 @@ export function settingsFor(
     dial === chosen.speed
       ? chosen
       : onTheDial(cutData({ ...request, asked: { ...asked, speed: dial } }), chosen);
+  const unbearable = tooMuch(job, kind, data, boundsOf(cutter, material, machine.limits.spindleHighest));
+  if (unbearable !== undefined) {
+    return failure([unbearable]);
+  }
   const settings: Settings = { cutter, radius: cutter.diameter / 2, data, step: cutter.flute, why: data.why };
   if (radialDepth !== 'slot') {
     return success(settings);
@@ -87,6 +92,35 @@ export function settingsFor(
 
 /** mm; a depth that would be said as 0.0000. */
 const LEAST_SAID = 0.0001;
+
+/** A speed or a feed that no cutter bears: what the job asks for, or the least that the machine runs. */
+function tooMuch(job: Job, kind: PassKind, data: CutData, bounds: Bounds): Problem | undefined {
+  const { cutter, ...asked } = job.cuts[kind];
+  const said = (key: 'speed' | 'feed', message: string): Problem => ({
+    code: 'toolpath.load',
+    severity: 'error',
+    message: `${kind}: ${message}`,
+    hint:
+      asked[key] === undefined
+        ? 'take another cutter: the machine runs no lower'
+        : `lower the ${key}, or leave it out: it then follows from cutter, material and machine`,
+    at: { kind: 'value', file: job.file, path: ['cuts', kind, asked[key] === undefined ? 'cutter' : key] },
+  });
+  if (data.speed > bounds.fastest) {
+    const edge = (turns: number): string => `${edgeSpeed(cutter, turns).toFixed(0)} m/min`;
+    return said(
+      'speed',
+      `at ${data.speed} turns a minute the edge of cutter ${cutter.number} runs at ${edge(data.speed)}; in ${job.setup.material} it burns above ${edge(bounds.fastest)} at the latest`,
+    );
+  }
+  if (data.feedPerTooth > bounds.thickest) {
+    return said(
+      'feed',
+      `${data.feed} mm/min makes a chip of ${data.feedPerTooth.toFixed(4)} mm a tooth; cutter ${cutter.number} breaks above ${bounds.thickest.toFixed(4)} mm at the latest`,
+    );
+  }
+  return undefined;
+}
 
 /** What a dial set by hand can be set to. Judgement: its marks stand a thousand apart and are read to a tenth. */
 const DIAL = 100;

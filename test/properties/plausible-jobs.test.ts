@@ -135,3 +135,13 @@ it('a machine that does not creep gets no feed below its lowest, on inside arcs 
   const brisk = (file: string): string => file.replace(/feed-lowest: .*/, 'feed-lowest: 100');
   expect(complaints(text, brisk)).toEqual([]);
 });
+
+it('a speed at which the edge burns is refused at the job, not by the proof of a program nobody can change', () => {
+  const wheel = '{ teeth: 12, mate: { leaves: 8 }, module: 2, thickness: 1 }';
+  const blank = '{ material: silver-steel, shape: sheet, size: [40, 40], holding: glue }';
+  const cuts = ['roughing: { speed: 24000 }'];
+  const text = small({ wheel, blank, cutters: ['{ diameter: 2.5, reach: 4, flute: 4 }'], cuts });
+  expect(complaints(text)).toEqual([
+    expect.stringMatching(/^toolpath\.load: roughing: at 24000 turns a minute/),
+  ]);
+});

@@ -39,6 +39,16 @@ const LIMITS: Readonly<
   'machining-centre': { spindle: [100, 15000], x: 500, y: 400, z: 400, feed: 5000, nut: 32 },
 };
 
+/** m/min at which a carbide edge is past any use, copied by hand: four times the speeds of shop charts, taken low. */
+const BURNS: Readonly<Record<string, number>> = {
+  'leaded-brass': 400,
+  brass: 320,
+  'free-cutting-steel': 320,
+  'silver-steel': 180,
+  aluminium: 800,
+  acetal: 600,
+};
+
 export function reasonsAgainst(job: RandomJob): readonly Reason[] {
   const rootRadius = job.module * (job.teeth / 2 - job.dedendum);
   const tip = tipRadius(job);
@@ -215,6 +225,14 @@ function machine(job: RandomJob, tip: number): Reason[] {
     reasons.push({
       bears: ['cuts.roughing.speed'],
       why: `the spindle does not turn at ${String(job.speed)}`,
+    });
+  }
+  const edge = (Math.PI * widest * (job.speed ?? 0)) / 1000;
+  const burns = BURNS[job.material] ?? Infinity;
+  if (edge > burns) {
+    reasons.push({
+      bears: ['cuts.roughing.speed'],
+      why: `the edge would run at ${edge.toFixed(0)} m/min, which burns it in ${job.material}`,
     });
   }
   return reasons;
