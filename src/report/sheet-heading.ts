@@ -48,7 +48,7 @@ function verdict(facts: SheetFacts): string {
     `<p class="verdict">Proved from its own text. At worst the cut flank lies ${figure('flank-gouge', figures.flankGouge)} inside and ` +
     `${figure('flank-left', figures.flankLeft)} outside the exact curve; ${tinyLength(allowedError(facts.machine), unit, 1)} is allowed. ` +
     `${figure('left-at-root', figures.leftAtRoot)} stays in the corners of the root, below where the pinion works.</p>\n` +
-    `<p class="soft">That is the program alone; cutter and slides add more. A cutter that cuts ${lengthBoth(0.01, unit)} wider thins every tooth by ${lengthBoth(0.02, unit)}, ` +
-    `${plain((0.02 / facts.form.toothThickness) * 100, 1)} per cent of it here. The cutters' runout is taken as ${lengthBoth(facts.job.cuts.finishing.cutter.runout, unit)}; ${slides}.</p>\n`
+    `<p class="soft">That is the program alone; cutter and slides add more. A cutter that cuts ${lengthBoth(0.01, unit)} wider thins every tooth by as much, ` +
+    `${plain((0.01 / facts.form.toothThickness) * 100, 1)} per cent of it here. The cutters' runout is taken as ${lengthBoth(facts.job.cuts.finishing.cutter.runout, unit)}; ${slides}.</p>\n`
   );
 }
