@@ -2,6 +2,7 @@
  * Speed and feed for a cutter in a material, where the job leaves them out, each with the sentence that says where it
  * came from. n = 1000 vc / (pi D), vf = n z fz. 1/min, mm/min, mm, degrees.
  */
+import { fixedDecimals } from '../base/fixed-decimals.ts';
 import { EDGE_RADIUS, rubbingFeed } from './edge.ts';
 import { thickestChip } from './engagement.ts';
 import { chipLoad, type Material } from './materials.ts';
@@ -103,7 +104,7 @@ function chooseFeed(
   const raised = thinning > 1 ? `, raised ${thinning.toFixed(2)} times since the wall's chip is thin` : '';
   const held = wanted > limits.feedHighest ? ', held to the highest feed of the machine' : '';
   why.push(
-    `feed ${feed} mm/min: ${load.toFixed(4)} mm a tooth for a ${cutter.diameter} mm cutter${raised}${held}`,
+    `feed ${feed} mm/min: ${load.toFixed(4)} mm a tooth for a ${Number(fixedDecimals(cutter.diameter, 3))} mm cutter${raised}${held}`,
   );
   if ((feed / (speed * cutter.flutes)) * share < EDGE_RADIUS / 2) {
     why.push('the chip is thinner than half the edge radius: listen for rubbing, use a sharp cutter');

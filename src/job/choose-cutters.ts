@@ -14,6 +14,7 @@ import { largestCutter } from '../tooth/largest-cutter.ts';
 import { restingDisc } from '../tooth/resting-disc.ts';
 import type { ToothSide } from '../tooth/tooth-side.ts';
 import type { Crossings } from '../tooth/wheel.ts';
+import { figure } from './show-length.ts';
 
 export interface Choice {
   readonly cutter: Cutter;
@@ -97,7 +98,12 @@ export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {
   const enters = (cutter: Cutter): boolean =>
     cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter < bore;
   const fits = (cutter: Cutter): boolean => enters(cutter) && cutter.diameter <= HOLE_SHARE * bore;
-  return largest(cutters, fits, enters, `the largest that has room to go round in a bore of ${bore} mm`);
+  return largest(
+    cutters,
+    fits,
+    enters,
+    `the largest that has room to go round in a bore of ${figure(bore, 3)} mm`,
+  );
 }
 
 export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings): Choice {
@@ -107,7 +113,12 @@ export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings
     cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter <= 2 * corner;
   const fits = (cutter: Cutter): boolean =>
     enters(cutter) && cutter.diameter < 2 * corner && cutter.diameter <= room;
-  return largest(cutters, fits, enters, `the largest that goes round corners of ${corner} mm radius`);
+  return largest(
+    cutters,
+    fits,
+    enters,
+    `the largest that goes round corners of ${figure(corner, 3)} mm radius`,
+  );
 }
 
 function largest(

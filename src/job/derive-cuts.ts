@@ -84,7 +84,7 @@ function toothCutters({ text, cutters }: CutsGround, choosing: Choosing, notes: 
     asked,
     'cuts.roughing.allowance',
     usualAllowance(roughing.diameter),
-    'a twentieth of the roughing cutter, from 0.02 to 0.1 mm',
+    'a twentieth of the roughing cutter, from 0.02 mm to 0.1 mm',
   );
   const finishing = pick(
     cuts.finishing?.cutter,

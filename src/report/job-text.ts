@@ -17,4 +17,4 @@ export function jobText(text: string, unit: LengthUnit): string {
 }
 
 /** A figure and its unit, where no other unit stands beside it already and it is no area. */
-const LENGTH = /(-?\d+(?:\.\d+)?) mm(\/min)?(?![\w²/]|\s*(?:\(|or\b))/g;
+const LENGTH = /(?<!inch \(|[\d.-])(-?\d+(?:\.\d+)?) mm(\/min)?(?![\w²/]|\s*(?:\(|or\b))/g;

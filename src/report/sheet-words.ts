@@ -81,7 +81,8 @@ export function derivedSection({ job }: SheetFacts): string {
     ]);
   }
   const rows = [...byWhy].map(
-    ([why, values]) => `<div><dt>${values.join(', ')}:</dt> <dd>${escapeText(why)}.</dd></div>`,
+    ([why, values]) =>
+      `<div><dt>${values.join(', ')}:</dt> <dd>${escapeText(jobText(why, job.length))}.</dd></div>`,
   );
   return rows.length === 0
     ? ''

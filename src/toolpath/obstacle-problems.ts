@@ -1,6 +1,7 @@
 /** Whether any cut would touch what stands on the plate: one problem for each obstacle, at the first move that would. */
 import type { Problem } from '../base/problem.ts';
 import type { Obstacle } from '../cutting/setup.ts';
+import { showLength } from '../job/show-length.ts';
 import type { Position } from '../motion/motion.ts';
 import type { CutTask } from './cut-task.ts';
 import { inTheWay } from './in-the-way.ts';
@@ -18,7 +19,7 @@ export function obstacleProblems({ job, machine }: CutTask, passes: readonly Pas
       for (const step of run.steps) {
         const obstacle = inTheWay(at, step, obstacles, cutter, machine);
         if (obstacle !== undefined && !hit.has(obstacle)) {
-          hit.set(obstacle, problemOf(job.file, obstacle, facts.name, step.to));
+          hit.set(obstacle, problemOf(job, obstacle, facts.name, step.to));
         }
         at = step.to;
       }
@@ -27,14 +28,20 @@ export function obstacleProblems({ job, machine }: CutTask, passes: readonly Pas
   return [...hit.values()];
 }
 
-function problemOf(file: string, obstacle: Obstacle, pass: string, at: Position): Problem {
+function problemOf(
+  { file, length }: CutTask['job'],
+  obstacle: Obstacle,
+  pass: string,
+  at: Position,
+): Problem {
+  const show = (mm: number): string => showLength(mm, length);
   return {
     code: 'job.does-not-fit',
     severity: 'error',
     message:
-      `${pass}: the cutter or what holds it would touch the ${obstacle.name} at x ${obstacle.x}, y ${obstacle.y} ` +
-      `(radius ${obstacle.radius} mm), near x ${at.x.toFixed(3)}, y ${at.y.toFixed(3)}`,
-    hint: 'move it out of the path, or let the cutter stand out more',
+      `${pass}: the cutter or what holds it would touch the ${obstacle.name} at x ${show(obstacle.x)}, y ${show(obstacle.y)}, ` +
+      `radius ${show(obstacle.radius)}, near x ${show(at.x)}, y ${show(at.y)}`,
+    hint: 'Move it out of the path, or let the cutter stand out more.',
     at: {
       kind: 'value',
       file,

@@ -97,7 +97,13 @@ describe('sentences of other stages in an inch job', () => {
   });
 
   it('leave alone what is no length, what has inches already, and every metric job', () => {
-    for (const text of ['0.0261 mm2 a space', '3.5 modules', '25.4 mm or 1 inch', '25.4 mm (1 in)']) {
+    for (const text of [
+      '0.0261 mm2 a space',
+      '3.5 modules',
+      '25.4 mm or 1 inch',
+      '25.4 mm (1 in)',
+      '1 inch (25.4 mm)',
+    ]) {
       expect(jobText(text, 'inch')).toBe(text);
     }
     expect(jobText('2.54 mm', 'mm')).toBe('2.54 mm');

@@ -30,6 +30,7 @@ export function cutter(number: number, diameter: number, change: Partial<Cutter>
 }
 
 export interface Wanted {
+  readonly length?: Job['length'];
   readonly wheel?: Partial<WheelProportions>;
   readonly thickness?: number;
   readonly bore?: number;
@@ -63,7 +64,7 @@ export function makeCase(wanted: Wanted = {}): Case {
     name: 'test',
     file: 'test.yaml',
     title: 'A wheel for a test',
-    length: 'mm',
+    length: wanted.length ?? 'mm',
     wheel: {
       ...wheel,
       thickness,

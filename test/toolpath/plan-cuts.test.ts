@@ -88,6 +88,12 @@ describe('reach', () => {
   });
 });
 
+it('"keep-out at x 27.94" of a job that says x: 1.1: a clamp in the path is told in the unit of the job', () => {
+  const clamp = { name: 'keep-out', x: 15.24, y: 0, radius: 2.54, fromZ: -1.5, toZ: 8 } as const;
+  const [problem] = problemsOf({ length: 'inch', setup: { obstacles: [clamp] } });
+  expect(problem?.message).toContain('at x 0.6 inch (15.24 mm), y 0 inch (0 mm), radius 0.1 inch (2.54 mm)');
+});
+
 describe('programs', () => {
   it('is one for each uninterrupted run of a cutter where the machine takes one cutter a program', () => {
     const plan = planOf({ machine: 'desk-three-axis' });
