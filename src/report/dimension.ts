@@ -26,13 +26,16 @@ export function widthOf(text: string): number {
   return text.length * LETTER * LETTER_WIDTH;
 }
 
-/** Level, with the figure above the line; outside to the right where it does not fit between the arrows. */
-export function levelDimension(dimension: Dimension): string {
+/** Level, with the figure above the line; where it does not fit between the arrows, outside to the right, or over both at `over`. */
+export function levelDimension(dimension: Dimension, over?: number): string {
   const { from, to, text } = dimension;
   const fits = widthOf(text) + 2 <= Math.abs(to.x - from.x);
-  const x = fits ? (from.x + to.x) / 2 : Math.max(from.x, to.x) + 6;
-  const anchor = fits ? 'middle' : 'start';
-  return wrap(dimension, line(dimension, fits), words(text, x, fits ? from.y - 1.2 : from.y + 1, anchor));
+  const middle = (from.x + to.x) / 2;
+  const figure =
+    fits || over !== undefined
+      ? words(text, middle, fits ? from.y - 1.2 : (over ?? from.y), 'middle')
+      : words(text, Math.max(from.x, to.x) + 6, from.y + 1, 'start');
+  return wrap(dimension, line(dimension, fits), figure);
 }
 
 /** Upright, the figure read from the right, on the left of the line. */

@@ -42,13 +42,15 @@ export function drawJaws({ form, unit }: SizesPlate, frame: PlateFrame): string 
     return `<path class="jaw" d="M${inner} ${plain(-touch + 0.5, 3)}V${plain(-top - BLADE, 3)}H${outer}V${plain(-touch, 3)}Z"/>`;
   };
   const y = -top - LINE;
-  const dimension = levelDimension({
+  const measured = {
     figure: `span-${span.teeth}-drawn`,
     value: span.reading,
     text: `over ${span.teeth} teeth ${bareLength(span.reading, unit)}`,
     from: { x: -half, y },
     to: { x: half, y },
-  });
+  };
+  // Over the blades where they stand close: beside them it would run into the figure of the thickness.
+  const dimension = levelDimension(measured, -top - BLADE - 1);
   const angle = (lean(span.teeth, teeth) * 180) / Math.PI;
   return `<g transform="rotate(${plain(-angle, 4)})">${blade(-1)}${blade(1)}${dimension}</g>`;
 }

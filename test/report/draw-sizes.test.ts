@@ -5,6 +5,7 @@ import { sampleChain } from '../../src/geometry/sample-piece.ts';
 import { turnPoint } from '../../src/geometry/point.ts';
 import { CHORD_SAG } from '../../src/base/tolerances.ts';
 import { drawSizes, type SizesPlate } from '../../src/report/draw-sizes.ts';
+import { LETTER } from '../../src/report/plate.ts';
 import { asCut } from '../../src/tooth/as-cut.ts';
 import { crossings } from '../../src/tooth/crossings.ts';
 import type { WheelProportions } from '../../src/tooth/wheel.ts';
@@ -189,4 +190,15 @@ describe('"root circle" on the drawing of what a cutter leaves, where no metal e
   it('is the root circle of the exact wheel elsewhere', () => {
     expect(textsOf(drawSizes(plate, 'x').svg).some((text) => text.startsWith('root circle'))).toBe(true);
   });
+});
+
+it('"over 11 teeth 10.493ick 1.200": the figure between the jaws keeps clear of the figure of the thickness', () => {
+  const svg = drawSizes(plateOf(72, 0.3268, 4, 'mm'), 'sizes').svg;
+  const boxOf = (figure: RegExp): { readonly x: number; readonly half: number } => {
+    const text = figure.exec(svg);
+    return { x: Number(text?.[1]), half: ((text?.[2]?.length ?? NaN) * LETTER) / 4 };
+  };
+  const span = boxOf(/<text[^>]*text-anchor="middle"[^>]*x="([-\d.]+)"[^>]*>(over \d+ teeth [\d.]+)</);
+  const thick = boxOf(/<text[^>]*x="([-\d.]+)"[^>]*>(thick [\d.]+)</);
+  expect(span.x + span.half).toBeLessThan(thick.x - thick.half);
 });
