@@ -32,16 +32,19 @@ const STOPS = 'It stops,';
 const AT_STOP = 'At the stop:';
 
 function fitted(facts: SheetFacts, number: number): string {
-  return facts.machine.words.cutters.change === 'automatic'
-    ? `It calls cutter ${number} first.`
-    : `Cutter ${number} is in the collet.`;
+  const words = {
+    automatic: `It calls cutter ${number} first.`,
+    'by-hand': `It stops at once for cutter ${number}.`,
+    'one-program': `Cutter ${number} is in the collet.`,
+  };
+  return words[facts.machine.words.cutters.change];
 }
 
 /** By the machine itself, or at a stop. */
 function changed(facts: SheetFacts, number: number): string {
   return facts.machine.words.cutters.change === 'automatic'
-    ? `Then it changes to cutter ${number} by itself; its length must be in the table of the controller.`
-    : `${STOPS} parked high and aside with the spindle still: fit cutter ${number}.`;
+    ? `Then it changes to cutter ${number} by itself.`
+    : `${STOPS} parked high and aside with the spindle still, for cutter ${number}.`;
 }
 
 /** The numerals of the passes it holds. */

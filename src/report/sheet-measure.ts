@@ -35,7 +35,12 @@ function tipRows(facts: SheetFacts): readonly string[] {
     facts.form.proportions.teeth % 2 === 1
       ? `Flat jaws, the largest reading as they turn; an odd count reads less than the tip circle, ${lengthOnly(tips.diameter, facts.job.length)}.`
       : 'Flat jaws over two opposite tips.';
-  return [row(facts, 'over the tips', tips.most, 'tip', how)];
+  const { shape } = facts.job.setup;
+  const turned =
+    shape.kind === 'disc'
+      ? ` The tips are not cut: what they read is what the disc was turned to, ${lengthOnly(shape.diameter, facts.job.length)} by the job.`
+      : '';
+  return [row(facts, 'over the tips', tips.most, 'tip', how + turned)];
 }
 
 function spanRows(facts: SheetFacts): readonly string[] {

@@ -75,7 +75,7 @@ function zeroSteps({ job, again }: SheetFacts): readonly string[] {
       ? `the top of the blank, touched off with the cutter that is used first (a slip of paper, a feeler, or a setter of known height: take its thickness off)`
       : `the plate under the blank: touch it off beside the blank, which lies ${lengthBoth(topZ - plateZ, job.length)} above it`;
   const hole =
-    bored > 0
+    bored > 0 && !job.setup.holding.includes('arbor')
       ? ` The hole of ${lengthBoth(bored, job.length)} is there already: run a dial gauge round it; a swing of the needle is twice the error.`
       : '';
   return [

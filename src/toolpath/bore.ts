@@ -66,13 +66,18 @@ export function bore(task: CutTask): Outcome<readonly PassCuts[]> {
       laps: helixRadii(hole).length,
       step: (heights.top - heights.bottom) / turns,
       why: [
-        `cleared whole by ${helixRadii(hole).length} helices side by side, so that no core comes loose`,
+        clearedWords(helixRadii(hole).length),
         ...(existing > 0 ? [`begins in the hole of ${job.setup.bored} mm that is there`] : []),
       ],
     },
     [roundHole(hole)],
   );
   return success([cleared, finishing(task, side.value, radius, wall, way)]);
+}
+
+function clearedWords(helices: number): string {
+  const by = helices === 1 ? 'one helix' : `${helices} helices side by side`;
+  return `cleared whole by ${by}, so that no core comes loose`;
 }
 
 function finishing(task: CutTask, settings: Settings, radius: number, wall: number, way: 1 | -1): PassCuts {

@@ -76,7 +76,50 @@ describe('the set-up', () => {
   });
 });
 
+it('"a cutter 0.010 mm wider thins every tooth by 0.020": a flank gives half of it, a tooth of two flanks all of it', () => {
+  const share = (0.01 / facts.form.toothThickness) * 100;
+  expect(wordsOf(page)).toContain(
+    `cuts 0.010 mm (0.0004 in) wider thins every tooth by as much, ${share.toFixed(1)} per cent`,
+  );
+});
+
+it('"Cutter 1 is in the collet. Fit it", and the table of lengths twice: says once what hands do at a change', () => {
+  const stepsOn = (machine: string): string => {
+    const run = runOf('third-wheel', (text) => text.replace('desk-three-axis', machine));
+    return wordsOf(setUpOf(sheetHtml(run.facts ?? facts)));
+  };
+  const byHand = stepsOn('desk-four-axis');
+  expect(byHand).toContain('It stops at once for cutter 1. Fit it: it cuts 1.000 mm wide');
+  expect(byHand).toContain('with the spindle still, for cutter 2. Fit it: it cuts');
+  expect(byHand).not.toContain('in the collet. Fit');
+  const changed =
+    /changes to cutter 2 by itself\..*?(?=Then|Cutters in)/.exec(stepsOn('bench-mill'))?.[0] ?? '';
+  expect(changed.match(/table/g)).toHaveLength(1);
+});
+
+it('"the hole is there already: run a dial gauge round it" with the arbor in it: says so only where the hole is free', () => {
+  const setUpText = (result: { readonly facts?: SheetFacts | undefined }): string =>
+    wordsOf(setUpOf(sheetHtml(result.facts ?? facts)));
+  expect(setUpText(runOf('disc-wheel'))).not.toContain('is there already');
+  const free = runOf('third-wheel', (text) => text.replace(/shape: sheet/, 'shape: sheet\n  bored: 3.0'));
+  expect(setUpText(free)).toContain('The hole of 3.000 mm (0.1181 in) is there already: run a dial gauge');
+});
+
+it('"over the tips 19.552" of a disc turned to 19.500: says that the tips are not cut', () => {
+  const { facts: disc } = runOf('disc-wheel');
+  expect(wordsOf(sheetHtml(disc ?? facts))).toContain('what the disc was turned to, 29.860 mm by the job');
+  expect(wordsOf(page)).not.toContain('what the disc was turned to');
+});
+
 describe('a job in inches', () => {
+  it('"wide at the root 0.864 mm", "a 0.0468750 in cutter": reasons are in inches, with no more decimals than the tables', () => {
+    const { facts: inchFacts } = runOf('inch-wheel', (text) => text.replace(/\ncuts:[\s\S]*/, '\n'));
+    const words = wordsOf(sheetHtml(inchFacts ?? facts));
+    expect(words).not.toMatch(/\.\d{6,} (?:in|mm)\b/);
+    expect(words).toMatch(/the largest that roughs a space [\d.]+ in \([\d.]+ mm\) wide/);
+    expect(words).toMatch(/from 0\.0008 in \(0\.02 mm\) to 0\.0039 in \(0\.1 mm\)/);
+  });
+
   const inches: SheetFacts = { ...facts, job: { ...facts.job, length: 'inch' } };
   const text = sheetHtml(inches);
 
