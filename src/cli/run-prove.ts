@@ -156,7 +156,10 @@ function verdictWords({ proof, cutting, walks }: SetProof, machine: Machine): st
   ].join('\n');
 }
 
-function figureWords({ figures }: Proof): string {
+function figureWords({ figures, verdict }: Proof): string {
+  if (verdict === 'unread') {
+    return 'held against nothing, as the rest was not read.';
+  }
   const um = (mm: number): string => `${(mm * 1000).toFixed(2)} um`;
   return figures === undefined
     ? 'held against travel, clear ways and the words of the machine only: it cuts no wheel.'

@@ -1,6 +1,6 @@
 /** The built command where files cannot go, where nobody reads on, and where words are mistyped. */
 import { spawnSync } from 'node:child_process';
-import { existsSync } from 'node:fs';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { afterAll, describe, expect, it } from 'vitest';
 import {
@@ -47,6 +47,18 @@ describe('ogive prove', { timeout: 60_000 }, () => {
     expect(err).toMatch(/Passed\.\n1 program for .*it cuts no wheel/);
     expect(exit).toBe(0);
   });
+});
+
+it('"it cuts no wheel" of a program that could not be read to its end: says that the rest was not read', () => {
+  const folder = folderWith();
+  cutSmall(folder);
+  const names = namesIn(folder).filter((one) => /-\d\.nc$/.test(one));
+  const path = join(folder, names[0] ?? '');
+  writeFileSync(path, readFileSync(path, 'utf8').replace(/^M0?5\b/m, 'G2 X1 Y1 I9 J0\nM5'));
+  const { exit, err } = ogive(['prove', ...names, '--job', 'small-wheel.yaml'], folder);
+  expect(exit).toBe(1);
+  expect(err).toContain('Not read to its end: do not run it.');
+  expect(err).not.toContain('it cuts no wheel');
 });
 
 it.runIf(existsSync('/dev/full'))('printed to a full disk is no fault of ours', () => {
