@@ -40,7 +40,7 @@ const CUTTERS: Readonly<Record<string, Readonly<Record<string, string>>>> = {
 const HEAD = [
   '# A job for ogive: one wheel, from its measurements to a program. It runs as it is: ogive cut THIS-FILE',
   '# Plain lengths are in the unit that `length` says; a value may say its own: 0.5 mm, 3/64 inch.',
-  '# Lines that begin with "# " may be used too: take the mark away. What is left out is derived, and the sheet says why.',
+  '# Lines that begin with "# " may be used too: take the mark and the blank after it away. What is left out is derived, and the sheet says why.',
   '# Where such a line says "Instead of", put the mark before the line whose place it takes.',
   '',
 ];
