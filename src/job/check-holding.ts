@@ -10,6 +10,7 @@ import { showLength } from './show-length.ts';
 export function checkHolding(text: JobText, wheel: WheelText): Problem[] {
   return [
     ...holds(text),
+    ...arbor(text),
     ...skin(text),
     ...holes(text, wheel),
     ...thickness(text, wheel),
@@ -37,6 +38,19 @@ function holds(text: JobText): JobProblem[] {
     problems.push({ path, message: `${twice} is said twice.`, hint: 'Say each hold once.' });
   }
   return problems;
+}
+
+/** An arbor mostly stands up under a nut, in the very middle of every way from window to window. */
+function arbor(text: JobText): JobProblem[] {
+  const named = (text.blank['keep-out'] ?? []).some(({ x, y, radius }) => Math.hypot(x, y) < radius);
+  if (named || !holdingOf(text).includes('arbor')) {
+    return [];
+  }
+  const message =
+    'an arbor holds the blank, and nothing says how high it or its nut stands up in the middle.';
+  const hint =
+    'Name it: keep-out: [{ x: 0, y: 0, radius: 4 mm, height: 6 mm }] with your sizes, from the plate up; let it be where nothing stands above the blank.';
+  return [{ path: ['blank', 'holding'], severity: 'warning', message, hint }];
 }
 
 function skin(text: JobText): JobProblem[] {

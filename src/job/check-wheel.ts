@@ -8,7 +8,12 @@ import { showLength } from './show-length.ts';
 
 export function checkWheel(text: JobText, wheel: WheelJob, form: WheelForm): Problem[] {
   const show = (mm: number): string => showLength(mm, text.length ?? 'mm');
-  return [...circles(text, wheel, form, show), ...pitch(wheel), ...centres(wheel, show)].map(jobProblem);
+  return [
+    ...circles(text, wheel, form, show),
+    ...thin(text, wheel, show),
+    ...pitch(wheel),
+    ...centres(wheel, show),
+  ].map(jobProblem);
 }
 
 type Show = (mm: number) => string;
@@ -35,6 +40,30 @@ function circles(text: JobText, wheel: WheelJob, form: WheelForm, show: Show): J
     });
   }
   return problems;
+}
+
+/** Modules below which what is left between windows, bore and teeth is told as thin. Why: three is usual for a rim (from memory);
+ *  under one it bends away from the cutter, and a wheel that is cut right is bent when it is taken off. */
+const THIN = 1;
+
+function thin(text: JobText, { module, bore, crossings }: WheelJob, show: Show): JobProblem[] {
+  if (crossings === undefined) {
+    return [];
+  }
+  const wall = (crossings.hub - Math.max(bore, text.blank.bored ?? 0)) / 2;
+  const left: readonly (readonly [string, string, number])[] = [
+    ['arm', 'an arm', Math.min(crossings.armAtHub, crossings.armAtRim)],
+    ['rim', 'the rim', crossings.rim],
+    ['hub', 'the hub round the bore', wall],
+  ];
+  return left
+    .filter(([, , width]) => width > 0 && width < THIN * module)
+    .map(([key, what, width]) => ({
+      path: ['wheel', 'crossings', key],
+      severity: 'warning',
+      message: `${what} is ${show(width)} wide, less than a module (${show(module)}): it bends under the cutter.`,
+      hint: 'Is it meant so? A rim of about three modules is usual.',
+    }));
 }
 
 /** Tooth and leaf (or trundle) share one circular pitch; what is over is the play at the pitch line. */

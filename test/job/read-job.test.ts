@@ -216,6 +216,39 @@ it('tells centres that are a little off, and goes on', () => {
   ]);
 });
 
+it('"rim: 0.05" written without a word: tells arms, rim and hub that are thinner than a module, and goes on', () => {
+  const crossed = (arm: string, rim: string, hub: string) =>
+    readJob(
+      'a.yaml',
+      change(
+        'bore: 4.0',
+        `bore: 4.0\n  crossings: { arms: 5, arm: ${arm}, rim: ${rim}, hub: ${hub}, corner: 1.2 }`,
+      ),
+    );
+  expect(crossed('0.5', '0.5', '5.0').problems).toEqual([]);
+  const thin = crossed('{ at-hub: 2, at-rim: 0.4 }', '0.05', '4.1');
+  expect(thin.ok).toBe(true);
+  expect(thin.problems.map(({ severity, message }) => `${severity}: ${message}`)).toEqual([
+    'warning: an arm is 0.4 mm wide, less than a module (0.5 mm): it bends under the cutter.',
+    'warning: the rim is 0.05 mm wide, less than a module (0.5 mm): it bends under the cutter.',
+    'warning: the hub round the bore is 0.05 mm wide, less than a module (0.5 mm): it bends under the cutter.',
+  ]);
+});
+
+it('"holding: arbor" with a nut that nobody named: tells that nothing says how high it stands, and is still once it is named', () => {
+  const held = (more: string) =>
+    readJob('a.yaml', change('holding: glue', `holding: arbor\n  bored: 4.0${more}`)).problems;
+  expect(held('')).toMatchObject([{ severity: 'warning', at: { path: ['blank', 'holding'] } }]);
+  expect(held('\n  keep-out: [{ x: 15, y: 0, radius: 1, height: 2 }]')).toContainEqual(
+    expect.objectContaining({ severity: 'warning' }),
+  );
+  expect(
+    held('\n  keep-out: [{ x: 0, y: 0, radius: 4, height: 6 }]').filter(
+      ({ severity }) => severity === 'warning',
+    ),
+  ).toEqual([]);
+});
+
 it('hands on what does not fit, so that a sheet can say why', () => {
   const job = readJob('a.yaml', change('[44, 44]', '[33, 33]'));
   expect(job.ok && job.value.misfits).toMatchObject([
