@@ -24,12 +24,20 @@ export interface MachineFacts {
     readonly spindleHighest: number;
     readonly nut: { readonly diameter: number };
   };
-  readonly words: { readonly cutters: { readonly change: string; readonly highest: number } };
+  readonly words: {
+    readonly cutters: { readonly change: string; readonly highest: number };
+    /** How far the slides leave the path while roughing, where the machine file says it. */
+    readonly path: { readonly roughingStrays: number | null };
+  };
 }
 
 export function checkJobOnMachine(job: Job, machine: MachineFacts): Problem[] {
   const form = wheelForm(job.wheel);
-  const found = [...job.cuts.order.flatMap((pass) => settings(job, machine, pass)), ...numbers(job, machine)];
+  const found = [
+    ...job.cuts.order.flatMap((pass) => settings(job, machine, pass)),
+    ...strays(job, machine),
+    ...numbers(job, machine),
+  ];
   const problems = found.map((problem) => jobProblem({ code: 'job.does-not-fit', ...problem }));
   if (form.ok) {
     const windows = job.wheel.crossings && crossings(job.wheel.crossings, form.value.rootRadius);
@@ -62,6 +70,19 @@ function settings(job: Job, { name, limits }: MachineFacts, pass: PassKind): Job
     }
   }
   return problems;
+}
+
+/** The proof holds the words of a program; how far a machine rounds what they say is known to its machine file alone. */
+function strays(job: Job, { name, words }: MachineFacts): JobProblem[] {
+  const { roughingStrays } = words.path;
+  const { allowance } = job.cuts.roughing;
+  if (roughingStrays === null || roughingStrays < allowance || !job.cuts.order.includes('roughing')) {
+    return [];
+  }
+  const show = (mm: number): string => showLength(mm, job.length);
+  const message = `${name} strays up to ${show(roughingStrays)} from the path while it roughs, and only ${show(allowance)} is left for finishing: roughing may mark the finished teeth.`;
+  const hint = `Leave more, allowance: ${show(1.5 * roughingStrays)} or so, or rough with the words for finishing.`;
+  return [{ path: ['cuts', 'roughing', 'allowance'], severity: 'warning', message, hint }];
 }
 
 function numbers(job: Job, { name, words }: MachineFacts): JobProblem[] {

@@ -24,7 +24,7 @@ const MACHINE: MachineFacts = {
     spindleHighest: 24000,
     nut: { diameter: 19 },
   },
-  words: { cutters: { change: 'by-hand', highest: 99 } },
+  words: { cutters: { change: 'by-hand', highest: 99 }, path: { roughingStrays: null } },
 };
 
 function problemsOf(more: string, machine: MachineFacts = MACHINE) {
@@ -41,6 +41,20 @@ function travel(axis: 'x' | 'y' | 'z', ends: readonly [number, number]): Machine
 
 it('finds nothing wrong with a job that fits', () => {
   expect(problemsOf(CUTS)).toEqual([]);
+});
+
+it('a machine that strays as far as the allowance is told of, a little less is not', () => {
+  const straying = (roughingStrays: number): MachineFacts => ({
+    ...MACHINE,
+    words: { ...MACHINE.words, path: { roughingStrays } },
+  });
+  expect(problemsOf(CUTS, straying(0.029))).toEqual([]);
+  expect(problemsOf(CUTS, straying(0.03))).toMatchObject([
+    {
+      severity: 'warning',
+      message: expect.stringMatching(/strays up to 0\.03 mm .* only 0\.03 mm is left/) as unknown,
+    },
+  ]);
 });
 
 describe('travel', () => {
@@ -74,12 +88,18 @@ describe('what the job asks of spindle and slides', () => {
 });
 
 describe('numbers of cutters', () => {
-  const few: MachineFacts = { ...MACHINE, words: { cutters: { change: 'automatic', highest: 20 } } };
+  const few: MachineFacts = {
+    ...MACHINE,
+    words: { ...MACHINE.words, cutters: { change: 'automatic', highest: 20 } },
+  };
   it('do not go beyond the changer', () => {
     expect(problemsOf(CUTS, few)).toMatchObject([{ at: { path: ['cutters', '30'], line: 7 } }]);
   });
   it('do not matter where every cutter has a program of its own', () => {
-    const single: MachineFacts = { ...MACHINE, words: { cutters: { change: 'one-program', highest: 20 } } };
+    const single: MachineFacts = {
+      ...MACHINE,
+      words: { ...MACHINE.words, cutters: { change: 'one-program', highest: 20 } },
+    };
     expect(problemsOf(CUTS, single)).toEqual([]);
   });
 });
