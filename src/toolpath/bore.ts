@@ -7,6 +7,7 @@
 import { failure, success, type Outcome } from '../base/problem.ts';
 import { steppedArcFeed } from '../cutting/arc-feed.ts';
 import { ORIGIN, polar } from '../geometry/point.ts';
+import { showLength } from '../job/show-length.ts';
 import type { Belongs, MoveStep } from '../motion/motion.ts';
 import type { CutTask } from './cut-task.ts';
 import { arcLeg, circleLegs, flat, vertical, type Leg, type Run } from './leg.ts';
@@ -35,7 +36,7 @@ export function bore(task: CutTask): Outcome<readonly PassCuts[]> {
       {
         code: 'reach.space',
         severity: 'error',
-        message: `cutter ${cutter.number} of ${cutter.diameter} mm is too wide for a hole of ${(2 * radius).toFixed(3)} mm`,
+        message: `cutter ${cutter.number} of ${showLength(cutter.diameter, job.length)} is too wide for a hole of ${(2 * radius).toFixed(3)} mm`,
         hint: `use a cutter of ${((2 * radius) / (1 + LEAST_HELIX)).toFixed(2)} mm or less for the bore, or drill it and say bored:`,
         at: { kind: 'value', file: job.file, path: ['cuts', 'bore', 'cutter'] },
       },

@@ -5,6 +5,7 @@
  * Window 1 is planned and turned for the others. Wheel frame, mm.
  */
 import { failure, success, type Outcome, type Problem } from '../base/problem.ts';
+import { showLength } from '../job/show-length.ts';
 import type { Crossings } from '../tooth/wheel.ts';
 import { clearWindow } from './clear-window.ts';
 import type { CutTask } from './cut-task.ts';
@@ -25,7 +26,10 @@ export function crossingsCuts(task: CutTask, crossings: Crossings): Outcome<read
   const wall = WALL_SHARE * cutter.diameter;
   if (r > crossings.proportions.corner) {
     return failure([
-      tooWide(task, `the corners of the windows have a radius of ${crossings.proportions.corner} mm`),
+      tooWide(
+        task,
+        `the corners of the windows have a radius of ${showLength(crossings.proportions.corner, job.length)}`,
+      ),
     ]);
   }
   const slot = settingsFor(job, machine, 'crossings', 'slot', wall);
@@ -50,7 +54,8 @@ export function crossingsCuts(task: CutTask, crossings: Crossings): Outcome<read
     open: held ? 'slot' : 'window',
   });
   if (finished === undefined) {
-    return failure([tooWide(task, 'there is no room to join the wall on an arc')]);
+    const hint = held ? LESS_ROUND : undefined;
+    return failure([tooWide(task, 'there is no room to join the wall on an arc', hint)]);
   }
   const depth = heights.top - heights.bottom;
   const laps = levelsFor(depth, slot.value.step);
@@ -96,13 +101,21 @@ function everyWindow(count: number, runs: readonly Run[], suffix: string): reado
   ).flat();
 }
 
-function tooWide({ job }: CutTask, reason: string): Problem {
+/** In the slot round a slug the wall is joined on its straight, which rounder corners make shorter. */
+const LESS_ROUND =
+  'make the corners of the windows less round, so that their sides have a straight to join on, or use a smaller cutter';
+
+function tooWide(
+  { job }: CutTask,
+  reason: string,
+  hint = 'use a smaller cutter for the crossings, or rounder corners',
+): Problem {
   const { cutter } = job.cuts.crossings;
   return {
     code: 'reach.corner',
     severity: 'error',
-    message: `cutter ${cutter.number} of ${cutter.diameter} mm is too wide for the crossings: ${reason}`,
-    hint: 'use a smaller cutter for the crossings, or rounder corners',
+    message: `cutter ${cutter.number} of ${showLength(cutter.diameter, job.length)} is too wide for the crossings: ${reason}`,
+    hint,
     at: { kind: 'value', file: job.file, path: ['cuts', 'crossings', 'cutter'] },
   };
 }

@@ -11,6 +11,7 @@ import { PROOF_RESOLUTION } from '../base/tolerances.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import { startOf } from '../geometry/on-piece.ts';
 import { angleOf } from '../geometry/point.ts';
+import { figure, showLength } from '../job/show-length.ts';
 import { asCut, type AsCut } from '../tooth/as-cut.ts';
 import { largestCutterBelow } from '../tooth/largest-cutter.ts';
 import { toothSide } from '../tooth/tooth-side.ts';
@@ -58,7 +59,7 @@ function flankInReach({ job, form }: CutTask, made: AsCut): Problem | undefined 
     code: 'reach.flank',
     severity: 'error',
     message:
-      `cutter ${cutter.number} of ${cutter.diameter} mm leaves metal on the flank up to a radius of ${made.footRadius.toFixed(4)} mm, ` +
+      `cutter ${cutter.number} of ${showLength(cutter.diameter, job.length)} leaves metal on the flank up to a radius of ${made.footRadius.toFixed(4)} mm, ` +
       `and the mate's tip works from ${form.workingRadius.toFixed(4)} mm`,
     hint: `the largest cutter that would do for the working flank is ${(Math.floor(largest * 1000) / 1000).toFixed(3)} mm`,
     at: { kind: 'value', file: job.file, path: ['cuts', 'finishing', 'cutter'] },
@@ -88,7 +89,7 @@ function remarksOf(task: CutTask, made: AsCut, best: Cutter | undefined): readon
   const remarks = [
     made.reachesRoot
       ? `cutter ${finishing.cutter.number} reaches the root; in its corners it leaves at most ${made.leftAtRoot.toFixed(4)} mm (${made.areaLeft.toFixed(4)} mm2 a space), all of it below the working flank`
-      : `cutter ${finishing.cutter.number} does not reach the root: it leaves at most ${made.leftAtRoot.toFixed(4)} mm there, all of it below the working flank; up to ${made.largestCutter.toFixed(3)} mm would reach it`,
+      : `cutter ${finishing.cutter.number} does not reach the root: it leaves at most ${made.leftAtRoot.toFixed(4)} mm there (${made.areaLeft.toFixed(4)} mm2 a space), all of it below the working flank; up to ${made.largestCutter.toFixed(3)} mm would reach it`,
   ];
   if (best !== undefined && best.diameter > roughing.cutter.diameter) {
     const now = roughingSeconds(task, roughing.cutter);
@@ -96,12 +97,12 @@ function remarksOf(task: CutTask, made: AsCut, best: Cutter | undefined): readon
     if (now !== undefined && then !== undefined && then < now) {
       const saved = ((100 * (now - then)) / now).toFixed(0);
       remarks.push(
-        `cutter ${best.number} of ${best.diameter} mm would rough the spaces in about ${(then / 60).toFixed(1)} minutes instead of ${(now / 60).toFixed(1)}, ${saved} % less`,
+        `cutter ${best.number} of ${figure(best.diameter, 4)} mm would rough the spaces in about ${(then / 60).toFixed(1)} minutes instead of ${(now / 60).toFixed(1)}, ${saved} % less`,
       );
     }
   } else if (roughing.cutter.diameter > rootWidth(form) - 2 * roughing.allowance - ROOM) {
     remarks.push(
-      `the root is ${rootWidth(form).toFixed(3)} mm wide: cutter ${roughing.cutter.number} of ${roughing.cutter.diameter} mm is held on both sides there, and leaves more for finishing`,
+      `the root is ${rootWidth(form).toFixed(3)} mm wide: cutter ${roughing.cutter.number} of ${figure(roughing.cutter.diameter, 4)} mm is held on both sides there, and leaves more for finishing`,
     );
   }
   return remarks;

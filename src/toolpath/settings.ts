@@ -14,6 +14,7 @@ import { materialNamed, type Material } from '../cutting/materials.ts';
 import type { Cutter } from '../cutting/setup.ts';
 import { slotDepth } from '../cutting/slot-depth.ts';
 import type { CutSettings, Job, PassKind } from '../job/job.ts';
+import { showLength } from '../job/show-length.ts';
 import type { Machine } from '../machine/machine.ts';
 
 export interface Settings {
@@ -79,7 +80,7 @@ export function settingsFor(
         code: 'toolpath.load',
         severity: 'error',
         message:
-          `${kind}: cutter ${cutter.number} (${cutter.diameter} mm, ${cutter.stickOut} mm out) could cut ` +
+          `${kind}: cutter ${cutter.number} (${showLength(cutter.diameter, job.length)}, ${showLength(cutter.stickOut, job.length)} out) could cut ` +
           `${slot.depth < LEAST_SAID ? `less than ${LEAST_SAID}` : `only ${slot.depth.toFixed(4)}`} mm deep a lap: ${slot.why}`,
         hint: 'use a stouter cutter, let it stand out less, or lower the feed',
         at: { kind: 'value', file: job.file, path: ['cuts', kind, 'cutter'] },

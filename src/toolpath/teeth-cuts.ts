@@ -15,6 +15,7 @@ import {
   LINE_FIT_ERROR,
   LINE_FIT_INSIDE,
 } from '../base/tolerances.ts';
+import { showLength } from '../job/show-length.ts';
 import { asCut } from '../tooth/as-cut.ts';
 import { bayFor, joinCorner, type Bay } from './bay.ts';
 import type { CutTask } from './cut-task.ts';
@@ -269,8 +270,8 @@ function tooWideFor({ job }: CutTask): Problem | undefined {
     code: 'toolpath.no-entry',
     severity: 'error',
     message:
-      `the finishing cutter ${finishing.cutter.number} of ${finishing.cutter.diameter} mm is wider than the slot that cutter ` +
-      `${roughing.cutter.number} of ${roughing.cutter.diameter} mm leaves for it`,
+      `the finishing cutter ${finishing.cutter.number} of ${showLength(finishing.cutter.diameter, job.length)} is wider than the slot that cutter ` +
+      `${roughing.cutter.number} of ${showLength(roughing.cutter.diameter, job.length)} leaves for it`,
     hint: 'rough with a cutter at least as wide as the finishing one',
     at: { kind: 'value', file: job.file, path: ['cuts', 'finishing', 'cutter'] },
   };

@@ -55,6 +55,28 @@ describe('reach', () => {
     expect(plan.reach.remarks.join(' ')).toMatch(/cutter 3 of 0.6 mm would rough/);
   });
 
+  it('says how much stays at a root that the cutter does not get to, at its thickest and in area', () => {
+    const wide = cutter(2, 0.766);
+    const { reach } = planOf({ cuts: { roughing: { cutter: wide }, finishing: { cutter: wide } } });
+    expect(reach.largestCutter).toBeLessThan(0.766);
+    expect(reach.remarks.join(' ')).toMatch(
+      /does not reach the root: it leaves at most 0\.\d+ mm there \(0\.\d+ mm2 a space\)/,
+    );
+  });
+
+  it('"use rounder corners" where a skin holds the slug and the corners leave no straight: says less round, and the width as it was given', () => {
+    const round = { arms: 5, armAtHub: 2.4, armAtRim: 2.4, rim: 1.8, hub: 10, corner: 3.7 };
+    const inch = cutter(1, 25.4 * 0.0393701);
+    const [problem] = problemsOf({
+      crossings: round,
+      setup: { skin: 0.08 },
+      cuts: { crossings: { cutter: inch } },
+    });
+    expect(problem).toMatchObject({ code: 'reach.corner' });
+    expect(problem?.message).toMatch(/^cutter 1 of 1 mm is too wide/);
+    expect(problem?.hint).toMatch(/less round/);
+  });
+
   it.each<[string, string, Wanted]>([
     ['a bore narrower than the cutter', 'reach.space', { bore: 1, cuts: { bore: { cutter: cutter(1, 1) } } }],
     [
