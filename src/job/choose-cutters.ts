@@ -9,6 +9,7 @@
 import { Bug } from '../base/bug.ts';
 import { WRITTEN_LENGTH } from '../base/tolerances.ts';
 import type { Cutter } from '../cutting/setup.ts';
+import { lengthOf } from '../geometry/on-piece.ts';
 import { norm } from '../geometry/point.ts';
 import { largestCutter } from '../tooth/largest-cutter.ts';
 import { restingDisc } from '../tooth/resting-disc.ts';
@@ -21,6 +22,11 @@ export interface Choice {
   readonly why: string;
 }
 
+/**
+ * Straight of a window's wall over the cutter, where only a slot round the slug is open: there the wall is joined and left.
+ * Why: a twentieth of the cutter is left on the wall, each of the two arcs takes as much, and a quarter goes to the overlap.
+ */
+const JOINING_STRAIGHT = 0.14;
 /** Room for chips beside a roughing cutter at the root. Why: without it both sides of the cutter rub. */
 export const CHIP_ROOM = 0.05;
 /** Largest cutter over the hole it clears, so that there is a ring to go round. */
@@ -106,13 +112,18 @@ export function chooseBore({ cutters, depth }: Choosing, bore: number): Choice {
   );
 }
 
-export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings): Choice {
+export function chooseCrossings({ cutters, depth }: Choosing, windows: Crossings, held = false): Choice {
   const { corner } = windows.proportions;
+  const straight = Math.max(
+    0,
+    ...windows.window.map((piece) => (piece.kind === 'line' ? lengthOf(piece) : 0)),
+  );
+  const joins = ({ diameter }: Cutter): boolean => !held || straight >= JOINING_STRAIGHT * diameter;
   const room = HOLE_SHARE * (windows.windowOuter - windows.windowInner);
   const enters = (cutter: Cutter): boolean =>
     cutter.reach >= depth - WRITTEN_LENGTH && cutter.diameter <= 2 * corner;
   const fits = (cutter: Cutter): boolean =>
-    enters(cutter) && cutter.diameter < 2 * corner && cutter.diameter <= room;
+    enters(cutter) && cutter.diameter < 2 * corner && cutter.diameter <= room && joins(cutter);
   return largest(
     cutters,
     fits,

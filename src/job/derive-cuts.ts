@@ -14,7 +14,7 @@ import {
   type Choice,
   type Choosing,
 } from './choose-cutters.ts';
-import { holdingOf } from './derive-setup.ts';
+import { holdingOf, skinOf } from './derive-setup.ts';
 import type { CutsText, JobText } from './job-schema.ts';
 import type { Cuts, CutSettings, PassKind, WheelJob } from './job.ts';
 import type { Notes } from './notes.ts';
@@ -44,10 +44,15 @@ export function deriveCuts(ground: CutsGround, notes: Notes): Cuts {
   const crossings =
     windows === undefined
       ? teeth.roughing
-      : pick(cuts.crossings?.cutter, 'crossings', () => chooseCrossings(choosing, windows), {
-          cutters,
-          notes,
-        });
+      : pick(
+          cuts.crossings?.cutter,
+          'crossings',
+          () => chooseCrossings(choosing, windows, skinOf(text) > 0),
+          {
+            cutters,
+            notes,
+          },
+        );
   return {
     order: notes.fill(cuts.order, 'cuts.order', ...usualOrder(ground)),
     bore: { ...settings(cuts.bore, bore), leave },

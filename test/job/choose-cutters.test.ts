@@ -106,6 +106,20 @@ it('crossings: smaller than twice the corner', () => {
   expect(chooseCrossings(choosing([1, 4], [1.5, 4], [1.8, 4]), windows.value).cutter.diameter).toBe(1.5);
 });
 
+it('"no room to join the wall" beside a smaller cutter that has it: where a skin holds the slug, the straight of the wall counts', () => {
+  // Sides of an arm between corners of 3.69: feet at sqrt(8.72^2 - 4.89^2) and sqrt(8.69^2 - 4.89^2), so 0.036 mm straight.
+  const windows = crossings(
+    { arms: 5, armAtHub: 2.4, armAtRim: 2.4, rim: 1.8, hub: 10, corner: 3.69 },
+    14.2146,
+  );
+  if (!windows.ok) {
+    throw new Bug('the crossings have no form');
+  }
+  const list = choosing([0.2, 4], [1, 4], [2, 4]);
+  expect(chooseCrossings(list, windows.value).cutter.diameter).toBe(2);
+  expect(chooseCrossings(list, windows.value, true).cutter.diameter).toBe(0.2);
+});
+
 it.each([
   [0.05, 0.005],
   [0.1, 0.01],
