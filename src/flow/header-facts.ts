@@ -34,6 +34,11 @@ const NOT_PROVED = {
   walk: 'whether zero is set where it says, and what stands on the table without being named in the job',
 } as const;
 
+/** A disc's tips are not cut: over them it measures what it was turned to. */
+function turnedTo({ setup: { shape } }: Job): number | undefined {
+  return shape.kind === 'disc' ? shape.diameter : undefined;
+}
+
 /** Of the i-th program, or of all of them together for the sheet. */
 export function headerFacts(kind: HeaderKind, i: number | 'all', sources: HeaderSources): HeaderFacts {
   const { job, mark, version, form, plan } = sources;
@@ -65,7 +70,7 @@ export function headerFacts(kind: HeaderKind, i: number | 'all', sources: Header
     park: plan.park,
     zero: job.zero,
     again: againWords(job, unit),
-    check: { what: 'the diameter over the tips', size: overTips(form).most },
+    check: { what: 'the diameter over the tips', size: overTips(form, turnedTo(job)).most },
     proved: [PROVED[kind]],
     notProved: [NOT_PROVED[kind]],
   };

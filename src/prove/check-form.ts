@@ -106,14 +106,14 @@ function rollingLaw(evidence: Evidence, figures: WheelFigures, rolling: RollingR
     return [];
   }
   const message =
-    `the normal of tooth ${String(rolling.copy + 1)} misses the point where the circles touch by ` +
+    `the side of tooth ${String(rolling.copy + 1)} leans: its normal misses the point where the pitch circles touch by ` +
     `${degrees(rolling.shareAngle).toFixed(2)} degrees, where a form error of ${micronText(figures.allowed)} explains ` +
     `${degrees(rolling.shareAllowed).toFixed(2)}`;
   return [
     findingAt(rolling.move ?? evidence.moves.at(-1), {
       code: 'prove.rolling-law',
       message,
-      hint: 'Follow the addendum more closely, with smooth arcs in place of long straight moves.',
+      hint: 'Look for a number that was changed here; else follow the addendum more closely, with smooth arcs in place of long straight moves.',
       x: rolling.x,
       y: rolling.y,
     }),

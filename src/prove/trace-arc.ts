@@ -151,7 +151,7 @@ function turnOf(run: Run, from: Point, end: Point, centre: Point, sense: 1 | -1)
   if (miss > allowed) {
     return badArc(
       `the radius is ${show(startRadius)} mm at the start of the arc and ${show(endRadius)} mm at its end; ` +
-        `they differ by ${show(miss)} mm, this machine allows ${show(allowed)} mm`,
+        `they differ by ${show(miss)} mm, this machine allows ${show(allowed)} mm. A number was changed, or rounded too far: put it back`,
     );
   }
   if (from.x === end.x && from.y === end.y) {

@@ -30,15 +30,15 @@ function row({ job }: SheetFacts, name: string, value: number, figure: string, h
 }
 
 function tipRows(facts: SheetFacts): readonly string[] {
-  const tips = overTips(facts.form);
+  const { shape } = facts.job.setup;
+  const tips = overTips(facts.form, shape.kind === 'disc' ? shape.diameter : undefined);
   const how =
     facts.form.proportions.teeth % 2 === 1
       ? `Flat jaws, the largest reading as they turn; an odd count reads less than the tip circle, ${lengthOnly(tips.diameter, facts.job.length)}.`
       : 'Flat jaws over two opposite tips.';
-  const { shape } = facts.job.setup;
   const turned =
     shape.kind === 'disc'
-      ? ` The tips are not cut: what they read is what the disc was turned to, ${lengthOnly(shape.diameter, facts.job.length)} by the job.`
+      ? ` The tips are not cut: what they read is what the disc was turned to, ${lengthOnly(shape.diameter, facts.job.length)} by the job, where the form has ${lengthOnly(2 * facts.form.outsideRadius, facts.job.length)}.`
       : '';
   return [row(facts, 'over the tips', tips.most, 'tip', how + turned)];
 }

@@ -92,17 +92,17 @@ export interface TipReading {
   readonly most: number;
 }
 
-/** With an odd count one jaw sits across two tips and the other on one; the corners of the lands carry it. */
-export function overTips(form: WheelForm): TipReading {
+/** With an odd count one jaw sits across two tips and the other on one; the corners of the lands carry it. `turned`: a disc's diameter, whose tips are not cut. */
+export function overTips(form: WheelForm, turned?: number): TipReading {
   const { teeth } = form.proportions;
-  const diameter = 2 * form.outsideRadius;
+  const diameter = turned ?? 2 * form.outsideRadius;
   if (teeth % 2 === 0) {
     return { diameter, reading: diameter, most: diameter };
   }
   const land = landAngle(form.sector);
   return {
     diameter,
-    reading: form.outsideRadius * (1 + Math.cos(Math.PI / teeth - land)),
+    reading: (diameter / 2) * (1 + Math.cos(Math.PI / teeth - land)),
     most: diameter * Math.cos(Math.max(0, Math.PI / (2 * teeth) - land)),
   };
 }
