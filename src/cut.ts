@@ -7,6 +7,7 @@
  */
 import { markOf } from './base/mark.ts';
 import type { Outcome, Problem } from './base/problem.ts';
+import { withAllowanceOfMachine } from './flow/allowance-of-machine.ts';
 import { headerFacts, type HeaderKind } from './flow/header-facts.ts';
 import { refusedText } from './flow/refused-text.ts';
 import { withRunoutOfMachine } from './flow/runout-of-machine.ts';
@@ -85,7 +86,7 @@ export function cut(input: CutInput): CutResult {
   }
   const problems = [...job.problems, ...machine.problems];
   const mark = markOf([input.version, input.text, found.value.text]);
-  const onMachine = withRunoutOfMachine(job.value, machine.value);
+  const onMachine = withAllowanceOfMachine(withRunoutOfMachine(job.value, machine.value), machine.value);
   return make(input, { job: onMachine, machine: machine.value, mark }, problems);
 }
 
