@@ -27,8 +27,8 @@ const WORK = {
     runCut(sample, { out: folder, json: true }, '');
   },
   'run-prove': ({ runProve }) => {
-    runProve([join(root, 'README.md')], { job: sample, json: true });
-    runProve([], { explain: true });
+    runProve([join(root, 'README.md')], { job: sample, json: true }, '');
+    runProve([], { explain: true }, '');
   },
   'run-draw': ({ runDraw }) => {
     runDraw(sample, { out: '-' });

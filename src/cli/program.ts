@@ -159,6 +159,7 @@ function addProve(program: Command, done: Done): void {
     .argument('[programs...]', 'program files, in the order they are run')
     .option('--job <job>', 'hold what they cut against this job')
     .option('--moves <file>', 'write each traced move as a line of JSON')
+    .option('--sarif <file>', 'write the findings as SARIF, which editors show at the line')
     .option('--json', 'the verdict on stdout, and nothing else there')
     .option('--quiet', 'say nothing but what is wrong')
     .option('--explain', 'list the checks: what each guards against and what it cannot see')
@@ -172,10 +173,17 @@ Examples:
     .action(
       async (
         programs: string[],
-        options: { job?: string; moves?: string; json?: boolean; quiet?: boolean; explain?: boolean },
+        options: {
+          job?: string;
+          moves?: string;
+          sarif?: string;
+          json?: boolean;
+          quiet?: boolean;
+          explain?: boolean;
+        },
       ) => {
         const { runProve } = await import('./run-prove.ts');
-        done(runProve(programs, options));
+        done(runProve(programs, options, version()));
       },
     );
 }

@@ -13,6 +13,7 @@ import { CHECK_CODES } from '../prove/check-codes.ts';
 import { proofJson } from '../prove/proof-json.ts';
 import type { Proof, ProofInput } from '../prove/proof.ts';
 import { proveSet, type SetProof } from '../prove/prove-set.ts';
+import { sarifOf } from '../prove/sarif.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
 import { changeFolder, folderOf, isThere, readText } from './files.ts';
@@ -24,12 +25,13 @@ import { terminalOf, type Terminal } from './terminal.ts';
 export interface ProveOptions {
   readonly job?: string;
   readonly moves?: string;
+  readonly sarif?: string;
   readonly json?: boolean;
   readonly quiet?: boolean;
   readonly explain?: boolean;
 }
 
-export function runProve(files: readonly string[], options: ProveOptions): Exit {
+export function runProve(files: readonly string[], options: ProveOptions, version: string): Exit {
   const terminal = terminalOf(options.quiet === true);
   if (options.explain === true) {
     process.stdout.write(explanation());
@@ -50,7 +52,7 @@ export function runProve(files: readonly string[], options: ProveOptions): Exit 
   const programs = texts.map(({ file, text }) => ({ file, text: text.ok ? text.value : '' }));
   const { job, machine } = understood.value;
   const bare = { programs, machine, setup: job.setup };
-  return answer(files, proveSet({ ...bare, ...targetOf(job) }), machine, options, terminal);
+  return answer(files, proveSet({ ...bare, ...targetOf(job) }), machine, options, { terminal, version });
 }
 
 function understand(jobFile: string): Outcome<{ job: Job; machine: Machine }> {
@@ -95,35 +97,33 @@ function answer(
   set: SetProof,
   machine: Machine,
   options: ProveOptions,
-  terminal: Terminal,
+  { terminal, version }: { readonly terminal: Terminal; readonly version: string },
 ): Exit {
   const { proof } = set;
-  if (options.moves !== undefined && isThere(options.moves) && !/\.(?:jsonl|ndjson)$/i.test(options.moves)) {
-    process.stderr.write(
-      `${options.moves}: is there already and its name does not end in .jsonl; it is kept as it is.\n`,
+  const moves = (): string => proof.moves.map((move) => `${JSON.stringify(move)}\n`).join('');
+  const pathOf = (name: string): string => files.find((file) => basename(file) === name) ?? name;
+  const sarif = (): string => `${JSON.stringify(sarifOf(proof, version, pathOf), null, 2)}\n`;
+  const wrote =
+    writeBeside(
+      options.moves,
+      'moves',
+      /\.(?:jsonl|ndjson)$/i,
+      '.jsonl',
+      moves,
+      [files, options],
+      terminal,
+    ) &&
+    writeBeside(
+      options.sarif,
+      'findings',
+      /\.(?:sarif|sarif\.json)$/i,
+      '.sarif',
+      sarif,
+      [files, options],
+      terminal,
     );
+  if (!wrote) {
     return 2;
-  }
-  if (options.moves !== undefined) {
-    const read = [...files, ...(options.job === undefined ? [] : [options.job])];
-    const lost = keepInputs(
-      dirname(options.moves),
-      [basename(options.moves)],
-      read,
-      'Give the moves another name.',
-    );
-    if (lost.length > 0) {
-      terminal.problems(lost);
-      return 2;
-    }
-    const text = proof.moves.map((move) => `${JSON.stringify(move)}\n`).join('');
-    const write = [{ name: basename(options.moves), text }];
-    const change = { folder: 'there', write, rename: [] } as const;
-    const done = changeFolder(dirname(options.moves), change);
-    terminal.problems(done.problems);
-    if (!done.ok) {
-      return 2;
-    }
   }
   if (options.json === true) {
     process.stdout.write(
@@ -137,6 +137,37 @@ function answer(
   }
   terminal.say(verdictWords(set, machine));
   return proof.verdict === 'pass' ? 0 : 1;
+}
+
+/** Writes what was asked for beside the answer, where that overwrites nothing but an earlier one; says whether it may go on. */
+function writeBeside(
+  path: string | undefined,
+  what: string,
+  ours: RegExp,
+  ending: string,
+  text: () => string,
+  [files, options]: readonly [readonly string[], ProveOptions],
+  terminal: Terminal,
+): boolean {
+  if (path === undefined) {
+    return true;
+  }
+  if (isThere(path) && !ours.test(path)) {
+    process.stderr.write(
+      `${path}: is there already and its name does not end in ${ending}; it is kept as it is.\n`,
+    );
+    return false;
+  }
+  const read = [...files, ...(options.job === undefined ? [] : [options.job])];
+  const lost = keepInputs(dirname(path), [basename(path)], read, `Give the ${what} another name.`);
+  if (lost.length > 0) {
+    terminal.problems(lost);
+    return false;
+  }
+  const write = [{ name: basename(path), text: text() }];
+  const done = changeFolder(dirname(path), { folder: 'there', write, rename: [] });
+  terminal.problems(done.problems);
+  return done.ok;
 }
 
 function verdictWords({ proof, cutting, walks }: SetProof, machine: Machine): string {
