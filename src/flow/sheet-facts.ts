@@ -1,10 +1,12 @@
 /** Gathers what the report is made from: job, machine, shapes, plan, texts and proof, as far as a run came. */
 import type { Problem } from '../base/problem.ts';
 import type { Job } from '../job/job.ts';
+import { isExactStop } from '../machine/exact-stop.ts';
 import type { Machine } from '../machine/machine.ts';
 import type { Motion } from '../motion/motion.ts';
 import { timeProgram, type ProgramTime } from '../motion/time-program.ts';
 import { cautions } from '../post/cautions.ts';
+import { pathWordsFor } from '../post/path-words.ts';
 import type { ProgramText } from '../post/write-program.ts';
 import type { Proof } from '../prove/proof.ts';
 import type { SheetFacts, SheetPass, SheetProgram } from '../report/facts.ts';
@@ -79,7 +81,10 @@ export function sheetFacts(
 }
 
 function timeOf(motion: Motion, machine: Machine): ProgramTime {
-  return timeProgram(motion, machine.limits, machine.words.spindle.spinUpSeconds);
+  const { spinUpSeconds } = machine.words.spindle;
+  return timeProgram(motion, machine.limits, spinUpSeconds, (pass) =>
+    isExactStop(pathWordsFor(machine, pass)),
+  );
 }
 
 function programsOf(

@@ -5,8 +5,9 @@
  *
  * A corner is taken as fast as an arc of radius R that touches both moves and passes the corner at the allowance d: with s the
  * sine of half the angle between the moves the arc's centre is R / s from the corner, so R / s - R = d and
- * v = sqrt(a R) = sqrt(a d s / (1 - s)); on arcs v <= sqrt(a R); along a heading the acceleration and the rapid rate are those
- * of the axis that limits it.
+ * v = sqrt(a R) = sqrt(a d s / (1 - s)); on arcs v <= sqrt(a R), R of the circle also on a helix, whose own curve is a little
+ * wider; along a heading the acceleration and the greatest rate are those of the axis that limits it, at a feed as at a rapid.
+ * A move of no length is passed over: what comes after it meets what came before.
  */
 import type { Position } from './motion.ts';
 
@@ -32,7 +33,11 @@ export interface MovePlan {
   readonly limit: Float64Array;
   readonly acceleration: Float64Array;
   readonly entry: Float64Array;
-  /** Heading at the end of the last move, then into and out of the one being added: nine numbers. */
+  /** Sine of half the angle between a move and the one before it: 1 straight on (and where the machine stands), 0 straight back. */
+  readonly halfSine: Float64Array;
+  /** The last move of any length, -1 for none. */
+  last: number;
+  /** Heading at the end of that move, then into and out of the one being added: nine numbers. */
   readonly headings: Float64Array;
 }
 
@@ -42,7 +47,7 @@ export interface PlannedMove {
   readonly centre?: { readonly x: number; readonly y: number } | undefined;
   readonly turn?: number | undefined;
   /** mm/min; of no matter for a rapid. */
-  readonly feed?: number | undefined;
+  readonly feed?: number | null | undefined;
 }
 
 const IN = 3;
@@ -57,6 +62,8 @@ export function openPlan(most: number, limits: MotionLimits): MovePlan {
     limit: new Float64Array(most),
     acceleration: new Float64Array(most),
     entry: new Float64Array(most),
+    halfSine: new Float64Array(most),
+    last: -1,
     headings: new Float64Array(9),
   };
 }
@@ -69,8 +76,26 @@ export function planMove(plan: MovePlan, from: Position, move: PlannedMove, stan
   } else {
     planLine(plan, i, from, move);
   }
-  plan.entry[i] = i === 0 || stands ? 0 : cornerSpeed(plan, i);
-  plan.headings.copyWithin(0, OUT, OUT + 3);
+  plan.halfSine[i] = 1;
+  if (stands || i === 0) {
+    plan.entry[i] = 0;
+  } else if (plan.length[i] === 0) {
+    // As fast as what follows allows: looking ahead finds it.
+    plan.entry[i] = Infinity;
+  } else {
+    plan.entry[i] = plan.last < 0 ? 0 : cornerSpeed(plan, plan.last, i);
+  }
+  if ((plan.length[i] as number) > 0) {
+    plan.last = i;
+    plan.headings.copyWithin(0, OUT, OUT + 3);
+  }
+}
+
+/** A move of which nobody knows the length: it takes a place in the columns and no time, and the machine stands before it. */
+export function planUnknown(plan: MovePlan): void {
+  const i = plan.count++;
+  plan.acceleration[i] = plan.limits.acceleration.x;
+  plan.halfSine[i] = 1;
 }
 
 function planLine(plan: MovePlan, i: number, from: Position, move: PlannedMove): void {
@@ -85,7 +110,7 @@ function planLine(plan: MovePlan, i: number, from: Position, move: PlannedMove):
   headings[IN + 2] = headings[OUT + 2] = dz * share;
   plan.length[i] = length;
   plan.acceleration[i] = along(headings, limits.acceleration);
-  plan.limit[i] = rateOf(plan, move);
+  plan.limit[i] = rateOf(headings, limits, move);
 }
 
 function planArc(
@@ -108,11 +133,17 @@ function planArc(
   const climb = length > 0 ? rise / length : 0;
   tangent(headings, IN, dx, dy, way, climb);
   tangent(headings, OUT, move.to.x - centre.x, move.to.y - centre.y, way, climb);
-  const across = Math.min(acceleration.x, acceleration.y);
-  const most = climb === 0 ? across : Math.min(across, acceleration.z / Math.abs(climb));
+  const most = alongArc(climb, acceleration);
+  const feed = Math.min(move.feed ?? 0, alongArc(climb, limits.rapid)) / 60;
   plan.length[i] = length;
   plan.acceleration[i] = most;
-  plan.limit[i] = Math.min(rateOf(plan, move), Math.sqrt(most * radius));
+  plan.limit[i] = Math.min(feed, Math.sqrt(most * radius));
+}
+
+/** The greatest value along an arc of which no axis takes more than its own: it turns through every heading in the plane. */
+function alongArc(climb: number, most: AxisValues): number {
+  const across = Math.min(most.x, most.y);
+  return climb === 0 ? across : Math.min(across, most.z / Math.abs(climb));
 }
 
 /** The heading of an arc at a place `dx`, `dy` from its centre. */
@@ -130,8 +161,10 @@ function tangent(
   headings[at + 2] = climb;
 }
 
-function rateOf({ headings, limits }: MovePlan, move: PlannedMove): number {
-  return (move.kind === 'rapid' ? along(headings, limits.rapid) : (move.feed ?? 0)) / 60;
+/** mm/s: no axis is driven faster by a feed than by a rapid. */
+function rateOf(headings: Float64Array, limits: MotionLimits, move: PlannedMove): number {
+  const most = along(headings, limits.rapid);
+  return (move.kind === 'rapid' ? most : Math.min(move.feed ?? 0, most)) / 60;
 }
 
 /** The greatest value along the heading of which no axis takes more than its own. */
@@ -144,20 +177,18 @@ function along(headings: Float64Array, most: AxisValues): number {
   return Number.isFinite(least) ? least : most.x;
 }
 
-function cornerSpeed(plan: MovePlan, i: number): number {
-  const { headings: h, length, limit, acceleration } = plan;
-  if (length[i - 1] === 0 || length[i] === 0) {
-    return 0;
-  }
+function cornerSpeed(plan: MovePlan, before: number, i: number): number {
+  const { headings: h, limit, acceleration } = plan;
   const cosine =
     (h[0] as number) * (h[IN] as number) +
     (h[1] as number) * (h[IN + 1] as number) +
     (h[2] as number) * (h[IN + 2] as number);
-  const halfSine = Math.sqrt(Math.max(0, (1 + cosine) / 2));
-  const least = Math.min(limit[i - 1] as number, limit[i] as number);
+  const halfSine = Math.sqrt(Math.min(1, Math.max(0, (1 + cosine) / 2)));
+  plan.halfSine[i] = halfSine;
+  const least = Math.min(limit[before] as number, limit[i] as number);
   if (halfSine >= 1) {
     return least;
   }
-  const a = Math.min(acceleration[i - 1] as number, acceleration[i] as number);
+  const a = Math.min(acceleration[before] as number, acceleration[i] as number);
   return Math.min(least, Math.sqrt((a * plan.limits.cornerAllowance * halfSine) / (1 - halfSine)));
 }

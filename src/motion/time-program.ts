@@ -12,12 +12,19 @@ export interface ProgramTime {
   readonly byPass: ReadonlyMap<string, number>;
 }
 
-export function timeProgram(motion: Motion, limits: MotionLimits, spinUpSeconds: number): ProgramTime {
+/** `stopsIn`: the passes in which the machine stands still at the end of every block. */
+export function timeProgram(
+  motion: Motion,
+  limits: MotionLimits,
+  spinUpSeconds: number,
+  stopsIn: (pass: string) => boolean,
+): ProgramTime {
   const plan = openPlan(motion.steps.length, limits);
   /** Where a pass begins: the number of its first move. */
   const runs: { readonly pass: string; readonly first: number }[] = [];
   let waiting = 0;
   let stands = true;
+  let exact = false;
   let pass: string | undefined;
   let at: Position | undefined;
   for (const step of motion.steps) {
@@ -31,8 +38,9 @@ export function timeProgram(motion: Motion, limits: MotionLimits, spinUpSeconds:
     if (now !== pass) {
       runs.push({ pass: now, first: plan.count });
       pass = now;
+      exact = stopsIn(now);
     }
-    planMove(plan, at ?? step.to, step, stands);
+    planMove(plan, at ?? step.to, step, stands || exact);
     at = step.to;
     stands = false;
   }

@@ -1,6 +1,7 @@
 /**
  * Exact path for what makes the flank, the machine file's roughing words for the rest, written where the kind of pass changes.
  */
+import type { Machine } from '../machine/machine.ts';
 import { writeCodes } from './program-sink.ts';
 import type { Writer } from './writer.ts';
 
@@ -17,8 +18,13 @@ export function writeFirstPath(writer: Writer): void {
 }
 
 export function writePathFor(writer: Writer, pass: string): void {
-  const { finishing, roughing } = writer.machine.words.path;
-  takePath(writer, FINISHING.test(pass) ? finishing : roughing);
+  takePath(writer, pathWordsFor(writer.machine, pass));
+}
+
+/** The words under which a pass is cut, null where there are none for it. */
+export function pathWordsFor({ words }: Machine, pass: string): string | null {
+  const { finishing, roughing } = words.path;
+  return FINISHING.test(pass) ? finishing : roughing;
 }
 
 /** The words of one block, `G64 P0.002`, as the machine file has them. */
