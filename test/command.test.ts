@@ -103,16 +103,35 @@ describe('ogive prove', { timeout: 60_000 }, () => {
   it('reads written programs back from disk and passes them', () => {
     const { exit, out, err } = ogive(['prove', ...programs, '--job', 'small-wheel.yaml'], folder);
     expect([exit, out]).toEqual([0, '']);
-    expect(err).toMatch(/Passed\.\n2 programs for .* blocks, the flank .*\nNot checked:\n {2}\S/);
+    expect(err).toMatch(
+      /Passed\.\n2 programs for .* blocks, the flank .*\nTakes \S+ (?:s|min): cutter 1 [^]*\nNot checked:\n {2}\S/,
+    );
   });
 
   it('answers in JSON, and writes each move as a line', () => {
     const args = ['prove', ...programs, '--job', 'small-wheel.yaml', '--json', '--moves', 'moves.jsonl'];
     const { exit, out } = ogive(args, folder);
     expect(exit).toBe(0);
-    const proof = JSON.parse(out) as { notChecked: string[] };
+    const proof = JSON.parse(out) as {
+      notChecked: string[];
+      seconds: number;
+      cuttingSeconds: number;
+      time: {
+        cutters: { cutter: number }[];
+        passes: { name: string }[];
+        spent: Record<string, number>;
+        rounding: { says: string }[];
+      };
+    };
     expect(proof).toMatchObject({ format: 'ogive-proof/1', verdict: 'pass', findings: [] });
     expect(proof.notChecked.length).toBeGreaterThan(0);
+    expect(proof.seconds).toBeGreaterThan(proof.cuttingSeconds);
+    const { cutters, passes, spent, rounding } = proof.time;
+    expect(cutters.map(({ cutter }) => cutter)).toEqual([1, 2]);
+    expect(passes.map(({ name }) => name)).toContain('ROUGHING');
+    const parts = Object.values(spent).reduce((sum, seconds) => sum + seconds, 0);
+    expect(Math.abs(parts - proof.seconds)).toBeLessThan(0.001);
+    expect(rounding[0]?.says).toMatch(/no word for the exact path/);
     const moves = readFileSync(join(folder, 'moves.jsonl'), 'utf8').trimEnd().split('\n');
     const kinds = new Set(moves.map((line) => (JSON.parse(line) as { kind: string }).kind));
     expect([...kinds].toSorted()).toEqual(['arc', 'line', 'rapid']);

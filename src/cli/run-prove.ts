@@ -14,6 +14,7 @@ import { proofJson } from '../prove/proof-json.ts';
 import type { Proof, ProofInput } from '../prove/proof.ts';
 import { proveSet, type SetProof } from '../prove/prove-set.ts';
 import { sarifOf } from '../prove/sarif.ts';
+import { timeWords } from '../prove/time-words.ts';
 import { crossings } from '../tooth/crossings.ts';
 import { wheelForm } from '../tooth/wheel-form.ts';
 import { changeFolder, folderOf, isThere, readText } from './files.ts';
@@ -127,7 +128,7 @@ function answer(
   }
   if (options.json === true) {
     process.stdout.write(
-      `${JSON.stringify(proofJson(files.map((file) => basename(file)).join(' '), proof, machine), null, 2)}\n`,
+      `${JSON.stringify(proofJson(files.map((file) => basename(file)).join(' '), set, machine), null, 2)}\n`,
     );
   }
   for (const finding of proof.findings) {
@@ -170,7 +171,7 @@ function writeBeside(
   return done.ok;
 }
 
-function verdictWords({ proof, cutting, walks }: SetProof, machine: Machine): string {
+function verdictWords({ proof, cutting, walks, time }: SetProof, machine: Machine): string {
   const words = {
     pass: 'Passed.',
     refuse: 'Refused: do not run it.',
@@ -182,6 +183,7 @@ function verdictWords({ proof, cutting, walks }: SetProof, machine: Machine): st
   return [
     words[proof.verdict],
     `${programs} for ${machine.name}, ${proof.blocks} blocks, ${figureWords(proof)}`,
+    ...timeWords(time),
     'Not checked:',
     ...proof.notChecked.map((line) => `  ${line}`),
   ].join('\n');

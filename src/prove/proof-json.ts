@@ -1,24 +1,23 @@
-/** A proof as `ogive-proof/1`: plain JSON with lengths in mm and times in s. */
+/** A proof as `ogive-proof/1`: plain JSON with lengths in mm, feeds in mm/min and times in s. */
 import type { Machine } from '../machine/machine.ts';
-import { timeMoves } from '../motion/move-time.ts';
-import type { TracedMove } from '../motion/traced-move.ts';
-import type { Proof } from './proof.ts';
+import type { SetProof } from './prove-set.ts';
+import type { TimeReport } from './time-report.ts';
+import { roundingWords } from './time-words.ts';
 
-export function proofJson(program: string, proof: Proof, machine: Machine): Record<string, unknown> {
+export function proofJson(
+  program: string,
+  { proof, time }: SetProof,
+  machine: Machine,
+): Record<string, unknown> {
   const { acceleration, rapid, cornerAllowance } = machine.limits;
-  const known = proof.moves.flatMap(knownMove);
-  const times = timeMoves(known, machine.limits);
-  const cutting = times.seconds.reduce(
-    (sum, seconds, i) => (known[i]?.kind === 'rapid' ? sum : sum + seconds),
-    0,
-  );
   return {
     format: 'ogive-proof/1',
     program,
     verdict: proof.verdict,
     blocks: proof.blocks,
-    seconds: hundredths(times.total),
-    cuttingSeconds: hundredths(cutting),
+    seconds: rounded(time.seconds),
+    cuttingSeconds: rounded(time.feedSeconds),
+    time: timeJson(time),
     machine: { name: machine.name, acceleration, rapid, cornerAllowance },
     extents: proof.extents,
     notChecked: proof.notChecked,
@@ -26,31 +25,35 @@ export function proofJson(program: string, proof: Proof, machine: Machine): Reco
   };
 }
 
-function hundredths(seconds: number): number {
-  return Math.round(seconds * 100) / 100;
+function timeJson(time: TimeReport): Record<string, unknown> {
+  const { programs, passes, cutters, spent, feed, corners, rounding, changes, stops, unknown } = time;
+  return roundedAll({
+    programs,
+    passes,
+    cutters,
+    spent,
+    feed,
+    corners,
+    rounding: rounding.map((one) => ({ ...one, limit: one.limit ?? null, says: roundingWords(one) })),
+    exactStop: time.exactStop,
+    notCounted: { changes, stops, movesFromUnknownPlaces: unknown.moves, atMostSeconds: unknown.atMost },
+  }) as Record<string, unknown>;
 }
 
-/** A move of which every place is known; others take a time nobody can tell. */
-function knownMove(move: TracedMove): Parameters<typeof timeMoves>[0][number][] {
-  const { from, to, kind, feed, centre, turn } = move;
-  if (
-    from.x === null ||
-    from.y === null ||
-    from.z === null ||
-    to.x === null ||
-    to.y === null ||
-    to.z === null
-  ) {
-    return [];
+/** Every number in it to five decimals. */
+function roundedAll(value: unknown): unknown {
+  if (typeof value === 'number') {
+    return rounded(value);
   }
-  return [
-    {
-      kind,
-      from: { x: from.x, y: from.y, z: from.z },
-      to: { x: to.x, y: to.y, z: to.z },
-      feed: feed ?? 0,
-      centre,
-      turn,
-    },
-  ];
+  if (Array.isArray(value)) {
+    return value.map(roundedAll);
+  }
+  return typeof value === 'object' && value !== null
+    ? Object.fromEntries(Object.entries(value).map(([key, own]) => [key, roundedAll(own)]))
+    : value;
+}
+
+/** A hundredth of a ms, of a mm/min: a thousandth of the shortest move that anybody times. */
+function rounded(value: number): number {
+  return Math.round(value * 1e5) / 1e5;
 }

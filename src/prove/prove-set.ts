@@ -6,6 +6,7 @@ import { offsetFindings } from './check-offset.ts';
 import type { Extents } from './extents.ts';
 import type { Finding, Proof, ProofInput } from './proof.ts';
 import { proveTraces } from './prove-program.ts';
+import { timeReport, type TimeReport } from './time-report.ts';
 import { traceProgram, type Trace } from './trace-program.ts';
 
 export interface SetProof {
@@ -13,6 +14,7 @@ export interface SetProof {
   /** How many of them cut. */
   readonly cutting: number;
   readonly walks: number;
+  readonly time: TimeReport;
 }
 
 export function proveSet(input: ProofInput): SetProof {
@@ -25,7 +27,8 @@ export function proveSet(input: ProofInput): SetProof {
     ...walks.map((trace) => proveTraces(bare, [trace], traces)),
   ];
   const proof = withStrays(proofs.reduce(joined), strayWalks(input, cutting, walks));
-  return { proof, cutting: cutting.length, walks: walks.length };
+  const time = timeReport(traces, input.machine, input.setup);
+  return { proof, cutting: cutting.length, walks: walks.length, time };
 }
 
 /** A walk-round from another zero than the cuts shows nothing of where they go. */

@@ -43,6 +43,15 @@ export function readComments(run: Run, comments: readonly string[], byHand: ByHa
   }
 }
 
+/** A comment alone on its line may head what follows; the last one before a move does. */
+export function readTitle(run: Run, comments: readonly string[]): void {
+  const title = { line: run.line, before: run.moves.length, text: comments.join(' ') };
+  if (run.titles.at(-1)?.before === title.before) {
+    run.titles.pop();
+  }
+  run.titles.push(title);
+}
+
 function readPart(run: Run, text: string): void {
   const [, number, of] = PART.exec(text) ?? [];
   if (number !== undefined && of !== undefined) {

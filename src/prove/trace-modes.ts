@@ -5,6 +5,7 @@
 import { BIT, has, valueOf, wholeOf, type Block } from './block.ts';
 import { G_GROUP, G_GROUPS } from './modes-codes.ts';
 import { wordOfCode } from './modes.ts';
+import { lengthOf } from './trace-place.ts';
 import { remark, unread, type Refusal, type Run } from './trace-run.ts';
 
 export function changeModes(run: Run, block: Block): Refusal | undefined {
@@ -32,9 +33,11 @@ export function changeModes(run: Run, block: Block): Refusal | undefined {
   }
   const path = g[G_GROUP.path] ?? -1;
   if (path >= 0) {
-    modes.path =
-      wordOfCode(path) +
-      (has(block, BIT.P) && run.codes.pathTolerance ? ` P${String(valueOf(block, 'P'))}` : '');
+    const word = wordOfCode(path);
+    const given = has(block, BIT.P) && run.codes.pathTolerance ? valueOf(block, 'P') : undefined;
+    modes.path = word + (given === undefined ? '' : ` P${String(given)}`);
+    const tolerance = given === undefined ? undefined : lengthOf(run, given);
+    run.paths.push({ before: run.moves.length, word, tolerance });
   }
   const distance = g[G_GROUP.distance] ?? -1;
   if (distance >= 0) {

@@ -15,14 +15,25 @@ import type { Finding } from './proof.ts';
 import { readLines, type ReadLine } from './read-lines.ts';
 import { modesAsked } from './trace-assumed.ts';
 import { runBlock } from './trace-block.ts';
-import { handsDone, readComments, type ByHand } from './trace-comments.ts';
+import { handsDone, readComments, readTitle, type ByHand } from './trace-comments.ts';
 import { checkEnd, checkLine, checkNumber, readLabel, readPercent, type FileState } from './trace-file.ts';
-import { countRemarks, unread, type Part, type Refusal, type Run, type TracedEvent } from './trace-run.ts';
+import {
+  countRemarks,
+  unread,
+  type Part,
+  type PathMode,
+  type Refusal,
+  type Run,
+  type Title,
+  type TracedEvent,
+} from './trace-run.ts';
 
 export interface Trace {
   readonly file: string;
   readonly moves: readonly TracedMove[];
   readonly events: readonly TracedEvent[];
+  readonly titles: readonly Title[];
+  readonly paths: readonly PathMode[];
   readonly findings: readonly Finding[];
   /** Lines that held words and were run. */
   readonly blocks: number;
@@ -54,11 +65,13 @@ export function traceProgram(file: string, text: string, machine: Machine, start
   const state: FileState = { blocks: 0, percents: 0, labelled: false, ended: false, alone: 0, passedOver: 0 };
   const complete = runLines(run, readLines(text, machine, run.codes), start, state);
   countRemarks(run);
-  const { moves, events, findings, modes } = run;
+  const { moves, events, titles, paths, findings, modes } = run;
   return {
     file,
     moves,
     events,
+    titles,
+    paths,
     findings,
     blocks: state.blocks,
     finalModes: { ...modes },
@@ -87,6 +100,8 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
     lengthAsked: false,
     moves: [],
     events: [],
+    titles: [],
+    paths: [],
     findings: [],
     remarks: new Map(),
   };
@@ -155,6 +170,9 @@ function runLine(
   }
   if (line.comments.length > 0) {
     readComments(run, line.comments, byHand);
+    if (line.count === 0) {
+      readTitle(run, line.comments);
+    }
   }
   const { block } = line;
   if (typeof block !== 'object') {

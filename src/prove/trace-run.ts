@@ -36,6 +36,23 @@ export type EventBody = TracedEvent extends infer E
     : never
   : never;
 
+/** A comment that stands alone, as a heading does; of several before the same move the last. */
+export interface Title {
+  readonly line: number;
+  /** Index of the move that follows. */
+  readonly before: number;
+  readonly text: string;
+}
+
+/** How the path is to be followed from a move on. */
+export interface PathMode {
+  readonly before: number;
+  /** 'G61', 'G64', ... */
+  readonly word: string;
+  /** How far it may be left, where the program says so with P, mm. */
+  readonly tolerance: number | undefined;
+}
+
 /** Why the reader stops at a line. */
 export interface Refusal {
   readonly code: CheckCode;
@@ -68,6 +85,8 @@ export interface Run {
   lengthAsked: boolean;
   readonly moves: TracedMove[];
   readonly events: TracedEvent[];
+  readonly titles: Title[];
+  readonly paths: PathMode[];
   readonly findings: Finding[];
   /** By kind of remark: which finding says it, and on how many more lines it was met. */
   readonly remarks: Map<string, { readonly at: number; more: number }>;
