@@ -34,9 +34,15 @@ export function timeTrace(trace: Trace, machine: Machine): TimedTrace {
   haltAtEvents(halts, trace);
   const exactStop = haltAtBlocks(halts, trace, machine);
   let stands = true;
+  // Most moves begin at the very place where the one before them ended.
+  let stood: TracedMove['to'] | undefined;
+  let isStoodKnown = false;
   for (let i = 0; i < moves.length; i++) {
     const move = moves[i] as TracedMove;
-    const known = isKnown(move) ? move : withoutUnknown(move);
+    const isFromKnown = move.from === stood ? isStoodKnown : isKnown(move.from);
+    stood = move.to;
+    isStoodKnown = isKnown(stood);
+    const known = isFromKnown && isStoodKnown ? (move as Known) : withoutUnknown(move);
     if (known === undefined) {
       unknown[i] = 1;
       planUnknown(plan);
@@ -83,11 +89,8 @@ export function firstPathWord(machine: Machine): string | undefined {
   return machine.words.modes.powerOn.find((word) => /^G(?:60|61|61\.1|64)$/.test(word));
 }
 
-function isKnown(move: TracedMove): move is Known {
-  const { from, to } = move;
-  return (
-    from.x !== null && from.y !== null && from.z !== null && to.x !== null && to.y !== null && to.z !== null
-  );
+function isKnown({ x, y, z }: TracedMove['to']): boolean {
+  return x !== null && y !== null && z !== null;
 }
 
 /** The move of the known axes, where they tell its whole length. */

@@ -3,12 +3,14 @@ import { readdirSync, readFileSync } from 'node:fs';
 import { join, resolve } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import type { Machine } from '../../src/machine/machine.ts';
+import type { TracedMove } from '../../src/motion/traced-move.ts';
 import { headingOf } from '../../src/prove/time-passes.ts';
 import { timeReport, type TimeReport } from '../../src/prove/time-report.ts';
 import { timeWords } from '../../src/prove/time-words.ts';
-import { traceProgram } from '../../src/prove/trace-program.ts';
+import { traceProgram, type Trace } from '../../src/prove/trace-program.ts';
 import { SETUP } from '../support/good-program.ts';
 import { MACHINE_NAMES, postMachine } from '../support/post-machines.ts';
+import { stepAlong, type ChainMove } from '../support/step-along.ts';
 
 const GOLDEN = resolve(import.meta.dirname, '../golden');
 
@@ -308,4 +310,36 @@ describe('every golden program', () => {
     expect(sum(Object.values(report.spent))).toBeCloseTo(report.seconds, 6);
     expect(Math.min(...Object.values(report.spent))).toBeGreaterThan(-1e-9);
   });
+
+  it.each(files)('%s: takes what stepping along its moves takes, within 0.5 %%', (file) => {
+    const machine = postMachine(machineOf(file));
+    const trace = traceProgram(file, readFileSync(join(GOLDEN, file), 'utf8'), machine);
+    const { seconds, spent } = timeReport([trace], machine, SETUP);
+    const stepped = stepAlong(chainOf(trace, machine), machine.limits, 60);
+    const moving = seconds - spent.dwells - spent.spinUp;
+    expect(Math.abs(moving / stepped - 1)).toBeLessThan(0.005);
+  });
 });
+
+function machineOf(file: string): string {
+  return MACHINE_NAMES.find((name) => new RegExp(`^small-wheel\\.${name}[-.]`).test(file)) ?? '';
+}
+
+/** The moves whose ends are known, and where something happens between them; on the DIN machine G60 stops at every block. */
+function chainOf({ moves, events }: Trace, machine: Machine): ChainMove[] {
+  const isTold = ({ x, y, z }: TracedMove['to']): boolean => x !== null && y !== null && z !== null;
+  return moves.flatMap((move, i) =>
+    isTold(move.from) && isTold(move.to)
+      ? [
+          {
+            ...(move as unknown as ChainMove),
+            standsBefore:
+              machine.words.path.finishing === 'G60' ||
+              i === 0 ||
+              !isTold(moves[i - 1]!.from) ||
+              events.some(({ before, kind }) => before === i && kind !== 'message'),
+          },
+        ]
+      : [],
+  );
+}
