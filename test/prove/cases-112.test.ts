@@ -1,0 +1,78 @@
+/**
+ * The 112 cases of the project's table of conformance, each with its reference in NISTIR 6556 (The NIST RS274NGC Interpreter,
+ * Version 3, August 2000) or the source that settles it: what the report prescribes is done, what it calls an error stops the
+ * reader at that line, and so does what it is silent about.
+ */
+import { describe, expect, it } from 'vitest';
+import { traceProgram } from '../../src/prove/trace-program.ts';
+import { movesOf, post, traceLines } from '../support/bench-program.ts';
+import { expectRead, expectStop, type CaseRow } from '../support/case-row.ts';
+import { ARCS } from './cases/arcs.ts';
+import { COMPENSATION } from './cases/compensation.ts';
+import { FEED } from './cases/feed.ts';
+import { HOLES } from './cases/holes.ts';
+import { MODES } from './cases/modes.ts';
+import { PARAMETERS } from './cases/parameters.ts';
+import { PLACES } from './cases/places.ts';
+import { SYNTAX } from './cases/syntax.ts';
+
+const TABLE: readonly CaseRow[] = [
+  ...SYNTAX, ...MODES, ...PLACES, ...FEED, ...ARCS, ...HOLES, ...COMPENSATION, ...PARAMETERS,
+]; // prettier-ignore
+
+/** Of the table, and not followed yet: the reader stops there. */
+const LATER: ReadonlySet<number> = new Set([26, 41, 51, 52, 61, 62, 63, 64, 67, 86, 87, 89, 90, 92, 93, 94, 95, 96, 97, 98, 99, 100, 101, 102, 103, 104, 106, 107, 108, 109, 110]); // prettier-ignore
+
+const NOW = TABLE.filter(({ n }) => !LATER.has(n));
+
+/** Prescribed by the report, and beyond this reader: it stops at the line. */
+const BEYOND = [28, 45, 58, 65, 66, 82, 97, 98, 99];
+
+describe('read as the report prescribes', () => {
+  it.each(
+    NOW.flatMap((row) =>
+      row.lines === undefined ? [] : [[row.n, row.lines.join(' | '), row.ref, row] as const],
+    ),
+  )('case %i: %s [NISTIR 6556 %s]', (_, __, ___, row) => expectRead(row));
+});
+
+describe('refused at the line', () => {
+  it.each(NOW.flatMap((row) => (row.wrong ?? []).map((line) => [row.n, line, row.ref, row] as const)))(
+    'case %i: %s [NISTIR 6556 %s]',
+    (_, line, __, row) => expectStop(row, line),
+  );
+});
+
+const codes = (text: string): string[] =>
+  traceProgram('f.ngc', text, post('bench-mill')).findings.map(({ code }) => code);
+
+it('case 15: % first and no second one [NISTIR 6556 §3.1]', () => {
+  expect(codes('%\nG21\nM2\n')).toEqual(['prove.end']);
+  expect(codes('%\nG21\n')).toEqual(['prove.end']);
+  expect(codes('%\nG21\n%\n')).toEqual([]);
+});
+
+it('case 16: neither % nor M2 nor M30 [NISTIR 6556 §3.1]', () => {
+  expect(codes('G21\n')).toContain('prove.end');
+  expect(codes('')).toContain('prove.end');
+});
+
+it("case 68: centre and radius of the report's own arc [NISTIR 6556 §3.5.3.2 p24]", () => {
+  const arc = movesOf(traceLines({ at: 'X7 Y7 Z0', lines: ['G17 G2 X10 Y16 I3 J4 Z9'] }))[0];
+  expect(arc?.centre).toEqual({ x: 10, y: 11 });
+});
+
+it('case 34: M6 before any T; the report is silent [NISTIR 6556 §3.6.3]', () => {
+  const trace = traceProgram('t.ngc', '%\nG21\nM6\nM2\n%\n', post('bench-mill'));
+  expect(trace.complete).toBe(false);
+  expect(trace.findings.at(-1)).toMatchObject({ code: 'prove.unread', line: 3 });
+});
+
+it('holds every case of the table', () => {
+  const held = new Set([...TABLE.map(({ n }) => n), 15, 16]);
+  expect(Array.from({ length: 112 }, (_, i) => i + 1).filter((n) => !held.has(n))).toEqual([]);
+});
+
+it('says which cases are beyond this reader, and no more of them', () => {
+  expect(TABLE.filter(({ beyond }) => beyond !== undefined).map(({ n }) => n)).toEqual(BEYOND);
+});
