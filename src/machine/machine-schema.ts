@@ -196,11 +196,14 @@ const arcWords = () =>
 
 const holeWords = () =>
   group({
-    cycles: z.array(oneOf('G81', 'G82', 'G83'), { error: 'a list of G81, G82, G83; [] for none' }),
+    cycles: z.array(oneOf('G73', 'G81', 'G82', 'G83', 'G84', 'G85', 'G86', 'G88', 'G89'), {
+      error: 'a list of cycles like G81, G82, G83; [] for none',
+    }),
     'return-word': oneOf('none', 'G98', 'G99'),
     'clear-meaning': oneOf('absolute', 'from-start-level'),
     // A word that moves, or sets a mode, would take its place in every program.
     'end-word': oneOf('G80'),
+    'peck-return': oneOf('clear-height', 'R').default('clear-height'),
   });
 
 const cutterWords = () =>

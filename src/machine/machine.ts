@@ -127,13 +127,17 @@ export interface ArcWords {
 }
 
 export interface HoleWords {
-  /** Which of 'G81', 'G82', 'G83' the controller has. S */
-  readonly cycles: readonly ('G81' | 'G82' | 'G83')[];
+  /** Which cycles the controller has. S */
+  readonly cycles: readonly CycleWord[];
   readonly returnWord: 'none' | 'G98' | 'G99'; // S
   /** S  how R is meant. */
   readonly clearMeaning: 'absolute' | 'from-start-level';
   readonly endWord: string; // S 'G80'
+  /** How far G83 comes out between two pecks: to the clear height (NISTIR 6556 §3.5.16.4), or to R. */
+  readonly peckReturn: 'clear-height' | 'R';
 }
+
+export type CycleWord = 'G73' | 'G81' | 'G82' | 'G83' | 'G84' | 'G85' | 'G86' | 'G88' | 'G89';
 
 export interface DwellWords {
   /** S  After a dwell with F or S the feed or speed is to be written again, for a reader that takes it as one. */

@@ -6,6 +6,7 @@
 import { WHOLE_NUMBER } from '../base/tolerances.ts';
 import { G_GROUP, G_GROUPS, M_GROUPS, type Codes } from './modes-codes.ts';
 import type { LineWords } from './line-words.ts';
+import { whyNoCode } from './not-followed.ts';
 import type { ArcMemo } from './trace-arc.ts';
 
 export interface Block {
@@ -47,12 +48,16 @@ export function bitOf(letter: Letter): number {
 }
 
 export const BIT = {
-  F: bitOf('F'), H: bitOf('H'), I: bitOf('I'), J: bitOf('J'), K: bitOf('K'), O: bitOf('O'), P: bitOf('P'), R: bitOf('R'),
+  F: bitOf('F'), H: bitOf('H'), I: bitOf('I'), J: bitOf('J'), K: bitOf('K'), L: bitOf('L'), O: bitOf('O'), P: bitOf('P'),
+  Q: bitOf('Q'), R: bitOf('R'),
   S: bitOf('S'), T: bitOf('T'), X: bitOf('X'), Y: bitOf('Y'), Z: bitOf('Z'),
 } as const; // prettier-ignore
 
+/** Letters of a move. */
+const PLACES = BIT.X | BIT.Y | BIT.Z | BIT.I | BIT.J | BIT.K | BIT.R;
+
 /** Letters whose number is a length. */
-const LENGTHS = BIT.X | BIT.Y | BIT.Z | BIT.I | BIT.J | BIT.K | BIT.R;
+const LENGTHS = PLACES | BIT.Q;
 
 export const AXES = BIT.X | BIT.Y | BIT.Z;
 
@@ -99,7 +104,7 @@ export function sortWords(words: LineWords, codes: Codes): Block | string {
       return `column ${String(words.columns[i])}: ${wrong}`;
     }
   }
-  block.onlyMoves &&= (block.given & ~LENGTHS) === 0 && mCount === 0;
+  block.onlyMoves &&= (block.given & ~PLACES) === 0 && mCount === 0;
   return block;
 }
 
@@ -130,7 +135,7 @@ function sortG(value: number, codes: Codes, block: Block): string | undefined {
   const code = wholeOf(value * 10) ?? -1;
   const group = (codes.g[code] ?? 0) - 1;
   if (group < 0) {
-    return `G${String(value)} is no word of this machine file that can be read`;
+    return whyNoCode(code, value);
   }
   if ((block.g[group] ?? -1) >= 0) {
     return `G${String(value)} and G${String((block.g[group] ?? 0) / 10)} exclude each other on one line`;

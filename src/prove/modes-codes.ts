@@ -105,6 +105,7 @@ function putByWords(machine: Machine, put: (group: number, ...codes: readonly nu
     put(G_GROUP.length, 430);
   }
   if (holes.cycles.length > 0) {
+    put(G_GROUP.motion, ...holes.cycles.map((word) => codeOf(word)));
     put(G_GROUP.cycleReturn, 980, 990);
   }
   if (positions.top !== 'none') {

@@ -8,8 +8,10 @@ import type { LengthUnit } from '../base/units.ts';
 import type { Machine } from '../machine/machine.ts';
 import { codeOf, G_GROUP, type Codes } from './modes-codes.ts';
 
+export type CycleMode = 'G73' | 'G81' | 'G82' | 'G83' | 'G84' | 'G85' | 'G86' | 'G88' | 'G89';
+
 /** Motion mode 'none' is after G80; codes as written otherwise. */
-export type MotionMode = 'G0' | 'G1' | 'G2' | 'G3' | 'none';
+export type MotionMode = 'G0' | 'G1' | 'G2' | 'G3' | CycleMode | 'none';
 
 export interface ModalState {
   motion: MotionMode | undefined;
@@ -79,11 +81,18 @@ function unknown(machine: Machine, cutter: number | null): ModalState {
   };
 }
 
-const MOTIONS: Readonly<Record<number, MotionMode>> = { 0: 'G0', 10: 'G1', 20: 'G2', 30: 'G3', 800: 'none' };
+const MOTIONS: Readonly<Record<number, MotionMode>> = {
+  0: 'G0', 10: 'G1', 20: 'G2', 30: 'G3', 800: 'none',
+  730: 'G73', 810: 'G81', 820: 'G82', 830: 'G83', 840: 'G84', 850: 'G85', 860: 'G86', 880: 'G88', 890: 'G89',
+}; // prettier-ignore
 
 /** Ten times a G code of motion, as its mode. */
 export function motionOfCode(code: number): MotionMode | undefined {
   return MOTIONS[code];
+}
+
+export function isCycle(motion: MotionMode | undefined): motion is CycleMode {
+  return motion !== undefined && motion.length > 2 && motion !== 'none';
 }
 
 export function wordOfCode(code: number): string {

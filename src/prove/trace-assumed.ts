@@ -20,7 +20,9 @@ const FAST = IN_MACHINE | bits(G_GROUP.motion, G_GROUP.work, G_GROUP.length, G_G
 const CUT = FAST | bits(G_GROUP.feedMode, G_GROUP.path);
 const ARC = CUT | bits(G_GROUP.plane, G_GROUP.centre);
 
-const HANGS = { machine: IN_MACHINE, G0: FAST, G1: CUT, G2: ARC, G3: ARC } as const;
+const CYCLE = CUT | bits(G_GROUP.plane, G_GROUP.cycleReturn);
+
+const HANGS = { machine: IN_MACHINE, G0: FAST, G1: CUT, G2: ARC, G3: ARC, cycle: CYCLE } as const;
 
 /** The modes that this controller has, as bits. */
 export function modesAsked({ words }: Machine, codes: Codes): number {
@@ -33,6 +35,7 @@ export function modesAsked({ words }: Machine, codes: Codes): number {
     path.feedMode ?? '',
     path.finishing ?? '',
     arcs.centreWord ?? '',
+    words.holes.returnWord,
   ];
   const groups = named.flatMap((word) => {
     const group = (codes.g[codeOf(word.split(' ')[0] ?? '')] ?? 0) - 1;
@@ -70,6 +73,7 @@ function nameOf({ words, units }: Machine, group: number): string {
     [G_GROUP.unit]: ['the unit', units === 'inch' ? modes.inchWord : modes.millimetreWord],
     [G_GROUP.compensation]: ['that radius compensation is off', 'G40'],
     [G_GROUP.length]: ['that no length offset is on', 'G49'],
+    [G_GROUP.cycleReturn]: ['how far cycles come out', words.holes.returnWord],
     [G_GROUP.work]: ['the work offset', positions.workOffset],
     [G_GROUP.path]: ['the path mode', path.finishing],
     [G_GROUP.centre]: ['how arc centres are counted', arcs.centreWord],

@@ -6,7 +6,9 @@
  */
 import { AXES, BIT, lettersOf, type Block } from './block.ts';
 import { G_GROUP, M_GROUP } from './modes-codes.ts';
-import { motionOfCode, type MotionMode } from './modes.ts';
+import { isCycle, motionOfCode, type MotionMode } from './modes.ts';
+import { runCycle } from './trace-cycle.ts';
+import { lettersOfCycle } from './trace-hole.ts';
 import { goHome, moveInMachine } from './trace-home.ts';
 import { runMove } from './trace-move.ts';
 import { changeCutter, runDwell, selectCutter, setFeed, setSpeed, turnSpindle } from './trace-settings.ts';
@@ -96,6 +98,9 @@ function leftOver(
   if (motion === 'G2' || motion === 'G3') {
     used |= BIT.I | BIT.J | BIT.R | (run.modes.plane === 'XY' ? 0 : BIT.K);
   }
+  if (isCycle(motion)) {
+    used |= BIT.R | BIT.L | lettersOfCycle(motion);
+  }
   if (block.g[G_GROUP.length] === 430) {
     used |= BIT.H;
   }
@@ -116,6 +121,7 @@ function moveAs(
   const code = block.g[G_GROUP.motion] ?? -1;
   const written = code >= 0 ? motionOfCode(code) : undefined;
   if (written !== undefined) {
+    run.cycle = written === run.modes.motion ? run.cycle : undefined;
     run.modes.motion = written;
     run.setAt[G_GROUP.motion] = run.line;
   }
@@ -125,7 +131,10 @@ function moveAs(
   if (other === MACHINE_PLACE) {
     return moveInMachine(run, block, motion, axes);
   }
-  return motion === undefined || motion === 'none' ? undefined : runMove(run, block, motion, axes);
+  if (motion === undefined || motion === 'none') {
+    return undefined;
+  }
+  return isCycle(motion) ? runCycle(run, block, motion, axes) : runMove(run, block, motion, axes);
 }
 
 function stop(run: Run, block: Block): undefined {

@@ -43,6 +43,12 @@ export function placeOf(run: Run, block: Block, axes: number): Here {
   };
 }
 
+/** A step from a place, both in mm, as a step of the program's unit. */
+export function stepFrom(run: Run, from: number, step: number): number {
+  const unit = millimetresPer(run.modes.unit ?? 'mm');
+  return ((Math.round((from / unit) * STEPS) + Math.round((step / unit) * STEPS)) / STEPS) * unit;
+}
+
 function axisPlace(from: number | null, value: number, unit: number, isAbsolute: boolean): number | null {
   if (isAbsolute) {
     return value * unit;

@@ -19,6 +19,7 @@ import { handsDone, readComments, readTitle, type ByHand } from './trace-comment
 import { checkEnd, checkLine, checkNumber, readLabel, readPercent, type FileState } from './trace-file.ts';
 import {
   countRemarks,
+  NO_SHIFT,
   unread,
   type Part,
   type PathMode,
@@ -94,6 +95,9 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
     here: NOWHERE,
     line: 0,
     part: undefined,
+    shift: NO_SHIFT,
+    cycle: undefined,
+    cycleMoves: 0,
     placed: false,
     setAt: Array.from({ length: G_GROUPS }, () => 0),
     unasked: modesAsked(machine, codes),

@@ -9,6 +9,7 @@ import type { CheckCode } from './check-codes.ts';
 import type { Codes } from './modes-codes.ts';
 import { spindleOf, type Here, type ModalState } from './modes.ts';
 import type { Finding } from './proof.ts';
+import type { CycleSeries } from './trace-cycle.ts';
 
 export type AxisName = 'x' | 'y' | 'z';
 
@@ -66,6 +67,14 @@ export interface Part {
   readonly line: number;
 }
 
+export interface Shift {
+  readonly x: number;
+  readonly y: number;
+  readonly z: number;
+}
+
+export const NO_SHIFT: Shift = { x: 0, y: 0, z: 0 };
+
 export interface Run {
   readonly file: string;
   readonly machine: Machine;
@@ -75,6 +84,12 @@ export interface Run {
   line: number;
   /** Where a comment at its head tells. */
   part: Part | undefined;
+  /** Where the zero that the program counts from lies in its frame, mm: not at its zero once G92 has shifted it. */
+  shift: Shift;
+  /** The series of holes that is on. */
+  cycle: CycleSeries | undefined;
+  /** Moves that cycles have made, at most. */
+  cycleMoves: number;
   /** A place in the program's own frame has been named. */
   placed: boolean;
   /** By modal group of G codes: the line that last set it, 1-based; 0 where none has. */

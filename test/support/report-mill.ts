@@ -3,5 +3,8 @@ import type { Machine } from '../../src/machine/machine.ts';
 import { post } from './bench-program.ts';
 
 export function reportMill(): Machine {
-  return post('bench-mill');
+  const bench = post('bench-mill');
+  const { words } = bench;
+  const cycles = ['G81', 'G82', 'G83', 'G84', 'G85', 'G86', 'G88', 'G89'] as const;
+  return { ...bench, words: { ...words, holes: { ...words.holes, cycles } } };
 }
