@@ -106,6 +106,7 @@ function machineSchema() {
       path: pathWords(),
       rotary: rotaryWords(),
       end: group({ end: oneOf('M2', 'M30'), restore: words(MODE, MODES).default([]) }),
+      language: languageWords(),
     }),
     limits: limits(),
   });
@@ -239,6 +240,13 @@ const pathWords = () =>
     'feed-mode': orNone(text(/^G94$/, 'G94, or none')).default('G94'),
     'helix-feed-along': oneOf('helix', 'circle').default('helix'),
     'feed-demanded': yesNo().default(true),
+  });
+
+const languageWords = () =>
+  group({
+    parameters: oneOf('none', 'numbered', 'numbered-and-named').default('none'),
+    'set-zero': z.array(oneOf('G10', 'G92'), { error: 'a list of G10, G92; [] for none' }).default([]),
+    'inverse-time': yesNo().default(false),
   });
 
 /** The one group that may be absent; `rotary: none` takes away what the file it is `like` has. */

@@ -31,6 +31,7 @@ export interface Words {
   readonly path: PathWords;
   readonly rotary?: RotaryWords;
   readonly end: EndWords;
+  readonly language: LanguageWords;
 }
 
 export interface FileWords {
@@ -197,6 +198,16 @@ export interface EndWords {
   readonly end: 'M2' | 'M30'; // S
   /** Modes written back before the end. */
   readonly restore: readonly string[];
+}
+
+/** What a program may hold beside plain blocks. Nothing of it is ever written; it is for reading programs of other makers. */
+export interface LanguageWords {
+  /** #1 to #5399, [expressions] and functions as NISTIR 6556 §3.3.2 has them; and names like #<depth>. */
+  readonly parameters: 'none' | 'numbered' | 'numbered-and-named';
+  /** Words by which it moves the zero itself: G10 L2, and G92 with G92.1 to G92.3. */
+  readonly setZero: readonly ('G10' | 'G92')[];
+  /** G93: F says how long a move takes. */
+  readonly inverseTime: boolean;
 }
 
 export interface Limits {

@@ -43,6 +43,9 @@ function stillOn({ finalModes: modes, setAt }: Trace): Leftover[] {
   if (modes.distance === 'incremental') {
     said.push({ message: 'distances are still incremental (G91)', line: setAt[G_GROUP.distance] });
   }
+  if (modes.feedMode === 'inverse-time') {
+    said.push({ message: 'F still counts how long a move takes (G93)', line: setAt[G_GROUP.feedMode] });
+  }
   if (modes.mist === true || modes.flood === true) {
     said.push({ message: 'the coolant still runs' });
   }

@@ -94,7 +94,7 @@ function dangerousIn(banned: string): RegExp {
 }
 
 function putByWords(machine: Machine, put: (group: number, ...codes: readonly number[]) => void): void {
-  const { arcs, cutters, positions, holes } = machine.words;
+  const { arcs, cutters, positions, holes, language } = machine.words;
   if (arcs.planes !== 'none') {
     put(G_GROUP.motion, 20, 30);
   }
@@ -107,6 +107,15 @@ function putByWords(machine: Machine, put: (group: number, ...codes: readonly nu
   if (holes.cycles.length > 0) {
     put(G_GROUP.motion, ...holes.cycles.map((word) => codeOf(word)));
     put(G_GROUP.cycleReturn, 980, 990);
+  }
+  if (language.setZero.includes('G10')) {
+    put(G_GROUP.other, 100);
+  }
+  if (language.setZero.includes('G92')) {
+    put(G_GROUP.other, 920, 921, 922, 923);
+  }
+  if (language.inverseTime) {
+    put(G_GROUP.feedMode, 930);
   }
   if (positions.top !== 'none') {
     put(G_GROUP.other, 280, 300, 530);

@@ -17,7 +17,7 @@ export interface ModalState {
   motion: MotionMode | undefined;
   plane: 'XY' | 'XZ' | 'YZ' | undefined;
   distance: 'absolute' | 'incremental' | undefined;
-  feedMode: 'per-minute' | undefined;
+  feedMode: 'per-minute' | 'inverse-time' | undefined;
   unit: LengthUnit | undefined;
   compensation: 'off' | undefined;
   /** H of the length offset that is on; 'off' after G49. */
@@ -26,7 +26,7 @@ export interface ModalState {
   work: string | undefined;
   path: string | undefined;
   centre: 'from-start' | 'from-zero' | undefined;
-  /** mm/min; undefined until F is given in the unit that is on. */
+  /** mm/min; undefined until F is given in the unit that is on, and under G93, where it holds for one move. */
   feed: number | undefined;
   /** S as last given. */
   speed: number | undefined;

@@ -39,6 +39,7 @@ export function notChecked(evidence: Evidence, named: readonly Trace[]): string[
 /** What reading itself leaves open, over all programs: each thing once. */
 function notReadOf(traces: readonly Trace[]): string[] {
   const alone = traces.reduce((sum, trace) => sum + trace.alone, 0);
+  const reckoned = traces.reduce((sum, trace) => sum + trace.reckoned, 0);
   const passedOver = traces.reduce((sum, trace) => sum + trace.passedOver, 0);
   return [
     'what the controller itself does otherwise than its machine file says',
@@ -47,6 +48,11 @@ function notReadOf(traces: readonly Trace[]): string[] {
           alone === 1
             ? '1 line that holds only %: the second reader cannot read it'
             : `${String(alone)} lines that hold only %: the second reader cannot read them`,
+        ]
+      : []),
+    ...(reckoned > 0
+      ? [
+          `${String(reckoned)} line${reckoned === 1 ? '' : 's'} with parameters or expressions: reckoned by one reader alone, the second one knows neither`,
         ]
       : []),
     ...(passedOver > 0

@@ -7,6 +7,7 @@
  */
 import type { Machine } from '../machine/machine.ts';
 import { sortWords, type Block } from './block.ts';
+import { readFormula, type FormulaLine } from './formula-line.ts';
 import { emptyLineWords, type LineWords } from './line-words.ts';
 import type { Codes } from './modes-codes.ts';
 import { secondReading, secondReadingAgrees } from './second-reader.ts';
@@ -31,6 +32,8 @@ export interface ReadLine {
   differs: string | undefined;
   /** Its words sorted, or what is wrong with them; undefined where it holds none. */
   readonly block: Block | string | undefined;
+  /** Where its numbers are reckoned: what stands on it. Then it has no block before it is run. */
+  readonly formula: FormulaLine | undefined;
   /** A move and nothing else: no rule about lines has anything to say of it. */
   readonly onlyMoves: boolean;
 }
@@ -81,6 +84,9 @@ function readFirst(text: string, machine: Machine, codes: Codes, waiting: Waitin
   const words = (waiting.words[waiting.count] ??= emptyLineWords());
   tokenizeLine(text, 0, text.length, file.commentForm, words);
   const { count, number, numberDigits, skipped, percent, small, comments, fault } = words;
+  if (fault !== undefined && /[#[]/.test(text)) {
+    return reckonedLine(text, machine, fault, words.faultColumn);
+  }
   const isWhole = fault === undefined && percent === undefined;
   const block = isWhole && count > 0 ? sortWords(words, codes) : undefined;
   const line: ReadLine = {
@@ -95,6 +101,7 @@ function readFirst(text: string, machine: Machine, codes: Codes, waiting: Waitin
     fault: fault === undefined ? undefined : `column ${String(words.faultColumn)}: ${fault}`,
     differs: undefined,
     block,
+    formula: undefined,
     onlyMoves:
       typeof block === 'object' &&
       block.onlyMoves &&
@@ -109,6 +116,42 @@ function readFirst(text: string, machine: Machine, codes: Codes, waiting: Waitin
     waiting.count += 1;
   }
   return line;
+}
+
+/** A line that is no row of plain words, and holds a # or a [. The second reader knows nothing of either. */
+function reckonedLine(text: string, { words }: Machine, plainFault: string, column: number): ReadLine {
+  const { parameters } = words.language;
+  const reading =
+    parameters === 'none'
+      ? ({ ok: false, fault: withoutComments(text) ? NO_PARAMETERS : plainFault, column } as const)
+      : readFormula(text, {
+          comments: words.file.commentForm,
+          named: parameters === 'numbered-and-named',
+          comparisons: false,
+        });
+  const line = reading.ok ? reading.line : undefined;
+  return {
+    text,
+    count: line === undefined ? 0 : line.words.length + line.settings.length,
+    number: line?.number ?? -1,
+    numberDigits: line?.numberDigits ?? 0,
+    skipped: line?.skipped ?? false,
+    percent: undefined,
+    small: line?.small ?? false,
+    comments: line?.comments ?? NO_COMMENTS,
+    fault: reading.ok ? undefined : `column ${String(reading.column)}: ${reading.fault}`,
+    differs: undefined,
+    block: undefined,
+    formula: line,
+    onlyMoves: false,
+  };
+}
+
+const NO_PARAMETERS = 'parameters and expressions; by its machine file this controller reads none';
+
+/** Whether it holds # or [ as more than text; a comment that is not closed is text to its end. */
+function withoutComments(text: string): boolean {
+  return /[#[]/.test(text.replace(/\([^)]*(?:\)|$)|;.*/g, ''));
 }
 
 /** Together, where all agree; one by one where that must be found, or where the second reader takes no lines together. */

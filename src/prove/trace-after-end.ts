@@ -15,9 +15,9 @@ export function sayWhatFollows(run: Run, lines: readonly ReadLine[], wasPercent:
   // Behind a closing % no controller that wants one reads on (NISTIR 6556 §3.1).
   let isClosed = wasPercent;
   for (let k = run.line; k < lines.length; k++) {
-    const { fault, block, percent } = lines[k]!;
+    const { fault, block, formula, percent } = lines[k]!;
     isClosed ||= percent !== undefined;
-    if (fault === undefined && block === undefined) {
+    if (fault === undefined && block === undefined && formula === undefined) {
       continue;
     }
     count += 1;

@@ -107,7 +107,9 @@ function centreByWords(run: Run, block: Block, from: Point): Point | Refusal {
   if (mode === 'from-start') {
     return { x: from.x + i, y: from.y + j };
   }
-  return words === (BIT.I | BIT.J) ? { x: i, y: j } : badArc('a centre counted from zero needs both I and J');
+  return words === (BIT.I | BIT.J)
+    ? { x: i + run.shift.x, y: j + run.shift.y }
+    : badArc('a centre counted from zero needs both I and J');
 }
 
 /** The centre lies on the bisector of the chord, left of it for a short counter-clockwise arc. */

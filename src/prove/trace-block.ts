@@ -6,12 +6,21 @@
  */
 import { AXES, BIT, lettersOf, type Block } from './block.ts';
 import { G_GROUP, M_GROUP } from './modes-codes.ts';
-import { isCycle, motionOfCode, type MotionMode } from './modes.ts';
+import { isCycle, motionOfCode, wordOfCode, type MotionMode } from './modes.ts';
 import { runCycle } from './trace-cycle.ts';
 import { lettersOfCycle } from './trace-hole.ts';
 import { goHome, moveInMachine } from './trace-home.ts';
 import { runMove } from './trace-move.ts';
-import { changeCutter, runDwell, selectCutter, setFeed, setSpeed, turnSpindle } from './trace-settings.ts';
+import { runZero, sayShiftLeft, SET_ZERO, SHIFT } from './trace-zero.ts';
+import {
+  changeCutter,
+  changeFeedMode,
+  runDwell,
+  selectCutter,
+  setFeed,
+  setSpeed,
+  turnSpindle,
+} from './trace-settings.ts';
 import { changeModes } from './trace-modes.ts';
 import { happen, remark, unread, type Refusal, type Run } from './trace-run.ts';
 
@@ -26,13 +35,13 @@ export function runBlock(run: Run, block: Block): Refusal | undefined {
   const other = block.g[G_GROUP.other] ?? -1;
   const dwellBit = other === DWELL ? dwellLetterBit(run) : 0;
   const axes = block.given & AXES & ~dwellBit;
-  const isHome = other === HOME || other === SECOND_HOME;
-  const motion = motionOf(run, block, axes, isHome);
+  const wantsAxes = other === HOME || other === SECOND_HOME || other === SET_ZERO || other === SHIFT;
+  const motion = motionOf(run, block, axes, wantsAxes);
   if (motion !== undefined && typeof motion !== 'string') {
     return motion;
   }
   return (
-    leftOver(run, block, motion, axes, dwellBit, isHome) ??
+    leftOver(run, block, motion, axes, dwellBit, wantsAxes) ??
     (block.onlyMoves ? undefined : settings(run, block, motion, dwellBit, other === DWELL)) ??
     moveAs(run, block, motion, axes, other) ??
     stop(run, block)
@@ -48,6 +57,7 @@ function settings(
   isDwell: boolean,
 ): Refusal | undefined {
   return (
+    changeFeedMode(run, block) ??
     setFeed(run, block, dwellBit) ??
     setSpeed(run, block, dwellBit) ??
     selectCutter(run, block) ??
@@ -64,12 +74,19 @@ function dwellLetterBit(run: Run): number {
 }
 
 /** The motion that this line makes, undefined for none; sets nothing. */
-function motionOf(run: Run, block: Block, axes: number, isHome: boolean): MotionMode | undefined | Refusal {
+function motionOf(
+  run: Run,
+  block: Block,
+  axes: number,
+  wantsAxes: boolean,
+): MotionMode | undefined | Refusal {
   const code = block.g[G_GROUP.motion] ?? -1;
   const written = code >= 0 ? motionOfCode(code) : undefined;
-  if (isHome) {
+  if (wantsAxes) {
     return code >= 0 && code !== CANCEL
-      ? unread(`${String(written)} and a way home both want the axis words`)
+      ? unread(
+          `${String(written)} and ${wordOfCode(block.g[G_GROUP.other] ?? 0)} on one line both want the axis words`,
+        )
       : undefined;
   }
   if (axes === 0) {
@@ -89,14 +106,17 @@ function leftOver(
   motion: MotionMode | undefined,
   axes: number,
   dwellBit: number,
-  isHome: boolean,
+  wantsAxes: boolean,
 ): Refusal | undefined {
   let used = BIT.F | BIT.S | BIT.T | dwellBit;
-  if (motion !== undefined || isHome) {
+  if (motion !== undefined || wantsAxes) {
     used |= axes;
   }
   if (motion === 'G2' || motion === 'G3') {
     used |= BIT.I | BIT.J | BIT.R | (run.modes.plane === 'XY' ? 0 : BIT.K);
+  }
+  if (block.g[G_GROUP.other] === SET_ZERO) {
+    used |= BIT.L | BIT.P;
   }
   if (isCycle(motion)) {
     used |= BIT.R | BIT.L | lettersOfCycle(motion);
@@ -131,8 +151,9 @@ function moveAs(
   if (other === MACHINE_PLACE) {
     return moveInMachine(run, block, motion, axes);
   }
-  if (motion === undefined || motion === 'none') {
-    return undefined;
+  const refused = other < SET_ZERO ? undefined : runZero(run, block, axes, other);
+  if (refused !== undefined || motion === undefined || motion === 'none') {
+    return refused;
   }
   return isCycle(motion) ? runCycle(run, block, motion, axes) : runMove(run, block, motion, axes);
 }
@@ -142,6 +163,7 @@ function stop(run: Run, block: Block): undefined {
   if (code === 0 || code === 1) {
     happen(run, { kind: 'stop', optional: code === 1 });
   } else if (code >= 0) {
+    sayShiftLeft(run);
     const word = code === 2 ? 'M2' : 'M30';
     const { end } = run.machine.words.end;
     if (word !== end) {

@@ -14,6 +14,7 @@ import { sayAssumed } from './trace-assumed.ts';
 import { drill, lettersOfCycle, peckCount, type Hole } from './trace-hole.ts';
 import { feedRefused } from './trace-move.ts';
 import { lengthOf, placeOf, placeRefused, stepFrom } from './trace-place.ts';
+import { lostRefused } from './trace-zero.ts';
 import { isLengthKnown, makeMove, unread, type Refusal, type Run } from './trace-run.ts';
 
 /** What holds on from hole to hole, in mm as it was written. */
@@ -26,7 +27,11 @@ export interface CycleSeries {
 
 export function runCycle(run: Run, block: Block, cycle: CycleMode, axes: number): Refusal | undefined {
   const { here } = run;
-  const refused = placeRefused(run) ?? cycleRefused(run, cycle) ?? feedRefused(run);
+  const refused =
+    placeRefused(run) ??
+    lostRefused(run, axes | BIT.Z) ??
+    cycleRefused(run, cycle) ??
+    feedRefused(run, block);
   if (refused !== undefined) {
     return refused;
   }
@@ -64,6 +69,9 @@ function cycleRefused({ modes }: Run, cycle: CycleMode): Refusal | undefined {
   }
   if (modes.cycleReturn === undefined) {
     return unread(`${cycle} before G98 or G99 says how far it comes out`);
+  }
+  if (modes.feedMode === 'inverse-time') {
+    return unread(`${cycle} under G93`);
   }
   const turning = modes.turning ?? 0;
   if (cycle === 'G84' && turning !== 1) {

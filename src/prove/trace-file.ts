@@ -19,6 +19,8 @@ export interface FileState {
   ended: boolean;
   /** Lines that the second reader could not hold. */
   alone: number;
+  /** Lines, 1-based, with parameters or expressions that were run. */
+  readonly reckoned: Set<number>;
   /** Lines that began with / and were passed over. */
   passedOver: number;
 }

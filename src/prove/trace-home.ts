@@ -8,6 +8,7 @@ import type { Here, MotionMode } from './modes.ts';
 import { feedRefused } from './trace-move.ts';
 import { sayAssumed } from './trace-assumed.ts';
 import { placeOf, placeRefused } from './trace-place.ts';
+import { lostRefused } from './trace-zero.ts';
 import { happen, makeMove, unread, type AxisName, type Refusal, type Run } from './trace-run.ts';
 
 const NAMES: readonly (readonly [number, AxisName])[] = [
@@ -19,7 +20,7 @@ const NAMES: readonly (readonly [number, AxisName])[] = [
 /** By way of the place that is named (in the program's frame), then home: the named axes, or all, by machine. */
 export function goHome(run: Run, block: Block, axes: number): Refusal | undefined {
   if (axes !== 0) {
-    const refused = placeRefused(run);
+    const refused = placeRefused(run) ?? lostRefused(run, axes);
     if (refused !== undefined) {
       return refused;
     }
@@ -63,9 +64,12 @@ export function moveInMachine(
   if (motion !== 'G0' && motion !== 'G1') {
     return unread('G53 needs X, Y or Z, and G0 or G1 on');
   }
-  const refused = placeRefused(run) ?? (motion === 'G1' ? feedRefused(run) : undefined);
+  const refused = placeRefused(run) ?? (motion === 'G1' ? feedRefused(run, block) : undefined);
   if (refused !== undefined) {
     return refused;
+  }
+  if (motion === 'G1' && run.modes.feedMode === 'inverse-time') {
+    return unread('G53 G1 under G93: how long the way is, and so its feed, is not known');
   }
   if (run.modes.distance === 'incremental') {
     return unread('G53 under G91: controllers differ in what it means');

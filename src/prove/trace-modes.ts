@@ -1,6 +1,6 @@
 /**
  * Modal G codes of a block: plane, unit, compensation, length offset, work offset, path, distance, cycle return, arc
- * centres, feed mode (Table 8, orders 2 and 11 to 18).
+ * centres (Table 8, orders 11 to 18).
  */
 import { BIT, has, valueOf, wholeOf, type Block } from './block.ts';
 import { G_GROUP, G_GROUPS } from './modes-codes.ts';
@@ -15,9 +15,6 @@ export function changeModes(run: Run, block: Block): Refusal | undefined {
     if (g[group]! >= 0) {
       run.setAt[group] = run.line;
     }
-  }
-  if ((g[G_GROUP.feedMode] ?? -1) >= 0) {
-    modes.feedMode = 'per-minute';
   }
   const plane = g[G_GROUP.plane] ?? -1;
   if (plane >= 0) {

@@ -2,17 +2,22 @@
  * G0 to G3: from the words of a block to a traced move. Frame: the program's; mm, mm/min, radians.
  */
 import { BIT, type Block } from './block.ts';
+import { feedAlong, inverseRefused } from './inverse-time.ts';
 import { spindleOf } from './modes.ts';
 import { sayAssumed } from './trace-assumed.ts';
 import { readArc, type ReadArc } from './trace-arc.ts';
 import { placeOf, placeRefused } from './trace-place.ts';
+import { lostRefused } from './trace-zero.ts';
 import { isLengthKnown, makeMove, remark, unread, type Refusal, type Run } from './trace-run.ts';
 import type { Here } from './modes.ts';
 
 /** What a cutting move needs beside its place. */
-export function feedRefused(run: Run): Refusal | undefined {
+export function feedRefused(run: Run, block: Block): Refusal | undefined {
   if (run.modes.feedMode === undefined) {
     return unread('a cutting move before G94 says that F is per minute');
+  }
+  if (run.modes.feedMode === 'inverse-time') {
+    return inverseRefused(run, block);
   }
   return run.modes.feed === undefined
     ? unread('a cutting move without any F in the unit that is on')
@@ -25,7 +30,10 @@ export function runMove(
   motion: 'G0' | 'G1' | 'G2' | 'G3',
   axes: number,
 ): Refusal | undefined {
-  const refused = placeRefused(run) ?? (motion === 'G0' ? undefined : feedRefused(run));
+  const refused =
+    placeRefused(run) ??
+    (run.lost === 0 ? undefined : lostRefused(run, axes)) ??
+    (motion === 'G0' ? undefined : feedRefused(run, block));
   if (refused !== undefined) {
     return refused;
   }
@@ -41,20 +49,28 @@ export function runMove(
   if (motion === 'G0') {
     makeMove(run, 'rapid', to, null);
   } else if (motion === 'G1') {
-    makeMove(run, 'line', to, run.modes.feed ?? null);
+    const feed = feedAlong(run, block, to);
+    if (typeof feed === 'object' && feed !== null) {
+      return feed;
+    }
+    makeMove(run, 'line', to, feed);
   } else {
     const arc = readArc(run, block, to, motion === 'G3' ? 1 : -1);
     if ('code' in arc) {
       return arc;
     }
-    makeArc(run, to, arc);
+    const feed = feedAlong(run, block, to, arc);
+    if (typeof feed === 'object' && feed !== null) {
+      return feed;
+    }
+    makeArc(run, to, arc, feed);
   }
   return undefined;
 }
 
-function makeArc(run: Run, to: Here, { centre, turn }: ReadArc): void {
+function makeArc(run: Run, to: Here, { centre, turn }: ReadArc, said: number | null): void {
   const { file, line, here, modes } = run;
-  const feed = arcFeed(run, to, { centre, turn });
+  const feed = arcFeed(run, to, { centre, turn }, said);
   const kind = 'arc';
   run.moves.push({
     file, line, kind, from: here, to, centre, turn, feed, cutter: modes.cutter, spindle: spindleOf(modes),
@@ -63,10 +79,10 @@ function makeArc(run: Run, to: Here, { centre, turn }: ReadArc): void {
 }
 
 /** Along the helix; where F holds along the circle below it, the helix is run faster by as much as it is longer. */
-function arcFeed(run: Run, to: Here, { centre, turn }: ReadArc): number | null {
+function arcFeed(run: Run, to: Here, { centre, turn }: ReadArc, feed: number | null): number | null {
   const { here, modes } = run;
-  const feed = modes.feed ?? null;
-  if (run.machine.words.path.helixFeedAlong === 'helix' || feed === null || here.z === to.z) {
+  const isAlong = run.machine.words.path.helixFeedAlong === 'helix' || modes.feedMode === 'inverse-time';
+  if (isAlong || feed === null || here.z === to.z) {
     return feed;
   }
   const circle = Math.abs(turn) * Math.hypot((to.x ?? 0) - centre.x, (to.y ?? 0) - centre.y);

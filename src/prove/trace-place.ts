@@ -36,10 +36,15 @@ export function placeOf(run: Run, block: Block, axes: number): Here {
   const unit = millimetresPer(modes.unit ?? 'mm');
   const isAbsolute = modes.distance === 'absolute';
   const { x, y, z } = here;
+  const { shift } = run;
   return {
-    x: given & BIT.X ? axisPlace(x, valueOf(block, 'X'), unit, isAbsolute) : x,
-    y: given & BIT.Y ? axisPlace(y, valueOf(block, 'Y'), unit, isAbsolute) : y,
-    z: !isLengthKnown(run) ? null : given & BIT.Z ? axisPlace(z, valueOf(block, 'Z'), unit, isAbsolute) : z,
+    x: given & BIT.X ? axisPlace(x, valueOf(block, 'X'), unit, isAbsolute, shift.x) : x,
+    y: given & BIT.Y ? axisPlace(y, valueOf(block, 'Y'), unit, isAbsolute, shift.y) : y,
+    z: !isLengthKnown(run)
+      ? null
+      : given & BIT.Z
+        ? axisPlace(z, valueOf(block, 'Z'), unit, isAbsolute, shift.z)
+        : z,
   };
 }
 
@@ -49,9 +54,15 @@ export function stepFrom(run: Run, from: number, step: number): number {
   return ((Math.round((from / unit) * STEPS) + Math.round((step / unit) * STEPS)) / STEPS) * unit;
 }
 
-function axisPlace(from: number | null, value: number, unit: number, isAbsolute: boolean): number | null {
+function axisPlace(
+  from: number | null,
+  value: number,
+  unit: number,
+  isAbsolute: boolean,
+  shift: number,
+): number | null {
   if (isAbsolute) {
-    return value * unit;
+    return value * unit + shift;
   }
   return from === null
     ? null

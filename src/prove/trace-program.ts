@@ -9,10 +9,13 @@
 import type { Machine } from '../machine/machine.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
 import type { Block } from './block.ts';
+import type { FormulaLine } from './formula-line.ts';
 import { codesOf, G_GROUPS, M_GROUP } from './modes-codes.ts';
 import { NOWHERE, powerOn, type FinalModes } from './modes.ts';
+import { noParameters } from './parameters.ts';
 import type { Finding } from './proof.ts';
 import { readLines, type ReadLine } from './read-lines.ts';
+import { blockOfFormula } from './run-formula.ts';
 import { modesAsked } from './trace-assumed.ts';
 import { runBlock } from './trace-block.ts';
 import { handsDone, readComments, readTitle, type ByHand } from './trace-comments.ts';
@@ -48,6 +51,8 @@ export interface Trace {
   readonly part: Part | undefined;
   /** Lines that the second reader could not hold, and lines that begin with / and were passed over. */
   readonly alone: number;
+  /** Lines with parameters or expressions that were run: the second reader knows neither. */
+  readonly reckoned: number;
   readonly passedOver: number;
   /** The line at which reading ended or stopped. */
   readonly lastRead: number;
@@ -63,7 +68,9 @@ export interface TraceStart {
 
 export function traceProgram(file: string, text: string, machine: Machine, start: TraceStart = {}): Trace {
   const run = openRun(file, machine, start);
-  const state: FileState = { blocks: 0, percents: 0, labelled: false, ended: false, alone: 0, passedOver: 0 };
+  const state: FileState = {
+    blocks: 0, percents: 0, labelled: false, ended: false, alone: 0, reckoned: new Set(), passedOver: 0,
+  }; // prettier-ignore
   const complete = runLines(run, readLines(text, machine, run.codes), start, state);
   countRemarks(run);
   const { moves, events, titles, paths, findings, modes } = run;
@@ -80,6 +87,7 @@ export function traceProgram(file: string, text: string, machine: Machine, start
     complete,
     part: run.part,
     alone: state.alone,
+    reckoned: state.reckoned.size,
     passedOver: state.passedOver,
     lastRead: run.line,
   };
@@ -96,7 +104,10 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
     line: 0,
     part: undefined,
     shift: NO_SHIFT,
+    keptShift: undefined,
+    lost: 0,
     cycle: undefined,
+    parameters: noParameters(),
     cycleMoves: 0,
     placed: false,
     setAt: Array.from({ length: G_GROUPS }, () => 0),
@@ -178,7 +189,7 @@ function runLine(
       readTitle(run, line.comments);
     }
   }
-  const { block } = line;
+  const block = line.formula === undefined ? line.block : reckoned(run, line.formula, state);
   if (typeof block !== 'object') {
     return block === undefined ? undefined : unread(block);
   }
@@ -199,6 +210,11 @@ function runLine(
   }
   state.ended = stop === 2 || stop === 30;
   return refused;
+}
+
+function reckoned(run: Run, formula: FormulaLine, state: FileState): Block | string {
+  state.reckoned.add(run.line);
+  return blockOfFormula(formula, run.codes, run.parameters);
 }
 
 /** Whether a line that begins with / is passed over, by the machine and its switch. */

@@ -8,6 +8,7 @@ import type { TracedMove } from '../motion/traced-move.ts';
 import type { CheckCode } from './check-codes.ts';
 import type { Codes } from './modes-codes.ts';
 import { spindleOf, type Here, type ModalState } from './modes.ts';
+import type { Parameters } from './parameters.ts';
 import type { Finding } from './proof.ts';
 import type { CycleSeries } from './trace-cycle.ts';
 
@@ -86,8 +87,13 @@ export interface Run {
   part: Part | undefined;
   /** Where the zero that the program counts from lies in its frame, mm: not at its zero once G92 has shifted it. */
   shift: Shift;
+  /** What G92.3 would bring back; undefined while this program has not said it. */
+  keptShift: Shift | undefined;
+  /** Axes, as bits of their letters, whose zero G10 has put where nobody knows. */
+  lost: number;
   /** The series of holes that is on. */
   cycle: CycleSeries | undefined;
+  readonly parameters: Parameters;
   /** Moves that cycles have made, at most. */
   cycleMoves: number;
   /** A place in the program's own frame has been named. */

@@ -1,11 +1,23 @@
 /**
- * Words that set without moving: F, S, T, cutter change, spindle, coolant, overrides, dwell (Table 8, orders 3 to 10).
+ * Words that set without moving: feed mode, F, S, T, cutter change, spindle, coolant, overrides, dwell (Table 8, orders 2 to 10).
  */
 import { BIT, has, valueOf, wholeOf, type Block, type Letter } from './block.ts';
 import { G_GROUP, M_GROUP } from './modes-codes.ts';
 import { spindleOf } from './modes.ts';
 import { lengthOf } from './trace-place.ts';
 import { happen, remark, unread, type Refusal, type Run } from './trace-run.ts';
+
+/** G93 and G94 (order 2): an F of the one is no F of the other. */
+export function changeFeedMode(run: Run, block: Block): undefined {
+  const code = block.g[G_GROUP.feedMode] ?? -1;
+  if (code >= 0) {
+    const mode = code === 930 ? 'inverse-time' : 'per-minute';
+    if (mode !== run.modes.feedMode && run.modes.feedMode !== undefined) {
+      run.modes.feed = undefined;
+    }
+    run.modes.feedMode = mode;
+  }
+}
 
 /** F in the unit that is on; it takes effect before a unit word of its own line would, so both together are refused. */
 export function setFeed(run: Run, block: Block, dwellBit: number): Refusal | undefined {
@@ -21,7 +33,8 @@ export function setFeed(run: Run, block: Block, dwellBit: number): Refusal | und
   if (value <= 0) {
     return unread(`F${String(value)}: a feed must be more than zero`);
   }
-  run.modes.feed = lengthOf(run, value);
+  // Under G93 it is taken by the move of its own line, or by nothing.
+  run.modes.feed = run.modes.feedMode === 'inverse-time' ? undefined : lengthOf(run, value);
   return undefined;
 }
 

@@ -6,5 +6,12 @@ export function reportMill(): Machine {
   const bench = post('bench-mill');
   const { words } = bench;
   const cycles = ['G81', 'G82', 'G83', 'G84', 'G85', 'G86', 'G88', 'G89'] as const;
-  return { ...bench, words: { ...words, holes: { ...words.holes, cycles } } };
+  return {
+    ...bench,
+    words: {
+      ...words,
+      holes: { ...words.holes, cycles },
+      language: { parameters: 'numbered', setZero: ['G10', 'G92'], inverseTime: true },
+    },
+  };
 }
