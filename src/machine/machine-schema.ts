@@ -247,6 +247,8 @@ const languageWords = () =>
     parameters: oneOf('none', 'numbered', 'numbered-and-named').default('none'),
     'set-zero': z.array(oneOf('G10', 'G92'), { error: 'a list of G10, G92; [] for none' }).default([]),
     'inverse-time': yesNo().default(false),
+    subprograms: oneOf('none', 'M98', 'O-words').default('none'),
+    loops: oneOf('none', 'O-words').default('none'),
   });
 
 /** The one group that may be absent; `rotary: none` takes away what the file it is `like` has. */

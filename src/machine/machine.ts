@@ -208,6 +208,10 @@ export interface LanguageWords {
   readonly setZero: readonly ('G10' | 'G92')[];
   /** G93: F says how long a move takes. */
   readonly inverseTime: boolean;
+  /** Called by M98 P, from O and its number to M99, in the same file; or `o100 sub` to `o100 endsub`, called by `o100 call`. */
+  readonly subprograms: 'none' | 'M98' | 'O-words';
+  /** `o100 while`, `o100 repeat`, `o100 if` and their like. */
+  readonly loops: 'none' | 'O-words';
 }
 
 export interface Limits {

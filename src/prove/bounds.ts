@@ -7,3 +7,15 @@ export const MOST_PECKS = 10_000;
 /** Moves that all cycles of a program make together.
  *  Why: a move takes some 200 bytes; 100 MB of them is what a desk computer gives without noticing. */
 export const MOST_CYCLE_MOVES = 500_000;
+
+/** Lines that loops and subprograms may run.
+ *  Why: a wheel of 400 teeth with 50 laps of 40 lines a tooth has 800,000; that many moves take 200 MB. */
+export const MOST_RUN = 1_000_000;
+
+/** What one line costs of them, in characters; a longer one costs what it is longer.
+ *  Why: a line of a common program has some 30; long lines take their time in proportion. */
+export const LINE_COST = 32;
+
+/** How deep subprograms may call each other.
+ *  Why: controllers hold 4 to 10 (from memory); what goes deeper stops on the machine. */
+export const MOST_DEPTH = 10;

@@ -11,7 +11,8 @@ export const CHECK_CODES = {
   },
   'prove.readers-disagree': {
     guards: 'a line in which two readers of different making find different words',
-    blind: 'what both readers take wrongly; % lines, which the second one cannot hold',
+    blind:
+      'what both readers take wrongly; % lines and lines with parameters, loops or calls, which the second one cannot hold',
   },
   'prove.arc': {
     guards: 'an arc that this controller would refuse or run otherwise than written',

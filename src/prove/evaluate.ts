@@ -3,6 +3,7 @@
  * FIX down and FUP up. What the report leaves open (MOD of negative numbers, ROUND of exactly a half) is not guessed.
  * Out: a finite number, never -0; or why there is none.
  */
+import { WHOLE_NUMBER } from '../base/tolerances.ts';
 import { degrees, radians } from '../base/units.ts';
 import type { Binary, Expression, Unary } from './expression.ts';
 import { parameterNumber, parameterValue, type ParameterKey, type Parameters } from './parameters.ts';
@@ -113,8 +114,17 @@ function binary(op: Binary, a: number, b: number): number | string {
     case '-':
       return a - b;
     default:
-      return truth(op, a, b) ? 1 : 0;
+      return isCompared(op) && a !== b && Math.abs(a - b) <= WHOLE_NUMBER
+        ? `${String(a)} ${op} ${String(b)}: so near to each other that controllers differ`
+        : truth(op, a, b)
+          ? 1
+          : 0;
   }
+}
+
+/** Some take numbers that differ by 0.0001 for the same (from memory). */
+function isCompared(op: Binary): boolean {
+  return op !== 'OR' && op !== 'XOR' && op !== 'AND';
 }
 
 function truth(op: Binary, a: number, b: number): boolean {

@@ -6,6 +6,7 @@
  * Out : what stands on the line, or the first thing that does not belong there, with its column.
  */
 import { faultAt, readParameter, readValue, takes, type Cursor, type Expression } from './expression.ts';
+import { readFlow, type FlowForm, type FlowLine } from './flow-words.ts';
 import type { CommentForm } from './tokenize.ts';
 
 export interface FormulaWord {
@@ -29,12 +30,14 @@ export interface FormulaLine {
   readonly comments: readonly string[];
   readonly words: readonly FormulaWord[];
   readonly settings: readonly Setting[];
+  /** Where it says which line is run next; then it holds nothing else. */
+  readonly flow: FlowLine | undefined;
 }
 
 export interface FormulaForm {
   readonly comments: CommentForm;
   readonly named: boolean;
-  readonly comparisons: boolean;
+  readonly flow: FlowForm;
 }
 
 export type FormulaReading =
@@ -56,8 +59,8 @@ export function readFormula(text: string, form: FormulaForm): FormulaReading {
   if (fault !== undefined) {
     return { ok: false, ...fault };
   }
-  const cursor: Cursor = { text: signs.toUpperCase(), at: 0, fault: undefined, named: form.named, comparisons: form.comparisons }; // prettier-ignore
-  const line = readItems(cursor, columns);
+  const cursor: Cursor = { text: signs.toUpperCase(), at: 0, fault: undefined, named: form.named, comparisons: form.flow.loops || form.flow.subprograms }; // prettier-ignore
+  const line = readItems(cursor, columns, form.flow);
   return cursor.fault === undefined
     ? { ok: true, line: { ...line, comments, small: /[a-z]/.test(signs) } }
     : { ok: false, fault: cursor.fault, column: columns[cursor.at] ?? text.length + 1 };
@@ -105,9 +108,10 @@ function compact(text: string, form: CommentForm): Compact {
 
 type Items = Omit<FormulaLine, 'comments' | 'small'>;
 
-function readItems(cursor: Cursor, columns: readonly number[]): Items {
+function readItems(cursor: Cursor, columns: readonly number[], form: FlowForm): Items {
   const words: FormulaWord[] = [];
   const settings: Setting[] = [];
+  let flow: FlowLine | undefined;
   const skipped = takes(cursor, '/');
   const label = /^N(\d+)(?![\d.])/.exec(cursor.text.slice(cursor.at));
   cursor.at += label?.[0].length ?? 0;
@@ -116,7 +120,11 @@ function readItems(cursor: Cursor, columns: readonly number[]): Items {
     if (takes(cursor, COMMENT)) {
       continue;
     }
-    if (takes(cursor, '#')) {
+    if (flow !== undefined) {
+      faultAt(cursor, 'words behind those that say which line is run next');
+    } else if ((form.loops || form.subprograms) && isFlow(cursor, words, settings)) {
+      flow = readFlow(cursor, form);
+    } else if (takes(cursor, '#')) {
       readSetting(cursor, column, settings);
     } else {
       readWord(cursor, column, words);
@@ -129,7 +137,12 @@ function readItems(cursor: Cursor, columns: readonly number[]): Items {
     numberDigits: digits.length,
     words,
     settings,
+    flow,
   };
+}
+
+function isFlow({ text, at }: Cursor, words: readonly FormulaWord[], settings: readonly Setting[]): boolean {
+  return words.length === 0 && settings.length === 0 && /^O(?:\d+|<[^>]*>)[A-Z]/.test(text.slice(at));
 }
 
 function readSetting(cursor: Cursor, column: number, settings: Setting[]): void {

@@ -23,8 +23,8 @@ export const G_GROUP = {
 } as const;
 export const G_GROUPS = 12;
 
-export const M_GROUP = { stop: 0, change: 1, spindle: 2, coolant: 3, overrides: 4 } as const;
-export const M_GROUPS = 5;
+export const M_GROUP = { stop: 0, change: 1, spindle: 2, coolant: 3, overrides: 4, call: 5 } as const;
+export const M_GROUPS = 6;
 
 export interface Codes {
   /** By ten times the G code: group + 1, or 0 where this machine has no such code. */
@@ -139,7 +139,7 @@ function pathCodes(words: readonly string[]): readonly number[] {
 }
 
 function mCodes(machine: Machine): Uint8Array {
-  const { cutters, spindle } = machine.words;
+  const { cutters, spindle, language } = machine.words;
   const m = new Uint8Array(100);
   for (const code of [0, 1, 2, 30]) {
     m[code] = M_GROUP.stop + 1;
@@ -149,6 +149,9 @@ function mCodes(machine: Machine): Uint8Array {
   }
   for (const code of spindle.run === 'program' ? [3, 4, 5] : []) {
     m[code] = M_GROUP.spindle + 1;
+  }
+  for (const code of language.subprograms === 'M98' ? [98, 99] : []) {
+    m[code] = M_GROUP.call + 1;
   }
   for (const code of [7, 8, 9]) {
     m[code] = M_GROUP.coolant + 1;

@@ -52,8 +52,11 @@ function notReadOf(traces: readonly Trace[]): string[] {
       : []),
     ...(reckoned > 0
       ? [
-          `${String(reckoned)} line${reckoned === 1 ? '' : 's'} with parameters or expressions: reckoned by one reader alone, the second one knows neither`,
+          `${String(reckoned)} line${reckoned === 1 ? '' : 's'} with parameters, expressions or words of loops and calls: read by one reader alone, the second one knows none of them`,
         ]
+      : []),
+    ...(traces.some(({ jumps }) => jumps)
+      ? ['lines to which no loop, branch or call of the program came: they were not run, and not read']
       : []),
     ...(passedOver > 0
       ? [

@@ -84,7 +84,7 @@ function readFirst(text: string, machine: Machine, codes: Codes, waiting: Waitin
   const words = (waiting.words[waiting.count] ??= emptyLineWords());
   tokenizeLine(text, 0, text.length, file.commentForm, words);
   const { count, number, numberDigits, skipped, percent, small, comments, fault } = words;
-  if (fault !== undefined && /[#[]/.test(text)) {
+  if (fault !== undefined && (/[#[]/.test(text) || /^[ \t/nN\d]*[oO]/.test(text))) {
     return reckonedLine(text, machine, fault, words.faultColumn);
   }
   const isWhole = fault === undefined && percent === undefined;
@@ -118,18 +118,24 @@ function readFirst(text: string, machine: Machine, codes: Codes, waiting: Waitin
   return line;
 }
 
-/** A line that is no row of plain words, and holds a # or a [. The second reader knows nothing of either. */
+/** A line that is no row of plain words, and holds a # or a [, or begins with O. The second reader knows nothing of either. */
 function reckonedLine(text: string, { words }: Machine, plainFault: string, column: number): ReadLine {
-  const { parameters } = words.language;
-  const reading =
-    parameters === 'none'
-      ? ({ ok: false, fault: withoutComments(text) ? NO_PARAMETERS : plainFault, column } as const)
-      : readFormula(text, {
-          comments: words.file.commentForm,
-          named: parameters === 'numbered-and-named',
-          comparisons: false,
-        });
+  const { parameters, subprograms, loops } = words.language;
+  const flow = { subprograms: subprograms === 'O-words', loops: loops === 'O-words' };
+  const hasNone = parameters === 'none' && (holds(text, /#/) || (!flow.subprograms && !flow.loops));
+  const reading = hasNone
+    ? ({ ok: false, fault: holds(text, /[#[]/) ? NO_PARAMETERS : plainFault, column } as const)
+    : readFormula(text, {
+        comments: words.file.commentForm,
+        named: parameters === 'numbered-and-named',
+        flow,
+      });
   const line = reading.ok ? reading.line : undefined;
+  const fault = reading.ok
+    ? parameters === 'none' && line?.flow === undefined
+      ? NO_PARAMETERS
+      : undefined
+    : `column ${String(reading.column)}: ${reading.fault}`;
   return {
     text,
     count: line === undefined ? 0 : line.words.length + line.settings.length,
@@ -139,7 +145,7 @@ function reckonedLine(text: string, { words }: Machine, plainFault: string, colu
     percent: undefined,
     small: line?.small ?? false,
     comments: line?.comments ?? NO_COMMENTS,
-    fault: reading.ok ? undefined : `column ${String(reading.column)}: ${reading.fault}`,
+    fault,
     differs: undefined,
     block: undefined,
     formula: line,
@@ -149,9 +155,9 @@ function reckonedLine(text: string, { words }: Machine, plainFault: string, colu
 
 const NO_PARAMETERS = 'parameters and expressions; by its machine file this controller reads none';
 
-/** Whether it holds # or [ as more than text; a comment that is not closed is text to its end. */
-function withoutComments(text: string): boolean {
-  return /[#[]/.test(text.replace(/\([^)]*(?:\)|$)|;.*/g, ''));
+/** Whether it holds such a sign as more than text; a comment that is not closed is text to its end. */
+function holds(text: string, sign: RegExp): boolean {
+  return sign.test(text.replace(/\([^)]*(?:\)|$)|;.*/g, ''));
 }
 
 /** Together, where all agree; one by one where that must be found, or where the second reader takes no lines together. */

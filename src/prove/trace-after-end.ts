@@ -2,7 +2,7 @@
  * Words behind the program's end. A controller that is sent its program line by line runs them; one that holds the file
  * does not. What moves there, or cannot be read, is refused; what only sets something is warned of.
  */
-import { AXES, type Block } from './block.ts';
+import { AXES, BIT, type Block } from './block.ts';
 import { G_GROUP, M_GROUP } from './modes-codes.ts';
 import type { ReadLine } from './read-lines.ts';
 import type { Run } from './trace-run.ts';
@@ -14,10 +14,18 @@ export function sayWhatFollows(run: Run, lines: readonly ReadLine[], wasPercent:
   let count = 0;
   // Behind a closing % no controller that wants one reads on (NISTIR 6556 §3.1).
   let isClosed = wasPercent;
+  // From O and its number to M99: run where it is called, and read there.
+  const hasSubs = run.machine.words.language.subprograms === 'M98';
+  let isSub = false;
   for (let k = run.line; k < lines.length; k++) {
     const { fault, block, formula, percent } = lines[k]!;
     isClosed ||= percent !== undefined;
     if (fault === undefined && block === undefined && formula === undefined) {
+      continue;
+    }
+    isSub ||= hasSubs && typeof block === 'object' && (block.given & BIT.O) !== 0;
+    if (isSub) {
+      isSub = !(typeof block === 'object' && block.m[M_GROUP.call] === 99);
       continue;
     }
     count += 1;

@@ -6,6 +6,7 @@
  */
 import { BIT, valueOf, wholeOf, type Block } from './block.ts';
 import type { ReadLine } from './read-lines.ts';
+import type { Flow } from './run-flow.ts';
 import { sayWhatFollows } from './trace-after-end.ts';
 import { happen, remark, unread, type Refusal, type Run } from './trace-run.ts';
 
@@ -19,8 +20,11 @@ export interface FileState {
   ended: boolean;
   /** Lines that the second reader could not hold. */
   alone: number;
-  /** Lines, 1-based, with parameters or expressions that were run. */
+  /** Lines, 1-based, with parameters, expressions or flow words that were run. */
   readonly reckoned: Set<number>;
+  /** The line that is run next, counted from 0; -1 for the one that follows. */
+  next: number;
+  readonly flow: Flow;
   /** Lines that began with / and were passed over. */
   passedOver: number;
 }
@@ -103,6 +107,9 @@ export function readPercent(run: Run, name: string, state: FileState): Refusal |
 export function readLabel(run: Run, line: ReadLine, block: Block, state: FileState): Refusal | boolean {
   if ((block.given & BIT.O) === 0) {
     return false;
+  }
+  if (run.machine.words.language.subprograms === 'M98' && state.blocks > 0) {
+    return unread('the program runs into a subprogram (O) that it has not called');
   }
   const { programLabel, labelLowest, labelHighest } = run.machine.words.file;
   if (programLabel !== 'o-number') {

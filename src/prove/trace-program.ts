@@ -8,7 +8,7 @@
  */
 import type { Machine } from '../machine/machine.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
-import type { Block } from './block.ts';
+import { BIT, has, valueOf, wholeOf, type Block } from './block.ts';
 import type { FormulaLine } from './formula-line.ts';
 import { codesOf, G_GROUPS, M_GROUP } from './modes-codes.ts';
 import { NOWHERE, powerOn, type FinalModes } from './modes.ts';
@@ -16,6 +16,7 @@ import { noParameters } from './parameters.ts';
 import type { Finding } from './proof.ts';
 import { readLines, type ReadLine } from './read-lines.ts';
 import { blockOfFormula } from './run-formula.ts';
+import { callNumber, endNumber, openFlow, runFlow } from './run-flow.ts';
 import { modesAsked } from './trace-assumed.ts';
 import { runBlock } from './trace-block.ts';
 import { handsDone, readComments, readTitle, type ByHand } from './trace-comments.ts';
@@ -51,8 +52,10 @@ export interface Trace {
   readonly part: Part | undefined;
   /** Lines that the second reader could not hold, and lines that begin with / and were passed over. */
   readonly alone: number;
-  /** Lines with parameters or expressions that were run: the second reader knows neither. */
+  /** Lines with parameters, expressions or flow words that were run: the second reader knows none of them. */
   readonly reckoned: number;
+  /** Lines were not run one after the other. */
+  readonly jumps: boolean;
   readonly passedOver: number;
   /** The line at which reading ended or stopped. */
   readonly lastRead: number;
@@ -68,10 +71,12 @@ export interface TraceStart {
 
 export function traceProgram(file: string, text: string, machine: Machine, start: TraceStart = {}): Trace {
   const run = openRun(file, machine, start);
+  const lines = readLines(text, machine, run.codes);
   const state: FileState = {
-    blocks: 0, percents: 0, labelled: false, ended: false, alone: 0, reckoned: new Set(), passedOver: 0,
+    blocks: 0, percents: 0, labelled: false, ended: false, alone: 0, passedOver: 0,
+    reckoned: new Set(), next: -1, flow: openFlow(lines),
   }; // prettier-ignore
-  const complete = runLines(run, readLines(text, machine, run.codes), start, state);
+  const complete = runLines(run, lines, start, state);
   countRemarks(run);
   const { moves, events, titles, paths, findings, modes } = run;
   return {
@@ -88,6 +93,7 @@ export function traceProgram(file: string, text: string, machine: Machine, start
     part: run.part,
     alone: state.alone,
     reckoned: state.reckoned.size,
+    jumps: state.flow.costs !== undefined,
     passedOver: state.passedOver,
     lastRead: run.line,
   };
@@ -125,7 +131,8 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
 /** Runs line after line until the program ends or a line is refused; says whether it came to the end. */
 function runLines(run: Run, lines: readonly ReadLine[], start: TraceStart, state: FileState): boolean {
   const byHand: ByHand = { cutter: undefined, speed: undefined };
-  for (let k = 0; k < lines.length && !state.ended; k++) {
+  let k = 0;
+  while (k < lines.length && !state.ended) {
     const line = lines[k]!;
     run.line = k + 1;
     const refused = line.onlyMoves
@@ -135,6 +142,8 @@ function runLines(run: Run, lines: readonly ReadLine[], start: TraceStart, state
       run.findings.push({ ...refused, severity: 'error', file: run.file, line: run.line });
       return false;
     }
+    k = state.next < 0 ? k + 1 : state.next;
+    state.next = -1;
   }
   checkEnd(run, state, lines);
   return true;
@@ -189,6 +198,9 @@ function runLine(
       readTitle(run, line.comments);
     }
   }
+  if (line.formula?.flow !== undefined) {
+    return goOn(state, runFlow(run, state.flow, run.line - 1, line.formula.flow), run);
+  }
   const block = line.formula === undefined ? line.block : reckoned(run, line.formula, state);
   if (typeof block !== 'object') {
     return block === undefined ? undefined : unread(block);
@@ -198,6 +210,9 @@ function runLine(
     return label === true ? undefined : label;
   }
   state.blocks += 1;
+  if ((block.m[M_GROUP.call] ?? -1) >= 0) {
+    return callOrEnd(run, block, state);
+  }
   const moves = run.moves.length;
   const refused = runBlock(run, block);
   if (run.moves.length > moves) {
@@ -210,6 +225,38 @@ function runLine(
   }
   state.ended = stop === 2 || stop === 30;
   return refused;
+}
+
+/** Notes which line is run next. */
+function goOn(state: FileState, next: number | Refusal, run?: Run): Refusal | undefined {
+  if (run !== undefined) {
+    state.blocks += 1;
+    state.reckoned.add(run.line);
+  }
+  if (typeof next !== 'number') {
+    return next;
+  }
+  state.next = next;
+  return undefined;
+}
+
+/** M98 and M99: nothing may stand beside them, for controllers differ in whether it is run before or after. */
+function callOrEnd(run: Run, block: Block, state: FileState): Refusal | undefined {
+  const isCall = block.m[M_GROUP.call] === 98;
+  const others = block.given & ~(isCall ? BIT.P | BIT.L : 0);
+  const isAlone = block.g.every((code) => code < 0) && block.m.filter((code) => code >= 0).length === 1;
+  if (others !== 0 || !isAlone) {
+    return unread(`words beside M${isCall ? '98' : '99'}: it is read alone`);
+  }
+  if (!isCall) {
+    return goOn(state, endNumber(state.flow, run.line - 1));
+  }
+  const number = has(block, BIT.P) ? wholeOf(valueOf(block, 'P')) : undefined;
+  const times = has(block, BIT.L) ? wholeOf(valueOf(block, 'L')) : 1;
+  if (number === undefined || times === undefined || times < 1) {
+    return unread('M98 wants P with the number of a subprogram, and L, if it stands there, with how often');
+  }
+  return goOn(state, callNumber(state.flow, run.line - 1, number, times));
 }
 
 function reckoned(run: Run, formula: FormulaLine, state: FileState): Block | string {

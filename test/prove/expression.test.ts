@@ -149,7 +149,7 @@ it('says how many lines one reader alone has read', () => {
   const trace = traceLines({ machine, lines: ['#1=2', 'G0 X#1', 'Y1'] });
   expect(trace.reckoned).toBe(2);
   const said = notChecked({ input: { programs: [], machine, setup: {} } } as never, [trace]).join('\n');
-  expect(said).toMatch(/2 lines with parameters or expressions/);
+  expect(said).toMatch(/2 lines with parameters, expressions/);
 });
 
 it('warns of words behind the end that would be reckoned', () => {

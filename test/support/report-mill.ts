@@ -11,7 +11,29 @@ export function reportMill(): Machine {
     words: {
       ...words,
       holes: { ...words.holes, cycles },
-      language: { parameters: 'numbered', setZero: ['G10', 'G92'], inverseTime: true },
+      language: {
+        parameters: 'numbered',
+        setZero: ['G10', 'G92'],
+        inverseTime: true,
+        subprograms: 'none',
+        loops: 'none',
+      },
     },
   };
+}
+
+/** The same with loops and subprograms by O, comparisons and names. */
+export function loopingMill(): Machine {
+  return spoken({ parameters: 'numbered-and-named', subprograms: 'O-words', loops: 'O-words' });
+}
+
+/** The same with subprograms by M98, and nothing of O-words. */
+export function callingMill(): Machine {
+  return spoken({ subprograms: 'M98' });
+}
+
+function spoken(more: Partial<Machine['words']['language']>): Machine {
+  const mill = reportMill();
+  const words = { ...mill.words, file: { ...mill.words.file, programLabel: 'none' } } as const;
+  return { ...mill, words: { ...words, language: { ...words.language, ...more } } };
 }
