@@ -4,9 +4,13 @@
  *  Why: a hole 100 mm deep in pecks of 0.05 mm has 2000; with five repeats that is the most anybody drills. */
 export const MOST_PECKS = 10_000;
 
-/** Moves that all cycles of a program make together.
+/** Moves that all cycles and all chords of arcs outside the XY plane make together.
  *  Why: a move takes some 200 bytes; 100 MB of them is what a desk computer gives without noticing. */
-export const MOST_CYCLE_MOVES = 500_000;
+export const MOST_MADE = 500_000;
+
+/** Chords of one arc outside the XY plane.
+ *  Why: a whole circle of radius 2 m has 9,935; larger ones no machine of these has room for. */
+export const MOST_CHORDS = 10_000;
 
 /** Lines that loops and subprograms may run.
  *  Why: a wheel of 400 teeth with 50 laps of 40 lines a tooth has 800,000; that many moves take 200 MB. */

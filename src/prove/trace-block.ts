@@ -113,7 +113,7 @@ function leftOver(
     used |= axes;
   }
   if (motion === 'G2' || motion === 'G3') {
-    used |= BIT.I | BIT.J | BIT.R | (run.modes.plane === 'XY' ? 0 : BIT.K);
+    used |= BIT.R | centreLetters(block, run);
   }
   if (block.g[G_GROUP.other] === SET_ZERO) {
     used |= BIT.L | BIT.P;
@@ -129,6 +129,14 @@ function leftOver(
   }
   const left = block.given & ~used;
   return left === 0 ? undefined : unread(`nothing on the line uses ${lettersOf(left).split('').join(', ')}`);
+}
+
+/** I J K that count in the plane of the block; before any plane is known the arc itself is refused. */
+function centreLetters(block: Block, run: Run): number {
+  const code = block.g[G_GROUP.plane] ?? -1;
+  const isXZ = code === 180 || (code < 0 && run.modes.plane === 'XZ');
+  const isYZ = code === 190 || (code < 0 && run.modes.plane === 'YZ');
+  return isXZ ? BIT.I | BIT.K : isYZ ? BIT.J | BIT.K : BIT.I | BIT.J;
 }
 
 function moveAs(

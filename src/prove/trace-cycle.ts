@@ -8,7 +8,7 @@
  *       height: under G98 the height before, or R where that is higher; under G99 R.
  */
 import { BIT, has, valueOf, wholeOf, type Block } from './block.ts';
-import { MOST_CYCLE_MOVES, MOST_PECKS } from './bounds.ts';
+import { MOST_MADE, MOST_PECKS } from './bounds.ts';
 import type { CycleMode, Here } from './modes.ts';
 import { sayAssumed } from './trace-assumed.ts';
 import { drill, lettersOfCycle, peckCount, type Hole } from './trace-hole.ts';
@@ -144,10 +144,10 @@ function boundRefused(run: Run, hole: Hole, repeats: number): Refusal | undefine
       `${hole.cycle} goes down ${String(Math.min(pecks, Number.MAX_SAFE_INTEGER))} times; ${String(MOST_PECKS)} are followed`,
     );
   }
-  run.cycleMoves += 4 * pecks;
-  if (run.cycleMoves > MOST_CYCLE_MOVES) {
+  run.made += 4 * pecks;
+  if (run.made > MOST_MADE) {
     return unread(
-      `the cycles up to here make more than the ${String(MOST_CYCLE_MOVES)} moves that are followed`,
+      `cycles and chords up to here make more than the ${String(MOST_MADE)} moves that are followed`,
     );
   }
   return hole.cycle === 'G88' && repeats > 1

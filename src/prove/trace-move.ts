@@ -6,6 +6,7 @@ import { feedAlong, inverseRefused } from './inverse-time.ts';
 import { spindleOf } from './modes.ts';
 import { sayAssumed } from './trace-assumed.ts';
 import { readArc, type ReadArc } from './trace-arc.ts';
+import { runPlaneArc } from './trace-plane-arc.ts';
 import { placeOf, placeRefused } from './trace-place.ts';
 import { lostRefused } from './trace-zero.ts';
 import { isLengthKnown, makeMove, remark, unread, type Refusal, type Run } from './trace-run.ts';
@@ -54,6 +55,8 @@ export function runMove(
       return feed;
     }
     makeMove(run, 'line', to, feed);
+  } else if (run.modes.plane === 'XZ' || run.modes.plane === 'YZ') {
+    return runPlaneArc(run, block, to, motion === 'G3' ? 1 : -1, run.modes.plane);
   } else {
     const arc = readArc(run, block, to, motion === 'G3' ? 1 : -1);
     if ('code' in arc) {
@@ -70,7 +73,7 @@ export function runMove(
 
 function makeArc(run: Run, to: Here, { centre, turn }: ReadArc, said: number | null): void {
   const { file, line, here, modes } = run;
-  const feed = arcFeed(run, to, { centre, turn }, said);
+  const feed = helixFeed(run, to, { centre, turn }, said);
   const kind = 'arc';
   run.moves.push({
     file, line, kind, from: here, to, centre, turn, feed, cutter: modes.cutter, spindle: spindleOf(modes),
@@ -79,7 +82,7 @@ function makeArc(run: Run, to: Here, { centre, turn }: ReadArc, said: number | n
 }
 
 /** Along the helix; where F holds along the circle below it, the helix is run faster by as much as it is longer. */
-function arcFeed(run: Run, to: Here, { centre, turn }: ReadArc, feed: number | null): number | null {
+export function helixFeed(run: Run, to: Here, { centre, turn }: ReadArc, feed: number | null): number | null {
   const { here, modes } = run;
   const isAlong = run.machine.words.path.helixFeedAlong === 'helix' || modes.feedMode === 'inverse-time';
   if (isAlong || feed === null || here.z === to.z) {

@@ -114,7 +114,7 @@ function openRun(file: string, machine: Machine, start: TraceStart): Run {
     lost: 0,
     cycle: undefined,
     parameters: noParameters(),
-    cycleMoves: 0,
+    made: 0,
     placed: false,
     setAt: Array.from({ length: G_GROUPS }, () => 0),
     unasked: modesAsked(machine, codes),

@@ -94,8 +94,8 @@ export interface Run {
   /** The series of holes that is on. */
   cycle: CycleSeries | undefined;
   readonly parameters: Parameters;
-  /** Moves that cycles have made, at most. */
-  cycleMoves: number;
+  /** Moves that cycles and chords have made, at most. */
+  made: number;
   /** A place in the program's own frame has been named. */
   placed: boolean;
   /** By modal group of G codes: the line that last set it, 1-based; 0 where none has. */

@@ -1,6 +1,6 @@
 /** Drilling cycles beside those of the table of cases. The order of G84 to G89 is NISTIR 6556 §3.5.16.5 to .9, by memory. */
 import { describe, expect, it } from 'vitest';
-import { MOST_CYCLE_MOVES, MOST_PECKS } from '../../src/prove/bounds.ts';
+import { MOST_MADE, MOST_PECKS } from '../../src/prove/bounds.ts';
 import { movesOf, post, traceLines } from '../support/bench-program.ts';
 import { expectStop } from '../support/case-row.ts';
 import { reportMill } from '../support/report-mill.ts';
@@ -82,7 +82,7 @@ describe('cycles that are not run', () => {
     const line = `G83 X0 Z-3 R2 Q${String(5 / pecks)}`;
     const trace = traceLines({ machine, lines: ['G98', ...Array.from({ length: 100 }, () => line)] });
     expect(trace.complete).toBe(false);
-    expect(trace.moves.length).toBeLessThanOrEqual(MOST_CYCLE_MOVES);
+    expect(trace.moves.length).toBeLessThanOrEqual(MOST_MADE);
   });
 
   it('on a machine that has none [the file of the desk mill]', () => {

@@ -25,7 +25,8 @@ export const ARCS: readonly CaseRow[] = [
   { n: 79, ref: '§3.5.3.1', code: 'prove.arc', wrong: ['G2 X0 Y0 R5'] },
   { n: 80, ref: 'published manual of an industrial controller', code: 'prove.arc', wrong: ['G2 X10 Y0 R6 I5'] },
   { n: 81, ref: 'from memory of the report', wrong: ['G2 X10 Y0 I5 K1'] },
-  { n: 82, ref: '§3.5.3', beyond: 'arcs outside the XY plane are not followed', before: ['G18'], wrong: ['G2 X1 Z1 I1', 'G3 X1 Z1 R1'] },
+  { n: 82, ref: '§3.5.3', before: ['G18'], wrong: ['G2 X1 Z1 J1', 'G2 X1 Y1 I1 J1'] },
+  { n: 82, ref: '§3.5.3.2, none of the plane', code: 'prove.arc', before: ['G18'], wrong: ['G2 Y1 R5', 'G2 Y1 I1'] },
   // 83 to 85 bind the writer; what the reader takes of the same words.
   { n: 83, ref: 'an end that rounds to the start is a whole circle to a controller', code: 'prove.arc', wrong: ['G2 X0.000000001 Y0 I5'] },
   { n: 84, ref: '§3.5.3.2, by rounded words', code: 'prove.arc', at: 'X0.707 Y0.707 Z0', wrong: ['G3 X-0.707 Y0.71 I-0.707 J-0.707'] },
