@@ -19,7 +19,8 @@ interface Reach {
   high: number;
 }
 
-export function extentsOf(moves: readonly TracedMove[]): Extents {
+/** `below`: only of moves that go lower than this; from an unknown height a program only rises. */
+export function extentsOf(moves: readonly TracedMove[], below = Infinity): Extents {
   const reach: Reach = {
     left: Infinity,
     right: -Infinity,
@@ -30,6 +31,9 @@ export function extentsOf(moves: readonly TracedMove[]): Extents {
   };
   let stood: TracedMove['to'] | undefined;
   for (const move of moves) {
+    if (below !== Infinity && !goesBelow(move, below)) {
+      continue;
+    }
     if (move.from !== stood) {
       takePlace(reach, move.from);
     }
@@ -45,6 +49,10 @@ export function extentsOf(moves: readonly TracedMove[]): Extents {
     y: range(reach.front, reach.back),
     z: range(reach.low, reach.high),
   };
+}
+
+function goesBelow({ from, to }: TracedMove, z: number): boolean {
+  return (to.z !== null && to.z < z) || (from.z !== null && from.z < z);
 }
 
 function takePlace(reach: Reach, { x, y, z }: TracedMove['to']): void {

@@ -21,14 +21,10 @@ export function keepClear({ proof, programs, job, machine }: SheetFacts): KeepCl
   }
   const used = new Set(programs.flatMap(({ cutters }) => cutters));
   const cutters = job.setup.cutters.filter(({ number }) => used.has(number));
-  // From an unknown place a program only rises.
-  const low = proof.moves.filter(
-    ({ from, to }) => Math.min(from.z ?? Infinity, to.z ?? Infinity) < job.setup.clearZ,
-  );
-  if (cutters.length === 0 || low.length === 0) {
+  const { x, y, z } = extentsOf(proof.moves, job.setup.clearZ);
+  if (cutters.length === 0 || x[0] === x[1]) {
     return undefined;
   }
-  const { x, y, z } = extentsOf(low);
   const beside = Math.max(...cutters.map(({ diameter, shank }) => Math.max(diameter, shank))) / 2;
   return {
     x: [x[0] - beside, x[1] + beside],
