@@ -21,6 +21,7 @@ export function describeMachine(machine: Machine): readonly string[] {
     ['path', pathOf(machine.words)],
     ['rotary', rotaryOf(machine.words)],
     ['end', [...machine.words.end.restore, machine.words.end.end].join(' ')],
+    ['reads too', languageOf(machine.words)],
     ['travel', travelOf(machine)],
     ['feeds', `${machine.limits.feedLowest} to ${machine.limits.feedHighest} mm/min`],
     ['proved', machine.proved],
@@ -107,6 +108,18 @@ function spindleOf({ words: { spindle }, limits }: Machine): string {
   const run =
     spindle.run === 'by-hand' ? 'by hand' : `${spindle.forward}, ${spindle.spinUpSeconds} s to get to speed`;
   return `${run}, ${limits.spindleLowest} to ${limits.spindleHighest} 1/min`;
+}
+
+/** What programs of other makers may hold. */
+function languageOf({ language }: Words): string {
+  const said = [
+    ...(language.parameters === 'none' ? [] : [`parameters ${language.parameters.replaceAll('-', ' ')}`]),
+    ...language.setZero,
+    ...(language.inverseTime ? ['G93'] : []),
+    ...(language.subprograms === 'none' ? [] : [`subprograms by ${language.subprograms}`]),
+    ...(language.loops === 'none' ? [] : [`loops by ${language.loops}`]),
+  ];
+  return said.length === 0 ? 'nothing more' : said.join(', ');
 }
 
 function waitingOf({ dwell, numbers }: Words): string {

@@ -23,3 +23,7 @@ export const LINE_COST = 32;
 /** How deep subprograms may call each other.
  *  Why: controllers hold 4 to 10 (from memory); what goes deeper stops on the machine. */
 export const MOST_DEPTH = 10;
+
+/** How many loops and branches may stand inside each other.
+ *  Why: nobody reads a tenth level; each more costs every line within it a look. */
+export const MOST_NESTED = 100;

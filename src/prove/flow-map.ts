@@ -3,6 +3,7 @@
  * Made once, when the first of them is run. Lines are counted from 0.
  */
 import { BIT, valueOf, wholeOf } from './block.ts';
+import { MOST_NESTED } from './bounds.ts';
 import type { FlowLine } from './flow-words.ts';
 import type { ReadLine } from './read-lines.ts';
 
@@ -110,6 +111,9 @@ function openBlock(
   }
   if (kind === 'sub' && (open.length > 0 || subs.has(label))) {
     return open.length > 0 ? `o${label} sub begins inside o${open[0]!.label}` : `o${label} sub stands twice`;
+  }
+  if (open.length >= MOST_NESTED) {
+    return `more than ${String(MOST_NESTED)} loops and branches inside each other`;
   }
   const block: FlowBlock = { kind, label, start: k, end: -1, branches: [], hasElse: false };
   open.push(block);

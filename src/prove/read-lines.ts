@@ -138,7 +138,8 @@ function reckonedLine(text: string, { words }: Machine, plainFault: string, colu
     : `column ${String(reading.column)}: ${reading.fault}`;
   return {
     text,
-    count: line === undefined ? 0 : line.words.length + line.settings.length,
+    count:
+      line === undefined ? 0 : line.words.length + line.settings.length + (line.flow === undefined ? 0 : 1),
     number: line?.number ?? -1,
     numberDigits: line?.numberDigits ?? 0,
     skipped: line?.skipped ?? false,

@@ -4,7 +4,7 @@
  * A word that nothing on its line uses, a move without what it needs, a mode that isn't known: the block is refused
  * before any of it is run, or at the latest before it moves.
  */
-import { AXES, BIT, lettersOf, type Block } from './block.ts';
+import { AXES, BIT, bitOf, lettersOf, type Block } from './block.ts';
 import { G_GROUP, M_GROUP } from './modes-codes.ts';
 import { isCycle, motionOfCode, wordOfCode, type MotionMode } from './modes.ts';
 import { runCycle } from './trace-cycle.ts';
@@ -29,9 +29,15 @@ const HOME = 280;
 const SECOND_HOME = 300;
 const MACHINE_PLACE = 530;
 const CANCEL = 800;
+const ROTARY = bitOf('A') | bitOf('B') | bitOf('C');
 
 /** Runs the block; answers why it can't be run, if so. */
 export function runBlock(run: Run, block: Block): Refusal | undefined {
+  if ((block.given & ROTARY) !== 0) {
+    return unread(
+      `${lettersOf(block.given & ROTARY)}: rotary words are not followed, so where the cutter meets the work is not known`,
+    );
+  }
   const other = block.g[G_GROUP.other] ?? -1;
   const dwellBit = other === DWELL ? dwellLetterBit(run) : 0;
   const axes = block.given & AXES & ~dwellBit;

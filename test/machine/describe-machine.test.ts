@@ -24,6 +24,22 @@ it.each(POSTS)('aligns what it says of %s and fits a terminal', (name) => {
   expect(rows.filter((row) => row.length > 100)).toEqual([]);
 });
 
+it('says what programs of other makers may hold', () => {
+  expect(describeMachine(postMachine('bench-mill')).join('\n')).toContain(
+    'parameters numbered, G10, G92, G93',
+  );
+  const looping = {
+    parameters: 'numbered',
+    setZero: [],
+    inverseTime: false,
+    subprograms: 'M98',
+    loops: 'O-words',
+  } as const;
+  const text = describeMachine(changedMachine(postMachine('lines-only'), { language: looping })).join('\n');
+  expect(text).toContain('parameters numbered, subprograms by M98, loops by O-words');
+  expect(describeMachine(postMachine('lines-only')).join('\n')).toMatch(/reads too +nothing more/);
+});
+
 it('says what is not there', () => {
   const bare = changedMachine(postMachine('lines-only'), { dwell: { letter: 'none', unit: 'seconds' } });
   const text = describeMachine(bare).join('\n');

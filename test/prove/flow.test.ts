@@ -227,6 +227,10 @@ describe('what is not followed', () => {
     expect(stops('o1 sub', 'o1 endsub', 'o1 sub', 'o1 endsub')).toMatch(/twice/);
     expect(stops('o1 if [1]', 'o2 sub', 'o2 endsub', 'o1 endif')).toMatch(/inside|closed/);
   });
+  it('loops inside each other without end', () => {
+    const lines = Array.from({ length: 200_000 }, (_, k) => `o${String(k)} if [1]`);
+    expect(traceLines({ machine, lines }).findings.at(-1)?.message).toMatch(/inside each other/);
+  });
   it('numbers so near each other that controllers differ', () => {
     expect(
       stops('#1=0', 'o1 repeat [10]', '#1=[#1+0.1]', 'o1 endrepeat', 'o2 if [#1 LT 1]', 'o2 endif'),

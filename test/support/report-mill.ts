@@ -37,3 +37,9 @@ function spoken(more: Partial<Machine['words']['language']>): Machine {
   const words = { ...mill.words, file: { ...mill.words.file, programLabel: 'none' } } as const;
   return { ...mill, words: { ...words, language: { ...words.language, ...more } } };
 }
+
+/** The same with plain blocks alone. */
+export function plainMill(): Machine {
+  const mill = spoken({ parameters: 'none', setZero: [], inverseTime: false });
+  return { ...mill, words: { ...mill.words, holes: { ...mill.words.holes, cycles: [] } } };
+}

@@ -14,7 +14,7 @@ export const FEED: readonly CaseRow[] = [
   { n: 63, ref: '§3.5.19', lines: ['G93 G0 X1', 'F5'], ends: ['1 0 0'] },
   { n: 63, ref: '§3.5.19, that F is not kept', before: ['G93 F5'], wrong: ['G1 X1'] },
   { n: 64, ref: '§3.5.16', before: ['G98', 'G93'], wrong: ['G81 X1 Y1 Z-1 R2 F100'], says: /G93/ },
-  { n: 65, ref: '§2.1.2.5', beyond: ROTARY, wrong: ['G94 G1 X0.1 A36 F100'] },
-  { n: 66, ref: '§2.1.2.5 B', beyond: ROTARY, wrong: ['G1 A90 F360'] },
+  { n: 65, ref: '§2.1.2.5', beyond: ROTARY, wrong: ['G94 G1 X0.1 A36 F100'], says: /rotary/ },
+  { n: 66, ref: '§2.1.2.5 B', beyond: ROTARY, wrong: ['G1 A90 F360'], says: /rotary/ },
   { n: 67, ref: 'published reference of a NIST-descended controller', before: ['G93 G1 X1 F2', 'G94'], wrong: ['G1 X5'] },
 ]; // prettier-ignore

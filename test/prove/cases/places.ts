@@ -10,7 +10,7 @@ export const PLACES: readonly CaseRow[] = [
   { n: 44, ref: 'Table 8, §3.5.7', lines: ['G20 G0 X1'], ends: ['25.4 0 0'] },
   { n: 44, ref: 'Table 8: F counts before the unit changes', wrong: ['G20 G1 X1 F10'], says: /unit/ },
   { n: 44, ref: 'a feed of the old unit', before: ['G20'], wrong: ['G1 X1'], says: /unit/ },
-  { n: 45, ref: '§2.1.2.9', beyond: ROTARY, before: ['G91'], wrong: ['G0 X1 A90'] },
+  { n: 45, ref: '§2.1.2.9', beyond: ROTARY, before: ['G91'], wrong: ['G0 X1 A90'], says: /rotary/ },
   { n: 46, ref: '§3.5.17', lines: ['G91 G1 X1', 'X1', 'G90 X0'], ends: ['1 0 0', '2 0 0', '0 0 0'] },
   { n: 46, ref: '§3.5.17, ten steps', lines: ['G91 G1 X0.1', ...Array.from({ length: 9 }, () => 'X0.1')], ends: Array.from({ length: 10 }, (_, i) => `${String((i + 1) / 10)} 0 0`) },
   { n: 47, ref: '§3.5.17', lines: ['G91 G2 X0 Y10 J5'], ends: ['0 10 0'], turns: [-Math.PI] },
@@ -30,5 +30,5 @@ export const PLACES: readonly CaseRow[] = [
   { n: 56, ref: '§3.5.13', modes: 'G21 G17 G40 G61 G90 G94 G59.3', lines: ['G0 X1'], ends: ['1 0 0'], leaves: { work: 'G59.3' } },
   { n: 56, ref: '§3.5.13', wrong: ['G59.4'] },
   { n: 57, ref: '§3.6.1', lines: ['G43 H1', 'G64', 'G20'], leaves: { length: 1, path: 'G64', unit: 'inch' } },
-  { n: 58, ref: '§2.1.2.2', beyond: ROTARY, wrong: ['A350'] },
+  { n: 58, ref: '§2.1.2.2', beyond: ROTARY, wrong: ['A350'], says: /rotary/ },
 ]; // prettier-ignore
