@@ -124,6 +124,9 @@ function putOn(state: ModalState, word: string, codes: Codes): void {
     case G_GROUP.length:
       state.length = 'off';
       break;
+    case G_GROUP.cycleReturn:
+      state.cycleReturn = wordOfCode(code);
+      break;
     case G_GROUP.work:
       state.work = wordOfCode(code);
       break;

@@ -8,7 +8,7 @@ import { wholeOf } from './block.ts';
 import { LINE_COST, MOST_DEPTH, MOST_RUN } from './bounds.ts';
 import { evaluate } from './evaluate.ts';
 import type { Expression } from './expression.ts';
-import { mapFlow, mapNumbers, type FlowBlock, type FlowMap } from './flow-map.ts';
+import { mapFlow, type FlowBlock, type FlowMap } from './flow-map.ts';
 import { MOST_ARGUMENTS, type FlowLine } from './flow-words.ts';
 import type { ReadLine } from './read-lines.ts';
 import { unread, type Refusal, type Run } from './trace-run.ts';
@@ -194,33 +194,8 @@ function goBack(run: Run, flow: Flow, block: FlowBlock): number | Refusal {
   return frame.back;
 }
 
-/** M98: the lines behind O and this number, as often as L says. */
-export function callNumber(flow: Flow, k: number, number: number, times: number): number | Refusal {
-  const numbers = (flow.numbers ??= mapNumbers(flow.lines));
-  const at = numbers.get(number);
-  if (at === undefined || at < 0) {
-    return unread(
-      `M98: O${String(number)} ${at === undefined ? 'is not in this file' : 'stands twice in this file'}`,
-    );
-  }
-  return enter(flow, k, { block: undefined, start: at + 1, back: k + 1, again: times - 1, numbered: [], named: new Map(), rounds: new Map() }); // prettier-ignore
-}
-
-/** M99. */
-export function endNumber(flow: Flow, k: number): number | Refusal {
-  const frame = flow.frames.at(-1);
-  if (frame === undefined) {
-    return unread('M99 outside a subprogram: the controller begins the program anew, without end');
-  }
-  if (frame.again > 0) {
-    frame.again -= 1;
-    return jump(flow, k, frame.start);
-  }
-  flow.frames.pop();
-  return jump(flow, k, frame.back);
-}
-
-function enter(flow: Flow, k: number, frame: Frame): number | Refusal {
+/** Into a subprogram. */
+export function enter(flow: Flow, k: number, frame: Frame): number | Refusal {
   if (flow.frames.length >= MOST_DEPTH) {
     return unread(`subprograms call each other more than ${String(MOST_DEPTH)} deep`);
   }
@@ -229,7 +204,7 @@ function enter(flow: Flow, k: number, frame: Frame): number | Refusal {
 }
 
 /** From line `k` to another: paid for with what has been gone over since the last jump. */
-function jump(flow: Flow, k: number, to: number): number | Refusal {
+export function jump(flow: Flow, k: number, to: number): number | Refusal {
   const costs = (flow.costs ??= costsOf(flow.lines));
   flow.paid += costs[k + 1]! - costs[flow.landed]!;
   flow.landed = to;

@@ -11,7 +11,7 @@ import { BIT, has, valueOf, type Block } from './block.ts';
 import type { Here, ModalState } from './modes.ts';
 import { arcMissAllowed, arcOutOfLimits } from './trace-arc-limits.ts';
 import { lengthOf } from './trace-place.ts';
-import { badArc, remark, unread, type Refusal, type Run } from './trace-run.ts';
+import { badArc, remark, unread, type Refusal, type Run, type Shift } from './trace-run.ts';
 
 export interface ReadArc {
   readonly centre: Point;
@@ -26,6 +26,8 @@ export interface ArcMemo {
   readonly plane: ModalState['plane'];
   readonly mode: ModalState['centre'];
   readonly unit: ModalState['unit'];
+  /** A centre that is counted from zero lies elsewhere once G92 has shifted it. */
+  readonly shift: Shift;
   readonly arc: ReadArc;
 }
 
@@ -47,14 +49,15 @@ export function readArc(run: Run, block: Block, to: Here, sense: 1 | -1): ReadAr
     was.sense === sense &&
     was.plane === plane &&
     was.mode === mode &&
-    was.unit === unit
+    was.unit === unit &&
+    was.shift === run.shift
   ) {
     return was.arc;
   }
   const arc = workOut(run, block, to, sense);
   // Where arcs have been remarked on, each is looked at anew: it may have to be counted.
   if (!('code' in arc) && !run.remarks.has(HALF)) {
-    block.arc = { from: here, to, sense, plane, mode, unit, arc };
+    block.arc = { from: here, to, sense, plane, mode, unit, shift: run.shift, arc };
   }
   return arc;
 }

@@ -8,7 +8,7 @@
  */
 import type { Machine } from '../machine/machine.ts';
 import type { TracedMove } from '../motion/traced-move.ts';
-import { BIT, has, valueOf, wholeOf, type Block } from './block.ts';
+import type { Block } from './block.ts';
 import type { FormulaLine } from './formula-line.ts';
 import { codesOf, G_GROUPS, M_GROUP } from './modes-codes.ts';
 import { NOWHERE, powerOn, type FinalModes } from './modes.ts';
@@ -16,7 +16,8 @@ import { noParameters } from './parameters.ts';
 import type { Finding } from './proof.ts';
 import { readLines, type ReadLine } from './read-lines.ts';
 import { blockOfFormula } from './run-formula.ts';
-import { callNumber, endNumber, openFlow, runFlow } from './run-flow.ts';
+import { runCall } from './run-call.ts';
+import { openFlow, runFlow } from './run-flow.ts';
 import { modesAsked } from './trace-assumed.ts';
 import { runBlock } from './trace-block.ts';
 import { handsDone, readComments, readTitle, type ByHand } from './trace-comments.ts';
@@ -211,7 +212,7 @@ function runLine(
   }
   state.blocks += 1;
   if ((block.m[M_GROUP.call] ?? -1) >= 0) {
-    return callOrEnd(run, block, state);
+    return goOn(state, runCall(state.flow, run.line - 1, block));
   }
   const moves = run.moves.length;
   const refused = runBlock(run, block);
@@ -238,25 +239,6 @@ function goOn(state: FileState, next: number | Refusal, run?: Run): Refusal | un
   }
   state.next = next;
   return undefined;
-}
-
-/** M98 and M99: nothing may stand beside them, for controllers differ in whether it is run before or after. */
-function callOrEnd(run: Run, block: Block, state: FileState): Refusal | undefined {
-  const isCall = block.m[M_GROUP.call] === 98;
-  const others = block.given & ~(isCall ? BIT.P | BIT.L : 0);
-  const isAlone = block.g.every((code) => code < 0) && block.m.filter((code) => code >= 0).length === 1;
-  if (others !== 0 || !isAlone) {
-    return unread(`words beside M${isCall ? '98' : '99'}: it is read alone`);
-  }
-  if (!isCall) {
-    return goOn(state, endNumber(state.flow, run.line - 1));
-  }
-  const number = has(block, BIT.P) ? wholeOf(valueOf(block, 'P')) : undefined;
-  const times = has(block, BIT.L) ? wholeOf(valueOf(block, 'L')) : 1;
-  if (number === undefined || times === undefined || times < 1) {
-    return unread('M98 wants P with the number of a subprogram, and L, if it stands there, with how often');
-  }
-  return goOn(state, callNumber(state.flow, run.line - 1, number, times));
 }
 
 function reckoned(run: Run, formula: FormulaLine, state: FileState): Block | string {

@@ -58,6 +58,20 @@ it("case 68: centre and radius of the report's own arc [NISTIR 6556 §3.5.3.2 p2
   expect(arc?.centre).toEqual({ x: 10, y: 11 });
 });
 
+it('case 51: G92 takes a centre that is counted from zero with it, the same words twice [NISTIR 6556 §3.5.18]', () => {
+  const mill = reportMill();
+  const arcs = { ...mill.words.arcs, centre: 'from-zero' } as const;
+  const machine = { ...mill, words: { ...mill.words, arcs } };
+  const half = 'G3 Y10 I0 J5';
+  const trace = traceLines({ machine, lines: [half, 'G0 Y0', 'G92 X1', half, 'G92.1'] });
+  expect(trace.findings).toEqual([]);
+  const centres = movesOf(trace).flatMap(({ centre }) => (centre === undefined ? [] : [centre]));
+  expect(centres).toEqual([
+    { x: 0, y: 5 },
+    { x: -1, y: 5 },
+  ]);
+});
+
 describe('case 82: clockwise in XZ is as seen from the plus end of Y [NISTIR 6556 §3.5.3]', () => {
   // From Z to X is counter-clockwise from there: a quarter about (1, 0) from (0, 0) to (1, 1) goes by (0.29, 0.71).
   const [near, far] = [1 - Math.SQRT1_2, 1 + Math.SQRT1_2];

@@ -167,7 +167,7 @@ describe('subprograms by M98', () => {
       ['O100', 'M98 P100', 'M99'],
       new RegExp(`${String(MOST_DEPTH)} deep`),
     ],
-    ['with words beside it', ['M98 P100 X5'], ['O100', 'M99'], /alone/],
+    ['with words beside it', ['M98 P100 X5'], ['O100', 'M99'], /beside/],
     ['without a number', ['M98'], [], /P/],
     ['not so often', ['M98 P100 L0'], ['O100', 'M99'], /how often/],
     ['run into', ['O100', 'G0 X1', 'M99'], [], /runs into/],

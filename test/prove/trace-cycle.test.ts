@@ -61,6 +61,14 @@ describe('what a cycle does in its hole', () => {
   });
 });
 
+it('comes out as far as is in force when the controller is switched on, and says that nothing has said so', () => {
+  const modes = { ...machine.words.modes, powerOn: ['G99'] };
+  const on = { ...machine, words: { ...machine.words, modes } };
+  const trace = traceLines({ machine: on, at: 'X0 Y0 Z5', lines: ['G81 X0 Z-1 R2'] });
+  expect(trace.moves.at(-1)?.to.z).toBe(2);
+  expect(trace.findings.map(({ code }) => code)).toEqual(['prove.assumed']);
+});
+
 describe('cycles that are not run', () => {
   it.each([
     ['before G98 or G99 is said', [], 'G81 X0 Z-1 R2', /G98/],
