@@ -15,12 +15,14 @@ import { drill, lettersOfCycle, peckCount, type Hole } from './trace-hole.ts';
 import { feedRefused } from './trace-move.ts';
 import { lengthOf, placeOf, placeRefused, stepFrom } from './trace-place.ts';
 import { lostRefused } from './trace-zero.ts';
-import { isLengthKnown, makeMove, unread, type Refusal, type Run } from './trace-run.ts';
+import { isLengthKnown, makeMove, remark, unread, type Refusal, type Run } from './trace-run.ts';
 
 /** What holds on from hole to hole, in mm as it was written. */
 export interface CycleSeries {
   readonly r: number;
   readonly z: number;
+  /** They were given as steps (G91). */
+  readonly isStep: boolean;
   /** Where Z stood before the first of them. */
   readonly initial: number;
 }
@@ -91,6 +93,14 @@ function holeOf(run: Run, block: Block, cycle: CycleMode, stands: number): Hole 
     return unread(`${cycle} without ${r === undefined ? 'R' : 'Z'}`);
   }
   const isStep = modes.distance === 'incremental';
+  const isHeld = !has(block, BIT.R) || !has(block, BIT.Z);
+  if (isHeld && series !== undefined && series.isStep !== isStep) {
+    return unread(`${cycle}: R and Z were given before G90 and G91 changed; give both again`);
+  }
+  if (isHeld && isStep) {
+    const message = `${cycle} under G91 without R or Z of its own: the step is taken anew from where Z stands (NISTIR 6556 §3.5.16); other controllers keep the heights`;
+    remark(run, 'prove.ambiguous', 'warning', message, 'held step');
+  }
   const fromStart = isStep || machine.words.holes.clearMeaning === 'from-start-level';
   const top = fromStart ? stepFrom(run, stands, r) : r + run.shift.z;
   const bottom = isStep ? stepFrom(run, top, z) : z + run.shift.z;
@@ -108,7 +118,7 @@ function holeOf(run: Run, block: Block, cycle: CycleMode, stands: number): Hole 
   if ('code' in letters) {
     return letters;
   }
-  run.cycle = { r, z, initial };
+  run.cycle = { r, z, initial, isStep };
   return { cycle, top, bottom, clear, ...letters };
 }
 

@@ -69,6 +69,21 @@ it('comes out as far as is in force when the controller is switched on, and says
   expect(trace.findings.map(({ code }) => code)).toEqual(['prove.assumed']);
 });
 
+it('steps anew for the next hole under G91, and says that others do not [NISTIR 6556 §3.5.16, by memory]', () => {
+  const trace = traceLines({ machine, at: 'X0 Y0 Z5', lines: ['G91 G98 G81 X1 Z-3 R1', 'X1', 'G90'] });
+  expect(movesOf(trace).map(({ to }) => `${String(to.x)} ${String(to.z)}`)).toEqual([
+    '0 6',
+    '1 6',
+    '1 3',
+    '1 6',
+    '1 7',
+    '2 7',
+    '2 4',
+    '2 7',
+  ]);
+  expect(trace.findings.map(({ code }) => code)).toEqual(['prove.ambiguous']);
+});
+
 describe('cycles that are not run', () => {
   it.each([
     ['before G98 or G99 is said', [], 'G81 X0 Z-1 R2', /G98/],
@@ -80,6 +95,7 @@ describe('cycles that are not run', () => {
     ['after another cycle, without its own Z', ['G98', 'G81 X0 Z-1 R2'], 'G85 X5', /without/],
     ['after G80, without R and Z', ['G98', 'G81 X0 Z-1 R2', 'G80'], 'G81 X5', /without/],
     ['where controllers come out to different heights', ['G0 Z5', 'G99 G81 X0 Z-1 R2'], 'G98 X5', /differ/],
+    ['with a height that was a place and would be a step', ['G0 Z5', 'G98 G81 X0 Z-1 R2'], 'G91 X5', /G91/],
     ['more pecks than anybody drills', ['G98'], `G83 X0 Z-3 R2 Q${String(4 / MOST_PECKS)}`, /times/],
     ['a peck of nothing', ['G98'], 'G83 X0 Z-3 R2 Q0.00000000000000000001', /times/],
     ['without end', ['G98'], 'G81 X0 Z-1 R2 L99999999', /times/],
