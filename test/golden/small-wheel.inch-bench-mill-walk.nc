@@ -1,6 +1,6 @@
 %
 (Title: Counting wheel of a toy clock)
-(Mark 09CC6121, made by Ogive, version golden)
+(Mark 8BACBE9F, made by Ogive, version golden)
 (Walk-round program, to be run first, spindle still)
 (Part: wheel of 7 teeth, module 1, for a pinion of 6 leaves, 0.00591 inch or 0.15 mm thick, bore)
 (0.06299 inch or 1.6 mm, no crossings)
