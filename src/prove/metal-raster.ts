@@ -44,8 +44,9 @@ export function blankRaster(setup: Setup, reach: number, size: number, through: 
   return raster;
 }
 
-/** A band round an arc is drawn as bands round chords that leave it by no more than this share of a square. */
+/** A band round an arc is drawn as bands round chords that leave it by no more than these shares of a square and of the radius. */
 const SAG = 1 / 8;
+const SAG_RADIUS = 1 / 50;
 
 /**
  * Takes away what path i cuts down to height z, and returns how deep it bit at most near its own axis, where the cutter is
@@ -63,7 +64,8 @@ export function cutRaster(raster: Raster, paths: PathSet, i: number, z: number):
   const cy = paths.cy[i]!;
   const turn = paths.turn[i]!;
   // A chord over the angle a leaves its arc by r a^2 / 8.
-  const chords = Math.max(1, Math.ceil(Math.abs(turn) / Math.sqrt((8 * SAG * raster.size) / arc)));
+  const sag = Math.min(SAG * raster.size, SAG_RADIUS * radius);
+  const chords = Math.max(1, Math.ceil(Math.abs(turn) / Math.sqrt((8 * sag) / arc)));
   const cos = Math.cos(turn / chords);
   const sin = Math.sin(turn / chords);
   let dx = x0 - cx;

@@ -49,8 +49,11 @@ interface Teeth {
   readonly fins: boolean;
 }
 
-/** Metal in the root's corner, over the finishing cutter's diameter, above which its middle cuts too: a slot, no finishing. */
-const THICK = 0.25;
+/**
+ * Metal in the root's corner, over the finishing cutter's diameter, above which its middle cuts too: a slot, no finishing. Its
+ * middle reaches to a quarter; a little is kept from that for rounding.
+ */
+const THICK = 0.23;
 /** How far the roughing path may stray outward, over the allowance: few blocks, and hardly more to finish. Judgement. */
 const ROUGH_STRAYS = 0.25;
 /**

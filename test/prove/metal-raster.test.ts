@@ -58,3 +58,16 @@ it('counts a square as cut through once', () => {
   cutRaster(raster, paths, 0, -1.1);
   expect(raster.opened).toBe(opened);
 });
+
+it('a fine cutter does not bite beyond half its radius for the sake of chords', () => {
+  const paths = wholePaths(solidMoves([moveOf({ x: 2, y: 0 }, { x: 0, y: 0 }, 3)], () => 0.1));
+  const raster = blankRaster(SETUP, 6, 0.067, -1);
+  // All but what lies further from the arc than half the radius and a fiftieth is open already.
+  for (let row = 0; row < raster.rows; row++) {
+    for (let column = 0; column < raster.columns; column++) {
+      const away = pathDistance(paths, 0, raster.x0 + column * raster.size, raster.y0 + row * raster.size);
+      raster.left[row * raster.columns + column] = away < 0.0521 ? -0.5 : 0;
+    }
+  }
+  expect(cutRaster(raster, paths, 0, -0.5)).toBe(0);
+});
