@@ -41,7 +41,7 @@ describe('a machine that the job names and nobody finds', { timeout: 60_000 }, (
     expect(exit).toBe(2);
     expect(err).toMatch(message);
     expect(err.startsWith(`job.yaml:${line}:10 machine: `)).toBe(true);
-    // oxlint-disable-next-line no-control-regex
+    // oxlint-disable-next-line no-control-regex -- control characters are what must not be printed
     expect(err).not.toMatch(/E[A-Z]{3,}|[\u0000-\u0009\u000b-\u001f]/);
   });
   it('is told at its line to whoever proves a program too', () => {

@@ -151,7 +151,7 @@ function beforeParsing(text: string, limitBytes: number): Fault | undefined {
 }
 
 /** Control characters other than tab and line ends, and what stands where bytes were no UTF-8. */
-// oxlint-disable-next-line no-control-regex
+// oxlint-disable-next-line no-control-regex -- control characters are what is looked for
 const NOT_TEXT = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f\ufffd]/;
 
 function spotOf(text: string, offset: number): Spot {

@@ -104,25 +104,10 @@ function answer(
   const moves = (): string => proof.moves.map((move) => `${JSON.stringify(move)}\n`).join('');
   const pathOf = (name: string): string => files.find((file) => basename(file) === name) ?? name;
   const sarif = (): string => `${JSON.stringify(sarifOf(proof, version, pathOf), null, 2)}\n`;
+  const inputs = [...files, ...(options.job === undefined ? [] : [options.job])];
   const wrote =
-    writeBeside(
-      options.moves,
-      'moves',
-      /\.(?:jsonl|ndjson)$/i,
-      '.jsonl',
-      moves,
-      [files, options],
-      terminal,
-    ) &&
-    writeBeside(
-      options.sarif,
-      'findings',
-      /\.(?:sarif|sarif\.json)$/i,
-      '.sarif',
-      sarif,
-      [files, options],
-      terminal,
-    );
+    writeBeside(options.moves, { what: 'moves', ending: '.jsonl', text: moves }, inputs, terminal) &&
+    writeBeside(options.sarif, { what: 'findings', ending: '.sarif', text: sarif }, inputs, terminal);
   if (!wrote) {
     return 2;
   }
@@ -143,24 +128,20 @@ function answer(
 /** Writes what was asked for beside the answer, where that overwrites nothing but an earlier one; says whether it may go on. */
 function writeBeside(
   path: string | undefined,
-  what: string,
-  ours: RegExp,
-  ending: string,
-  text: () => string,
-  [files, options]: readonly [readonly string[], ProveOptions],
+  { what, ending, text }: { readonly what: string; readonly ending: string; readonly text: () => string },
+  inputs: readonly string[],
   terminal: Terminal,
 ): boolean {
   if (path === undefined) {
     return true;
   }
-  if (isThere(path) && !ours.test(path)) {
+  if (isThere(path) && !path.toLowerCase().endsWith(ending)) {
     process.stderr.write(
       `${path}: is there already and its name does not end in ${ending}; it is kept as it is.\n`,
     );
     return false;
   }
-  const read = [...files, ...(options.job === undefined ? [] : [options.job])];
-  const lost = keepInputs(dirname(path), [basename(path)], read, `Give the ${what} another name.`);
+  const lost = keepInputs(dirname(path), [basename(path)], inputs, `Give the ${what} another name.`);
   if (lost.length > 0) {
     terminal.problems(lost);
     return false;

@@ -5,7 +5,7 @@
 import type { ProgramText } from '../post/write-program.ts';
 import type { Proof } from '../prove/proof.ts';
 
-export function refusedText(programs: readonly ProgramText[], proof: Proof): string {
+export function refusedText(programs: readonly ProgramText[], proof: Pick<Proof, 'findings'>): string {
   const reasons = proof.findings
     .filter(({ severity }) => severity === 'error')
     .map(

@@ -178,6 +178,7 @@ function groupsOf(schema: z.ZodType, path: Path): readonly Group[] {
 
 /** Without optional; the branches of a union each. */
 function unwrap(schema: z.ZodType): readonly z.ZodType[] {
+  // zod types `def` by its own base only; `type` says which of these is there.
   const def = schema.def as unknown as { type: string; innerType?: z.ZodType; options?: z.ZodType[] };
   if (def.type === 'optional' && def.innerType !== undefined) {
     return unwrap(def.innerType);
@@ -186,6 +187,7 @@ function unwrap(schema: z.ZodType): readonly z.ZodType[] {
 }
 
 function childOf(schema: z.ZodType, key: string | number): z.ZodType | undefined {
+  // As above.
   const def = schema.def as unknown as {
     type: string;
     shape?: Record<string, z.ZodType>;

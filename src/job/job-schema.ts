@@ -217,6 +217,7 @@ export function jobJsonSchema(): JsonSchema {
     unrepresentable: 'any',
     override: ({ zodSchema, jsonSchema }) => {
       // Values are read by functions of ours, of which zod knows neither whether they may be left out nor the examples.
+      // zod hands over its inner type, of which `def` is not told further; only objects have a shape.
       const { shape } = (zodSchema as unknown as z.ZodType).def as { shape?: Record<string, z.ZodType> };
       if (shape !== undefined) {
         jsonSchema.required = Object.keys(shape).filter((key) => shape[key]?.def.type !== 'optional');

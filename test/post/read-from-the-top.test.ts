@@ -256,6 +256,6 @@ it('a refused program parts what is wrong from what to do', () => {
         hint: 'Go out.',
       },
     ],
-  } as unknown as Parameters<typeof refusedText>[1]);
+  });
   expect(text).toContain('a.nc:3: tooth 4 is cut into. Go out. [prove.gouge]');
 });

@@ -10,7 +10,7 @@ import { pathsBelow } from '../../src/prove/metal-paths.ts';
 import { solidMoves } from '../../src/prove/metal-solids.ts';
 import { asCut } from '../../src/tooth/as-cut.ts';
 import { exactWheel } from '../support/exact-wheel.ts';
-import { offsetPath, pathStart, type PathOptions } from '../support/offset-path.ts';
+import { loopMoves, type PathOptions } from '../support/offset-path.ts';
 
 const FORM = exactWheel(60, 0.5, 8);
 const DIAMETER = 0.5;
@@ -19,22 +19,7 @@ const RADIUS = DIAMETER / 2;
 const FOUND_TO = 1e-4;
 
 function loop(offset: number, z: number, options: PathOptions = {}, form = FORM): TracedMove[] {
-  let at = pathStart(form, offset);
-  return offsetPath(form, offset, options).map(({ to, centre, turn }, k) => {
-    const from = at;
-    at = to;
-    return {
-      file: 'a',
-      line: k + 1,
-      kind: centre === undefined ? 'line' : 'arc',
-      from: { ...from, z },
-      to: { ...to, z },
-      ...(centre === undefined || turn === undefined ? {} : { centre, turn }),
-      feed: 100,
-      cutter: 1,
-      spindle: 10000,
-    };
-  });
+  return loopMoves(form, offset, z, options);
 }
 
 function figuresOf(moves: readonly TracedMove[], form = FORM): ToothFigures {

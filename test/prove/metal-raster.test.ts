@@ -9,8 +9,8 @@ import { solidMoves } from '../../src/prove/metal-solids.ts';
 import { SETUP } from '../support/good-program.ts';
 
 const SIZE = 0.1;
-/** A square's middle this near the edge of the band may be told to either side: the sag of a chord. */
-const DOUBT = SIZE / 8 + 1e-9;
+/** A square's middle this near the edge of the band may be told to either side: rounding. */
+const DOUBT = 1e-9;
 
 const real = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const place = fc.record({ x: real(-4, 4), y: real(-4, 4) });
@@ -59,14 +59,14 @@ it('counts a square as cut through once', () => {
   expect(raster.opened).toBe(opened);
 });
 
-it('a fine cutter does not bite beyond half its radius for the sake of chords', () => {
+it('a fine cutter does not bite beyond half its radius on an arc', () => {
   const paths = wholePaths(solidMoves([moveOf({ x: 2, y: 0 }, { x: 0, y: 0 }, 3)], () => 0.1));
   const raster = blankRaster(SETUP, 6, 0.067, -1);
-  // All but what lies further from the arc than half the radius and a fiftieth is open already.
+  // All but what lies further from the arc than half the radius is open already.
   for (let row = 0; row < raster.rows; row++) {
     for (let column = 0; column < raster.columns; column++) {
       const away = pathDistance(paths, 0, raster.x0 + column * raster.size, raster.y0 + row * raster.size);
-      raster.left[row * raster.columns + column] = away < 0.0521 ? -0.5 : 0;
+      raster.left[row * raster.columns + column] = away <= 0.05 + DOUBT ? -0.5 : 0;
     }
   }
   expect(cutRaster(raster, paths, 0, -0.5)).toBe(0);

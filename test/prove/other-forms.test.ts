@@ -3,7 +3,6 @@
  * fillets, an addendum of one arc, and a blank turned to the tips' diameter beforehand.
  */
 import { describe, expect, it } from 'vitest';
-import type { TracedMove } from '../../src/motion/traced-move.ts';
 import { toothFigures, type ToothFigures } from '../../src/prove/deviation-depths.ts';
 import { REGION } from '../../src/prove/deviation-stations.ts';
 import { pathsBelow } from '../../src/prove/metal-paths.ts';
@@ -13,7 +12,7 @@ import { wheelForm } from '../../src/tooth/wheel-form.ts';
 import { edited, errorsOf, findingOf, GOOD, lineOf, prove, withSetup } from '../support/damage.ts';
 import { exactWheel } from '../support/exact-wheel.ts';
 import { FORM as SMALL, TARGET } from '../support/good-program.ts';
-import { offsetPath, pathStart } from '../support/offset-path.ts';
+import { loopMoves } from '../support/offset-path.ts';
 
 /** 0.1 um, to which the proof is to find its figures. */
 const FOUND_TO = 1e-4;
@@ -21,22 +20,7 @@ const HEIGHTS = { top: 0, bottom: -1.5, slack: 1e-4 };
 
 /** One loop of a cutter of this radius, its axis `offset` off the exact outline; by the path of another form, where asked. */
 function figuresOf(form: WheelForm, radius: number, offset: number, along = form): ToothFigures {
-  let at = pathStart(along, offset);
-  const moves = offsetPath(along, offset).map(({ to, centre, turn }, k): TracedMove => {
-    const from = at;
-    at = to;
-    return {
-      file: 'a',
-      line: k + 1,
-      kind: centre === undefined ? 'line' : 'arc',
-      from: { ...from, z: -1.6 },
-      to: { ...to, z: -1.6 },
-      ...(centre === undefined || turn === undefined ? {} : { centre, turn }),
-      feed: 100,
-      cutter: 1,
-      spindle: 10000,
-    };
-  });
+  const moves = loopMoves(along, offset, -1.6);
   const solids = solidMoves(moves, () => radius);
   const paths = pathsBelow(solids, HEIGHTS.bottom + HEIGHTS.slack, HEIGHTS.top - HEIGHTS.slack);
   return toothFigures(solids, paths, form, 2 * radius, HEIGHTS, 0.0011);

@@ -17,6 +17,7 @@ import {
   turnPoint,
   type Point,
 } from '../../src/geometry/point.ts';
+import type { TracedMove } from '../../src/motion/traced-move.ts';
 import type { Piece } from '../../src/geometry/piece.ts';
 import type { PieceRole, WheelForm } from '../../src/tooth/wheel.ts';
 
@@ -31,6 +32,31 @@ export interface PathOptions {
   /** How many arcs (or chords) stand for an addendum. */
   readonly parts?: number;
   readonly facets?: boolean;
+}
+
+/** The same loop as traced moves of cutter 1 at one height, as if each stood on a line of its own. */
+export function loopMoves(
+  form: WheelForm,
+  offset: number,
+  z: number,
+  options: PathOptions = {},
+): TracedMove[] {
+  let at = pathStart(form, offset);
+  return offsetPath(form, offset, options).map(({ to, centre, turn }, k) => {
+    const from = at;
+    at = to;
+    return {
+      file: 'a',
+      line: k + 1,
+      kind: centre === undefined ? 'line' : 'arc',
+      from: { ...from, z },
+      to: { ...to, z },
+      ...(centre === undefined || turn === undefined ? {} : { centre, turn }),
+      feed: 100,
+      cutter: 1,
+      spindle: 10000,
+    };
+  });
 }
 
 /** One loop, counter-clockwise, from the middle of the space before tooth 1. */
